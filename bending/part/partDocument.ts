@@ -1,0 +1,96 @@
+import type { LengthUnit } from "../core/units";
+
+/**
+ * The part document, format `part/1`, as it is typed, stored and exchanged: lengths in `units`, angles in
+ * degrees turned through (0 = flat). See README.md of this folder for the conventions.
+ */
+export type PartDocument = PartCommon & (
+  | { readonly profile: ProfileShape; readonly base?: never; readonly flanges?: never; readonly flat?: never }
+  | { readonly base: BaseShape; readonly flanges?: readonly FlangeEntry[]; readonly profile?: never; readonly flat?: never }
+  | { readonly flat: FlatShape; readonly profile?: never; readonly base?: never; readonly flanges?: never }
+);
+
+export interface PartCommon {
+  readonly format: "part/1";
+  readonly name: string;
+  readonly units: LengthUnit;
+  readonly material: string;
+  readonly thickness: number;
+  readonly insideRadius?: number;
+  readonly kFactor?: number;
+  readonly rule?: AllowanceRule;
+  readonly dimension?: DimensionKind;
+  readonly toleranceAngle?: number;
+  readonly toleranceLength?: number;
+}
+
+/** How the bend allowance is found; see part-document conventions in README.md. */
+export type AllowanceRule = "shop" | "din6935" | "machinery" | "faa" | "k";
+export type DimensionKind = "outside" | "inside" | "tangent";
+export type BendDirection = "up" | "down";
+export type HemKind = "closed" | "open" | "teardrop";
+
+export interface ProfileShape {
+  readonly width: number;
+  readonly legs: readonly number[];
+  readonly bends: readonly ProfileBend[];
+}
+
+export interface ProfileBend {
+  readonly angle: number;
+  readonly direction: BendDirection;
+  readonly insideRadius?: number;
+  readonly kFactor?: number;
+  readonly hem?: HemKind;
+  readonly gap?: number;
+  readonly toleranceAngle?: number;
+}
+
+/** [x, y] or [x, y, bulge of the edge that starts here]. */
+export type DocumentVertex = readonly [number, number] | readonly [number, number, number];
+
+export type DocumentHole =
+  | { readonly circle: readonly [number, number]; readonly diameter: number }
+  | { readonly slot: readonly [readonly [number, number], readonly [number, number]]; readonly width: number }
+  | { readonly polygon: readonly DocumentVertex[] };
+
+export interface BaseShape {
+  readonly outline: readonly DocumentVertex[];
+  readonly holes?: readonly DocumentHole[];
+}
+
+export interface FlangeEntry {
+  readonly id: string;
+  readonly on: string;
+  readonly edge: number;
+  readonly length?: number;
+  readonly outline?: readonly DocumentVertex[];
+  readonly angle: number;
+  readonly direction: BendDirection;
+  readonly dimension?: DimensionKind;
+  readonly hem?: HemKind;
+  readonly gap?: number;
+  readonly start?: number;
+  readonly end?: number;
+  readonly startAngle?: number;
+  readonly endAngle?: number;
+  readonly insideRadius?: number;
+  readonly kFactor?: number;
+  readonly relief?: { readonly kind: "rectangular" | "round" | "tear"; readonly width?: number; readonly depth?: number };
+  readonly holes?: readonly DocumentHole[];
+  readonly toleranceAngle?: number;
+  readonly toleranceLength?: number;
+}
+
+export interface FlatShape {
+  readonly outline: readonly DocumentVertex[];
+  readonly holes?: readonly DocumentHole[];
+  readonly bends: readonly {
+    readonly id: string;
+    readonly line: readonly [readonly [number, number], readonly [number, number]];
+    readonly angle: number;
+    readonly direction: BendDirection;
+    readonly insideRadius?: number;
+    readonly kFactor?: number;
+  }[];
+}

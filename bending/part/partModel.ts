@@ -1,0 +1,75 @@
+import type { Mm, Rad } from "../core/units";
+import type { FlatPoint } from "../geometry/vec2";
+import type { MaterialFacts } from "../handbook/material";
+import type { BendDirection, HemKind } from "./partDocument";
+
+export type FaceId = string;
+export type BendId = string;
+
+/**
+ * A part made ready for computing: a tree of plane faces joined by bends, all in millimetres and radians,
+ * drawn unfolded. Face 0 is the base; a parent stands before its children, and `bends[i]` carries
+ * `faces[i + 1]`, so that bends and faces but the base have the same order.
+ *
+ * Frame of the unfolded sheet: x, y in the sheet seen from the base's top; z = 0 at the bottom surface,
+ * z = thickness at the top.
+ */
+export interface PartModel {
+  readonly name: string;
+  readonly thickness: Mm;
+  readonly material: MaterialFacts;
+  readonly faces: readonly Face[];
+  readonly bends: readonly Bend[];
+}
+
+export interface Face {
+  readonly id: FaceId;
+  /** The plane region only, without any bend zone; counter-clockwise; arcs already as chords. */
+  readonly outline: readonly FlatPoint[];
+  /** Clockwise or counter-clockwise, arcs as chords. */
+  readonly holes: readonly (readonly FlatPoint[])[];
+  /** Index of the bend that carries this face; null for the base. */
+  readonly bend: number | null;
+}
+
+/**
+ * A bend line between `parent` (nearer the base) and `child`. The line runs along the parent's edge in the
+ * parent's counter-clockwise sense, so the parent lies on its left and the child on its right.
+ */
+export interface Bend {
+  readonly id: BendId;
+  readonly parent: number;
+  readonly child: number;
+  /** Angle turned through when finished, 0 < angle <= pi. */
+  readonly angle: Rad;
+  /** `up`: the child turns towards the side that is the base's top. */
+  readonly direction: BendDirection;
+  readonly hem: HemKind | null;
+  /** Inside radius when finished. */
+  readonly insideRadius: Mm;
+  /** Where the radius comes from: the document, the die, or the material's default. */
+  readonly radiusSource: string;
+  /** Neutral-line length of the bend zone; it stays the same at every angle of the stroke. */
+  readonly allowance: Mm;
+  /** 2 x outside setback - allowance; above 90 degrees legs run to the outermost tangent (DIN 6935). */
+  readonly deduction: Mm;
+  /** Neutral line at `k * thickness` from the inside surface. */
+  readonly k: number;
+  /** Names the rule that gave the allowance, e.g. "DIN 6935". */
+  readonly allowanceSource: string;
+  /** Middle of the bend zone. */
+  readonly line: readonly [FlatPoint, FlatPoint];
+  /**
+   * The bend zone unfolded, counter-clockwise: tangent on the parent (end, start), then tangent on the
+   * child (start, end): [parentStart, childStart, childEnd, parentEnd] with start and end as along `line`.
+   */
+  readonly zone: readonly [FlatPoint, FlatPoint, FlatPoint, FlatPoint];
+  /** Angular tolerance in radians, null when the general tolerance holds. */
+  readonly toleranceAngle: Rad | null;
+}
+
+/**
+ * How far each bend is formed, by bend index, in radians turned through; 0 = flat.
+ * Most of the time an entry is 0 or the bend's own angle; within a stroke, something between or beyond.
+ */
+export type FormedAngles = readonly number[];

@@ -1,0 +1,105 @@
+import type { LengthUnit } from "../core/units";
+
+/**
+ * The plan document, format `plan/1`: what is stored, drawn and printed. Lengths in `units` (the part
+ * document's), angles in degrees, forces in kN, times in seconds.
+ *
+ * A step forms its bend upwards, so which side is up follows from the bend's direction. `front` is the face
+ * next to the bend line on the operator's side, `bendZ` is where the bend line lies along the bed (from the
+ * middle, to the operator's right): with these the part's place in the machine is fixed.
+ */
+export interface PlanDocument {
+  readonly format: "plan/1";
+  readonly engine: string;
+  readonly units: LengthUnit;
+  readonly part: string;
+  readonly machine: string;
+  readonly batch: number;
+  readonly status: "optimal" | "feasible" | "infeasible" | "unknown";
+  /** (best - bound) / best; 0 when optimal. */
+  readonly gap: number;
+  readonly flat: PlanFlat;
+  readonly flatLength: number;
+  readonly steps: readonly PlanStep[];
+  /** The bend ids in order; several formed by one stroke are joined with "+". */
+  readonly order: readonly string[];
+  readonly stations: readonly PlanStation[];
+  readonly seconds: { readonly setup: number; readonly perPart: number; readonly total: number };
+  readonly cost: number;
+  readonly proof: { readonly method: string; readonly expanded: number; readonly bound: number };
+  readonly alternatives?: readonly Omit<PlanDocument, "alternatives" | "flat" | "elapsedMs">[];
+  readonly reasons: readonly PlanReason[];
+  readonly cautions: readonly PlanReason[];
+  readonly elapsedMs: number;
+}
+
+export interface PlanFlat {
+  readonly width: number;
+  readonly depth: number;
+  readonly area: number;
+  readonly massKg: number;
+  readonly bends: readonly {
+    readonly id: string;
+    readonly allowance: number;
+    readonly deduction: number;
+    readonly k: number;
+    readonly insideRadius: number;
+    readonly source: string;
+  }[];
+}
+
+export interface PlanStep {
+  readonly bends: readonly string[];
+  /** The face next to the bend line on the operator's side. */
+  readonly front: string;
+  readonly punch: string;
+  readonly die: string;
+  readonly station: string;
+  readonly bendZ: readonly [number, number];
+  readonly angle: number;
+  readonly demandedAngle: number;
+  readonly insideRadius: number;
+  readonly forceKN: number;
+  readonly depthMm: number;
+  readonly toolWindow: readonly [number, number];
+  readonly gauge: PlanGauge;
+  readonly handling: { readonly flip: boolean; readonly turn: number };
+}
+
+export interface PlanGauge {
+  readonly x: number;
+  readonly r: number;
+  readonly fingers: readonly { readonly x: number; readonly r: number; readonly z: number }[];
+  readonly face: string;
+  readonly edge: number;
+}
+
+export interface PlanStation {
+  readonly id: string;
+  readonly punch: string;
+  readonly die: string;
+  readonly from: number;
+  readonly to: number;
+  readonly punchSections: readonly PlanSection[];
+  readonly dieSections: readonly PlanSection[];
+}
+
+/** Left to right from the station's `from`; a gap between two is an entry of its own. */
+export type PlanSection =
+  | { readonly length: number; readonly piece?: string; readonly horn?: "left" | "right" | "both"; readonly gap?: never }
+  | { readonly gap: number; readonly length?: never };
+
+export type ReasonKind =
+  | "clearance" | "self-collision" | "minimum-flange" | "no-punch" | "no-die" | "force" | "tool-force" | "sections" | "bed"
+  | "daylight" | "gauge" | "angle" | "radius" | "lift" | "throat" | "hem" | "order" | "budget";
+
+export interface PlanReason {
+  readonly kind: ReasonKind;
+  readonly bends: readonly string[];
+  readonly faces: readonly string[];
+  readonly tools: readonly string[];
+  /** Says what is wrong and what would be right, in the part document's units. */
+  readonly message: string;
+  /** Where it happens, to draw it: stroke angle in degrees, depth of the overlap. */
+  readonly evidence?: { readonly strokeAngle: number; readonly depth: number; readonly zFrom: number; readonly zTo: number };
+}

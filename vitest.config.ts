@@ -1,0 +1,25 @@
+import { defineConfig } from "vitest/config";
+
+export default defineConfig({
+  resolve: { tsconfigPaths: true },
+  test: {
+    pool: "threads",
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: "unit",
+          include: ["{bending,lib,components,app,seeds,scripts}/**/*.test.{ts,tsx}", "tests/{corpus,repro,laws}/**/*.test.ts"],
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: "integration",
+          include: ["db/**/*.test.ts", "tests/integration/**/*.test.ts"],
+          globalSetup: ["tests/integration/postgres.global.ts"],
+        },
+      },
+    ],
+  },
+});
