@@ -1,0 +1,177 @@
+import type { PartDocument } from "@/bending/part/partDocument";
+import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { MaterialFacts } from "@/bending/handbook/material";
+import type { Role } from "./role";
+
+/** What the API answers; times are ISO 8601 strings, lengths in mm unless a document carries its own units. */
+
+export interface Page<T> {
+  readonly items: readonly T[];
+  readonly total: number;
+  readonly page: number;
+  readonly pageSize: number;
+}
+
+/** Query of every list: `?q=&sort=name&dir=asc&page=1&pageSize=25` plus the list's own filters. */
+export interface ListQuery {
+  readonly q?: string;
+  readonly sort?: string;
+  readonly dir?: "asc" | "desc";
+  readonly page?: number;
+  readonly pageSize?: number;
+}
+
+export interface PartListItem {
+  readonly id: string;
+  readonly number: string;
+  readonly name: string;
+  readonly material: string;
+  readonly thicknessMm: number;
+  readonly bends: number;
+  readonly flatWidthMm: number;
+  readonly flatDepthMm: number;
+  readonly revision: number;
+  readonly releasedSheets: number;
+  readonly updatedAt: string;
+  readonly updatedBy: string;
+}
+
+export interface RevisionInfo {
+  readonly id: string;
+  readonly revision: number;
+  readonly note: string;
+  readonly createdAt: string;
+  readonly createdBy: string;
+}
+
+export interface PartDetail {
+  readonly id: string;
+  readonly number: string;
+  readonly name: string;
+  /** Newest first. */
+  readonly revisions: readonly RevisionInfo[];
+  /** The revision asked for, or the newest. */
+  readonly revision: RevisionInfo;
+  readonly document: PartDocument;
+  readonly plans: readonly PlanListItem[];
+}
+
+export type MaterialView = MaterialFacts;
+
+export interface MachineView {
+  readonly id: string;
+  readonly name: string;
+  readonly bedLengthMm: number;
+  readonly maxForceKN: number;
+  readonly daylightMm: number;
+  /** The machine document (machine/1). */
+  readonly document: unknown;
+}
+
+export type PieceState = "in rack" | "at brake" | "at regrind" | "withdrawn";
+
+export interface PieceView {
+  readonly id: string;
+  readonly code: string;
+  readonly lengthMm: number;
+  readonly horn: "left" | "right" | "both" | null;
+  readonly rack: string;
+  readonly state: PieceState;
+  readonly machine: string | null;
+}
+
+export interface ToolListItem {
+  readonly code: string;
+  readonly kind: "punch" | "die";
+  readonly name: string;
+  readonly angleDeg: number;
+  /** Tip radius (punch) or shoulder radius (die). */
+  readonly radiusMm: number;
+  /** Dies only. */
+  readonly vOpeningMm: number | null;
+  readonly heightMm: number;
+  readonly maxForcePerMetreKN: number;
+  readonly pieces: number;
+  readonly piecesInService: number;
+  readonly lengthInServiceMm: number;
+}
+
+export interface ToolDetail extends ToolListItem {
+  readonly tang: string;
+  readonly profile: readonly (readonly [number, number])[];
+  readonly pieceList: readonly PieceView[];
+  readonly updatedAt: string;
+}
+
+export interface PlanListItem {
+  readonly id: string;
+  readonly partId: string;
+  readonly partNumber: string;
+  readonly partName: string;
+  readonly revision: number;
+  readonly machine: string;
+  readonly status: PlanDocument["status"];
+  readonly batch: number;
+  readonly steps: number;
+  readonly stations: number;
+  readonly secondsPerPart: number;
+  readonly setupSeconds: number;
+  readonly createdAt: string;
+  readonly createdBy: string;
+}
+
+export interface PlanDetail extends PlanListItem {
+  readonly plan: PlanDocument;
+  /** The part document that was planned. */
+  readonly document: PartDocument;
+  readonly material: MaterialFacts;
+  readonly machineId: string;
+  readonly machineDocument: unknown;
+  /** The tools that the plan uses, as they were (tooling/1 document). */
+  readonly tooling: unknown;
+  readonly sheets: readonly SheetListItem[];
+}
+
+/** Planning runs in the background: POST /api/plans answers 202 with one of these; GET /api/plan-jobs/[id] follows it. */
+export interface PlanJobView {
+  readonly id: string;
+  readonly state: "running" | "done" | "failed" | "cancelled";
+  /** 0..1, or null when unknown. */
+  readonly progress: number | null;
+  readonly message: string;
+  readonly planId: string | null;
+}
+
+export type SheetState = "draft" | "released" | "superseded";
+
+export interface SheetListItem {
+  readonly id: string;
+  readonly number: string;
+  readonly state: SheetState;
+  readonly partNumber: string;
+  readonly partName: string;
+  readonly revision: number;
+  readonly machine: string;
+  readonly bends: number;
+  readonly batch: number;
+  readonly planId: string;
+  readonly releasedAt: string | null;
+  readonly releasedBy: string | null;
+  readonly createdAt: string;
+}
+
+export interface ActivityItem {
+  readonly id: string;
+  readonly at: string;
+  readonly actor: string;
+  readonly action: string;
+  readonly subject: string;
+  readonly detail: string;
+}
+
+export interface PersonItem {
+  readonly id: string;
+  readonly name: string;
+  readonly email: string;
+  readonly role: Role;
+}
