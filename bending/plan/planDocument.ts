@@ -91,7 +91,7 @@ export type PlanSection =
 
 export type ReasonKind =
   | "clearance" | "self-collision" | "minimum-flange" | "no-punch" | "no-die" | "force" | "tool-force" | "sections" | "bed"
-  | "daylight" | "gauge" | "angle" | "radius" | "lift" | "throat" | "hem" | "order" | "budget";
+  | "daylight" | "gauge" | "angle" | "radius" | "lift" | "throat" | "hem" | "order" | "budget" | "part" | "whip-up" | "tool-choice";
 
 export interface PlanReason {
   readonly kind: ReasonKind;

@@ -1,0 +1,31 @@
+import type { MaterialLookup } from "../handbook/material";
+import type { PartDocument } from "../part/partDocument";
+import type { Machine } from "../tooling/machine";
+import type { Tool } from "../tooling/tool";
+
+export interface PlanProgress {
+  /** Search states looked at so far. */
+  readonly expanded: number;
+  /** 0..1, or null when unknown. */
+  readonly fraction: number | null;
+  readonly message: string;
+}
+
+/** What a plan is asked for. `tools` are the ones in service; `now` is a clock in milliseconds, if elapsed time is wanted. */
+export interface PlanRequest {
+  readonly document: PartDocument;
+  readonly materials: MaterialLookup;
+  readonly tools: readonly Tool[];
+  readonly machine: Machine;
+  readonly batch: number;
+  /** How many other plans to give beside the best. */
+  readonly alternatives?: number;
+  readonly shouldStop?: () => boolean;
+  readonly onProgress?: (progress: PlanProgress) => void;
+  readonly now?: () => number;
+}
+
+/** A person's own order: bend ids, those of one stroke joined with "+". */
+export interface CheckRequest extends PlanRequest {
+  readonly order: readonly string[];
+}
