@@ -1,0 +1,58 @@
+import { mmPer } from "@/bending/core/units";
+import type { PartDocument } from "@/bending/part/partDocument";
+import { createSheetFormat } from "./createSheetFormat";
+import { GENERAL_TOLERANCE, generalTolerance } from "./generalTolerance";
+import { measuredLengths } from "./measuredLengths";
+import type { PlanModel } from "./planModel";
+import type { PlanSource, SheetMeasurement } from "./sheetView";
+import { shorterSide } from "./shorterSide";
+
+/** What to measure on the first part: every angle after its step, then the lengths that the document states. */
+export function sheetMeasurements({ document }: PlanSource, model: PlanModel): readonly SheetMeasurement[] {
+  return [...angles(document, model), ...lengths(document, model)];
+}
+
+function angles(document: PartDocument, model: PlanModel): readonly SheetMeasurement[] {
+  const format = createSheetFormat(model.units);
+  return model.steps.flatMap((step, index) =>
+    step.hit.bends.flatMap((bendIndex): SheetMeasurement[] => {
+      const bend = model.part.bends[bendIndex];
+      if (!bend) return [];
+      const own = bend.toleranceAngle !== null ? (bend.toleranceAngle * 180) / Math.PI : (document.toleranceAngle ?? null);
+      const tolerance = own ?? generalTolerance("angle", shorterSide(model.part, bendIndex)) ?? 1;
+      const included = 180 - step.step.angle;
+      const digits = (value: number): string => `${value.toFixed(2)}°`;
+      return [{
+        what: `Included angle at ${bend.id}`,
+        kind: "angle",
+        nominal: format.angle(included),
+        tolerance: `±${digits(tolerance)}`,
+        low: digits(included - tolerance),
+        high: digits(included + tolerance),
+        source: own === null ? GENERAL_TOLERANCE : "part document",
+        afterStep: index + 1,
+      }];
+    }),
+  );
+}
+
+function lengths(document: PartDocument, model: PlanModel): readonly SheetMeasurement[] {
+  const format = createSheetFormat(model.units);
+  const per = mmPer(document.units);
+  return measuredLengths(document).flatMap(({ what, length, tolerance: stated }): SheetMeasurement[] => {
+    const size = length * per;
+    const own = stated ?? document.toleranceLength ?? null;
+    const tolerance = own === null ? generalTolerance("length", size) : own * per;
+    if (tolerance === null) return [];
+    return [{
+      what,
+      kind: "length",
+      nominal: format.fine(size),
+      tolerance: `±${format.fine(tolerance)}`,
+      low: format.fine(size - tolerance),
+      high: format.fine(size + tolerance),
+      source: own === null ? GENERAL_TOLERANCE : "part document",
+      afterStep: null,
+    }];
+  });
+}
