@@ -1,0 +1,16 @@
+import type { Knex } from "knex";
+import * as access from "./migrations/001_access";
+import * as shop from "./migrations/002_shop";
+
+export interface Migration {
+  /** The file's name, so that the knex command line and the application agree on what has run. */
+  readonly name: string;
+  readonly up: (db: Knex) => Promise<void>;
+  readonly down: (db: Knex) => Promise<void>;
+}
+
+/** In order; a name stays as it is once it has run anywhere. */
+export const migrationList: readonly Migration[] = [
+  { name: "001_access.ts", up: access.up, down: access.down },
+  { name: "002_shop.ts", up: shop.up, down: shop.down },
+];

@@ -1,0 +1,22 @@
+import type { MaterialFacts } from "@/bending/handbook/material";
+import type { PartDocument } from "@/bending/part/partDocument";
+import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { Connection } from "../connection";
+import { planListColumns, planQuery } from "./planQuery";
+import type { PlanListRow } from "./planRow";
+
+/** A plan with everything that it was made of, as it was. */
+export interface PlanRow extends PlanListRow {
+  readonly plan: PlanDocument;
+  readonly part_document: PartDocument;
+  readonly material: MaterialFacts;
+  readonly machine_document: unknown;
+  readonly tooling: unknown;
+}
+
+export async function findPlan(db: Connection, id: string): Promise<PlanRow | undefined> {
+  const rows: PlanRow[] = await planQuery(db)
+    .where("plan.id", id)
+    .select([...planListColumns, "plan.document as plan", "revision.document as part_document", "plan.material", "plan.machine_document", "plan.tooling"]);
+  return rows[0];
+}

@@ -1,0 +1,13 @@
+import type { Connection } from "../connection";
+import { sheetListColumns, sheetQuery } from "./sheetQuery";
+import type { SheetListRow, SheetRowState } from "./sheetRow";
+
+/** A sheet; `snapshot` is what was frozen at its release, null while it is a draft. */
+export interface SheetRow extends SheetListRow {
+  readonly snapshot: unknown;
+}
+
+export async function findSheet(db: Connection, visible: readonly SheetRowState[], id: string): Promise<SheetRow | undefined> {
+  const rows: SheetRow[] = await sheetQuery(db, visible).where("sheet.id", id).select([...sheetListColumns, "sheet.snapshot"]);
+  return rows[0];
+}
