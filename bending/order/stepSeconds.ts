@@ -1,0 +1,26 @@
+import { handlingBetween } from "./handlingBetween";
+import { handlingSeconds } from "./handlingSeconds";
+import type { OrderProblem } from "./orderProblem";
+
+export interface StepBefore {
+  readonly move: number;
+  readonly station: number;
+  readonly gauge: number;
+}
+
+/** Seconds of one step: handle, walk, move the gauge, stroke. The first step of a part sets the gauge anew. */
+export function stepSeconds(problem: OrderProblem, before: StepBefore | null, step: StepBefore): number {
+  const { times } = problem;
+  const to = moveOf(problem, step.move);
+  if (before === null) return times.gaugeMove + times.stroke;
+  return handlingSeconds(handlingBetween(moveOf(problem, before.move), to), times)
+    + (before.station === step.station ? 0 : problem.walk(before.station, step.station))
+    + (before.gauge === step.gauge ? 0 : times.gaugeMove)
+    + times.stroke;
+}
+
+function moveOf(problem: OrderProblem, move: number) {
+  const found = problem.moves[move];
+  if (found === undefined) throw new Error(`invariant: move ${move} is not one of the problem's`);
+  return found.pose;
+}
