@@ -6,6 +6,6 @@ const store = globalThis as typeof globalThis & { foldwrightDatabase?: Knex };
 
 /** The process's own pool: one, whatever is reloaded around it. */
 export function database(): Knex {
-  store.foldwrightDatabase ??= connect(env().DATABASE_URL, env().DATABASE_POOL);
+  store.foldwrightDatabase ??= connect(env.databaseUrl);
   return store.foldwrightDatabase;
 }
