@@ -1,5 +1,5 @@
 import type { Frame } from "@/bending/geometry/frame";
-import { applyFrame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import type { Bend } from "@/bending/part/partModel";
 

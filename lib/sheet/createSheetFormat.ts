@@ -1,4 +1,6 @@
 import { MM_PER_INCH, type LengthUnit } from "@/bending/core/units";
+import { formatFixed as fixed } from "@/lib/format/formatFixed";
+import { formatNumber as trimmed } from "@/lib/format/formatNumber";
 
 /** Numbers as a setup sheet states them; lengths are given in mm and written in the sheet's unit. */
 export interface SheetFormat {
@@ -24,7 +26,6 @@ export function createSheetFormat(unit: LengthUnit): SheetFormat {
   const inch = unit === "in";
   const inUnit = (millimetres: number): number => (inch ? millimetres / MM_PER_INCH : millimetres);
   const withUnit = (text: string): string => `${text} ${unit}`;
-  const trimmed = (value: number, digits: number): string => String(Number(value.toFixed(digits)) + 0);
   return {
     unit,
     length: (millimetres) => withUnit(trimmed(inUnit(millimetres), inch ? 3 : 1)),
@@ -39,12 +40,6 @@ export function createSheetFormat(unit: LengthUnit): SheetFormat {
     time: duration,
     ratio: (value) => fixed(value, 3),
   };
-}
-
-/** Never "-0.00". */
-function fixed(value: number, digits: number): string {
-  const text = value.toFixed(digits);
-  return Number(text) === 0 ? (0).toFixed(digits) : text;
 }
 
 function signed(value: number, digits: number): string {

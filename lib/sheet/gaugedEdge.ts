@@ -1,4 +1,5 @@
-import { applyFrame, type Frame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
+import type { Frame } from "@/bending/geometry/frame";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import type { PlanModel, StepModel } from "./planModel";
 

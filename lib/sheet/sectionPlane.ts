@@ -1,4 +1,4 @@
-import { applyFrame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
 import type { PlanModel, StepModel } from "./planModel";
 import type { StrokeMoment } from "./stepFrames";
 

@@ -1,5 +1,5 @@
 import type { Frame } from "@/bending/geometry/frame";
-import { applyFrame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
 import { convexPieces } from "@/bending/geometry/convexPieces";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
 import { bendPrisms, type SheetPrism } from "./bendPrisms";

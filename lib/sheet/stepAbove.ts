@@ -1,4 +1,4 @@
-import { applyFrame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import { arrowShapes } from "./arrowShapes";

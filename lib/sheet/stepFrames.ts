@@ -1,6 +1,9 @@
 import type { Rad } from "@/bending/core/units";
 import { machineFrames } from "@/bending/clearance/machineFrames";
-import { applyFrame, composeFrames, identityFrame, type Frame } from "@/bending/geometry/frame";
+import { applyFrame } from "@/bending/geometry/applyFrame";
+import { composeFrames } from "@/bending/geometry/composeFrames";
+import type { Frame } from "@/bending/geometry/frame";
+import { identityFrame } from "@/bending/geometry/identityFrame";
 import type { FormedAngles } from "@/bending/part/partModel";
 import { zonePoint } from "./bendPrisms";
 import type { PlanModel, StepModel } from "./planModel";
