@@ -1,0 +1,2 @@
+/** [from, to] with from <= to. */
+export type Interval = readonly [number, number];
