@@ -47,3 +47,6 @@ export const MAX_BENDS = 30;
 
 /** Weighs a demerit against seconds, so that the order is by demerits first. */
 export const DEMERIT_SECONDS = 1e6;
+
+/** A gauge setting not settled yet, equal to every other: for problems that only bound the real one from below. */
+export const ANY_GAUGE = -1;

@@ -1,6 +1,6 @@
 import { handlingBetween } from "./handlingBetween";
 import { handlingSeconds } from "./handlingSeconds";
-import type { OrderProblem } from "./orderProblem";
+import { ANY_GAUGE, type OrderProblem } from "./orderProblem";
 
 export interface StepBefore {
   readonly move: number;
@@ -15,7 +15,7 @@ export function stepSeconds(problem: OrderProblem, before: StepBefore | null, st
   if (before === null) return times.gaugeMove + times.stroke;
   return handlingSeconds(handlingBetween(moveOf(problem, before.move), to), times)
     + (before.station === step.station ? 0 : problem.walk(before.station, step.station))
-    + (before.gauge === step.gauge ? 0 : times.gaugeMove)
+    + (before.gauge === step.gauge || before.gauge === ANY_GAUGE || step.gauge === ANY_GAUGE ? 0 : times.gaugeMove)
     + times.stroke;
 }
 
