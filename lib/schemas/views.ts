@@ -1,6 +1,9 @@
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PlanDocument } from "@/bending/plan/planDocument";
 import type { MaterialFacts } from "@/bending/handbook/material";
+import type { Machine } from "@/bending/tooling/machine";
+import type { Tool } from "@/bending/tooling/tool";
+import type { SheetView } from "@/lib/sheet/sheetView";
 import type { Role } from "./role";
 
 /** What the API answers; times are ISO 8601 strings, lengths in mm unless a document carries its own units. */
@@ -14,11 +17,11 @@ export interface Page<T> {
 
 /** Query of every list: `?q=&sort=name&dir=asc&page=1&pageSize=25` plus the list's own filters. */
 export interface ListQuery {
-  readonly q?: string;
-  readonly sort?: string;
-  readonly dir?: "asc" | "desc";
-  readonly page?: number;
-  readonly pageSize?: number;
+  readonly q?: string | undefined;
+  readonly sort?: string | undefined;
+  readonly dir?: "asc" | "desc" | undefined;
+  readonly page?: number | undefined;
+  readonly pageSize?: number | undefined;
 }
 
 export interface PartListItem {
@@ -127,8 +130,12 @@ export interface PlanDetail extends PlanListItem {
   readonly material: MaterialFacts;
   readonly machineId: string;
   readonly machineDocument: unknown;
+  /** The machine document read: millimetres and radians. */
+  readonly machineModel: Machine;
   /** The tools that the plan uses, as they were (tooling/1 document). */
   readonly tooling: unknown;
+  /** The same tools read: millimetres and radians, with the pieces that were in service. */
+  readonly tools: readonly Tool[];
   readonly sheets: readonly SheetListItem[];
 }
 
@@ -160,6 +167,15 @@ export interface SheetListItem {
   readonly createdAt: string;
 }
 
+export interface SheetDetail extends SheetListItem {
+  readonly partId: string;
+  readonly machineId: string;
+  /** What the sheet says: as frozen at its release, or as it would be frozen now. */
+  readonly view: SheetView;
+  /** The part's newest revision; higher than `revision`: the part has changed since. */
+  readonly latestRevision: number;
+}
+
 export interface ActivityItem {
   readonly id: string;
   readonly at: string;
@@ -174,4 +190,6 @@ export interface PersonItem {
   readonly name: string;
   readonly email: string;
   readonly role: Role;
+  /** False: the account is switched off. */
+  readonly active: boolean;
 }

@@ -1,0 +1,13 @@
+import { keepPreviousData, queryOptions, useQuery } from "@tanstack/react-query";
+import type { ActivityItem, ListQuery, Page } from "@/lib/schemas/views";
+import { queryText } from "./queryText";
+import { request } from "./request";
+
+export const activityOptions = (query: Pick<ListQuery, "q" | "page" | "pageSize"> = {}) =>
+  queryOptions({
+    queryKey: ["activity", query],
+    queryFn: ({ signal }) => request<Page<ActivityItem>>(`/api/activity${queryText(query)}`, { signal }),
+    placeholderData: keepPreviousData,
+  });
+
+export const useActivity = (query: Pick<ListQuery, "q" | "page" | "pageSize"> = {}) => useQuery(activityOptions(query));

@@ -1,0 +1,31 @@
+import { z } from "zod";
+import { listQuerySchema } from "./listQuery";
+import { filledText, plainText } from "./plainText";
+import type { ListQuery } from "./views";
+
+export const partSorts = ["number", "name", "material", "thickness", "bends", "revision", "updatedAt"] as const;
+
+export const partListQuerySchema = listQuerySchema(partSorts, "updatedAt", "desc").extend({ material: plainText(60).optional() });
+
+export interface PartListQuery extends ListQuery {
+  readonly sort?: (typeof partSorts)[number] | undefined;
+  readonly material?: string | undefined;
+}
+
+const note = plainText(2000).default("");
+
+/** `document` is checked by the library, with its own words. */
+export const createPartSchema = z.strictObject({ number: filledText(60).optional(), document: z.unknown(), note });
+export type CreatePartInput = z.input<typeof createPartSchema>;
+
+/** `basedOn` is the revision that was changed: when a newer one exists, nothing is saved. */
+export const addRevisionSchema = z.strictObject({
+  basedOn: z.number({ error: "must be the number of the revision that was changed" }).int("must be a whole number").min(1, "must be 1 or more"),
+  document: z.unknown(),
+  note,
+});
+export type AddRevisionInput = z.input<typeof addRevisionSchema>;
+
+export const revisionQuerySchema = z.object({
+  revision: z.coerce.number({ error: "must be a whole number from 1" }).int("must be a whole number from 1").min(1, "must be 1 or more").max(2_147_483_647).optional(),
+});
