@@ -1,0 +1,50 @@
+import { cleanPolygon } from "../geometry/cleanPolygon";
+import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
+import { signedArea } from "../geometry/signedArea";
+import type { FlatPoint } from "../geometry/vec2";
+import { mm, type Mm, type Rad } from "../core/units";
+import { developedOutline } from "./developedOutline";
+import type { BendDirection } from "./partDocument";
+import type { PartModel } from "./partModel";
+
+export interface FlatBendLine {
+  readonly id: string;
+  readonly line: readonly [FlatPoint, FlatPoint];
+  readonly angle: Rad;
+  readonly direction: BendDirection;
+}
+
+/** The blank that the laser or punch cuts, in the frame of the unfolded sheet (millimetres). */
+export interface FlatPattern {
+  /** Counter-clockwise; a tear relief is a slit without width. */
+  readonly outline: readonly FlatPoint[];
+  /** Clockwise. */
+  readonly holes: readonly (readonly FlatPoint[])[];
+  readonly bendLines: readonly FlatBendLine[];
+  readonly bounds: Bounds2;
+  /** Size along x and along y. */
+  readonly width: Mm;
+  readonly depth: Mm;
+  /** mm², holes taken off. */
+  readonly area: number;
+  readonly massKg: number;
+}
+
+export function flatPattern(part: PartModel): FlatPattern {
+  const outline = developedOutline(part);
+  const holes = part.faces.flatMap((face) => face.holes.map(clockwise));
+  const bounds = polygonBounds(outline);
+  const area = signedArea(outline) + holes.reduce((sum, hole) => sum + signedArea(hole), 0);
+  return {
+    outline: cleanPolygon(outline),
+    holes,
+    bendLines: part.bends.map(({ id, line, angle, direction }) => ({ id, line, angle, direction })),
+    bounds,
+    width: mm(bounds.max[0] - bounds.min[0]),
+    depth: mm(bounds.max[1] - bounds.min[1]),
+    area,
+    massKg: (area * part.thickness * part.material.density) / 1e9,
+  };
+}
+
+const clockwise = (hole: readonly FlatPoint[]): readonly FlatPoint[] => (signedArea(hole) > 0 ? [...hole].reverse() : hole);
