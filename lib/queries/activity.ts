@@ -3,11 +3,11 @@ import type { ActivityItem, ListQuery, Page } from "@/lib/schemas/views";
 import { queryText } from "./queryText";
 import { request } from "./request";
 
-export const activityOptions = (query: Pick<ListQuery, "q" | "page" | "pageSize"> = {}) =>
+export const activityOptions = (query: ListQuery = {}) =>
   queryOptions({
     queryKey: ["activity", query],
     queryFn: ({ signal }) => request<Page<ActivityItem>>(`/api/activity${queryText(query)}`, { signal }),
     placeholderData: keepPreviousData,
   });
 
-export const useActivity = (query: Pick<ListQuery, "q" | "page" | "pageSize"> = {}) => useQuery(activityOptions(query));
+export const useActivity = (query: ListQuery = {}) => useQuery(activityOptions(query));

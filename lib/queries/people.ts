@@ -1,11 +1,13 @@
-import { queryOptions, useQuery } from "@tanstack/react-query";
-import type { PersonItem } from "@/lib/schemas/views";
+import { keepPreviousData, queryOptions, useQuery } from "@tanstack/react-query";
+import type { ListQuery, Page, PersonItem } from "@/lib/schemas/views";
+import { queryText } from "./queryText";
 import { request } from "./request";
 
-export const peopleOptions = () =>
+export const peopleOptions = (query: ListQuery = {}) =>
   queryOptions({
-    queryKey: ["people"],
-    queryFn: ({ signal }) => request<readonly PersonItem[]>("/api/people", { signal }),
+    queryKey: ["people", query],
+    queryFn: ({ signal }) => request<Page<PersonItem>>(`/api/people${queryText(query)}`, { signal }),
+    placeholderData: keepPreviousData,
   });
 
-export const usePeople = () => useQuery(peopleOptions());
+export const usePeople = (query: ListQuery = {}) => useQuery(peopleOptions(query));
