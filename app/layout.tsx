@@ -10,6 +10,9 @@ export const metadata: Metadata = {
   robots: { index: false, follow: false },
 };
 
+/** Every page is made for its request: its scripts carry the nonce of that request's content security policy. */
+export const dynamic = "force-dynamic";
+
 export const viewport: Viewport = { width: "device-width", initialScale: 1, themeColor: "#F7F4EC" };
 
 export default function RootLayout({ children }: { readonly children: ReactNode }) {
