@@ -16,7 +16,7 @@ export interface SheetInput extends PlanSource {
 /** Everything that a setup sheet says, as text and drawings. The plan must be one that can be made (it has steps). */
 export function buildSheetView(input: SheetInput): SheetView {
   const { document, material, machine } = input;
-  const { alternatives: _alternatives, ...plan } = input.plan;
+  const plan = { ...input.plan, alternatives: [] };
   const used = new Set(plan.steps.flatMap((step) => [step.punch, step.die]).concat(plan.stations.flatMap((station) => [station.punch, station.die])));
   const tools = input.tools.filter((tool) => used.has(tool.id));
   const source: PlanSource = { plan, document, material, machine, tools };

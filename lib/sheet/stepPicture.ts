@@ -20,15 +20,15 @@ const REACH_MM = 240;
 
 /**
  * The step seen along the bed from its right end: a section through the bend with the operator on the left and the back gauge
- * on the right; the sheet before the stroke and bent, punch down.
+ * on the right; the sheet before the stroke and bent, punch down (or at another moment of the stroke).
  */
-export function stepPicture(model: PlanModel, step: StepModel): StepPicture {
+export function stepPicture(model: PlanModel, step: StepModel, moment: { readonly angle: number; readonly lift: number } = { angle: step.finished, lift: 0 }): StepPicture {
   const before = stepFrames(model, step, 0);
-  const after = stepFrames(model, step, step.finished);
+  const after = stepFrames(model, step, moment.angle);
   const plane = sectionPlane(model, step, before);
   const cutBefore = sections(model, before, plane);
   const cutAfter = sections(model, after, plane);
-  const tools = toolShapes(model, step, after.tipHeight);
+  const tools = toolShapes(model, step, after.tipHeight + moment.lift);
   const bounds = pictureBounds([...cutAfter, ...tools.near.map((shape) => shape.points)], cutBefore);
   const lettering = Math.max(bounds[2] - bounds[0], bounds[3] - bounds[1]) * 0.045;
   const shapes: PictureShape[] = [

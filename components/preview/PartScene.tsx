@@ -1,0 +1,45 @@
+"use client";
+import { useMemo } from "react";
+import { applyFrame } from "@/bending/geometry/applyFrame";
+import { foldFrames } from "@/bending/part/foldFrames";
+import type { FormedAngles, PartModel } from "@/bending/part/partModel";
+import { FitView, type FitTarget } from "./FitView";
+import { SheetMesh } from "./SheetMesh";
+import { StageCanvas } from "./StageCanvas";
+import type { StageTheme } from "./stageColours";
+
+export interface PartSceneProps {
+  readonly part: PartModel;
+  readonly angles: FormedAngles;
+  readonly theme: StageTheme;
+  readonly onLost: () => void;
+}
+
+/** The folded part on its own, base flat, its top up. */
+export default function PartScene({ part, angles, theme, onLost }: PartSceneProps) {
+  const frames = useMemo(() => foldFrames(part, angles), [part, angles]);
+  const target = useMemo(() => partTarget(part, angles), [part, angles]);
+  return (
+    <StageCanvas theme={theme} label={`The part ${part.name}, folded`} onLost={onLost}>
+      <FitView preset="part" target={target} />
+      <group rotation={[-Math.PI / 2, 0, 0]}>
+        <SheetMesh part={part} frames={frames} angles={angles} theme={theme} />
+      </group>
+    </StageCanvas>
+  );
+}
+
+/** In the view's axes: the part's z stands up. */
+function partTarget(part: PartModel, angles: FormedAngles): FitTarget {
+  const frames = foldFrames(part, angles);
+  const corners = part.faces.flatMap((face, index) => {
+    const frame = frames[index];
+    return frame ? face.outline.map(([x, y]) => applyFrame(frame, [x, y, 0])) : [];
+  });
+  const range = (axis: 0 | 1 | 2) => {
+    const values = corners.map((corner) => corner[axis]);
+    return { middle: (Math.min(...values) + Math.max(...values)) / 2, size: Math.max(...values) - Math.min(...values) };
+  };
+  const [x, y, z] = [range(0), range(1), range(2)];
+  return { centre: [x.middle, z.middle, -y.middle], radius: Math.max(5, (Math.hypot(x.size, y.size, z.size) / 2) * 1.05) };
+}
