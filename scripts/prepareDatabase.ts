@@ -7,6 +7,8 @@
 import type { Knex } from "knex";
 import { connect } from "../db/connect";
 import { migrateLatest } from "../db/migrateLatest";
+import { demonstrationPassword } from "../seeds/shop/demonstrationPassword";
+import { people } from "../seeds/shop/people";
 
 const wants = (flag: string) => process.argv.includes(flag);
 
@@ -37,13 +39,24 @@ async function prepare() {
     if (wants("--empty")) await knex.raw("drop schema if exists public cascade; create schema public");
     const applied = await migrateLatest(knex);
     const seeded = wants("--seed") && (await seed(knex));
-    console.log(JSON.stringify({ applied: applied.length, seeded }));
+    console.log(JSON.stringify({ applied: applied.length, seeded, signIns: await signIns(knex) }));
   });
 }
 
-async function seed(knex: Knex) {
+/** Loaded only when wanted: the demonstration brings the whole bending library with it. */
+async function seed(knex: Knex): Promise<boolean> {
   const { seedDemonstration } = await import("../seeds/demonstration");
-  return seedDemonstration(knex, { hashRounds: Number(process.env.SEED_HASH_ROUNDS ?? 12) });
+  return seedDemonstration(knex);
+}
+
+/** How to sign in as the demonstration's people, as far as they are there. */
+async function signIns(knex: Knex): Promise<readonly string[]> {
+  const emails = people.map((person) => person.email);
+  const rows = await knex("users").whereIn("email", emails).whereNull("disabled_at").select<{ email: string; role: string }[]>("email", "role");
+  if (rows.length === 0) return [];
+  rows.sort((a, b) => emails.indexOf(a.email) - emails.indexOf(b.email));
+  const width = Math.max(...rows.map((row) => row.email.length));
+  return [`Sign in as one of these, password ${demonstrationPassword}`, ...rows.map((row) => `  ${row.email.padEnd(width)}  ${row.role}`)];
 }
 
 try {

@@ -1,7 +1,76 @@
 import type { Knex } from "knex";
+import { materialById } from "@/bending/handbook/materials";
+import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
+import { readToolingDocument } from "@/bending/tooling/readToolingDocument";
+import { insertEvent } from "@/db/audit/insertEvent";
+import { insertMachine } from "@/db/machines/insertMachine";
+import { upsertMaterials } from "@/db/materials/upsertMaterials";
+import { insertPart } from "@/db/parts/insertPart";
+import { insertTool } from "@/db/tools/insertTool";
+import { insertUser } from "@/db/users/insertUser";
+import { hashPassword } from "@/lib/auth/hashPassword";
+import { readPart } from "@/lib/services/parts/readPart";
+import { mustRead } from "./mustRead";
+import { demonstrationPassword } from "./shop/demonstrationPassword";
+import { machines } from "./shop/machines";
+import { materials } from "./shop/materials";
+import { parts } from "./shop/parts";
+import { people } from "./shop/people";
+import { tooling } from "./shop/tools";
+import { pieceStates } from "./shop/tools/pieceStates";
 
-/** Puts the demonstration shop into a database that nobody is in yet; tells whether it did. */
-export async function seedDemonstration(knex: Knex, { hashRounds }: { hashRounds: number }): Promise<boolean> {
-  const people = await knex("users").count<{ count: string }[]>({ count: "*" });
-  return Number(people[0]?.count ?? 0) === 0 && hashRounds < 0;
+/** Puts the demonstration shop into a database that nobody is in yet, all or nothing; tells whether it did. */
+export async function seedDemonstration(knex: Knex): Promise<boolean> {
+  return knex.transaction(async (db) => {
+    await db.raw("lock table users in exclusive mode");
+    if (await db("users").first("id")) return false;
+    await upsertMaterials(db, materials);
+    const engineer = await seedPeople(db);
+    const brakes = await seedMachines(db);
+    await seedTools(db, brakes);
+    await seedParts(db, engineer);
+    await insertEvent(db, { actorId: null, actor: "installation", action: "put in the demonstration shop", subject: "Ravel Street Instruments" });
+    return true;
+  });
+}
+
+/** Answers the first engineer's id. */
+async function seedPeople(db: Knex): Promise<string> {
+  let engineer = "";
+  for (const person of people) {
+    const passwordHash = mustRead("password", await hashPassword(demonstrationPassword));
+    const { id, role } = await insertUser(db, { ...person, passwordHash });
+    if (engineer === "" && role === "engineer") engineer = id;
+  }
+  return engineer;
+}
+
+async function seedMachines(db: Knex): Promise<readonly string[]> {
+  const ids: string[] = [];
+  for (const document of machines) {
+    ids.push(await insertMachine(db, { machine: mustRead(document.name, readMachineDocument(document)), document }));
+  }
+  return ids;
+}
+
+async function seedTools(db: Knex, brakes: readonly string[]): Promise<void> {
+  for (const tool of mustRead("tooling", readToolingDocument(tooling))) {
+    const pieces = tool.pieces.map((piece) => {
+      const away = pieceStates[piece.id];
+      const machineId = away?.state === "at brake" ? brakes[away.brake] : undefined;
+      return {
+        code: piece.id, lengthMm: piece.length, horn: piece.horn, rack: piece.rack ?? "",
+        ...(away ? { state: away.state } : {}),
+        ...(machineId ? { machineId } : {}),
+      };
+    });
+    await insertTool(db, tool, pieces);
+  }
+}
+
+async function seedParts(db: Knex, by: string): Promise<void> {
+  for (const { number, note, document } of parts) {
+    const read = mustRead(document.name, readPart(document, materialById));
+    await insertPart(db, number, { ...read, note, by });
+  }
 }

@@ -56,7 +56,7 @@ export const parts: readonly DemonstrationPart[] = [
     number: "RS-104",
     note: "Eleven of them make a shield; both edges are folded in for stiffness.",
     document: {
-      format: "part/1", name: "Radiation-shield louvre", units: "mm", material: "EN AW-5754", thickness: 1,
+      format: "part/1", name: "Radiation-shield louvre", units: "mm", material: "AW-5754-H22", thickness: 1,
       profile: {
         width: 220, legs: [18, 48, 48, 18],
         bends: [{ angle: 120, direction: "up" }, { angle: 40, direction: "down" }, { angle: 120, direction: "up" }],
@@ -78,7 +78,7 @@ export const parts: readonly DemonstrationPart[] = [
     number: "RS-106",
     note: "Carries the solar panel; two to a station.",
     document: {
-      format: "part/1", name: "Solar-panel rail", units: "mm", material: "EN AW-5754", thickness: 2,
+      format: "part/1", name: "Solar-panel rail", units: "mm", material: "AW-5754-H22", thickness: 2,
       profile: { width: 2400, legs: [40, 60, 40], bends: [{ angle: 90, direction: "up" }, { angle: 90, direction: "up" }] },
     },
   },

@@ -19,7 +19,6 @@ export default async function setup(project: TestProject) {
   try {
     prepareDatabase(withName(cluster.url, EMPTY_TEMPLATE), ["--create"]);
     await copy(cluster.url, EMPTY_TEMPLATE, SHOP_TEMPLATE);
-    prepareDatabase(withName(cluster.url, SHOP_TEMPLATE), ["--seed"], { SEED_HASH_ROUNDS: "4" });
     await copy(cluster.url, EMPTY_TEMPLATE, "foldwright");
   } catch (error) {
     await cluster.end();

@@ -27,7 +27,7 @@ export function createCluster(folder, binaries) {
   rmSync(data, { recursive: true, force: true });
   mkdirSync(data, { recursive: true, mode: 0o700 });
   writeFileSync(password, randomBytes(24).toString("hex"), { mode: 0o600 });
-  const user = serverUser();
+  const user = serverUser(folder);
   if (user) for (const path of [folder, data, password]) chownSync(path, user.uid, user.gid);
   const result = spawnSync(
     join(binaries, "initdb"),

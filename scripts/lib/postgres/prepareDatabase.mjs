@@ -7,7 +7,7 @@ import { projectRoot } from "../projectRoot.mjs";
  * @param {string} url
  * @param {readonly ("--create" | "--empty" | "--seed")[]} flags
  * @param {Record<string, string>} environment
- * @returns {{ applied: number, seeded: boolean }}
+ * @returns {{ applied: number, seeded: boolean, signIns: string[] }}
  */
 export function prepareDatabase(url, flags = [], environment = {}) {
   const result = spawnSync(process.execPath, ["--import", "tsx", "scripts/prepareDatabase.ts", ...flags], {

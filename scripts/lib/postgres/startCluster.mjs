@@ -31,7 +31,7 @@ export async function startCluster(folder, binaries, settings = []) {
   const child = spawn(
     join(binaries, "postgres"),
     ["-D", data, "-p", String(port), "-c", "listen_addresses=127.0.0.1", "-c", "unix_socket_directories=", ...settings],
-    { ...serverUser(), cwd: "/", detached: true, stdio: ["ignore", log, log] },
+    { ...serverUser(folder), cwd: "/", detached: true, stdio: ["ignore", log, log] },
   );
   closeSync(log);
   child.on("error", () => undefined);

@@ -1,0 +1,1 @@
+export { builtInMaterials as materials } from "@/bending/handbook/materials";
