@@ -17,5 +17,5 @@ export function signInMessage(error: string | null | undefined): string | null {
     const minutes = Math.max(1, Math.ceil(Number(seconds) / 60) || 15);
     return `${signInErrors["too-many-attempts"]} Try again in ${minutes} ${minutes === 1 ? "minute" : "minutes"}.`;
   }
-  return code && code in signInErrors ? signInErrors[code as SignInErrorCode] : "Signing in failed. Try again.";
+  return code && Object.hasOwn(signInErrors, code) ? signInErrors[code as SignInErrorCode] : "Signing in failed. Try again.";
 }
