@@ -55,7 +55,7 @@ function shapeOfV(die: Die, at: (field: string, message: string) => FieldProblem
 /** How far a point inside the V stands over the shoulder arc beside it, radially. */
 function overShoulder(die: Die, [x, y]: ProfilePoint): number {
   const [dx, dy] = [Math.abs(x) - die.vOpening / 2, y + die.shoulderRadius];
-  const beside = dx <= 0 && dy >= Math.sin(die.vAngle / 2) * Math.min(0, dx / Math.cos(die.vAngle / 2));
+  const beside = dx <= 0 && dy >= -dx * Math.tan(die.vAngle / 2);
   return beside ? Math.hypot(dx, dy) - die.shoulderRadius : 0;
 }
 
