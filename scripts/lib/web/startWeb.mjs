@@ -18,7 +18,7 @@ const answers = (port, host) =>
 
 /**
  * Starts the web server and waits until it listens.
- * @param {{ mode: "start" | "dev", host: string, port: number, env: Record<string, string>, log?: number }} options `log`: a file for its output
+ * @param {{ mode: "start" | "dev", host: string, port: number, env: Record<string, string | undefined>, log?: number }} options `log`: a file for its output
  * @returns {Promise<{ mark: string, ended: Promise<number> }>}
  */
 export async function startWeb({ mode, host, port, env, log }) {
