@@ -141,7 +141,7 @@ const plans = `
     document jsonb not null check (document ->> 'format' = 'plan/1'),
     material jsonb not null,
     machine_document jsonb not null,
-    tooling jsonb not null,
+    tools jsonb not null check (jsonb_typeof(tools) = 'array'),
     inputs_digest text not null check (length(inputs_digest) = 64),
     engine text not null,
     created_at timestamptz not null default now(),
@@ -176,6 +176,7 @@ const sheets = `
     constraint sheets_superseded_time check ((state = 'superseded') = (superseded_at is not null))
   );
   create unique index sheets_one_released on sheets (part_id, machine_id) where state = 'released';
+  create unique index sheets_one_draft on sheets (plan_id) where state = 'draft';
   create index sheets_of_plan on sheets (plan_id);
   create index sheets_by_time on sheets (created_at desc);
 

@@ -1,6 +1,7 @@
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { Tool } from "@/bending/tooling/tool";
 import type { Connection } from "../connection";
 import { planListColumns, planQuery } from "./planQuery";
 import type { PlanListRow } from "./planRow";
@@ -11,12 +12,12 @@ export interface PlanRow extends PlanListRow {
   readonly part_document: PartDocument;
   readonly material: MaterialFacts;
   readonly machine_document: unknown;
-  readonly tooling: unknown;
+  readonly tools: readonly Tool[];
 }
 
 export async function findPlan(db: Connection, id: string): Promise<PlanRow | undefined> {
   const rows: PlanRow[] = await planQuery(db)
     .where("plan.id", id)
-    .select([...planListColumns, "plan.document as plan", "revision.document as part_document", "plan.material", "plan.machine_document", "plan.tooling"]);
+    .select([...planListColumns, "plan.document as plan", "revision.document as part_document", "plan.material", "plan.machine_document", "plan.tools"]);
   return rows[0];
 }

@@ -19,7 +19,7 @@ export async function insertPlan(db: Connection, entry: NewPlan): Promise<{ read
       document: JSON.stringify(plan),
       material: JSON.stringify(entry.material),
       machine_document: JSON.stringify(entry.machineDocument),
-      tooling: JSON.stringify(entry.tooling),
+      tools: JSON.stringify(entry.tools),
       inputs_digest: entry.inputsDigest,
       engine: plan.engine,
       created_by: entry.by,

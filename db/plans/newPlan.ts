@@ -1,5 +1,6 @@
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { Tool } from "@/bending/tooling/tool";
 
 export interface NewPlan {
   readonly partId: string;
@@ -9,8 +10,8 @@ export interface NewPlan {
   /** What the plan was made of, as it was. */
   readonly material: MaterialFacts;
   readonly machineDocument: unknown;
-  /** The tools that the plan uses (tooling/1). */
-  readonly tooling: unknown;
+  /** The tools that the plan uses, with the pieces that were in service. */
+  readonly tools: readonly Tool[];
   /** SHA-256 over everything the plan follows from. */
   readonly inputsDigest: string;
   readonly by: string | null;

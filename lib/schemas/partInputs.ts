@@ -14,17 +14,31 @@ export interface PartListQuery extends ListQuery {
 
 const note = plainText(2000).default("");
 
-/** `document` is checked by the library, with its own words. */
-export const createPartSchema = z.strictObject({ number: filledText(60).optional(), document: z.unknown(), note });
-export type CreatePartInput = z.input<typeof createPartSchema>;
+/** Checked by the library, with its own words; also when it is missing. */
+const document = z.unknown().optional();
 
-/** `basedOn` is the revision that was changed: when a newer one exists, nothing is saved. */
+export const createPartSchema = z.strictObject({ number: filledText(60).optional(), document, note });
+
+export interface CreatePartInput {
+  /** Made up when absent. */
+  readonly number?: string | undefined;
+  /** A part document (part/1), as typed or read from a file. */
+  readonly document: unknown;
+  readonly note?: string | undefined;
+}
+
 export const addRevisionSchema = z.strictObject({
-  basedOn: z.number({ error: "must be the number of the revision that was changed" }).int("must be a whole number").min(1, "must be 1 or more"),
-  document: z.unknown(),
+  basedOn: z.number({ error: "must be the number of the revision that was changed" }).int("must be a whole number").min(1, "must be 1 or more").max(2_147_483_646, "is higher than any revision"),
+  document,
   note,
 });
-export type AddRevisionInput = z.input<typeof addRevisionSchema>;
+
+export interface AddRevisionInput {
+  /** The revision that was changed: when a newer one exists, nothing is saved. */
+  readonly basedOn: number;
+  readonly document: unknown;
+  readonly note?: string | undefined;
+}
 
 export const revisionQuerySchema = z.object({
   revision: z.coerce.number({ error: "must be a whole number from 1" }).int("must be a whole number from 1").min(1, "must be 1 or more").max(2_147_483_647).optional(),

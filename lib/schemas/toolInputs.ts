@@ -35,14 +35,14 @@ const code = filledText(60).regex(/^[\p{L}\p{N}][\p{L}\p{N} ._+-]*$/u, "must beg
 /** The tool's own values go to the library to be checked: profile, angles, radii, heights, ratings. */
 const toolValues = {
   name: filledText(120).optional(),
-  profile: z.unknown(),
-  tipAngle: z.unknown(),
-  tipRadius: z.unknown(),
-  vOpening: z.unknown(),
-  vAngle: z.unknown(),
-  shoulderRadius: z.unknown(),
-  height: z.unknown(),
-  maxForcePerMetre: z.unknown(),
+  profile: z.unknown().optional(),
+  tipAngle: z.unknown().optional(),
+  tipRadius: z.unknown().optional(),
+  vOpening: z.unknown().optional(),
+  vAngle: z.unknown().optional(),
+  shoulderRadius: z.unknown().optional(),
+  height: z.unknown().optional(),
+  maxForcePerMetre: z.unknown().optional(),
   tang: filledText(60).optional(),
 };
 
@@ -52,10 +52,9 @@ export const toolSchema = z.strictObject({
   units,
   ...toolValues,
   pieces: z.array(pieceSchema).max(200, "must be at most 200 entries").default([]),
-}).partial({ profile: true, tipAngle: true, tipRadius: true, vOpening: true, vAngle: true, shoulderRadius: true, height: true, maxForcePerMetre: true });
+});
 
-export const updateToolSchema = z.strictObject({ units, ...toolValues })
-  .partial({ profile: true, tipAngle: true, tipRadius: true, vOpening: true, vAngle: true, shoulderRadius: true, height: true, maxForcePerMetre: true });
+export const updateToolSchema = z.strictObject({ units, ...toolValues });
 
 export const addPiecesSchema = z.strictObject({ units, pieces: z.array(pieceSchema).min(1, "give at least one piece").max(200, "must be at most 200 entries") });
 export type AddPiecesInput = z.input<typeof addPiecesSchema>;

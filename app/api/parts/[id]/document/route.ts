@@ -1,0 +1,17 @@
+import { route } from "@/lib/api/route";
+import { idParams } from "@/lib/schemas/idParams";
+import { revisionQuerySchema } from "@/lib/schemas/partInputs";
+import { getPart } from "@/lib/services/parts/getPart";
+
+/** The part document alone, as a file to keep. */
+export const GET = route("GET /api/parts/[id]/document", {
+  params: idParams,
+  query: revisionQuerySchema,
+  run: async ({ person, params, query }) => {
+    const part = await getPart(person, params.id, query.revision);
+    if (!part.ok) return part;
+    const { number, revision, document } = part.value;
+    const file = `${number.replace(/[^A-Za-z0-9._-]/g, "_")}-rev${revision.revision}.json`;
+    return Response.json(document, { headers: { "cache-control": "no-store", "content-disposition": `attachment; filename="${file}"` } });
+  },
+});

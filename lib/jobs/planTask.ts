@@ -1,0 +1,16 @@
+import type { MaterialFacts } from "@/bending/handbook/material";
+import type { PartDocument } from "@/bending/part/partDocument";
+import type { Machine } from "@/bending/tooling/machine";
+import type { Tool } from "@/bending/tooling/tool";
+
+/** A planning question as plain data, so that it can be sent to another thread. */
+export interface PlanTask {
+  readonly document: PartDocument;
+  readonly material: MaterialFacts;
+  readonly tools: readonly Tool[];
+  readonly machine: Machine;
+  readonly batch: number;
+  readonly alternatives: number;
+  /** When the search stops with the best so far. */
+  readonly limitMs: number;
+}

@@ -1,0 +1,28 @@
+import { Worker } from "node:worker_threads";
+import type { PlanRunner } from "./planRunner";
+import type { PlanWorkerMessage } from "./planWorkerMessage";
+import type { PlanDocument } from "@/bending/plan/planDocument";
+
+/** Longer than the search's own limit: what does not stop by itself is ended. */
+const GRACE_MS = 30_000;
+
+/** Plans in a thread of its own. The address of the worker must stand in the call itself: the bundler looks for it there. */
+export const runInWorker: PlanRunner = (task, onProgress) => {
+  const worker = new Worker(new URL("./planWorker.ts", import.meta.url), { workerData: task });
+  const result = new Promise<PlanDocument>((resolve, reject) => {
+    const timer = setTimeout(() => {
+      reject(new Error("the planning thread did not end in time"));
+      void worker.terminate();
+    }, task.limitMs + GRACE_MS);
+    worker.on("message", (message: PlanWorkerMessage) => {
+      if (message.kind === "progress") onProgress(message.progress);
+      else resolve(message.plan);
+    });
+    worker.on("error", reject);
+    worker.on("exit", () => {
+      clearTimeout(timer);
+      reject(new Error("the planning thread ended without an answer"));
+    });
+  });
+  return { result, stop: () => void worker.terminate() };
+};

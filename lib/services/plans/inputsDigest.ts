@@ -1,0 +1,17 @@
+import { createHash } from "node:crypto";
+import type { PlanTask } from "@/lib/jobs/planTask";
+
+/**
+ * SHA-256 over everything that a plan follows from, keys in order. Rack places are left out: where a piece is kept
+ * changes no plan.
+ */
+export function inputsDigest(engine: string, task: PlanTask): string {
+  const tools = task.tools.map((tool) => ({ ...tool, pieces: tool.pieces.map(({ id, length, horn }) => ({ id, length, horn })) }));
+  return createHash("sha256").update(canonical({ engine, ...task, tools })).digest("hex");
+}
+
+const canonical = (value: unknown): string =>
+  JSON.stringify(value, (_key, entry: unknown) =>
+    typeof entry === "object" && entry !== null && !Array.isArray(entry)
+      ? Object.fromEntries(Object.entries(entry).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : entry);
