@@ -1,10 +1,8 @@
-import { mmPer, type LengthUnit } from "@/bending/core/units";
-import type { PlanStep } from "@/bending/plan/planDocument";
-import { createSheetFormat } from "./createSheetFormat";
 import { edgeName } from "./edgeName";
 import type { PlanModel, StepModel } from "./planModel";
 import type { SheetStep } from "./sheetView";
 import { stepAbove } from "./stepAbove";
+import { stepNumbers } from "./stepNumbers";
 import { stepPicture } from "./stepPicture";
 import { upSide } from "./upSide";
 
@@ -21,38 +19,4 @@ export function sheetStep(model: PlanModel, stepModel: StepModel, index: number)
     picture: stepPicture(model, stepModel),
     above: stepAbove(model, stepModel),
   };
-}
-
-type StepNumbers = Omit<SheetStep, "number" | "upSide" | "up" | "front" | "toGauge" | "picture" | "above">;
-
-/** The numbers of a step as text; `units` are the plan's. */
-export function stepNumbers(step: PlanStep, units: LengthUnit): StepNumbers {
-  const format = createSheetFormat(units);
-  const per = mmPer(units);
-  const fingers = step.gauge.fingers.map((finger) => ({
-    x: format.gauge(finger.x * per), r: format.gauge(finger.r * per), z: format.place(finger.z * per),
-  }));
-  return {
-    bends: step.bends.join(" + "),
-    handling: handling(step.handling),
-    punch: step.punch,
-    die: step.die,
-    station: step.station,
-    bendZ: `${format.place(step.bendZ[0] * per)} to ${format.place(step.bendZ[1] * per)}`,
-    gaugeX: format.gauge(step.gauge.x * per),
-    gaugeR: format.gauge(step.gauge.r * per),
-    fingers,
-    gaugeZ: fingers.map((finger) => finger.z).join(" / ") || "no finger",
-    angle: format.angle(step.angle),
-    includedAngle: format.angle(180 - step.angle),
-    demandedAngle: format.angle(step.demandedAngle),
-    insideRadius: format.fine(step.insideRadius * per),
-    force: format.force(step.forceKN),
-    depth: format.fine(step.depthMm * per),
-  };
-}
-
-function handling({ flip, turn }: PlanStep["handling"]): string {
-  const moves = [flip ? "flip over" : "", turn !== 0 ? `turn ${turn}°` : ""].filter(Boolean);
-  return moves.join(", ") || "as it lies";
 }
