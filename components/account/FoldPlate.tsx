@@ -14,7 +14,7 @@ export function FoldPlate() {
             <path d="M604 185h22M484 75h142M618 75v110" /><path d="M618 75l2.2 9h-4.4zM618 185l2.2-9h-4.4z" fill="var(--steel-500)" stroke="none" />
             <path d="M320 58v46" strokeDasharray="12 3 2 3" />
           </g>
-          <g stroke="var(--ink)" fill="var(--paper)" strokeWidth="1.2"><path d="M40 262h560v96H40z" /></g>
+          <g stroke="var(--ink)" fill="var(--paper)" strokeWidth="1.2"><path d="M40 262h560v96H40z" /><path d="M70 174.9v10.2M570 174.9v10.2" /></g>
           <g stroke="var(--accent)" strokeWidth="1.2" fill="none">
             <path d="M124 262v96M516 262v96" strokeDasharray="14 4 3 4" /><path d="M234 262v96M406 262v96" strokeDasharray="6 5" />
           </g>

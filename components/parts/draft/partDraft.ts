@@ -1,0 +1,81 @@
+import type { LengthUnit } from "@/bending/core/units";
+import type { AllowanceRule, BendDirection, DimensionKind, DocumentHole, DocumentVertex, FlatShape, HemKind } from "@/bending/part/partDocument";
+
+/**
+ * A part as it is being typed: numbers are still the text that was typed, so that nothing entered is lost while
+ * it is wrong. An empty text means "not given". `key`s only tell rows apart on the screen.
+ */
+export interface PartDraft {
+  readonly number: string;
+  readonly name: string;
+  readonly note: string;
+  readonly units: LengthUnit;
+  readonly material: string;
+  readonly thickness: string;
+  readonly radiusFrom: "die" | "typed";
+  readonly insideRadius: string;
+  readonly kFactor: string;
+  readonly rule: AllowanceRule | "default";
+  readonly dimension: DimensionKind;
+  readonly toleranceAngle: string;
+  readonly toleranceLength: string;
+  readonly shape: "profile" | "base" | "flat";
+  readonly width: string;
+  readonly legs: readonly LegDraft[];
+  readonly base: BaseDraft;
+  readonly flanges: readonly FlangeDraft[];
+  /** A flat with bend lines that came in as a document; it is kept as it is. */
+  readonly flat: FlatShape | null;
+}
+
+/** A leg, and the bend that ends it (the last leg has none that counts). */
+export interface LegDraft {
+  readonly key: string;
+  readonly length: string;
+  readonly bend: BendDraft;
+}
+
+export interface BendDraft {
+  readonly angle: string;
+  readonly direction: BendDirection;
+  readonly insideRadius: string;
+  readonly kFactor: string;
+  readonly hem: HemKind | "none";
+  readonly gap: string;
+  readonly toleranceAngle: string;
+}
+
+export interface BaseDraft {
+  readonly kind: "rectangle" | "vertices";
+  readonly width: string;
+  readonly depth: string;
+  readonly vertices: readonly VertexDraft[];
+  readonly holes: readonly HoleDraft[];
+}
+
+export interface VertexDraft { readonly key: string; readonly x: string; readonly y: string; readonly bulge: string }
+
+/** A round hole is edited here; any other is kept as the document gave it. */
+export type HoleDraft =
+  | { readonly key: string; readonly kind: "circle"; readonly x: string; readonly y: string; readonly diameter: string }
+  | { readonly key: string; readonly kind: "kept"; readonly hole: DocumentHole };
+
+export interface FlangeDraft extends BendDraft {
+  readonly key: string;
+  readonly id: string;
+  readonly on: string;
+  readonly edge: number;
+  readonly length: string;
+  readonly start: string;
+  readonly end: string;
+  readonly startAngle: string;
+  readonly endAngle: string;
+  readonly dimension: DimensionKind | "part";
+  readonly relief: "none" | "rectangular" | "round" | "tear";
+  readonly reliefWidth: string;
+  readonly reliefDepth: string;
+  readonly toleranceLength: string;
+  readonly holes: readonly HoleDraft[];
+  /** An outline of its own, kept as the document gave it; it then takes the place of the length. */
+  readonly outline: readonly DocumentVertex[] | null;
+}

@@ -1,0 +1,49 @@
+"use client";
+import type { MaterialFacts } from "@/bending/handbook/material";
+import type { LengthUnit } from "@/bending/core/units";
+import type { DimensionKind } from "@/bending/part/partDocument";
+import { Choice } from "@/components/ui/Choice";
+import { Select } from "@/components/ui/Select";
+import { convertDraft } from "../draft/convertDraft";
+import type { PartDraft } from "../draft/partDraft";
+import { useEditor } from "./editorContext";
+import { fieldId } from "./fieldId";
+import { PathField } from "./PathField";
+
+const rules: readonly { readonly value: PartDraft["rule"]; readonly label: string }[] = [
+  { value: "default", label: "By the material: DIN 6935 for steel, else straight length" },
+  { value: "shop", label: "Shop’s measured values first" },
+  { value: "din6935", label: "DIN 6935" },
+  { value: "machinery", label: "Straight length by material group" },
+  { value: "faa", label: "Aircraft repair handbook formula" },
+  { value: "k", label: "The K-factor given here" },
+];
+
+/** Material, thickness, radius, and how lengths are measured and unfolded. */
+export function CommonFields({ materials }: { readonly materials: readonly MaterialFacts[] }) {
+  const { draft, update, problemAt } = useEditor();
+  const set = (change: Partial<PartDraft>) => update((old) => ({ ...old, ...change }));
+  return (
+    <div className="grid grid-cols-2 gap-x-4 gap-y-3">
+      <Select id={fieldId("material")} label="Material" value={draft.material} onChange={(material) => set({ material })} error={problemAt("material")} className="col-span-2"
+        placeholder="Choose a material" options={materials.map(({ id, name }) => ({ value: id, label: name, note: name.includes(id) ? undefined : id }))} />
+      <PathField path="thickness" label="Thickness" value={draft.thickness} onChange={(thickness) => set({ thickness })} hint="Also 16 ga, 1/8 in" />
+      <div className="flex flex-col items-start gap-3">
+        <Choice<LengthUnit> label="Lengths in" value={draft.units} onChange={(units) => update((old) => convertDraft(old, units))}
+          options={[{ value: "mm", label: "mm" }, { value: "in", label: "inch" }]} />
+      </div>
+      <Choice label="Inside radius" value={draft.radiusFrom} onChange={(radiusFrom) => set({ radiusFrom })}
+        options={[{ value: "die", label: "From the die" }, { value: "typed", label: "Given" }]} />
+      {draft.radiusFrom === "typed"
+        ? <PathField path="insideRadius" label="Radius" value={draft.insideRadius} onChange={(insideRadius) => set({ insideRadius })} />
+        : <p className="self-end pb-2 text-sm text-ink-faint">Until a die is chosen, the material’s usual radius is taken.</p>}
+      <Choice<DimensionKind> label="Lengths are measured" value={draft.dimension} onChange={(dimension) => set({ dimension })}
+        options={[{ value: "outside", label: "outside" }, { value: "inside", label: "inside" }, { value: "tangent", label: "tangent" }]} />
+      <PathField path="kFactor" label="K-factor (only to override)" kind="number" value={draft.kFactor} onChange={(kFactor) => set({ kFactor })} placeholder="from the rule" />
+      <Select id={fieldId("rule")} label="Bend allowance by" value={draft.rule} options={rules} error={problemAt("rule")} className="col-span-2"
+        onChange={(value) => { const rule = rules.find((one) => one.value === value); if (rule !== undefined) set({ rule: rule.value }); }} />
+      <PathField path="toleranceAngle" label="Angle tolerance ±" kind="angle" value={draft.toleranceAngle} onChange={(toleranceAngle) => set({ toleranceAngle })} placeholder="general" />
+      <PathField path="toleranceLength" label="Length tolerance ±" value={draft.toleranceLength} onChange={(toleranceLength) => set({ toleranceLength })} placeholder="general" />
+    </div>
+  );
+}

@@ -1,0 +1,108 @@
+"use client";
+import { useState, type FormEvent } from "react";
+import type { FieldProblem } from "@/bending/core/problem";
+import type { MaterialFacts } from "@/bending/handbook/material";
+import { mmPer } from "@/bending/core/units";
+import { Choice } from "@/components/ui/Choice";
+import { Notice } from "@/components/ui/Notice";
+import { Panel } from "@/components/ui/Panel";
+import { formatMoment } from "@/lib/format/formatMoment";
+import { BendTable } from "../drawing/BendTable";
+import { faceEdges } from "../drawing/faceEdges";
+import { FlatFacts } from "../drawing/FlatFacts";
+import { PartDrawings } from "../drawing/PartDrawings";
+import { draftFromDocument } from "../draft/draftFromDocument";
+import type { PartDraft } from "../draft/partDraft";
+import { addFlange } from "./addFlange";
+import { BaseFields } from "./BaseFields";
+import { CommonFields } from "./CommonFields";
+import { EditorContext } from "./editorContext";
+import { EditorHead } from "./EditorHead";
+import { FlangeFields } from "./FlangeFields";
+import { fieldId } from "./fieldId";
+import { NameFields } from "./NameFields";
+import { problemFinder } from "./problemFinder";
+import { ProblemList } from "./ProblemList";
+import { ProfileFields } from "./ProfileFields";
+import { QuickStarts } from "./QuickStarts";
+import { usePreview } from "./usePreview";
+import type { useStoredDraft } from "./useStoredDraft";
+
+interface PartEditorProps {
+  readonly title: string;
+  readonly materials: readonly MaterialFacts[];
+  readonly store: ReturnType<typeof useStoredDraft>;
+  readonly isNew: boolean;
+  readonly saving: boolean;
+  /** What the server refused, until something is changed. */
+  readonly refused: readonly FieldProblem[];
+  readonly message: React.ReactNode;
+  readonly onChange: () => void;
+  readonly onSave: (draft: PartDraft, document: unknown) => void;
+}
+
+export function PartEditor({ title, materials, store, isNew, saving, refused, message, onChange, onSave }: PartEditorProps) {
+  const { draft } = store;
+  const [tried, setTried] = useState(false);
+  const preview = usePreview(draft, materials);
+  const problems = [...preview.problems, ...refused].filter((problem) => tried || problem.path !== "name");
+  const update = (change: (old: PartDraft) => PartDraft) => { onChange(); store.setDraft(change); };
+  const editor = { draft, update, problemAt: problemFinder(problems, draft), gaugeGroup: materials.find(({ id }) => id === draft.material)?.group };
+  const save = (event: FormEvent) => {
+    event.preventDefault();
+    setTried(true);
+    if (preview.model !== null) { onSave(draft, preview.model.document); return; }
+    const first = preview.problems[0];
+    if (first !== undefined) document.getElementById(fieldId(first.path))?.focus();
+  };
+  const { shown } = preview;
+  const stale = preview.model === null;
+  return (
+    <EditorContext value={editor}>
+      <form noValidate onSubmit={save}>
+        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.model?.document ?? null} changed={store.changed} onStartAgain={store.startAgain}
+          onImport={(document) => update((old) => ({ ...draftFromDocument(document, old.number), note: old.note }))} />
+        <div className="mb-6 space-y-3 empty:hidden">
+          {store.restoredAt === null ? null : <Notice tone="note" title="Your unsaved entries were brought back">They were last changed {formatMoment(store.restoredAt)} and are not saved yet.</Notice>}
+          {message}
+          <ProblemList problems={problems} draft={draft} />
+        </div>
+        <div className="grid grid-cols-1 gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,38rem)_minmax(0,1fr)]">
+          <div className="space-y-8">
+            <NameFields isNew={isNew} />
+            <Panel title="Shape" aside={draft.shape === "flat" ? null : <ShapeChoice draft={draft} update={update} />}>
+              {draft.shape === "flat" ? <p className="text-ink-soft">A flat with {draft.flat?.bends.length ?? 0} bend lines, as the document gave it. Import another document to change it.</p> : (
+                <div className="space-y-4">
+                  <QuickStarts />
+                  {draft.shape === "profile" ? <ProfileFields /> : <BaseFields />}
+                </div>
+              )}
+            </Panel>
+            {draft.shape === "base" ? <Panel title="Flanges" aside="name, edge, length, angle, direction"><FlangeFields /></Panel> : null}
+            <Panel title="Material and measures"><CommonFields materials={materials} /></Panel>
+          </div>
+          <div className="space-y-6">
+            {shown === null ? <p className="border border-dashed border-rule-strong p-8 text-center text-ink-soft">The drawings appear here as soon as the part can be built.</p> : (
+              <>
+                <div className={stale ? "opacity-40" : undefined}><FlatFacts part={shown.part} flat={shown.flat} units={shown.document.units} /></div>
+                <PartDrawings part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={stale}
+                  {...(shown.document.base === undefined ? {} : {
+                    edges: faceEdges(shown.part, shown.document.base, mmPer(shown.document.units)),
+                    onEdge: (edge) => update((old) => addFlange(old, edge.face, edge.edge)),
+                  })} />
+                <Panel title="Bends" aside={`lengths in ${shown.document.units}`}><BendTable part={shown.part} units={shown.document.units} /></Panel>
+              </>
+            )}
+          </div>
+        </div>
+      </form>
+    </EditorContext>
+  );
+}
+
+function ShapeChoice({ draft, update }: { readonly draft: PartDraft; readonly update: (change: (old: PartDraft) => PartDraft) => void }) {
+  return (
+    <Choice<"profile" | "base"> label="Kind of part" labelHidden small value={draft.shape === "base" ? "base" : "profile"} onChange={(shape) => update((old) => ({ ...old, shape }))}
+      options={[{ value: "profile", label: "Profile" }, { value: "base", label: "Base with flanges" }]} />
+  );
+}

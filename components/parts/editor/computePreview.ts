@@ -1,0 +1,29 @@
+import type { FieldProblem } from "@/bending/core/problem";
+import { buildPart } from "@/bending/part/buildPart";
+import { flatPattern, type FlatPattern } from "@/bending/part/flatPattern";
+import type { PartDocument } from "@/bending/part/partDocument";
+import type { PartModel } from "@/bending/part/partModel";
+import { readPartDocument } from "@/bending/part/readPartDocument";
+import type { MaterialFacts } from "@/bending/handbook/material";
+import { documentFromDraft } from "../draft/documentFromDraft";
+import type { PartDraft } from "../draft/partDraft";
+
+export interface PreviewModel { readonly document: PartDocument; readonly part: PartModel; readonly flat: FlatPattern }
+
+export interface Preview {
+  /** Null while something is wrong. */
+  readonly model: PreviewModel | null;
+  readonly problems: readonly FieldProblem[];
+}
+
+/** From what was typed to the part, its flat and every problem found on the way. */
+export function computePreview(draft: PartDraft, materials: readonly MaterialFacts[]): Preview {
+  const byId = (id: string) => materials.find((material) => material.id === id);
+  const typed = documentFromDraft(draft, byId(draft.material)?.group);
+  if (typed.problems.length > 0) return { model: null, problems: typed.problems };
+  const read = readPartDocument(typed.document);
+  if (!read.ok) return { model: null, problems: read.error };
+  const built = buildPart(read.value, { materials: byId });
+  if (!built.ok) return { model: null, problems: built.error };
+  return { model: { document: read.value, part: built.value, flat: flatPattern(built.value) }, problems: [] };
+}

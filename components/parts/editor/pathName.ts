@@ -1,0 +1,20 @@
+import type { PartDraft } from "../draft/partDraft";
+
+const names: Readonly<Record<string, string>> = {
+  name: "Name", number: "Number", note: "Note", material: "Material", thickness: "Thickness", insideRadius: "Inside radius", kFactor: "K-factor", rule: "Bend allowance",
+  toleranceAngle: "Angle tolerance", toleranceLength: "Length tolerance", length: "length", angle: "angle", edge: "edge", on: "stands on", start: "inset at start", end: "inset at end",
+  startAngle: "side at start", endAngle: "side at end", gap: "gap", hem: "hem", id: "name", relief: "relief", outline: "outline", width: "width", depth: "depth", diameter: "diameter",
+};
+
+/** A path of the document in the words of the form: `flanges[1].length` is "Flange left, length". */
+export function pathName(path: string, draft: PartDraft): string {
+  const leg = /^profile\.legs\[(\d+)\]/.exec(path);
+  if (leg !== null) return `Leg ${Number(leg[1]) + 1}`;
+  const bend = /^profile\.bends\[(\d+)\](?:\.(\w+))?/.exec(path);
+  if (bend !== null) return `Bend ${Number(bend[1]) + 1}${bend[2] === undefined ? "" : `, ${names[bend[2]] ?? bend[2]}`}`;
+  const flange = /^flanges\[(\d+)\](?:\.(.+))?/.exec(path);
+  if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${names[flange[2]] ?? flange[2]}`}`;
+  if (path === "profile.width") return "Width";
+  if (path.startsWith("base.")) return `Base, ${names[path.slice(5)] ?? path.slice(5)}`;
+  return names[path] ?? path;
+}

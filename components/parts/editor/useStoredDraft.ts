@@ -1,0 +1,44 @@
+"use client";
+import { useEffect, useState } from "react";
+import type { PartDraft } from "../draft/partDraft";
+
+interface Stored { readonly savedAt: string; readonly basedOn: number; readonly draft: PartDraft }
+
+/** Grows when the shape of a draft changes, so that an old one is not read as a new one. */
+const version = 1;
+
+function read(key: string): Stored | null {
+  try {
+    const text = window.localStorage.getItem(key);
+    return text === null ? null : (JSON.parse(text) as Stored);
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * What is being typed, kept in this browser until it is saved or thrown away: it survives a reload, a failed
+ * save and a lost network. `basedOn` is the revision it started from (0: a new part).
+ */
+export function useStoredDraft(name: string, basedOn: number, start: () => PartDraft) {
+  const key = `foldwright.part-draft.${version}.${name}`;
+  const [begun] = useState(() => ({ stored: read(key), start: start() }));
+  const [draft, setDraft] = useState(begun.stored?.draft ?? begun.start);
+  const [restoredAt, setRestoredAt] = useState(begun.stored?.savedAt ?? null);
+  const [base, setBase] = useState(begun.stored?.basedOn ?? basedOn);
+  const changed = draft !== begun.start;
+  useEffect(() => {
+    if (!changed) return undefined;
+    const timer = setTimeout(() => {
+      try {
+        window.localStorage.setItem(key, JSON.stringify({ savedAt: new Date().toISOString(), basedOn: base, draft } satisfies Stored));
+      } catch {
+        // A full or forbidden store only means that a reload starts afresh.
+      }
+    }, 300);
+    return () => clearTimeout(timer);
+  }, [key, draft, base, changed]);
+  const forget = () => window.localStorage.removeItem(key);
+  const startAgain = () => { forget(); setDraft(begun.start); setBase(basedOn); setRestoredAt(null); };
+  return { draft, setDraft, basedOn: base, setBasedOn: setBase, restoredAt, changed, forget, startAgain };
+}
