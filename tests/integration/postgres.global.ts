@@ -19,6 +19,7 @@ export default async function setup(project: TestProject) {
   try {
     prepareDatabase(withName(cluster.url, EMPTY_TEMPLATE), ["--create"]);
     await copy(cluster.url, EMPTY_TEMPLATE, SHOP_TEMPLATE);
+    prepareDatabase(withName(cluster.url, SHOP_TEMPLATE), ["--seed"], { BCRYPT_ROUNDS: "4" });
     await copy(cluster.url, EMPTY_TEMPLATE, "foldwright");
   } catch (error) {
     await cluster.end();
