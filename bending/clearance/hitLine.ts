@@ -1,5 +1,6 @@
 import { invariant } from "../core/invariant";
 import type { Mm } from "../core/units";
+import { bendDirections } from "../part/bendDirections";
 import type { Bend, PartModel } from "../part/partModel";
 import type { Hit } from "./hit";
 
@@ -17,14 +18,12 @@ export interface HitLine {
   readonly middle: Mm;
 }
 
-/** Side of every face in a hit: true = front (the operator's side). Cut at the hit's bends, the parts lie front and back by turns. */
+/** How one bend of a hit lies in the machine; `sides` as from `hitSides`. */
 export function hitLine(part: PartModel, hit: Hit, which: number, sides: readonly boolean[]): HitLine {
   const bend = part.bends[which];
   invariant(bend, "a hit names bends of the part");
   const parentInFront = sides[bend.parent] === true;
-  const [[ax, ay], [bx, by]] = bend.line;
-  const length = Math.hypot(bx - ax, by - ay);
-  const u = [(bx - ax) / length, (by - ay) / length] as const;
+  const { along: u, outward } = bendDirections(bend);
   const turn = (bend.direction === "up") === parentInFront ? -1 : 1;
   const along = [turn * u[0], turn * u[1]] as const;
   let [low, high] = [Infinity, -Infinity];
@@ -35,5 +34,5 @@ export function hitLine(part: PartModel, hit: Hit, which: number, sides: readonl
       high = Math.max(high, z);
     }
   }
-  return { bend, index: which, parentInFront, along, across: [u[1], -u[0]], middle: ((low + high) / 2) as Mm };
+  return { bend, index: which, parentInFront, along, across: outward, middle: ((low + high) / 2) as Mm };
 }

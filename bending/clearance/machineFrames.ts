@@ -6,9 +6,9 @@ import type { Frame } from "../geometry/frame";
 import { identityFrame } from "../geometry/identityFrame";
 import { invertFrame } from "../geometry/invertFrame";
 import type { Vec3 } from "../geometry/vec3";
+import { foldFrames } from "../part/foldFrames";
 import type { PartModel } from "../part/partModel";
 import type { Die, Punch } from "../tooling/tool";
-import { bendTurn } from "./bendTurn";
 import type { Hit } from "./hit";
 import { hitLine } from "./hitLine";
 import { hitSides } from "./hitSides";
@@ -24,11 +24,8 @@ export type { Hit } from "./hit";
 export function machineFrames(part: PartModel, hit: Hit, strokeAngle: Rad, ...[, die]: readonly [punch: Punch, die: Die]): readonly Frame[] {
   const first = hit.bends[0];
   invariant(first !== undefined, "a hit forms at least one bend");
-  const folded: Frame[] = [identityFrame];
-  part.bends.forEach((bend, i) => {
-    const angle = hit.bends.includes(i) ? strokeAngle : (hit.formed >> i) & 1 ? bend.angle : 0;
-    folded[bend.child] = composeFrames(folded[bend.parent] ?? identityFrame, bendTurn(bend, part.thickness, angle));
-  });
+  const angles = part.bends.map((bend, i) => (hit.bends.includes(i) ? strokeAngle : (hit.formed >> i) & 1 ? bend.angle : 0));
+  const folded = foldFrames(part, angles);
   const line = hitLine(part, hit, first, hitSides(part, hit));
   const parent = folded[line.bend.parent] ?? identityFrame;
   const place = composeFrames(parentInMachine(part, line, strokeAngle, die), invertFrame(parent));

@@ -1,0 +1,14 @@
+import type { Shape } from "./convexPiece";
+
+/** Something on the ram or on the bed, placed against the tools that make the hit. */
+export interface Obstacle {
+  readonly kind: "punch" | "die" | "ram" | "bed";
+  readonly tool: string | null;
+  /** Names shape and place, so that answers can be kept. */
+  readonly key: string;
+  readonly shape: Shape;
+  /** Things on the ram move with the punch, things on the bed stand with the die. */
+  readonly on: "ram" | "bed";
+  /** Height of its origin over the punch's tip (on the ram) or over the die's top plane (on the bed). */
+  readonly lift: number;
+}

@@ -1,0 +1,34 @@
+import type { Mm } from "../core/units";
+import type { Bend } from "../part/partModel";
+import type { Prism } from "./prism";
+
+/** Where the wings stand, seen from the punch's tip (x to the back, y up). */
+export interface WingPose {
+  readonly sin: number;
+  readonly cos: number;
+  /** Tangent of the back wing's outside surface. */
+  readonly x: number;
+  readonly y: number;
+}
+
+/** Seen from the punch the sheet's pose depends on the angle alone (h is half of it), not on the die: see `strokePlacement`. */
+export function wingPose(bend: Bend, thickness: Mm, h: number): WingPose {
+  const [sin, cos] = [Math.sin(h), Math.cos(h)];
+  const outer = (1 - bend.k) * thickness;
+  const neutral = bend.allowance / 2;
+  const rise = h < 1e-9 ? h / 2 : (2 * Math.sin(h / 2) ** 2) / h;
+  return { sin, cos, x: neutral * (h < 1e-9 ? 1 : sin / h) + outer * sin, y: neutral * rise + outer * (1 - cos) - thickness };
+}
+
+/** Writes the corners of a prism into `into` (x, y, z a corner), seen from the punch's tip. */
+export function posePrism(prism: Prism, pose: WingPose, inFront: boolean, into: Float64Array): void {
+  const side = inFront ? -1 : 1;
+  const { points } = prism;
+  for (let i = 0; i < points.length; i += 3) {
+    const a = points[i] as number;
+    const b = points[i + 1] as number;
+    into[i] = side * (pose.x + a * pose.cos - b * pose.sin);
+    into[i + 1] = pose.y + a * pose.sin + b * pose.cos;
+    into[i + 2] = points[i + 2] as number;
+  }
+}

@@ -1,0 +1,13 @@
+/**
+ * A convex plate that moves with a wing: `count` corners on one side, then `count` on the other, each three numbers:
+ * a (away from the bend, from the tangent on the wing's outside surface), b (from the outside surface to the inside), z.
+ */
+export interface Prism {
+  readonly count: number;
+  readonly points: Float64Array;
+  /** How the prism lies to its wing: `plane` in the wing's plane, `inside` on or over its outside surface, `outside` else. */
+  readonly lies: "plane" | "inside" | "outside";
+  readonly a: readonly [number, number];
+  readonly b: readonly [number, number];
+  readonly z: readonly [number, number];
+}
