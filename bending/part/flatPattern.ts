@@ -1,4 +1,4 @@
-import { cleanPolygon } from "../geometry/cleanPolygon";
+import { SAME_POINT_MM } from "../core/tolerance";
 import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import { signedArea } from "../geometry/signedArea";
 import type { FlatPoint } from "../geometry/vec2";
@@ -36,7 +36,7 @@ export function flatPattern(part: PartModel): FlatPattern {
   const bounds = polygonBounds(outline);
   const area = signedArea(outline) + holes.reduce((sum, hole) => sum + signedArea(hole), 0);
   return {
-    outline: cleanPolygon(outline),
+    outline: withoutMidpoints(outline),
     holes,
     bendLines: part.bends.map(({ id, line, angle, direction }) => ({ id, line, angle, direction })),
     bounds,
@@ -48,3 +48,16 @@ export function flatPattern(part: PartModel): FlatPattern {
 }
 
 const clockwise = (hole: readonly FlatPoint[]): readonly FlatPoint[] => (signedArea(hole) > 0 ? [...hole].reverse() : hole);
+
+/** Leaves out points in the middle of straight runs; the tip of a slit, where the outline turns back, stays. */
+function withoutMidpoints(outline: readonly FlatPoint[]): readonly FlatPoint[] {
+  const kept: FlatPoint[] = [];
+  outline.forEach((q, i) => {
+    const p = kept[kept.length - 1] ?? outline[outline.length - 1] ?? q;
+    const r = outline[(i + 1) % outline.length] ?? q;
+    const [ux, uy, vx, vy] = [q[0] - p[0], q[1] - p[1], r[0] - q[0], r[1] - q[1]];
+    const straightOn = ux * vx + uy * vy > 0 && Math.abs(ux * vy - uy * vx) <= SAME_POINT_MM * Math.max(Math.hypot(ux, uy), Math.hypot(vx, vy));
+    if (!straightOn) kept.push(q);
+  });
+  return kept;
+}

@@ -1,0 +1,43 @@
+import { mm } from "../core/units";
+import type { FieldProblem } from "../core/problem";
+import { fail, ok, type Result } from "../core/result";
+import type { MaterialFacts, MaterialLookup } from "../handbook/material";
+import { buildFaces } from "./buildFaces";
+import { checkPartDocument } from "./checkPartDocument";
+import { documentInUnits } from "./documentInUnits";
+import { flatsOverlap } from "./flatsOverlap";
+import type { PartDocument } from "./partDocument";
+import type { PartModel } from "./partModel";
+import { partSource } from "./partSource";
+import type { RadiusOf } from "./resolveBend";
+import { unknownMaterial } from "./unknownMaterial";
+
+export interface BuildPartOptions {
+  readonly materials: MaterialLookup;
+  /** The inside radius that the chosen die gives a bend; used where the document gives none. */
+  readonly radiusOf?: RadiusOf;
+  /** The ids that `materials` knows, to list them when one is not known. */
+  readonly knownMaterials?: readonly string[];
+}
+
+/**
+ * The part that a document describes, made ready for computing: plane faces and bends in the unfolded sheet,
+ * or what has to be mended, field by field and in the document's units.
+ */
+export function buildPart(document: PartDocument, options: BuildPartOptions): Result<PartModel, readonly FieldProblem[]> {
+  const material = options.materials(document.material);
+  const early = [...checkPartDocument(document), ...(material ? [] : [unknownMaterial(document.material, options.knownMaterials)])];
+  if (early.length > 0 || !material) return fail(early);
+  const built = buildShape(document, material, options.radiusOf);
+  if (!built.ok) return built;
+  const part: PartModel = { name: document.name, thickness: mm(documentInUnits(document, "mm").thickness), material, ...built.value };
+  const overlaps = flatsOverlap(part, document);
+  return overlaps.length > 0 ? fail(overlaps) : ok(part);
+}
+
+function buildShape(document: PartDocument, material: MaterialFacts, radiusOf: RadiusOf | undefined): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
+  const inMm = documentInUnits(document, "mm");
+  const source = partSource(inMm);
+  if (!source) return fail([{ path: "flat", message: "a flat with bend lines is not taken yet; give the part as a profile or as a base with flanges" }]);
+  return buildFaces(source, inMm, document.units, material, radiusOf);
+}

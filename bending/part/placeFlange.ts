@@ -1,0 +1,98 @@
+import type { FieldProblem } from "../core/problem";
+import { fail, ok, type Result } from "../core/result";
+import type { LengthUnit, Mm } from "../core/units";
+import type { Interval } from "../geometry/interval";
+import type { Vec2 } from "../geometry/vec2";
+import { outsideSetback } from "../handbook/outsideSetback";
+import type { DrawnFace } from "./drawnFace";
+import { drawnFlange, drawnFromOwnOutline } from "./drawnFlange";
+import { edgeAxes, fromEdge } from "./edgeCut";
+import { edgeCutsOf } from "./edgeCutsOf";
+import { edgeRange } from "./edgeRange";
+import type { FaceWork, FlangeWork } from "./faceWork";
+import { formatLength } from "./formatLength";
+import type { DimensionKind } from "./partDocument";
+import type { Bend } from "./partModel";
+import { placeOnSheet, turnOnSheet } from "./sheetPlacement";
+import { planeOutline } from "./planeOutline";
+import { setback } from "./setback";
+
+export interface PlaceFlangeQuestion {
+  readonly parent: FaceWork;
+  readonly flange: FlangeWork;
+  /** The flanges on this one. */
+  readonly children: readonly FlangeWork[];
+  readonly dimension: DimensionKind;
+  readonly thickness: Mm;
+  readonly units: LengthUnit;
+  readonly index: number;
+}
+
+/** One flange with its bend, laid into the unfolded sheet beside its parent. */
+export function placeFlange(question: PlaceFlangeQuestion): Result<{ readonly face: FaceWork; readonly bend: Bend }, FieldProblem> {
+  const { parent, flange, children, thickness, units, index } = question;
+  const { entry, bend, path } = flange;
+  const edge = parent.drawn.edges[entry.edge];
+  if (!edge) return fail({ path: `${path}.edge`, message: `"${entry.on}" has no edge ${entry.edge}` });
+  const axes = edgeAxes(edge);
+  const parentDepth = setback(parent.drawn.dimension, bend.angle, bend.insideRadius, thickness);
+  const inset = entry.start ?? 0;
+  const wanted: Interval = entry.outline ? [-Infinity, Infinity] : [inset, axes.length - (entry.end ?? 0)];
+  if (wanted[1] - wanted[0] <= 0) {
+    return fail({ path: `${path}.${entry.start ? "start" : "end"}`, message: `the insets leave nothing of edge ${entry.edge} of "${entry.on}", which is ${formatLength(axes.length, units)} long` });
+  }
+  const range = edgeRange(parent.plane, axes, parentDepth, wanted);
+  if (!range) return fail({ path: `${path}.edge`, message: `edge ${entry.edge} of "${entry.on}" is too short for this bend: the bends on the edges beside it leave nothing straight of it` });
+
+  const own = outsideSetback(bend.angle, bend.insideRadius, thickness);
+  const drawn = draw(question, range, own);
+  if (!drawn) return fail({ path: `${path}.${entry.startAngle ? "startAngle" : "endAngle"}`, message: "the sides meet before the far edge; make the flange shorter or the angles nearer to 90" });
+  const ownEdge = drawn.edges[0];
+  if (!ownEdge) return fail({ path: `${path}.outline`, message: "needs an edge 0 on the bend's outside line" });
+  const plane = planeOutline(drawn, [{ edge: ownEdge, depth: own, start: 0, end: 0, relief: null }, ...edgeCutsOf(drawn, children, thickness)]);
+  const ownAxes = edgeAxes(ownEdge);
+  const ownRange = plane && edgeRange(plane, ownAxes, own, [-Infinity, Infinity]);
+  if (!plane || !ownRange) return fail({ path: flange.lengthPath, message: `its bends leave nothing of "${entry.id}", or cut it in pieces; its own bend takes ${formatLength(own, units)}` });
+
+  // Along the bend from the flange's start; counter-clockwise, its own edge 0 runs from end to start.
+  const zone: Interval = [ownEdge.from[0] - ownRange[1], ownEdge.from[0] - ownRange[0]];
+  const originAlong = entry.outline ? inset : range[0];
+  if (originAlong + zone[0] < range[0] - FITS_MM || originAlong + zone[1] > range[1] + FITS_MM) {
+    return fail({ path: `${path}.outline`, message: `is wider at the bend than the straight part of edge ${entry.edge} of "${entry.on}": it runs from ${formatLength(originAlong + zone[0], units)} to ${formatLength(originAlong + zone[1], units)} along the edge, which is free from ${formatLength(range[0], units)} to ${formatLength(range[1], units)}` });
+  }
+  const outward: Vec2 = [-axes.inward[0], -axes.inward[1]];
+  const at = (along: number, across: number): Vec2 => {
+    const tangent = fromEdge(axes, [originAlong + along, parentDepth]);
+    return placeOnSheet(parent.placement, [tangent[0] + outward[0] * across, tangent[1] + outward[1] * across]);
+  };
+  const [from, to] = zone;
+  const { source: allowanceSource, ...resolved } = bend;
+  const placement = { origin: at(0, bend.allowance - own), along: turnOnSheet(parent.placement, axes.along) };
+  return ok({
+    face: { id: entry.id, index, drawn, plane, placement },
+    bend: {
+      ...resolved,
+      allowanceSource,
+      parent: parent.index,
+      child: index,
+      line: [at(from, bend.allowance / 2), at(to, bend.allowance / 2)],
+      zone: [at(from, 0), at(from, bend.allowance), at(to, bend.allowance), at(to, 0)],
+    },
+  });
+}
+
+/** An own outline may stand over the free edge by rounding alone (mm). */
+const FITS_MM = 1e-4;
+
+function draw({ flange, dimension, thickness }: PlaceFlangeQuestion, range: Interval, own: number): DrawnFace | null {
+  const { entry, bend } = flange;
+  if (entry.outline) return drawnFromOwnOutline(entry.outline, dimension);
+  return drawnFlange({
+    width: range[1] - range[0],
+    reach: (entry.length ?? 0) - setback(dimension, bend.angle, bend.insideRadius, thickness),
+    setback: own,
+    startAngle: entry.startAngle ?? 90,
+    endAngle: entry.endAngle ?? 90,
+    dimension,
+  });
+}
