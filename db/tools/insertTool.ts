@@ -4,11 +4,13 @@ import { insertPieces } from "./insertPieces";
 import type { NewPiece } from "./newPiece";
 import { toolColumns } from "./toolColumns";
 
-/** Puts in a tool with its pieces: those given, else the tool's own, all in the rack. */
+/** Puts in a tool with its pieces, all or nothing: those given, else the tool's own, all in the rack. */
 export async function insertTool(db: Connection, tool: Tool, pieces: readonly NewPiece[] = piecesOf(tool)): Promise<string> {
-  const [row] = await db("tools").insert(toolColumns(tool)).returning<{ id: string }[]>("id");
-  await insertPieces(db, row!.id, pieces);
-  return row!.id;
+  return db.transaction(async (within) => {
+    const [row] = await within("tools").insert(toolColumns(tool)).returning<{ id: string }[]>("id");
+    await insertPieces(within, row!.id, pieces);
+    return row!.id;
+  });
 }
 
 const piecesOf = (tool: Tool): readonly NewPiece[] =>

@@ -2,9 +2,9 @@ import { mmPer, type LengthUnit } from "@/bending/core/units";
 import type { Tool } from "@/bending/tooling/tool";
 import { toolToDocument } from "@/bending/tooling/toolToDocument";
 
-/** A tool as an entry of a tooling document in the units asked for, without its pieces. */
+/** A tool as an entry of a tooling document in the units asked for with no pieces. */
 export function toolValuesIn(tool: Tool, units: LengthUnit): Readonly<Record<string, unknown>> {
-  const { sections: _sections, ...entry } = toolToDocument(tool);
+  const entry = toolToDocument({ ...tool, pieces: [] });
   const scaled = (length: number): number => length / mmPer(units);
   const common = { ...entry, height: scaled(entry.height), profile: entry.profile.map(([x, y]) => [scaled(x), scaled(y)]) };
   return entry.kind === "punch"
