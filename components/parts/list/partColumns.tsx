@@ -1,0 +1,20 @@
+import type { Column } from "@/components/ui/DataTable";
+import { StateMark } from "@/components/ui/StateMark";
+import { TextLink } from "@/components/ui/TextLink";
+import { formatLength } from "@/lib/format/formatLength";
+import { formatMoment } from "@/lib/format/formatMoment";
+import type { PartListItem } from "@/lib/schemas/views";
+
+export const partColumns: readonly Column<PartListItem>[] = [
+  { key: "number", header: "Number", sortable: true, className: "whitespace-nowrap", cell: (part) => <span className="num">{part.number}</span> },
+  { key: "name", header: "Name", sortable: true, rowHeader: true, cell: (part) => <TextLink href={`/parts/${part.id}`}>{part.name}</TextLink> },
+  { key: "material", header: "Material", sortable: true, cell: (part) => part.material },
+  { key: "thickness", header: "Thickness", sortable: true, align: "right", cell: (part) => <span className="num whitespace-nowrap">{formatLength(part.thicknessMm, "mm")}</span> },
+  { key: "bends", header: "Bends", sortable: true, align: "right", cell: (part) => <span className="num">{part.bends}</span> },
+  { key: "flat", header: "Blank", align: "right", cell: (part) => <span className="num whitespace-nowrap">{formatLength(part.flatWidthMm, "mm", false)} × {formatLength(part.flatDepthMm, "mm")}</span> },
+  { key: "revision", header: "Revision", sortable: true, align: "right", cell: (part) => <span className="num">{part.revision}</span> },
+  { key: "released", header: "Setup sheet", cell: (part) => (part.releasedSheets > 0
+    ? <StateMark tone="good">{part.releasedSheets === 1 ? "released" : `${part.releasedSheets} released`}</StateMark>
+    : <StateMark tone="wait">none yet</StateMark>) },
+  { key: "updatedAt", header: "Changed", sortable: true, cell: (part) => <span className="text-sm"><span className="whitespace-nowrap">{formatMoment(part.updatedAt)}</span><br /><span className="text-ink-faint">{part.updatedBy}</span></span> },
+];
