@@ -49,6 +49,7 @@ export function createPlanJobs(runner: PlanRunner, limits: PlanJobLimits): PlanJ
     job.run = runner(job.facts.task, ({ fraction, message }) => change(job, { progress: fraction, message }));
     const plan = await job.run.result;
     job.run = null;
+    if (job.view.state !== "running") return;
     change(job, { progress: 1, message: "Storing the plan" });
     change(job, { state: "done", message: endMessage(plan), planId: await job.facts.store(plan) });
   };

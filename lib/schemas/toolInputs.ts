@@ -12,7 +12,7 @@ export interface ToolListQuery extends ListQuery {
   readonly kind?: "punch" | "die" | undefined;
 }
 
-export const toolCodeParams = z.object({ code: z.string().min(1).max(60) });
+export const toolCodeParams = z.object({ code: filledText(60) });
 
 const length = z.number().positive("must be more than 0").max(20_000, "must be at most 20000");
 

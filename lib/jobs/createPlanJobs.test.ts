@@ -1,0 +1,78 @@
+import { describe, expect, it } from "vitest";
+import type { PlanDocument } from "@/bending/plan/planDocument";
+import { emptyPlan } from "@/bending/plan/emptyPlan";
+import { builtInMaterials } from "@/bending/handbook/materials";
+import { createPlanJobs } from "./createPlanJobs";
+import type { PlanRunner } from "./planRunner";
+import type { PlanTask } from "./planTask";
+
+const task = { material: builtInMaterials[0]!, tools: [], batch: 1, alternatives: 0, limitMs: 1000 } as unknown as PlanTask;
+const plan = emptyPlan({ part: "a", machine: "b", units: "mm", batch: 1, status: "infeasible", method: "none", reasons: [] });
+
+/** A runner that is told from outside what its runs come to. */
+function handRunner() {
+  const runs: { say: (message: string, fraction: number) => void; end: (plan: PlanDocument) => void; stopped: boolean }[] = [];
+  const runner: PlanRunner = (_task, onProgress) => {
+    let end: (plan: PlanDocument) => void = () => undefined;
+    let fail: (error: Error) => void = () => undefined;
+    const result = new Promise<PlanDocument>((resolve, reject) => {
+      end = resolve;
+      fail = reject;
+    });
+    const run = { say: (message: string, fraction: number) => onProgress({ expanded: 0, fraction, message }), end, stopped: false };
+    runs.push(run);
+    return { result, stop: () => { run.stopped = true; fail(new Error("stopped")); } };
+  };
+  return { runs, jobs: createPlanJobs(runner, { atOnce: 1, waitingMost: 1, rememberedMost: 2 }) };
+}
+const facts = (key: string, store: (plan: PlanDocument) => Promise<string> = async () => `plan of ${key}`) => ({ key, task, store });
+const settled = () => new Promise((resolve) => setImmediate(resolve));
+
+describe("planning jobs", () => {
+  it("run so many at once, the next in turn, and refuse what is too much", async () => {
+    const { runs, jobs } = handRunner();
+    const first = jobs.start(facts("a"));
+    const second = jobs.start(facts("b"));
+    expect([runs.length, second?.message, jobs.start(facts("c"))]).toEqual([1, "Waiting for its turn", null]);
+    runs[0]?.say("12 orders looked at", 0.5);
+    expect(jobs.find(first?.id ?? "")).toMatchObject({ state: "running", progress: 0.5, message: "12 orders looked at" });
+    runs[0]?.end(plan);
+    await settled();
+    expect(jobs.find(first?.id ?? "")).toMatchObject({ state: "done", planId: "plan of a", progress: 1 });
+    expect([runs.length, jobs.find(second?.id ?? "")?.message]).toEqual([2, "Planning"]);
+  });
+
+  it("are one job when the same is asked twice", () => {
+    const { runs, jobs } = handRunner();
+    expect(jobs.start(facts("a"))?.id).toBe(jobs.start(facts("a"))?.id);
+    expect(runs.length).toBe(1);
+  });
+
+  it("are ended by being cancelled, running or waiting, and let the next one in", async () => {
+    const { runs, jobs } = handRunner();
+    const first = jobs.start(facts("a"));
+    const second = jobs.start(facts("b"));
+    expect(jobs.cancel(second?.id ?? "")).toMatchObject({ state: "cancelled", planId: null });
+    expect(jobs.cancel(first?.id ?? "")?.state).toBe("cancelled");
+    await settled();
+    expect([runs[0]?.stopped, jobs.find(first?.id ?? "")?.state]).toEqual([true, "cancelled"]);
+    jobs.start(facts("c"));
+    expect(runs.length).toBe(2);
+    expect(jobs.cancel("nothing")).toBeUndefined();
+  });
+
+  it("fail when the plan cannot be stored, and stay so", async () => {
+    const { runs, jobs } = handRunner();
+    const job = jobs.start(facts("a", () => Promise.reject(new Error("the database is away"))));
+    runs[0]?.end(plan);
+    await settled();
+    expect(jobs.find(job?.id ?? "")).toMatchObject({ state: "failed", planId: null });
+    expect(jobs.cancel(job?.id ?? "")?.state).toBe("failed");
+  });
+
+  it("are forgotten, the oldest ended ones first", () => {
+    const { jobs } = handRunner();
+    const ids = ["1", "2", "3"].map((planId) => jobs.finished(planId).id);
+    expect(ids.map((id) => jobs.find(id)?.planId)).toEqual([undefined, "2", "3"]);
+  });
+});

@@ -1,0 +1,30 @@
+import { expect, it } from "vitest";
+import { builtInMaterials } from "@/bending/handbook/materials";
+import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
+import type { PlanTask } from "@/lib/jobs/planTask";
+import { bracketDocument } from "@/tests/integration/shop/bracketDocument";
+import { bracketMachine } from "@/tests/integration/shop/bracketMachine";
+import { bracketPunch } from "@/tests/integration/shop/bracketTools";
+import { inputsDigest } from "./inputsDigest";
+
+const machine = readMachineDocument(bracketMachine);
+if (!machine.ok) throw new Error("the machine can be read");
+const task: PlanTask = {
+  document: bracketDocument, material: builtInMaterials[0]!, tools: [bracketPunch], machine: machine.value, batch: 10, alternatives: 3, limitMs: 1000,
+};
+const digest = (changes: Partial<PlanTask>, engine = "1") => inputsDigest(engine, { ...task, ...changes });
+const pieces = (change: object) => ({ tools: [{ ...bracketPunch, pieces: bracketPunch.pieces.map((piece) => ({ ...piece, ...change })) }] });
+
+it("is the same for the same inputs, in whatever order their keys stand", () => {
+  const turned = Object.fromEntries(Object.entries(bracketDocument).reverse()) as unknown as PlanTask["document"];
+  expect(digest({ document: turned })).toBe(digest({}));
+  expect(digest(pieces({ rack: "elsewhere" }))).toBe(digest({}));
+});
+
+it("is another one for every change that a plan follows from", () => {
+  const all = [
+    digest({}), digest({}, "2"), digest({ batch: 11 }), digest({ document: { ...bracketDocument, thickness: 3 } }), digest({ tools: [] }),
+    digest(pieces({ length: 150 })), digest({ machine: { ...machine.value, fingers: 1 } as PlanTask["machine"] }), digest({ material: builtInMaterials[1]! }),
+  ];
+  expect(new Set(all).size).toBe(all.length);
+});
