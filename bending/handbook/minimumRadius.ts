@@ -10,14 +10,14 @@ const STEEL: readonly (readonly [number, readonly [number, number, number]])[] =
 const RIGHT_ANGLE_AND_A_THIRD = (120 * Math.PI) / 180 + 1e-9;
 
 /**
- * Smallest inside radius of steel by DIN 6935 (1975-10) across the rolling direction; beyond 120 degrees the
- * next thicker row. Null where the table has no row: other materials, or thicker than 20 mm.
+ * Smallest inside radius of steel by DIN 6935 (1975-10) across the rolling direction; along it, and beyond
+ * 120 degrees, the next thicker row. Null where the table has no row: other materials, or thicker than 20 mm.
  */
-export function minimumRadius(material: MaterialFacts, thickness: Mm, angle: Rad): MinimumRadius | null {
+export function minimumRadius(material: MaterialFacts, thickness: Mm, angle: Rad, alongGrain = false): MinimumRadius | null {
   if (material.group !== "steel") return null;
   const row = STEEL.findIndex(([upTo]) => thickness <= upTo);
-  const found = row < 0 ? undefined : STEEL[angle > RIGHT_ANGLE_AND_A_THIRD ? row + 1 : row];
+  const found = row < 0 ? undefined : STEEL[alongGrain || angle > RIGHT_ANGLE_AND_A_THIRD ? row + 1 : row];
   const column = material.tensile[0] <= 390 ? 0 : material.tensile[0] <= 490 ? 1 : material.tensile[0] <= 640 ? 2 : null;
   const radius = column === null ? undefined : found?.[1][column];
-  return radius === undefined ? null : { radius: mm(radius), source: "DIN 6935 (1975-10), across the rolling direction" };
+  return radius === undefined ? null : { radius: mm(radius), source: `DIN 6935 (1975-10), ${alongGrain ? "along" : "across"} the rolling direction` };
 }
