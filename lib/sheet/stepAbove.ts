@@ -2,7 +2,9 @@ import { applyFrame } from "@/bending/geometry/applyFrame";
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import { arrowShapes } from "./arrowShapes";
+import { bendOutlines } from "./bendOutlines";
 import { boundsOf } from "./boundsOf";
+import { createSheetFormat } from "./createSheetFormat";
 import type { Bounds } from "./clipToBox";
 import { faceOutlines, type FaceOutline } from "./faceOutlines";
 import { finishPicture } from "./finishPicture";
@@ -22,9 +24,10 @@ export function stepAbove(model: PlanModel, step: StepModel): StepPicture {
   const station = model.stations.find((entry) => entry.id === step.station);
   const shapes: PictureShape[] = [
     ...fingerShapes(model, step),
+    ...bendOutlines(model.part, before.frames, before.angles, look).map((points): PictureShape => ({ kind: "bend-zone", closed: true, points })),
     ...faces.map(({ face, points, holes }): PictureShape => ({ kind: face === step.hit.front ? "front-face" : "sheet-beyond", closed: true, points, holes })),
-    ...bendLines(model, step, before),
     ...(station ? [band(station.from, station.to)] : []),
+    ...bendLines(model, step, before),
     ...edgeShapes(model, step, before),
     ...arrowShapes([bounds[0] + lettering * 1.2, bounds[3] - lettering * 0.4], [bounds[0] + lettering * 1.2, bounds[3] - lettering * 2.4], lettering * 0.8),
   ];
@@ -76,9 +79,12 @@ function labelsOf(model: PlanModel, step: StepModel, faces: readonly FaceOutline
   return [
     { kind: "up", text: upSide(model, step), at: [(left + right) / 2, (top + bottom) / 2 + lettering * 0.7], anchor: "middle" },
     { kind: "front", text: "operator", at: [bounds[0] + lettering * 2.2, bounds[3] - lettering * 0.7], anchor: "start" },
-    ...step.fingers.slice(0, 1).map((finger): PictureLabel => ({ kind: "gauge", text: "gauge", at: [finger.z, -finger.x - lettering * 0.8], anchor: "middle" })),
+    { kind: "gauge", text: `X ${createSheetFormat(model.units).gauge(step.gaugeX)}`, at: [fingerMiddle(step), bounds[1] + lettering * 1.3], anchor: "middle" },
   ];
 }
+
+const fingerMiddle = ({ fingers, bendZ }: StepModel): number =>
+  fingers.length === 0 ? (bendZ[0] + bendZ[1]) / 2 : fingers.reduce((sum, finger) => sum + finger.z, 0) / fingers.length;
 
 function area(points: readonly Vec2[]): number {
   return Math.abs(points.reduce((sum, [x, y], i) => {

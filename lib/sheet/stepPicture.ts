@@ -1,6 +1,7 @@
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { ProfilePoint } from "@/bending/geometry/vec2";
 import { arrowShapes } from "./arrowShapes";
+import { bendOutlines } from "./bendOutlines";
 import { boundsOf } from "./boundsOf";
 import type { Bounds } from "./clipToBox";
 import { createSheetFormat } from "./createSheetFormat";
@@ -30,7 +31,7 @@ export function stepPicture(model: PlanModel, step: StepModel, moment: { readonl
   const cutAfter = sections(model, after, plane);
   const tools = toolShapes(model, step, after.tipHeight + moment.lift);
   const bounds = pictureBounds([...cutAfter, ...tools.near.map((shape) => shape.points)], cutBefore);
-  const lettering = Math.max(bounds[2] - bounds[0], bounds[3] - bounds[1]) * 0.045;
+  const lettering = letteringOf(bounds);
   const shapes: PictureShape[] = [
     ...tools.far,
     ...beyond(model, after),
@@ -43,6 +44,7 @@ export function stepPicture(model: PlanModel, step: StepModel, moment: { readonl
   return finishPicture([...shapes, ...marks.shapes], marks.labels, bounds, lettering);
 }
 
+const letteringOf = ([left, top, right, bottom]: Bounds): number => Math.max(right - left, bottom - top) * 0.045;
 const look = ([x, y]: readonly [number, number, number]): Vec2 => [x, -y];
 const placed = (profile: readonly ProfilePoint[], x: number, y: number): readonly Vec2[] => profile.map(([px, py]) => [px + x, -(py + y)]);
 
@@ -53,9 +55,11 @@ function sections(model: PlanModel, moment: StrokeMoment, plane: number): readon
 }
 
 function beyond(model: PlanModel, moment: StrokeMoment): readonly PictureShape[] {
-  return [...faceOutlines(model.part, moment.frames, 2, look)]
-    .sort((a, b) => a.depth - b.depth)
-    .map(({ points, holes }): PictureShape => ({ kind: "sheet-beyond", closed: true, points, holes }));
+  const faces = [...faceOutlines(model.part, moment.frames, 2, look)].sort((a, b) => a.depth - b.depth);
+  return [
+    ...bendOutlines(model.part, moment.frames, moment.angles, look).map((points): PictureShape => ({ kind: "bend-zone", closed: true, points })),
+    ...faces.map(({ points, holes }): PictureShape => ({ kind: "sheet-beyond", closed: true, points, holes })),
+  ];
 }
 
 function toolShapes(model: PlanModel, step: StepModel, tip: number): { far: readonly PictureShape[]; near: readonly PictureShape[] } {
@@ -78,10 +82,12 @@ function pictureBounds(whole: readonly (readonly Vec2[])[], flat: readonly (read
   const [flatLeft, , flatRight] = boundsOf(flat);
   const margin = 14;
   const clamp = (value: number): number => Math.max(-REACH_MM, Math.min(REACH_MM, value));
-  return [
+  const bounds: Bounds = [
     clamp(Math.min(left, flatLeft, -70) - margin), Math.max(top, -2 * REACH_MM) - margin,
     clamp(Math.max(right, flatRight, 70) + margin), bottom + margin,
   ];
+  // Room on the operator's side for the sign that tells which side is up.
+  return [bounds[0] - 4 * letteringOf(bounds), bounds[1], bounds[2], bounds[3]];
 }
 
 function edgeMark(model: PlanModel, step: StepModel, before: StrokeMoment): readonly PictureShape[] {
@@ -92,8 +98,9 @@ function edgeMark(model: PlanModel, step: StepModel, before: StrokeMoment): read
 function signs(model: PlanModel, step: StepModel, bounds: Bounds, lettering: number): { shapes: readonly PictureShape[]; labels: readonly PictureLabel[] } {
   const [left, top, right] = bounds;
   const thickness = model.part.thickness;
-  const at = left + lettering * 1.6;
+  const at = left + lettering * 1.1;
   const gauge = Math.min(step.gaugeX, right - lettering);
+  const small = gauge < lettering * 8;
   const format = createSheetFormat(model.units);
   return {
     shapes: [
@@ -102,7 +109,7 @@ function signs(model: PlanModel, step: StepModel, bounds: Bounds, lettering: num
     ],
     labels: [
       { kind: "up", text: upSide(model, step), at: [at + lettering * 0.8, -thickness - lettering * 1.6], anchor: "start" },
-      { kind: "gauge", text: `X ${format.gauge(step.gaugeX)}`, at: [gauge - lettering * 0.2, lettering * 2.6], anchor: gauge > right * 0.4 ? "end" : "start" },
+      { kind: "gauge", text: `X ${format.gauge(step.gaugeX)}`, at: [small ? gauge + lettering * 0.4 : gauge, lettering * (small ? 1.6 : 2.6)], anchor: small ? "start" : "end" },
       { kind: "front", text: "operator", at: [left + lettering * 0.6, top + lettering * 1.4], anchor: "start" },
       { kind: "note", text: "gauge", at: [right - lettering * 0.6, top + lettering * 1.4], anchor: "end" },
     ],
