@@ -1,0 +1,53 @@
+"use client";
+import { FileDown, Printer } from "lucide-react";
+import Link from "next/link";
+import { Notice } from "@/components/ui/Notice";
+import { PageHeader } from "@/components/ui/PageHeader";
+import { StateMark } from "@/components/ui/StateMark";
+import { buttonClasses } from "@/components/ui/buttonClasses";
+import { formatMoment } from "@/lib/format/formatMoment";
+import { useSheet } from "@/lib/queries/sheets";
+import type { SheetDetail } from "@/lib/schemas/views";
+import { ReleaseSheet } from "./ReleaseSheet";
+import { SheetPaper } from "./SheetPaper";
+import { sheetState } from "./sheetState";
+
+interface SheetScreenProps { readonly id: string; readonly mayRelease: boolean; readonly maySeePlans: boolean; readonly maySeeFloor: boolean }
+
+/** The office's view of a sheet: its state, releasing it, and the sheet itself as it will be printed. */
+export function SheetScreen({ id, ...may }: SheetScreenProps) {
+  const { data, error } = useSheet(id);
+  if (error) return <Notice tone="wrong" title="This sheet cannot be shown">{error.message}</Notice>;
+  if (!data) return <p className="py-10 text-ink-faint">Loading the setup sheet…</p>;
+  return (
+    <>
+      <SheetHead sheet={data} {...may} />
+      {data.latestRevision > data.revision ? (
+        <div className="mb-6"><Notice tone="caution" title={`The part has changed: revision ${data.latestRevision} is newer than this sheet’s revision ${data.revision}`}>Plan the new revision and release its sheet.</Notice></div>
+      ) : null}
+      <div className="border border-rule-strong bg-white p-6 shadow-[0_2px_0_var(--rule)]"><SheetPaper view={data.view} /></div>
+    </>
+  );
+}
+
+function SheetHead({ sheet, mayRelease, maySeePlans, maySeeFloor }: Omit<SheetScreenProps, "id"> & { readonly sheet: SheetDetail }) {
+  return (
+    <PageHeader kicker="Setup sheet" title={<><span className="num">{sheet.number}</span> {sheet.partName}</>} summary={sheetState[sheet.state].sentence}
+      actions={<>
+        {maySeePlans ? <Link href={`/plans/${sheet.planId}`} className={buttonClasses("quiet")}>Plan</Link> : null}
+        {sheet.state === "released" && maySeeFloor ? <Link href={`/floor/${sheet.id}`} className={buttonClasses("quiet")}>At the brake</Link> : null}
+        <Link href={`/print/${sheet.id}`} className={buttonClasses("plain")}><Printer aria-hidden />Print</Link>
+        <a href={`/api/sheets/${sheet.id}/pdf`} className={buttonClasses("plain")}><FileDown aria-hidden />PDF</a>
+        {mayRelease && sheet.state === "draft" ? <ReleaseSheet sheet={sheet} /> : null}
+      </>}
+      facts={[
+        { label: "State", value: <StateMark tone={sheetState[sheet.state].tone}>{sheet.state}</StateMark> },
+        { label: "Part", value: <Link href={`/parts/${sheet.partId}`} className="num underline">{sheet.partNumber}</Link> },
+        { label: "Revision", value: <span className="num">{sheet.revision}</span> },
+        { label: "Brake", value: sheet.machine },
+        { label: "Batch", value: <span className="num">{sheet.batch}</span> },
+        { label: "Made", value: formatMoment(sheet.createdAt) },
+        ...(sheet.releasedAt ? [{ label: "Released", value: `${formatMoment(sheet.releasedAt)} by ${sheet.releasedBy ?? "somebody who has left"}` }] : []),
+      ]} />
+  );
+}
