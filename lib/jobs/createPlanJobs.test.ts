@@ -3,6 +3,7 @@ import type { PlanDocument } from "@/bending/plan/planDocument";
 import { emptyPlan } from "@/bending/plan/emptyPlan";
 import { builtInMaterials } from "@/bending/handbook/materials";
 import { createPlanJobs } from "./createPlanJobs";
+import { PlanOverdue } from "./planOverdue";
 import type { PlanRunner } from "./planRunner";
 import type { PlanTask } from "./planTask";
 
@@ -68,6 +69,13 @@ describe("planning jobs", () => {
     await settled();
     expect(jobs.find(job?.id ?? "")).toMatchObject({ state: "failed", planId: null });
     expect(jobs.cancel(job?.id ?? "")?.state).toBe("failed");
+  });
+
+  it("say when the planner came to no end", async () => {
+    const jobs = createPlanJobs(() => ({ result: Promise.reject(new PlanOverdue(90)), stop: () => undefined }), { atOnce: 1, waitingMost: 1, rememberedMost: 2 });
+    const job = jobs.start(facts("a"));
+    await settled();
+    expect(jobs.find(job?.id ?? "")).toMatchObject({ state: "failed", message: expect.stringContaining("within 90 seconds") });
   });
 
   it("are forgotten, the oldest ended ones first", () => {

@@ -1,8 +1,11 @@
 import { randomUUID } from "node:crypto";
+import { PlanOverdue } from "./planOverdue";
 import type { PlanRun, PlanRunner } from "./planRunner";
 import type { PlanTask } from "./planTask";
 import type { PlanDocument } from "@/bending/plan/planDocument";
 import type { PlanJobView } from "@/lib/schemas/views";
+
+const BROKE_OFF = "Planning broke off. Nothing was stored; start it again. The server's log has the reason.";
 
 export interface PlanJobFacts {
   /** Two jobs of one key at once are one job. */
@@ -69,7 +72,7 @@ export function createPlanJobs(runner: PlanRunner, limits: PlanJobLimits): PlanJ
     job.run = null;
     if (job.view.state !== "running") return;
     console.error(`planning job ${job.view.id}:`, thrown);
-    change(job, { state: "failed", message: "Planning broke off. Nothing was stored; start it again. The server's log has the reason." });
+    change(job, { state: "failed", message: thrown instanceof PlanOverdue ? thrown.message : BROKE_OFF });
   };
 
   return {

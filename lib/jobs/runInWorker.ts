@@ -1,4 +1,5 @@
 import { Worker } from "node:worker_threads";
+import { PlanOverdue } from "./planOverdue";
 import type { PlanRunner } from "./planRunner";
 import type { PlanWorkerMessage } from "./planWorkerMessage";
 import type { PlanDocument } from "@/bending/plan/planDocument";
@@ -11,7 +12,7 @@ export const runInWorker: PlanRunner = (task, onProgress) => {
   const worker = new Worker(new URL("./planWorker.ts", import.meta.url), { workerData: task });
   const result = new Promise<PlanDocument>((resolve, reject) => {
     const timer = setTimeout(() => {
-      reject(new Error("the planning thread did not end in time"));
+      reject(new PlanOverdue((task.limitMs + GRACE_MS) / 1000));
       void worker.terminate();
     }, task.limitMs + GRACE_MS);
     worker.on("message", (message: PlanWorkerMessage) => {
