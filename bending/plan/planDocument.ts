@@ -72,6 +72,8 @@ export interface PlanGauge {
   readonly fingers: readonly { readonly x: number; readonly r: number; readonly z: number }[];
   readonly face: string;
   readonly edge: number;
+  /** What the fingers touch: an edge of a level face, or the outside of an upright one; absent when nothing is touched. */
+  readonly on?: "edge" | "face";
 }
 
 export interface PlanStation {

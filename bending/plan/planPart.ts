@@ -1,12 +1,10 @@
-import { emptyPlan } from "./emptyPlan";
 import type { PlanDocument } from "./planDocument";
 import type { PlanRequest } from "./planRequest";
+import { solvePlan } from "./solvePlan";
 
 /** Order, tools, stations and gauge of a part on a machine, with the proof or the reasons. */
 export function planPart(request: PlanRequest): PlanDocument {
-  const { document, machine, batch } = request;
-  return emptyPlan({
-    part: document.name, machine: machine.name, units: document.units, batch,
-    status: "unknown", method: "nothing searched", reasons: [],
-  });
+  const started = request.now?.() ?? 0;
+  const plan = solvePlan(request);
+  return { ...plan, elapsedMs: (request.now?.() ?? 0) - started };
 }

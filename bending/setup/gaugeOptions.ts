@@ -41,7 +41,8 @@ export function gaugeOptions(part: PartModel, hit: Hit, machine: Machine, punch:
     zones: zonesInMachine(part, hit, frames),
     thickness: part.thickness,
   };
-  return joined(contacts.filter((contact) => inTravel(contact, gauge)))
+  const touching = contacts.map((contact) => ({ ...contact, x: contact.x + (Math.abs(contact.slope) * gauge.fingerWidth) / 2 }));
+  return joined(touching.filter((contact) => inTravel(contact, gauge)))
     .map((contact) => ({ ...contact, free: clearOf(contact, gauge, fingers, obstacles) }))
     .filter((option) => option.free.length > 0)
     .sort((a, b) => rank(a, gauge) - rank(b, gauge) || nearest(a) - nearest(b) || a.face - b.face || a.edge - b.edge);
@@ -61,7 +62,11 @@ const rank = (option: GaugeOption, gauge: BackGauge) => {
 
 const nearest = (option: GaugeOption) => Math.min(...option.free.map(([z]) => option.x + option.slope * z));
 
-const inTravel = (contact: Contact, { x, r }: BackGauge) => contact.x >= x[0] && contact.x <= x[1] && contact.r >= r[0] && contact.r <= r[1];
+/** X travel holds for every finger: at both ends of a slanted edge. */
+function inTravel(contact: Contact, { x, r }: BackGauge): boolean {
+  const ends = contact.z.map((z) => contact.x + contact.slope * z);
+  return ends.every((at) => at >= x[0] && at <= x[1]) && contact.r >= r[0] - MEANT_CONTACT_MM && contact.r <= r[1] + MEANT_CONTACT_MM;
+}
 
 /** Contacts at one depth and height are one choice: fingers may stand at different edges then. */
 function joined(contacts: readonly Contact[]): readonly (Contact & { readonly spans: readonly Interval[] })[] {
@@ -91,7 +96,7 @@ function clearOf(contact: Contact & { readonly spans: readonly Interval[] }, gau
   const blocked: Interval[] = [];
   const ends = contact.slope === 0 ? [0] : [contact.z[0], (contact.z[0] + contact.z[1]) / 2, contact.z[1]];
   for (const z of ends) {
-    const at = contact.x + contact.slope * z + Math.abs(contact.slope) * half;
+    const at = contact.x + contact.slope * z;
     for (const met of fingers.flatMap((finger) => meets(finger.map((p): Vec2 => [p[0] + at, p[1] + contact.r]), obstacles))) {
       if (contact.slope === 0) blocked.push([met[0] - half, met[1] + half]);
       else if (Math.max(met[0], z - half) < Math.min(met[1], z + half)) blocked.push([z - half, z + half]);

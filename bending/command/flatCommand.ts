@@ -1,0 +1,30 @@
+import { mmPer } from "../core/units";
+import { flatPattern } from "../part/flatPattern";
+import type { PartDocument } from "../part/partDocument";
+import type { PartModel } from "../part/partModel";
+import { flatLength } from "../plan/flatLength";
+import { planFlat } from "../plan/planFlat";
+import { rounded } from "../plan/rounded";
+import type { CommandOutcome } from "./outcome";
+
+/** The flat pattern: numbers as in a plan, and the outline, holes and bend lines to cut and to bend by. */
+export function flatCommand(document: PartDocument, part: PartModel): CommandOutcome {
+  const flat = planFlat(part, document.units);
+  const pattern = flatPattern(part);
+  const point = (p: readonly [number, number]) => [rounded(p[0] / mmPer(document.units)), rounded(p[1] / mmPer(document.units))];
+  return {
+    exitCode: 0,
+    error: null,
+    json: {
+      part: part.name,
+      units: document.units,
+      material: part.material.id,
+      flatLength: flatLength(document, flat),
+      ...flat,
+      bends: flat.bends.map((bend, index) => ({ ...bend, radiusSource: part.bends[index]?.radiusSource })),
+      outline: pattern.outline.map(point),
+      holes: pattern.holes.map((hole) => hole.map(point)),
+      bendLines: pattern.bendLines.map(({ id, line, angle, direction }) => ({ id, line: line.map(point), angle: rounded((angle * 180) / Math.PI), direction })),
+    },
+  };
+}

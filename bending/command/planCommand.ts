@@ -1,0 +1,51 @@
+import { materialById } from "../handbook/materials";
+import type { PartDocument } from "../part/partDocument";
+import type { PartModel } from "../part/partModel";
+import { checkOrder } from "../plan/checkOrder";
+import { planPart } from "../plan/planPart";
+import type { PlanRequest } from "../plan/planRequest";
+import { readOrder } from "../plan/readOrder";
+import { readMachineDocument } from "../tooling/readMachineDocument";
+import { readToolingDocument } from "../tooling/readToolingDocument";
+import { wrongInput, type CommandOutcome, type CommandWorld } from "./outcome";
+import { problemLine, readJsonFile } from "./readJsonFile";
+import type { Arguments } from "./readArguments";
+import { readNumber } from "./readNumber";
+
+const DEFAULT_BATCH = 1;
+const DEFAULT_SECONDS = 60;
+
+/** `plan` and `check`: the plan document; exit code 3 when there is none, 4 when the time ran out before one was found. */
+export function planCommand({ verb, options }: Arguments, document: PartDocument, part: PartModel, world: CommandWorld): CommandOutcome {
+  const tooling = options.get("--tooling");
+  const machineFile = options.get("--machine");
+  if (tooling === undefined) return wrongInput("--tooling: name the tooling document");
+  if (machineFile === undefined) return wrongInput("--machine: name the machine document");
+  const tools = readJsonFile(world, tooling, readToolingDocument);
+  if (!tools.ok) return wrongInput(tools.error);
+  const machine = readJsonFile(world, machineFile, readMachineDocument);
+  if (!machine.ok) return wrongInput(machine.error);
+  const batch = readNumber(options, "--batch", DEFAULT_BATCH, { least: 1, most: 1_000_000, whole: true });
+  if (!batch.ok) return wrongInput(batch.error);
+  const alternatives = readNumber(options, "--alternatives", 0, { least: 0, most: 20, whole: true });
+  if (!alternatives.ok) return wrongInput(alternatives.error);
+  const limit = readNumber(options, "--time-limit", DEFAULT_SECONDS, { least: 0, most: 86_400, whole: false });
+  if (!limit.ok) return wrongInput(limit.error);
+  const end = world.now() + limit.value * 1000;
+  const request: PlanRequest = {
+    document, materials: materialById, tools: tools.value, machine: machine.value, batch: batch.value, alternatives: alternatives.value,
+    now: world.now, shouldStop: () => world.now() > end,
+  };
+  if (verb === "plan") return outcomeOf(planPart(request));
+  const text = options.get("--order");
+  if (text === undefined) return wrongInput("--order: give the bends in order, e.g. b2,b1 (bends of one stroke joined with +)");
+  const order = text.split(",").map((entry) => entry.trim());
+  const known = readOrder(part, order);
+  if (!known.ok) return wrongInput(problemLine("--order", known.error));
+  return outcomeOf(checkOrder({ ...request, order }));
+}
+
+function outcomeOf(plan: ReturnType<typeof planPart>): CommandOutcome {
+  const exitCode = plan.status === "infeasible" ? 3 : plan.status === "unknown" ? 4 : 0;
+  return { exitCode, json: plan, error: null };
+}

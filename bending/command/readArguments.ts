@@ -1,0 +1,32 @@
+import { fail, ok, type Result } from "../core/result";
+
+export interface Arguments {
+  readonly verb: string;
+  readonly file: string;
+  readonly options: ReadonlyMap<string, string>;
+}
+
+/** `VERB FILE --name value ...`; the options that the verb takes are given. */
+export function readArguments(args: readonly string[], known: Readonly<Record<string, readonly string[]>>): Result<Arguments, string> {
+  const [verb, ...rest] = args;
+  const verbs = Object.keys(known).join(", ");
+  if (verb === undefined) return fail(`verb: say what to do: ${verbs}`);
+  const allowed = Object.hasOwn(known, verb) ? known[verb] : undefined;
+  if (allowed === undefined) return fail(`verb: "${verb}" is not known; there are ${verbs}`);
+  const options = new Map<string, string>();
+  const files: string[] = [];
+  for (let i = 0; i < rest.length; i += 1) {
+    const word = rest[i] ?? "";
+    if (!word.startsWith("--")) { files.push(word); continue; }
+    const [name, inline] = word.split("=", 2);
+    if (name === undefined || !allowed.includes(name)) return fail(`${word}: not an option of ${verb}; it takes ${allowed.length > 0 ? allowed.join(", ") : "none"}`);
+    const value = inline ?? rest[(i += 1)];
+    if (value === undefined || value === "") return fail(`${name}: a value is missing after it`);
+    if (options.has(name)) return fail(`${name}: given twice`);
+    options.set(name, value);
+  }
+  const file = files[0];
+  if (file === undefined) return fail("PART.json: name the part document");
+  if (files.length > 1) return fail(`${files[1]}: one part document at a time`);
+  return ok({ verb, file, options });
+}

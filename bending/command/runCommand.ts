@@ -1,0 +1,22 @@
+import { builtInMaterials, materialById } from "../handbook/materials";
+import { buildPart } from "../part/buildPart";
+import { readPartDocument } from "../part/readPartDocument";
+import { flatCommand } from "./flatCommand";
+import { wrongInput, type CommandOutcome, type CommandWorld } from "./outcome";
+import { planCommand } from "./planCommand";
+import { problemLine, readJsonFile } from "./readJsonFile";
+import { readArguments } from "./readArguments";
+
+const PLANNING = ["--tooling", "--machine", "--batch", "--alternatives", "--time-limit"];
+const VERBS = { flat: [], plan: PLANNING, check: [...PLANNING, "--order"] } as const;
+
+/** The command line as a function of its arguments and files: flat, plan, check. */
+export function runCommand(args: readonly string[], world: CommandWorld): CommandOutcome {
+  const given = readArguments(args, VERBS);
+  if (!given.ok) return wrongInput(given.error);
+  const document = readJsonFile(world, given.value.file, readPartDocument);
+  if (!document.ok) return wrongInput(document.error);
+  const built = buildPart(document.value, { materials: materialById, knownMaterials: builtInMaterials.map(({ id }) => id) });
+  if (!built.ok) return wrongInput(problemLine(given.value.file, built.error));
+  return given.value.verb === "flat" ? flatCommand(document.value, built.value) : planCommand(given.value, document.value, built.value, world);
+}

@@ -1,0 +1,63 @@
+import { toDeg } from "../core/units";
+import { advisedFlange, minimumFlange } from "../handbook/minimumFlange";
+import { minimumRadius } from "../handbook/minimumRadius";
+import { formatLength } from "../part/formatLength";
+import { flatPattern } from "../part/flatPattern";
+import type { Layout } from "../setup/layout";
+import type { OrderStep } from "../order/orderProblem";
+import { formatBends } from "./formatBends";
+import type { PlanReason, PlanStep } from "./planDocument";
+import type { Situation } from "./situation";
+import { sheetReach } from "./sheetReach";
+
+/** kg. One person's lift under the best conditions: NIOSH load constant, 51 lb. */
+const LIFT_LIMIT_KG = 23;
+/** Part of a rating above which the step says so. Common practice, no source. */
+const NEAR_RATING = 0.8;
+/** mm. Sheet in front of the die that whips up far enough to strike. Common practice, no source. */
+const WHIP_UP_MM = 400;
+
+/** What a person should know before making this plan; none of it forbids it. */
+export function cautionsOf(situation: Situation, layout: Layout, orderSteps: readonly OrderStep[], steps: readonly PlanStep[]): readonly PlanReason[] {
+  const { part, units } = situation;
+  const cautions: PlanReason[] = [];
+  const say = (kind: PlanReason["kind"], bends: readonly string[], tools: readonly string[], message: string) =>
+    cautions.push({ kind, bends, faces: [], tools, message });
+  const { massKg } = flatPattern(part);
+  if (massKg > LIFT_LIMIT_KG) say("lift", [], [], `the blank weighs ${massKg.toFixed(1)} kg; above ${LIFT_LIMIT_KG} kg (NIOSH load constant) plan for two people or a support`);
+  for (const bend of part.bends) {
+    const least = minimumRadius(part.material, part.thickness, bend.angle);
+    if (least && bend.insideRadius < least.radius - 1e-6 && !bend.hem) {
+      say("radius", [bend.id], [], `bend ${bend.id} has ${formatLength(bend.insideRadius, units)} inside; ${least.source} gives ${formatLength(least.radius, units)} at least for ${part.material.id}`);
+    }
+  }
+  orderSteps.forEach((orderStep, index) => {
+    const step = steps[index];
+    if (step) stepCautions(situation, layout, orderStep, step, say);
+  });
+  return cautions;
+}
+
+type Say = (kind: PlanReason["kind"], bends: readonly string[], tools: readonly string[], message: string) => void;
+
+function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep, step: PlanStep, say: Say): void {
+  const { part, machine, moves, pairs, fits, units } = situation;
+  const move = moves[orderStep.move];
+  const pair = pairs[layout.stations[orderStep.station]?.pair ?? -1];
+  const bend = part.bends[move?.bends[0] ?? -1];
+  const fit = fits[move?.bends[0] ?? -1]?.[pair?.index ?? -1];
+  if (!move || !pair || !bend || !fit?.ok) return;
+  const name = formatBends(step.bends);
+  for (const wish of fit.wishes) say(wish.kind, step.bends, wish.tools, wish.message);
+  if (step.gauge.fingers.length === 0) say("gauge", step.bends, [], `${name}: nothing behind the die is straight enough for the back gauge; mark the bend line or use a stop`);
+  if (step.gauge.fingers.length === 1) say("gauge", step.bends, [], `${name}: only one gauge finger can touch; hold the sheet square by hand or use a side stop`);
+  if (step.forceKN > NEAR_RATING * machine.maxForce) say("force", step.bends, [], `${name}: ${step.forceKN.toFixed(0)} kN of ${machine.maxForce.toFixed(0)} kN that ${machine.name} has`);
+  const rating = Math.min(pair.punch.maxForcePerMetre, pair.die.maxForcePerMetre);
+  if (fit.force > NEAR_RATING * rating) say("tool-force", step.bends, [pair.punch.id, pair.die.id], `${name}: ${fit.force.toFixed(0)} kN/m of the ${rating.toFixed(0)} kN/m that the tools bear`);
+  const reach = sheetReach(part, { bends: move.bends, front: move.front, formed: orderStep.formed });
+  if (reach.front > WHIP_UP_MM) say("whip-up", step.bends, [], `${name}: ${formatLength(Math.round(reach.front), units)} of sheet swings up ${(toDeg(bend.angle) / 2).toFixed(0)}° in front; stand clear, support it from behind the swing`);
+  const setback = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2) - bend.allowance / 2;
+  const flange = Math.min(reach.front, reach.back) + setback;
+  const advised = Math.max(advisedFlange(pair.die.vOpening), minimumFlange(bend.angle, pair.die));
+  if (flange < advised) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
+}

@@ -1,0 +1,116 @@
+import type { Hit } from "../clearance/hit";
+import { hitSides } from "../clearance/hitSides";
+import type { Interval } from "../geometry/interval";
+import { fingerMeetsTools } from "../setup/fingerMeetsTools";
+import type { GaugeOption } from "../setup/gaugeOption";
+import { gaugeOptions } from "../setup/gaugeOptions";
+import type { Tool } from "../tooling/tool";
+import { sheetReach } from "./sheetReach";
+import type { Situation } from "./situation";
+import type { ToolPair } from "./toolPair";
+
+/** The yes-or-no questions of a search, each answered once. */
+export interface StepChecks {
+  readonly hitOf: (move: number, formed: number) => Hit;
+  /** Can the pair form these bends now, given room on the bed? */
+  readonly possible: (move: number, formed: number, pair: number) => boolean;
+  /** Where the tool must not stand while the move is made, z from the line's middle. */
+  readonly forbidden: (move: number, formed: number, pair: number, obstacle: Tool) => readonly Interval[];
+  /** Ways to gauge the sheet that clear the tools of the pair, best first. */
+  readonly gauges: (move: number, formed: number, pair: number) => readonly GaugeOption[];
+  /** Do all pairs that fit gauge this move alike? */
+  readonly gaugesAgree: (move: number, formed: number) => boolean;
+  /** Unmet wishes of the pair for the move. */
+  readonly wishes: (move: number, pair: number) => number;
+}
+
+export function createStepChecks(situation: Situation): StepChecks {
+  const { part, machine, moves, pairs, clearance, fits } = situation;
+  const moveOf = (move: number) => must(moves[move]);
+  const pairOf = (pair: number): ToolPair => must(pairs[pair]);
+  const hitOf = (move: number, formed: number): Hit => ({ bends: moveOf(move).bends, front: moveOf(move).front, formed });
+  const behind = moves.map((move) => bendsBehind(situation, { bends: move.bends, front: move.front, formed: 0 }));
+  const state = (move: number, formed: number) => formed * moves.length + move;
+
+  const possible = remember((move, formed, pair) => {
+    const { punch, die } = pairOf(pair);
+    let force = 0;
+    let needed = 0;
+    for (const bend of moveOf(move).bends) {
+      const fit = fits[bend]?.[pair];
+      if (!fit?.ok) return false;
+      force = fit.force;
+      needed = Math.max(needed, fit.reach);
+    }
+    if ((force * moveOf(move).bentLength) / 1000 > machine.maxForce) return false;
+    const reach = sheetReach(part, hitOf(move, formed));
+    if (Math.min(reach.front, reach.back) < needed) return false;
+    return clearance.blocked(hitOf(move, formed), punch, die).length === 0;
+  });
+  const intervals = new Map<string, Map<number, readonly Interval[]>>();
+  const allGauges = new Map<number, readonly GaugeOption[]>();
+  const fingers = new Map<string, boolean>();
+  const meets = (option: GaugeOption, { index, punch, die }: ToolPair): boolean => {
+    const ends = [option.free[0]?.[0] ?? 0, option.free[option.free.length - 1]?.[1] ?? 0];
+    return ends.some((z) => {
+      const x = option.x + option.slope * z;
+      const key = `${index}/${x.toFixed(3)}/${option.r.toFixed(3)}`;
+      const known = fingers.get(key) ?? fingerMeetsTools(x, option.r, part.thickness, punch, die, machine);
+      fingers.set(key, known);
+      return known;
+    });
+  };
+  const gauges = (move: number, formed: number, pair: number): readonly GaugeOption[] => {
+    const hidden = formed & (behind[move] ?? 0);
+    const key = state(move, hidden);
+    const any = pairOf(0);
+    const found = allGauges.get(key) ?? gaugeOptions(part, hitOf(move, hidden), machine, any.punch, any.die);
+    allGauges.set(key, found);
+    return found.filter((option) => !meets(option, pairOf(pair)));
+  };
+  return {
+    hitOf,
+    possible,
+    gauges,
+    gaugesAgree: (move, formed) => {
+      const usable = pairs.filter(({ index }) => moveOf(move).bends.every((bend) => fits[bend]?.[index]?.ok));
+      const first = usable.map(({ index }) => gauges(move, formed, index)[0]);
+      return first.every((option) => option === first[0]);
+    },
+    forbidden: (move, formed, pair, obstacle) => {
+      const name = `${pair}/${obstacle.kind}/${obstacle.id}`;
+      const known = intervals.get(name) ?? new Map<number, readonly Interval[]>();
+      intervals.set(name, known);
+      const key = state(move, formed);
+      const found = known.get(key) ?? clearance.forbidden(hitOf(move, formed), pairOf(pair).punch, pairOf(pair).die, obstacle);
+      known.set(key, found);
+      return found;
+    },
+    wishes: (move, pair) => moveOf(move).bends.reduce((sum, bend) => {
+      const fit = fits[bend]?.[pair];
+      return sum + (fit?.ok ? fit.wishes.length : 0);
+    }, 0),
+  };
+
+  function remember(ask: (move: number, formed: number, pair: number) => boolean) {
+    const known = pairs.map(() => new Map<number, boolean>());
+    return (move: number, formed: number, pair: number): boolean => {
+      const answers = must(known[pair]);
+      const key = state(move, formed);
+      const answer = answers.get(key) ?? ask(move, formed, pair);
+      answers.set(key, answer);
+      return answer;
+    };
+  }
+}
+
+/** The bends that say how the sheet behind the line looks: only they matter to the gauge. */
+function bendsBehind({ part }: Situation, hit: Hit): number {
+  const front = hitSides(part, hit);
+  return part.bends.reduce((mask, bend, index) => (!hit.bends.includes(index) && !front[bend.parent] && !front[bend.child] ? mask | (1 << index) : mask), 0);
+}
+
+function must<T>(value: T | undefined): T {
+  if (value === undefined) throw new Error("invariant: a move or pair of the situation");
+  return value;
+}

@@ -1,0 +1,60 @@
+import { ANY_GAUGE, type OrderProblem, type StepOption } from "../order/orderProblem";
+import { freeShifts } from "../setup/freeShifts";
+import type { StepChecks } from "./createStepChecks";
+import { fingerCount } from "./fingerCount";
+import { gaugeDemerits } from "./gaugeDemerits";
+import type { GaugeNumbers } from "./gaugeNumbers";
+import type { Situation } from "./situation";
+
+/**
+ * The order question with the bed left out: every stroke has the best pair and the shortest station that real
+ * pieces make, alone on the bed and without a walk. No plan costs less a part; if it has no order, none has.
+ */
+export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): OrderProblem {
+  const { moves, pairs, machine, part, allowed, runs } = situation;
+  const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
+    const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));
+    return { punch: least(punch), die: least(die) };
+  }));
+  const withPair = (move: number, formed: number, pair: number): StepOption | null => {
+    const length = shortest[move]?.[pair];
+    const tools = pairs[pair];
+    if (!length || !tools || !Number.isFinite(length.punch) || !Number.isFinite(length.die) || !checks.possible(move, formed, pair)) return null;
+    const reach = Math.min(length.punch, length.die) / 2 - (moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd;
+    const shifts = freeShifts(reach, [
+      { offset: 0, length: length.punch, forbidden: checks.forbidden(move, formed, pair, tools.punch) },
+      { offset: 0, length: length.die, forbidden: checks.forbidden(move, formed, pair, tools.die) },
+    ]);
+    if (shifts.length === 0) return null;
+    const gauge = checks.gauges(move, formed, pair)[0];
+    const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
+    return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };
+  };
+  const known = new Map<number, StepOption | null>();
+  return {
+    bends: part.bends.length,
+    moves,
+    stations: 1,
+    times: machine.times,
+    walk: () => 0,
+    option: (move, formed) => {
+      if (!allowed(move, formed)) return null;
+      const key = formed * moves.length + move;
+      const answer = known.get(key);
+      if (answer !== undefined) return answer;
+      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), checks.gaugesAgree(move, formed));
+      known.set(key, best);
+      return best;
+    },
+  };
+}
+
+/** The option of least demerit; its gauge is left open when not every pair would gauge alike. */
+function bestOf(pairs: number, option: (pair: number) => StepOption | null, gaugesAgree: boolean): StepOption | null {
+  let best: StepOption | null = null;
+  for (let pair = 0; pair < pairs && best?.demerit !== 0; pair += 1) {
+    const found = option(pair);
+    if (found && (best === null || found.demerit < best.demerit)) best = found;
+  }
+  return best === null || gaugesAgree ? best : { ...best, gauge: ANY_GAUGE };
+}

@@ -1,0 +1,95 @@
+import { MEANT_CONTACT_MM } from "../core/tolerance";
+import { mm, toDeg, type LengthUnit } from "../core/units";
+import { airBendForce } from "../handbook/airBendForce";
+import { minimumFlange } from "../handbook/minimumFlange";
+import { naturalRadius } from "../handbook/naturalRadius";
+import { springback } from "../handbook/springback";
+import { vOpeningRule } from "../handbook/vOpeningRule";
+import { formatLength } from "../part/formatLength";
+import type { Bend, PartModel } from "../part/partModel";
+import type { RunsOf } from "../setup/createRuns";
+import type { FitProblem, ToolFit } from "./situation";
+import type { ToolPair } from "./toolPair";
+
+/** How far the natural radius (or the V, where no radius is asked for) may be off before it counts as a wish unmet. Common practice, no source. */
+const WISHED_RATIO = 1.5;
+/** Degrees. Angles this near are the same to a tool. */
+const SAME_ANGLE_DEG = 0.05;
+
+export interface FitQuestion {
+  readonly part: PartModel;
+  readonly runs: RunsOf;
+  readonly units: LengthUnit;
+  /** The V whose natural radius the bend was given, when its radius follows from the die. */
+  readonly vOpening: number | null;
+}
+
+/** Whether a bend can be formed by a pair, apart from order and clearance; the first thing that is wrong, else. */
+export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): ToolFit {
+  const { part } = question;
+  const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
+  const force = airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening);
+  const problem = radiusProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
+    ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
+  if (problem) return { ok: false, problem };
+  const tangentToApex = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2);
+  const held = minimumFlange(bend.angle, pair.die) - tangentToApex + bend.allowance / 2;
+  return { ok: true, wishes: wishes(question, bend, pair), demanded, force, reach: mm(Math.max(pair.die.vOpening / 2, held)) };
+}
+
+function radiusProblem({ part, units, vOpening }: FitQuestion, bend: Bend, { die }: ToolPair): FitProblem | null {
+  if (vOpening === null || bend.radiusSource === "document" || Math.abs(die.vOpening - vOpening) < 1e-6) return null;
+  const gives = naturalRadius(part.material, die.vOpening);
+  return {
+    kind: "no-die", tools: [die.id], off: Math.abs(Math.log(die.vOpening / vOpening)),
+    message: `the flat of bend ${bend.id} is for the inside radius ${formatLength(bend.insideRadius, units)} of a V ${formatLength(vOpening, units)}; ${die.id} gives ${formatLength(gives, units)}`,
+  };
+}
+
+function angleProblem(bend: Bend, demanded: number, { punch, die }: ToolPair): FitProblem | null {
+  const included = 180 - demanded;
+  const sharp = Math.max(toDeg(punch.tipAngle), toDeg(die.vAngle));
+  if (included >= sharp - SAME_ANGLE_DEG) return null;
+  const tool = toDeg(punch.tipAngle) > toDeg(die.vAngle) ? punch : die;
+  return {
+    kind: "angle", tools: [tool.id], off: (sharp - included) / 180,
+    message: `bend ${bend.id} is taken to ${(180 - demanded).toFixed(1)}° included (${toDeg(bend.angle).toFixed(1)}° turned and its springback); ` +
+      `${tool.id} has ${sharp.toFixed(1)}°, ${Math.max(0, included).toFixed(1)}° or less is needed`,
+  };
+}
+
+function forceProblem(force: number, { punch, die }: ToolPair): FitProblem | null {
+  const weak = punch.maxForcePerMetre < die.maxForcePerMetre ? punch : die;
+  if (force <= weak.maxForcePerMetre) return null;
+  return { kind: "tool-force", tools: [weak.id], off: force / weak.maxForcePerMetre - 1, message: `${weak.id} is rated ${weak.maxForcePerMetre.toFixed(0)} kN/m; this V needs ${force.toFixed(0)} kN/m` };
+}
+
+function piecesProblem({ runs, units }: FitQuestion, bend: Bend, { punch, die }: ToolPair): FitProblem | null {
+  const [[ax, ay], [bx, by]] = bend.line;
+  const length = Math.hypot(bx - ax, by - ay);
+  const short = [punch, die].find((tool) => runs(tool, length).length === 0);
+  if (short === undefined) return null;
+  const have = short.pieces.reduce((sum, piece) => sum + piece.length, 0);
+  return {
+    kind: "sections", tools: [short.id], off: length / Math.max(1, have),
+    message: `bend ${bend.id} is ${formatLength(length, units)} long; the pieces of ${short.id} in service make ${formatLength(have, units)} together`,
+  };
+}
+
+function wishes({ part, units, vOpening }: FitQuestion, bend: Bend, { punch, die }: ToolPair): readonly FitProblem[] {
+  const found: FitProblem[] = [];
+  const asked = bend.radiusSource === "document";
+  const gives = naturalRadius(part.material, die.vOpening);
+  const ratio = asked ? gives / Math.max(bend.insideRadius, 1e-6) : die.vOpening / vOpeningRule(part.thickness);
+  const off = Math.abs(Math.log(ratio));
+  if (off > Math.log(WISHED_RATIO) && asked) {
+    found.push({ kind: "radius", tools: [die.id], off, message: `${die.id} gives bend ${bend.id} an inside radius of about ${formatLength(gives, units)}; ${formatLength(bend.insideRadius, units)} is asked for, the natural radius of a V ${formatLength(bend.insideRadius / part.material.naturalRadiusRatio, units)}` });
+  }
+  if (off > Math.log(WISHED_RATIO) && !asked && vOpening !== null) {
+    found.push({ kind: "tool-choice", tools: [die.id], off, message: `${die.id} has a V of ${formatLength(die.vOpening, units)}; the usual one for ${formatLength(part.thickness, units)} is ${formatLength(vOpeningRule(part.thickness), units)}` });
+  }
+  if (punch.tipRadius > bend.insideRadius + MEANT_CONTACT_MM) {
+    found.push({ kind: "radius", tools: [punch.id], off: punch.tipRadius - bend.insideRadius, message: `the tip of ${punch.id} has a radius of ${formatLength(punch.tipRadius, units)}; bend ${bend.id} asks for ${formatLength(bend.insideRadius, units)} inside` });
+  }
+  return found;
+}

@@ -1,0 +1,51 @@
+import { cautionsOf } from "./cautionsOf";
+import type { StepChecks } from "./createStepChecks";
+import { PLAN_ENGINE } from "./emptyPlan";
+import { planFlat } from "./planFlat";
+import type { PlanDocument, PlanFlat } from "./planDocument";
+import { rounded } from "./rounded";
+import type { Situation } from "./situation";
+import type { Candidate } from "./solveVariant";
+import { writeStation } from "./writeStation";
+import { writeStep } from "./writeStep";
+
+export interface PlanFrame {
+  readonly batch: number;
+  readonly expanded: number;
+  readonly method: string;
+  /** Seconds that no plan considered goes below. */
+  readonly bound: number;
+  readonly flatLength: (flat: PlanFlat) => number;
+}
+
+/** A candidate as a plan document, optimal when its total is the bound. */
+export function writePlan(situation: Situation, checks: StepChecks, candidate: Candidate, frame: PlanFrame): PlanDocument {
+  const { layout, steps } = candidate;
+  const { part, machine, units } = situation;
+  const written = steps.map((step, index) => writeStep(situation, checks, layout, step, steps[index - 1] ?? null));
+  const flat = planFlat(part, units);
+  const seconds = { setup: rounded(layout.setupSeconds), perPart: rounded(candidate.perPart), total: rounded(layout.setupSeconds + candidate.perPart * frame.batch) };
+  const bound = Math.min(seconds.total, rounded(frame.bound));
+  const gap = seconds.total - bound < 1e-6 ? 0 : rounded((seconds.total - bound) / seconds.total);
+  return {
+    format: "plan/1",
+    engine: PLAN_ENGINE,
+    units,
+    part: part.name,
+    machine: machine.name,
+    batch: frame.batch,
+    status: gap === 0 ? "optimal" : "feasible",
+    gap,
+    flat,
+    flatLength: frame.flatLength(flat),
+    steps: written,
+    order: written.map((step) => step.bends.join("+")),
+    stations: layout.stations.map((station, index) => writeStation(situation, station, index)),
+    seconds,
+    cost: seconds.total,
+    proof: { method: frame.method, expanded: frame.expanded, bound },
+    reasons: [],
+    cautions: cautionsOf(situation, layout, steps, written),
+    elapsedMs: 0,
+  };
+}
