@@ -1,0 +1,18 @@
+export interface ToolDraft {
+  readonly code: string;
+  readonly name: string;
+  readonly kind: "punch" | "die";
+  readonly angle: string;
+  readonly radius: string;
+  readonly vOpening: string;
+  readonly height: string;
+  readonly bodyWidth: string;
+  readonly rating: string;
+  readonly tang: string;
+  /** One point a line: x and y in mm. */
+  readonly profile: string;
+}
+
+export const firstToolDraft: ToolDraft = {
+  code: "", name: "", kind: "punch", angle: "88", radius: "0.8", vOpening: "16", height: "120", bodyWidth: "26", rating: "1000", tang: "20 mm", profile: "",
+};
