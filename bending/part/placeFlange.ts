@@ -58,7 +58,7 @@ export function placeFlange(question: PlaceFlangeQuestion): Result<{ readonly fa
   const zone: Interval = [ownEdge.from[0] - ownRange[1], ownEdge.from[0] - ownRange[0]];
   const originAlong = entry.outline ? inset : range[0];
   if (originAlong + zone[0] < range[0] - FITS_MM || originAlong + zone[1] > range[1] + FITS_MM) {
-    return fail({ path: `${path}.outline`, message: `is wider at the bend than the straight part of edge ${entry.edge} of "${entry.on}": it runs from ${formatLength(originAlong + zone[0], units)} to ${formatLength(originAlong + zone[1], units)} along the edge, which is free from ${formatLength(range[0], units)} to ${formatLength(range[1], units)}` });
+    return fail({ path: `${path}.outline`, message: `is wider at the bend than the straight part of edge ${entry.edge} of "${entry.on}": it runs from ${formatLength(originAlong + zone[0], units)} to ${formatLength(originAlong + zone[1], units)} along the edge, which is straight there from ${formatLength(range[0], units)} to ${formatLength(range[1], units)}` });
   }
   const outward: Vec2 = [-axes.inward[0], -axes.inward[1]];
   const at = (along: number, across: number): Vec2 => {

@@ -22,7 +22,7 @@ function fieldPath(path: readonly PropertyKey[]): string {
 function message(issue: z.core.$ZodIssue): string {
   switch (issue.code) {
     case "invalid_type":
-      return issue.input === undefined ? "is missing" : `must be ${EXPECTED[issue.expected] ?? issue.expected}`;
+      return written(issue.message) ?? (issue.input === undefined ? "is missing" : `must be ${EXPECTED[issue.expected] ?? issue.expected}`);
     case "invalid_value":
       return `must be ${issue.values.map((value) => JSON.stringify(value)).join(" or ")}`;
     case "too_small":
