@@ -9,7 +9,7 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
   const { box, unit, rows, bed } = layout;
   const scale = width / box[2];
   const thin = 0.6 / scale;
-  const letter = (size: number, weight: 400 | 600 = 400) => ({ fontFamily: "Plex Mono", fontSize: unit * size, fontWeight: weight });
+  const letter = (size: number, weight: 400 | 600 = 400) => ({ fontFamily: "Barlow", fontSize: unit * size, fontWeight: weight });
   return (
     <Svg viewBox={box.join(" ")} width={width} height={box[3] * scale}>
       <Rect x={bed[0]} y={rows.punch[0]} width={bed[1] - bed[0]} height={rows.die[1] - rows.punch[0]} fill={colours["steel-100"]} stroke={colours["steel-400"]} strokeWidth={thin} />

@@ -1,6 +1,7 @@
 import { Text, View } from "@react-pdf/renderer";
 import type { SheetStep } from "@/lib/sheet/sheetView";
 import { PdfDrawing } from "./PdfDrawing";
+import { PdfNumber } from "./PdfNumber";
 import { pdfStyles as styles } from "./pdfStyles";
 
 /** One row of the bend table, never broken over pages. */
@@ -24,7 +25,7 @@ export function PdfStep({ step }: { readonly step: SheetStep }) {
         <Text style={styles.strong}>{step.bends}</Text>
         <View style={styles.cells}>
           {numbers.map(([label, value]) => (
-            <View key={label} style={{ marginRight: 9, marginTop: 2 }}><Text style={styles.caption}>{label}</Text><Text style={styles.monoStrong}>{value}</Text></View>
+            <View key={label} style={{ marginRight: 9, marginTop: 2 }}><Text style={styles.caption}>{label}</Text><PdfNumber strong>{value}</PdfNumber></View>
           ))}
         </View>
         <View style={{ ...styles.cells, marginTop: 3 }}>

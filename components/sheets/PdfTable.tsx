@@ -1,4 +1,5 @@
 import { Text, View } from "@react-pdf/renderer";
+import { PdfNumber } from "./PdfNumber";
 import { pdfStyles as styles } from "./pdfStyles";
 
 interface PdfTableProps {
@@ -15,7 +16,7 @@ export function PdfTable({ heads, rows, shares }: PdfTableProps) {
       <View style={styles.tableHead}>{heads.map((head, column) => <Text key={head} style={cell(column)}>{head}</Text>)}</View>
       {rows.map((row, index) => (
         <View key={index} style={styles.row} wrap={false}>
-          {row.map((text, column) => <Text key={column} style={{ ...cell(column), ...(column === 0 ? styles.monoStrong : styles.mono), fontSize: 7.5 }}>{text}</Text>)}
+          {row.map((text, column) => <PdfNumber key={column} strong={column === 0} style={{ ...cell(column), fontSize: 7.5 }}>{text}</PdfNumber>)}
         </View>
       ))}
     </View>
