@@ -22,7 +22,7 @@ export interface RelievedPunchShape {
 
 /**
  * A punch whose body steps back behind its tip on one side, so that a flange that stands up there goes into the
- * relief. Counter-clockwise from the tip.
+ * relief. Counter-clockwise from the tip. For tips of 80 degrees and over: a sharper tip leaves the neck no room.
  */
 export function relievedPunchProfile(shape: RelievedPunchShape): readonly ProfilePoint[] {
   const half = shape.tipAngle / 2;
