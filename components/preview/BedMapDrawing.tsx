@@ -46,15 +46,17 @@ export function BedMapDrawing({ map, className, placed, step, close = false }: B
 
 function Piece({ piece, layout, done }: { readonly piece: BedPiece; readonly layout: BedMapLayout; readonly done: boolean }) {
   const [top, bottom] = piece.kind === "punch" ? layout.rows.punch : layout.rows.die;
-  const lines = layout.lettersFit(piece) ? [piece.id, piece.length] : [];
+  const lettering = layout.lettering(piece);
+  const [x, y] = [(piece.from + piece.to) / 2, (top + bottom) / 2];
+  const ink = done ? "var(--accent-on)" : "var(--ink)";
   return (
     <g>
       <title>{`${piece.id}, ${piece.length}`}</title>
       <path d={layout.pieceOutline(piece)} fill={done ? "var(--accent)" : "var(--steel-300)"} stroke="var(--steel-700)" strokeWidth={1} vectorEffect="non-scaling-stroke" />
-      {lines.map((line, index) => (
-        <text key={line} x={(piece.from + piece.to) / 2} y={(top + bottom) / 2 + layout.unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fontSize={layout.unit * 0.8}
-          fill={done ? "var(--accent-on)" : "var(--ink)"} className="num">{line}</text>
+      {(lettering === "level" ? [piece.id, piece.length] : []).map((line, index) => (
+        <text key={index} x={x} y={y + layout.unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fontSize={layout.unit * 0.8} fill={ink}>{line}</text>
       ))}
+      {lettering === "upright" ? <text x={x} y={y} transform={`rotate(-90 ${x} ${y})`} dy={layout.unit * 0.22} textAnchor="middle" fontSize={layout.unit * 0.62} fill={ink}>{piece.id}</text> : null}
     </g>
   );
 }

@@ -18,13 +18,17 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
         <G key={station.id}>
           {station.pieces.map((piece) => {
             const [top, bottom] = piece.kind === "punch" ? rows.punch : rows.die;
-            const lines = layout.lettersFit(piece) ? [piece.id, piece.length] : [];
+            const lettering = layout.lettering(piece);
+            const [x, y] = [(piece.from + piece.to) / 2, (top + bottom) / 2];
             return (
               <G key={`${piece.kind} ${piece.from}`}>
                 <Path d={layout.pieceOutline(piece)} fill={colours["steel-300"]} stroke={colours["steel-700"]} strokeWidth={thin} />
-                {lines.map((line, index) => (
-                  <Text key={index} x={(piece.from + piece.to) / 2} y={(top + bottom) / 2 + unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fill={colours.ink} style={letter(0.8)}>{line}</Text>
+                {(lettering === "level" ? [piece.id, piece.length] : []).map((line, index) => (
+                  <Text key={index} x={x} y={y + unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fill={colours.ink} style={letter(0.8)}>{line}</Text>
                 ))}
+                {lettering === "upright" ? (
+                  <G transform={`rotate(-90 ${x} ${y})`}><Text x={x} y={y + unit * 0.22} textAnchor="middle" fill={colours.ink} style={letter(0.62)}>{piece.id}</Text></G>
+                ) : null}
               </G>
             );
           })}

@@ -8,7 +8,7 @@ const ink = `1pt solid ${colours.ink}`;
 export const pdfStyles = StyleSheet.create({
   page: { paddingTop: 28, paddingBottom: 40, paddingHorizontal: 30, fontFamily: ["Barlow", "Barlow ext"], fontSize: 8.5, color: colours.ink, lineHeight: 1.25 },
   head: { flexDirection: "row", borderTop: `2pt solid ${colours.ink}`, borderBottom: ink, paddingVertical: 5 },
-  title: { fontSize: 15, fontWeight: 600 },
+  title: { fontSize: 15, fontWeight: 600, lineHeight: 1.35 },
   cells: { flexDirection: "row", flexWrap: "wrap" },
   cell: { marginRight: 14, marginTop: 3 },
   caption: { fontSize: 6.5, color: colours["ink-soft"], letterSpacing: 0.3 },

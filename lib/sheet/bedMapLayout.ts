@@ -15,7 +15,8 @@ export interface BedMapLayout {
   };
   readonly bendLine: (step: number) => number;
   readonly pieceOutline: (piece: BedPiece) => string;
-  readonly lettersFit: (piece: BedPiece) => boolean;
+  /** How a piece is lettered: its mark and length level, its mark alone upright, or not at all. */
+  readonly lettering: (piece: BedPiece) => "level" | "upright" | "none";
 }
 
 /**
@@ -27,8 +28,8 @@ export function bedMapLayout(map: BedMap, close: boolean): BedMapLayout {
   const unit = (to - from) / 62;
   const steps = map.bends.length;
   const gap = unit * 0.95 * (steps + 1);
-  const punch = [0, unit * 3] as const;
-  const die = [punch[1] + gap, punch[1] + gap + unit * 3] as const;
+  const punch = [0, unit * 4] as const;
+  const die = [punch[1] + gap, punch[1] + gap + unit * 4] as const;
   const top = -unit * 4;
   const bottom = die[1] + unit * 3;
   return {
@@ -38,7 +39,8 @@ export function bedMapLayout(map: BedMap, close: boolean): BedMapLayout {
     rows: { title: -unit * 2.2, punchName: -unit * 0.6, punch, die, dieName: die[1] + unit * 1.2, places: die[1] + unit * 2.3 },
     bendLine: (step) => punch[1] + unit * 0.95 * step,
     pieceOutline: (piece) => outline(piece, piece.kind === "punch" ? punch : die, unit),
-    lettersFit: (piece) => piece.to - piece.from > unit * 0.52 * Math.max(piece.id.length, piece.length.length),
+    lettering: ({ from: left, to: right, id, length }) =>
+      right - left > unit * 0.52 * Math.max(id.length, length.length) ? "level" : right - left > unit * 0.7 && id.length <= 11 ? "upright" : "none",
   };
 }
 
