@@ -36,27 +36,29 @@ export function dieProblems(die: Die, path: string, units: LengthUnit): readonly
 }
 
 function shapeOfV(die: Die, at: (field: string, message: string) => FieldProblem, text: (value: number) => string): readonly FieldProblem[] {
-  const problems: FieldProblem[] = [];
+  const angle = wallAngle(die);
+  if (angle === null) {
+    return [at("profile", "has no V below the origin: the top plane must open into the V between the shoulder arcs")];
+  }
+  if (Math.abs(angle - die.vAngle) > PROFILE_TOLERANCE_RAD) {
+    return [at("vAngle", `is ${toDeg(die.vAngle).toFixed(1)} degrees, but the walls of the profile's V stand at ${toDeg(rad(angle)).toFixed(1)} degrees (up to ${deg(1.5)} degrees apart are taken)`)];
+  }
   const inside = die.profile.filter((p) => Math.abs(p[0]) < die.vOpening / 2 && p[1] < 0 && p[1] > -die.height + PROFILE_TOLERANCE_MM);
   const proud = Math.max(0, ...inside.map((p) => overShoulder(die, p)));
   if (proud > PROFILE_TOLERANCE_MM) {
-    problems.push(at("shoulderRadius", `is ${text(die.shoulderRadius)}, but the profile stands ${text(proud)} over that arc; the arcs leave the top plane at x = ${text(die.vOpening / 2)} on both sides`));
-    return problems;
+    return [at("shoulderRadius", `is ${text(die.shoulderRadius)}, but the profile stands ${text(proud)} over that arc; the arcs leave the top plane at x = ${text(die.vOpening / 2)} on both sides`)];
   }
-  const angle = wallAngle(die);
-  if (angle === null) {
-    problems.push(at("profile", "has no V below the origin: the top plane must open into the V between the shoulder arcs"));
-  } else if (Math.abs(angle - die.vAngle) > PROFILE_TOLERANCE_RAD) {
-    problems.push(at("vAngle", `is ${toDeg(die.vAngle).toFixed(1)} degrees, but the walls of the profile's V stand at ${toDeg(rad(angle)).toFixed(1)} degrees (up to ${deg(1.5)} degrees apart are taken)`));
-  }
-  return problems;
+  return [];
 }
 
-/** How far a point inside the V stands over the shoulder arc beside it, radially. */
+/** How far a point inside the V stands over the shoulder arc or over the wall tangent to it, less what a wall within the angle's tolerance may. */
 function overShoulder(die: Die, [x, y]: ProfilePoint): number {
   const [dx, dy] = [Math.abs(x) - die.vOpening / 2, y + die.shoulderRadius];
-  const beside = dx <= 0 && dy >= -dx * Math.tan(die.vAngle / 2);
-  return beside ? Math.hypot(dx, dy) - die.shoulderRadius : 0;
+  const half = die.vAngle / 2;
+  const besideArc = dx <= 0 && dy >= -dx * Math.tan(half);
+  if (besideArc) return Math.hypot(dx, dy) - die.shoulderRadius;
+  const overWall = -dx * Math.cos(half) + dy * Math.sin(half) - die.shoulderRadius;
+  return overWall - Math.hypot(dx, dy) * Math.tan(PROFILE_TOLERANCE_RAD);
 }
 
 /** The angle between the longest edges of the V on the two sides, or null. */

@@ -38,9 +38,9 @@ export async function createSolids(): Promise<Solids> {
 }
 
 async function started(): Promise<ManifoldToplevel> {
-  const module = await manifoldModule();
-  module.setup();
-  return module;
+  const top = await manifoldModule();
+  top.setup();
+  return top;
 }
 
 function matrix({ x, y, z, o }: Frame): Mat4 {
