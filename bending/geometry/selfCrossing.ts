@@ -13,19 +13,38 @@ export interface SelfCrossing {
  */
 export function selfCrossing(polygon: readonly Vec2[]): SelfCrossing | null {
   const n = polygon.length;
-  for (let i = 0; i < n; i++) {
-    const a = polygon[i];
-    const b = polygon[(i + 1) % n];
-    if (!a || !b) continue;
-    for (let j = i + 1; j < n; j++) {
-      const c = polygon[j];
-      const d = polygon[(j + 1) % n];
-      if (!c || !d) continue;
-      const at = j === i + 1 ? foldsBack(a, b, d) : j === n - 1 && i === 0 ? foldsBack(c, a, b) : segmentsCross(a, b, c, d);
-      if (at) return { edges: [i, j], at };
+  const edges = polygon.map((a, i): Edge => {
+    const b = polygon[(i + 1) % n] ?? a;
+    return { i, a, b, from: Math.min(a[0], b[0]), to: Math.max(a[0], b[0]) };
+  });
+  const swept = [...edges].sort((p, q) => p.from - q.from || p.i - q.i);
+  let first: SelfCrossing | null = null;
+  swept.forEach((p, k) => {
+    for (let next = k + 1; next < n; next++) {
+      const q = swept[next];
+      if (!q || q.from > p.to) break;
+      const [e, f] = p.i < q.i ? [p, q] : [q, p];
+      if (first && (e.i > first.edges[0] || (e.i === first.edges[0] && f.i > first.edges[1]))) continue;
+      const at = meet(e, f, n);
+      if (at) first = { edges: [e.i, f.i], at };
     }
-  }
-  return null;
+  });
+  return first;
+}
+
+interface Edge {
+  readonly i: number;
+  readonly a: Vec2;
+  readonly b: Vec2;
+  /** Reach in x. */
+  readonly from: number;
+  readonly to: number;
+}
+
+function meet(e: Edge, f: Edge, n: number): Vec2 | null {
+  if (f.i === e.i + 1) return foldsBack(e.a, e.b, f.b);
+  if (e.i === 0 && f.i === n - 1) return foldsBack(f.a, e.a, e.b);
+  return segmentsCross(e.a, e.b, f.a, f.b);
 }
 
 /** Edges p-q and q-r that run back over one another share more than q. */

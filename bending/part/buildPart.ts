@@ -3,6 +3,7 @@ import type { FieldProblem } from "../core/problem";
 import { fail, ok, type Result } from "../core/result";
 import type { MaterialFacts, MaterialLookup } from "../handbook/material";
 import { buildFaces } from "./buildFaces";
+import { buildFlat } from "./buildFlat";
 import { checkPartDocument } from "./checkPartDocument";
 import { documentInUnits } from "./documentInUnits";
 import { flatsOverlap } from "./flatsOverlap";
@@ -37,7 +38,7 @@ export function buildPart(document: PartDocument, options: BuildPartOptions): Re
 
 function buildShape(document: PartDocument, material: MaterialFacts, radiusOf: RadiusOf | undefined): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
   const inMm = documentInUnits(document, "mm");
+  if (inMm.flat) return buildFlat(inMm.flat, inMm, document.units, material, radiusOf);
   const source = partSource(inMm);
-  if (!source) return fail([{ path: "flat", message: "a flat with bend lines is not taken yet; give the part as a profile or as a base with flanges" }]);
   return buildFaces(source, inMm, document.units, material, radiusOf);
 }

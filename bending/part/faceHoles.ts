@@ -1,9 +1,8 @@
 import type { FieldProblem } from "../core/problem";
-import { polygonContains } from "../geometry/polygonContains";
-import { segmentsCross } from "../geometry/segmentsCross";
 import type { Vec2 } from "../geometry/vec2";
 import type { FaceWork } from "./faceWork";
 import { holeAsChords } from "./holeAsChords";
+import { holeWithin, holesMeet } from "./holeWithin";
 import type { DocumentHole } from "./partDocument";
 
 /**
@@ -20,25 +19,12 @@ export function faceHoles(face: FaceWork, holes: readonly DocumentHole[] | undef
     return mirrored ? points.map(([a, b]): Vec2 => [a, -b]).reverse() : points;
   });
   outlines.forEach((hole, i) => {
-    if (!within(hole, face.plane)) {
+    if (!holeWithin(hole, face.plane)) {
       problems.push({ path: `${path}[${i}]`, message: `the hole reaches over the plane part of "${face.id}" (its outline less what the bends take); move it inwards or make it smaller` });
       return;
     }
-    const other = outlines.slice(0, i).findIndex((earlier) => meet(earlier, hole));
+    const other = outlines.slice(0, i).findIndex((earlier) => holesMeet(earlier, hole));
     if (other >= 0) problems.push({ path: `${path}[${i}]`, message: `the hole overlaps ${path}[${other}]` });
   });
   return { outlines, problems };
-}
-
-const within = (hole: readonly Vec2[], plane: readonly Vec2[]) => hole.every((p) => polygonContains(plane, p)) && !edgesCross(hole, plane);
-
-function meet(a: readonly Vec2[], b: readonly Vec2[]): boolean {
-  return edgesCross(a, b) || (b[0] !== undefined && polygonContains(a, b[0])) || (a[0] !== undefined && polygonContains(b, a[0]));
-}
-
-function edgesCross(a: readonly Vec2[], b: readonly Vec2[]): boolean {
-  return a.some((p, i) => {
-    const q = a[(i + 1) % a.length] ?? p;
-    return b.some((r, j) => segmentsCross(p, q, r, b[(j + 1) % b.length] ?? r) !== null);
-  });
 }

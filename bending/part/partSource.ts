@@ -1,4 +1,4 @@
-import type { BaseShape, FlangeEntry, PartDocument } from "./partDocument";
+import type { BaseShape, FlangeEntry, FlatShape, PartDocument } from "./partDocument";
 
 /** A part as base and flanges, whatever shape the document has, with where each thing stands in the document. */
 export interface PartSource {
@@ -19,7 +19,7 @@ export interface SourceFlange {
  * A profile is a chain of full-width flanges: the first leg is the base, x runs along the legs and y along
  * the bends. Documents in mm.
  */
-export function partSource(document: PartDocument): PartSource | null {
+export function partSource(document: Exclude<PartDocument, { readonly flat: FlatShape }>): PartSource {
   if (document.base) {
     return {
       base: document.base,
@@ -27,7 +27,6 @@ export function partSource(document: PartDocument): PartSource | null {
       flanges: (document.flanges ?? []).map((entry, i) => ({ entry, path: `flanges[${i}]`, lengthPath: entry.outline ? `flanges[${i}].outline` : `flanges[${i}].length` })),
     };
   }
-  if (!document.profile) return null;
   const { width, legs, bends } = document.profile;
   const first = legs[0] ?? 0;
   return {
