@@ -26,6 +26,16 @@ export { bendAllowance } from "./handbook/bendAllowance";
 export { bendDeduction } from "./handbook/bendDeduction";
 export { outsideSetback } from "./handbook/outsideSetback";
 export { kFactorFromDeduction } from "./handbook/kFactorFromDeduction";
+export { airBendForce } from "./handbook/airBendForce";
+export { airBendForces, type AirBendForces, type PublishedForce } from "./handbook/airBendForces";
+export { advisedFlange, minimumFlange } from "./handbook/minimumFlange";
+export { minimumRadius } from "./handbook/minimumRadius";
+export { naturalRadius } from "./handbook/naturalRadius";
+export { penetrationDepth } from "./handbook/penetrationDepth";
+export { springback } from "./handbook/springback";
+export { springbackRatio, type SpringbackRatio } from "./handbook/springbackRatio";
+export { vOpeningRule } from "./handbook/vOpeningRule";
+export { gaugeThickness, type GaugeSystem } from "./handbook/gaugeThickness";
 export { resolveAllowance, type AllowanceQuestion, type ResolvedAllowance } from "./handbook/resolveAllowance";
 
 export type * from "./part/partDocument";

@@ -109,6 +109,16 @@ test("a flange with an outline of its own, an arc in it and a hole", () => {
   expect(ear?.holes).toHaveLength(1);
 });
 
+test("the tray of the folder's README", () => {
+  const part = build(tray([
+    { id: "front", on: "base", edge: 0, length: 30, ...up },
+    { id: "return", on: "front", edge: 2, length: 12, ...up },
+  ]));
+  const { depth, area, massKg } = flatPattern(part);
+  expect([depth, area, massKg].map((value) => Number(value.toFixed(4)))).toEqual([156.2439, 31248.7831, 0.368]);
+  expect(part.bends.map(({ allowance, deduction, k }) => [allowance, deduction, k].map((value) => Number(value.toFixed(3))))).toEqual([[3.122, 2.878, 0.325], [3.122, 2.878, 0.325]]);
+});
+
 test("mass: 100 x 172.325 x 2 of steel", () => {
   expect(flatPattern(build({ ...profile, insideRadius: 2 })).massKg).toBeCloseTo(0.1 * 0.172325 * 0.002 * 7850, 5);
 });

@@ -2,11 +2,11 @@ import type { FieldProblem } from "../core/problem";
 import { fail, ok, type Result } from "../core/result";
 import type { LengthUnit, Mm } from "../core/units";
 import type { Interval } from "../geometry/interval";
-import type { Vec2 } from "../geometry/vec2";
+import type { FlatPoint } from "../geometry/vec2";
 import { outsideSetback } from "../handbook/outsideSetback";
 import type { DrawnFace } from "./drawnFace";
 import { drawnFlange, drawnFromOwnOutline } from "./drawnFlange";
-import { edgeAxes, fromEdge } from "./edgeCut";
+import { edgeAxes, fromEdge, type EdgeAxes } from "./edgeCut";
 import { edgeCutsOf } from "./edgeCutsOf";
 import { edgeRange } from "./edgeRange";
 import type { FaceWork, FlangeWork } from "./faceWork";
@@ -60,25 +60,29 @@ export function placeFlange(question: PlaceFlangeQuestion): Result<{ readonly fa
   if (originAlong + zone[0] < range[0] - FITS_MM || originAlong + zone[1] > range[1] + FITS_MM) {
     return fail({ path: `${path}.outline`, message: `is wider at the bend than the straight part of edge ${entry.edge} of "${entry.on}": it runs from ${formatLength(originAlong + zone[0], units)} to ${formatLength(originAlong + zone[1], units)} along the edge, which is straight there from ${formatLength(range[0], units)} to ${formatLength(range[1], units)}` });
   }
-  const outward: Vec2 = [-axes.inward[0], -axes.inward[1]];
-  const at = (along: number, across: number): Vec2 => {
-    const tangent = fromEdge(axes, [originAlong + along, parentDepth]);
-    return placeOnSheet(parent.placement, [tangent[0] + outward[0] * across, tangent[1] + outward[1] * across]);
-  };
-  const [from, to] = zone;
-  const { source: allowanceSource, ...resolved } = bend;
-  const placement = { origin: at(0, bend.allowance - own), along: turnOnSheet(parent.placement, axes.along) };
+  const at = sheetPointBeside(parent, axes, originAlong, parentDepth);
   return ok({
-    face: { id: entry.id, index, drawn, plane, placement },
-    bend: {
-      ...resolved,
-      allowanceSource,
-      parent: parent.index,
-      child: index,
-      line: [at(from, bend.allowance / 2), at(to, bend.allowance / 2)],
-      zone: [at(from, 0), at(from, bend.allowance), at(to, bend.allowance), at(to, 0)],
-    },
+    face: { id: entry.id, index, drawn, plane, placement: { origin: at(0, bend.allowance - own), along: turnOnSheet(parent.placement, axes.along) } },
+    bend: bendBetween(bend, parent.index, index, zone, at),
   });
+}
+
+type SheetPointBeside = (along: number, across: number) => FlatPoint;
+
+/** Points of the sheet by distance along the bend from the flange's start, and across it from the parent's tangent. */
+function sheetPointBeside(parent: FaceWork, axes: EdgeAxes, originAlong: number, depth: number): SheetPointBeside {
+  return (along, across) => placeOnSheet(parent.placement, fromEdge(axes, [originAlong + along, depth - across]));
+}
+
+function bendBetween({ source, ...bend }: FlangeWork["bend"], parent: number, child: number, [from, to]: Interval, at: SheetPointBeside): Bend {
+  return {
+    ...bend,
+    allowanceSource: source,
+    parent,
+    child,
+    line: [at(from, bend.allowance / 2), at(to, bend.allowance / 2)],
+    zone: [at(from, 0), at(from, bend.allowance), at(to, bend.allowance), at(to, 0)],
+  };
 }
 
 /** An own outline may stand over the free edge by rounding alone (mm). */

@@ -1,7 +1,10 @@
 import Module, { type Manifold, type ManifoldToplevel } from "manifold-3d";
-import { beforeAll, describe, expect, test } from "vitest";
+import { beforeAll, describe, expect, test, vi } from "vitest";
 import { applyFrame, bendFacets, flatPattern, foldFrames, signedArea, type FlangeEntry, type PartDocument, type PartModel, type ProfileBend, type Vec3 } from "@/bending";
 import { mustBuild } from "./mustBuild";
+
+// Many random parts on a machine that does other work too: only a hang shall stop it.
+vi.setConfig({ testTimeout: 300_000 });
 
 let wasm: ManifoldToplevel;
 beforeAll(async () => {

@@ -1,8 +1,11 @@
 import fc from "fast-check";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { documentInUnits, flatPattern, foldPoint, signedArea, unfoldPoint, type DocumentVertex, type PartDocument, type PartModel, type Vec3 } from "@/bending";
 import { arbitraryProfile, arbitraryTray } from "./arbitraryPart";
 import { mustBuild } from "./mustBuild";
+
+// Many random parts on a machine that does other work too: only a hang shall stop it.
+vi.setConfig({ testTimeout: 300_000 });
 
 const anyPart = fc.oneof(arbitraryProfile, arbitraryTray);
 const finished = (part: PartModel) => part.bends.map((bend) => bend.angle);
@@ -133,6 +136,23 @@ describe("a part does not depend on how it was written down", () => {
       }));
     }), { numRuns: 60 });
   });
+});
+
+test("a profile's blank, taken as a flat with bend lines, folds into the same part", () => {
+  fc.assert(fc.property(arbitraryProfile, (document) => {
+    const part = mustBuild(document);
+    const pattern = flatPattern(part);
+    const { profile, ...head } = document;
+    const flat = mustBuild({
+      ...head,
+      flat: {
+        outline: pattern.outline.map(([x, y]): DocumentVertex => [x, y]),
+        bends: pattern.bendLines.map(({ id, line, direction }, i) => ({ id, line, direction, angle: profile?.bends[i]?.angle ?? NaN })),
+      },
+    } as PartDocument);
+    expect(flatPattern(flat).area).toBeCloseTo(pattern.area, 6);
+    expectSameNumbers(sorted(distances([...foldedCorners(flat).values()].flat())), sorted(distances([...foldedCorners(part).values()].flat())), 5);
+  }), { numRuns: 40 });
 });
 
 test("the blank's area is that of faces and bend zones, less the holes", () => {
