@@ -25,7 +25,7 @@ describe("the demonstration shop", () => {
     expect(tooling.tools).toHaveLength(60);
     expect(new Set(tooling.tools.map((tool) => tool.id)).size).toBe(60);
     expect(pieces.length).toBeGreaterThanOrEqual(280);
-    expect(pieces.length).toBeLessThanOrEqual(320);
+    expect(pieces.length).toBeLessThanOrEqual(340);
     expect(new Set(marks).size).toBe(pieces.length);
     expect(pieces.filter((piece) => !/^[A-K][1-6]-[1-3]$/.test(piece.rack ?? ""))).toEqual([]);
     expect(Object.keys(pieceStates).filter((mark) => !marks.includes(mark))).toEqual([]);
