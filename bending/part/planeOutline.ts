@@ -7,6 +7,7 @@ import type { Vec2 } from "../geometry/vec2";
 import { cornerReach } from "./cornerReach";
 import type { DrawnFace } from "./drawnFace";
 import { edgeAxes, fromEdge, type EdgeAxes, type EdgeCut } from "./edgeCut";
+import { notchEdges } from "./notchEdges";
 
 /** Strips begin this much outside the edge, so that rounding leaves no sliver there (mm). */
 const OUTSIDE_MM = 0.01;
@@ -20,9 +21,11 @@ const OUTSIDE_MM = 0.01;
  */
 export function planeOutline(face: DrawnFace, cuts: readonly EdgeCut[]): readonly Vec2[] | null {
   const ends = cuts.map((cut) => ({ cut, axes: edgeAxes(cut.edge), ...reaches(cut, cuts) }));
-  if (ends.every(({ start, end }) => start && end) && isConvex(face.points)) {
-    const clipped = ends.reduce<readonly Vec2[]>((rest, { cut, axes }) => clipByHalfPlane(rest, fromEdge(axes, [0, cut.depth]), axes.inward), face.points);
-    return withArea(cleanPolygon(clipped));
+  if (ends.every(({ start, end }) => start === end) && isConvex(face.points)) {
+    const clipped = ends.filter(({ start }) => start)
+      .reduce<readonly Vec2[]>((rest, { cut, axes }) => clipByHalfPlane(rest, fromEdge(axes, [0, cut.depth]), axes.inward), face.points);
+    const notched = notchEdges(cleanPolygon(clipped), ends.filter(({ start }) => !start).map(({ cut }) => cut));
+    if (notched) return withArea(notched);
   }
   const strips = ends.flatMap(({ cut, axes, start, end }) => stripsOf(face, cut, axes, start, end));
   const pieces = polyclip.difference([ring(face.points)], ...strips.map((strip) => [ring(strip)]))
