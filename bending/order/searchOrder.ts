@@ -7,6 +7,8 @@ export interface SearchLimits {
   /** Only plans cheaper than this (demerits weighed in) are looked for. */
   readonly under?: number;
   readonly shouldStop?: () => boolean;
+  /** A better bound from below on what is left after a move, if one is known; consistent, Infinity where nothing can follow. */
+  readonly toGo?: (formed: number, move: number) => number;
   readonly onExpand?: (expanded: number) => void;
 }
 
@@ -23,13 +25,15 @@ interface Node {
   readonly weight: number;
   readonly demerits: number;
   readonly total: number;
+  /** Strokes so far: of equal totals the one nearer to the end goes first. */
+  readonly depth: number;
   readonly serial: number;
   readonly before: Node | null;
 }
 
 /** Seconds; two totals nearer than this are equal: over rounding noise, under anything a clock shows. */
 const SAME_SECONDS = 1e-7;
-const ASK_EVERY = 128;
+const ASK_EVERY = 16;
 
 /**
  * Best first over (formed set, last move, station), each state kept once with its cheapest way: exact, since
@@ -40,7 +44,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
   const all = 2 ** problem.bends - 1;
   const bound = remainingBound(problem);
   const best = new Map<number, number>();
-  const queue = new TinyQueue<Node>([], (a, b) => (Math.abs(a.total - b.total) > SAME_SECONDS ? a.total - b.total : a.serial - b.serial));
+  const queue = new TinyQueue<Node>([], (a, b) => (Math.abs(a.total - b.total) > SAME_SECONDS ? a.total - b.total : b.depth - a.depth || a.serial - b.serial));
   const under = limits.under ?? Infinity;
   const deadEnds = new Set<number>();
   let expanded = 0;
@@ -60,14 +64,14 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
         const seconds = stepSeconds(problem, node, { move, station, gauge: option.gauge });
         const weight = (node?.weight ?? 0) + seconds + option.demerit * DEMERIT_SECONDS;
         const next = formed | mask;
-        const total = weight + bound(all & ~next, problem.moves[move]?.pose ?? null);
+        const total = weight + (limits.toGo?.(next, move) ?? bound(all & ~next, problem.moves[move]?.pose ?? null));
         if (total >= under - SAME_SECONDS) { pruned = true; continue; }
         const key = (next * problem.moves.length + move) * problem.stations + station;
         const known = best.get(key);
         if (known !== undefined && known <= weight + SAME_SECONDS) continue;
         best.set(key, weight);
         serial += 1;
-        queue.push({ formed: next, move, station, gauge: option.gauge, weight, demerits: (node?.demerits ?? 0) + option.demerit, total, serial, before: node });
+        queue.push({ formed: next, move, station, gauge: option.gauge, weight, demerits: (node?.demerits ?? 0) + option.demerit, total, depth: (node?.depth ?? 0) + 1, serial, before: node });
       }
     }
     if (!any) deadEnds.add(formed);

@@ -5,7 +5,7 @@ import { collectMoves } from "../order/collectMoves";
 import { createRuns } from "../setup/createRuns";
 import type { Machine } from "../tooling/machine";
 import type { PartVariant } from "./partVariants";
-import type { Situation } from "./situation";
+import type { Situation, ToolFit } from "./situation";
 import { toolFit } from "./toolFit";
 import type { ToolPair } from "./toolPair";
 
@@ -33,6 +33,15 @@ export function createSituation({ variant: { part, vOpening }, machine, units, p
     fits: useful.length === 0 ? fits : fits.map((ofBend) => ofBend.filter((_, index) => kept.has(index))),
     clearance: createClearance(part, machine, { demandedAngle: (bend) => demanded[bend] ?? rad(0) }),
     allowed: (move, formed) => next === null || next.get(formed) === moves[move]?.mask,
+  };
+}
+
+/** The same with fewer pairs. */
+export function withPairs(situation: Situation, chosen: readonly ToolPair[]): Situation {
+  return {
+    ...situation,
+    pairs: chosen.map((pair, index) => ({ ...pair, index })),
+    fits: situation.fits.map((ofBend) => chosen.map(({ index }) => ofBend[index] as ToolFit)),
   };
 }
 

@@ -9,6 +9,8 @@ import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
 import type { ToolPair } from "./toolPair";
 
+interface Pattern { readonly mask: number; readonly value: number }
+
 /** The yes-or-no questions of a search, each answered once. */
 export interface StepChecks {
   readonly hitOf: (move: number, formed: number) => Hit;
@@ -32,6 +34,9 @@ export function createStepChecks(situation: Situation): StepChecks {
   const behind = moves.map((move) => bendsBehind(situation, { bends: move.bends, front: move.front, formed: 0 }));
   const state = (move: number, formed: number) => formed * moves.length + move;
 
+  /** What blocked a move once blocks it in every state that agrees with the pattern; the part meeting itself, with every tool. */
+  const patterns = pairs.map(() => new Map<number, readonly Pattern[]>());
+  const selfPatterns = new Map<number, readonly Pattern[]>();
   const possible = remember((move, formed, pair) => {
     const { punch, die } = pairOf(pair);
     let force = 0;
@@ -45,7 +50,15 @@ export function createStepChecks(situation: Situation): StepChecks {
     if ((force * moveOf(move).bentLength) / 1000 > machine.maxForce) return false;
     const reach = sheetReach(part, hitOf(move, formed));
     if (Math.min(reach.front, reach.back) < needed) return false;
-    return clearance.blocked(hitOf(move, formed), punch, die).length === 0;
+    const agrees = ({ mask, value }: Pattern) => (formed & mask) === value;
+    const ofPair = patterns[pair]?.get(move) ?? [];
+    if (selfPatterns.get(move)?.some(agrees) || ofPair.some(agrees)) return false;
+    const hits = clearance.blocked(hitOf(move, formed), punch, die);
+    if (hits.length === 0) return true;
+    const own = hits.filter(({ kind }) => kind === "self");
+    if (own.length > 0) selfPatterns.set(move, [...(selfPatterns.get(move) ?? []), ...own.map(({ mask, value }) => ({ mask, value }))]);
+    else patterns[pair]?.set(move, [...ofPair, ...hits.map(({ mask, value }) => ({ mask, value }))]);
+    return false;
   });
   const intervals = new Map<string, Map<number, readonly Interval[]>>();
   const allGauges = new Map<number, readonly GaugeOption[]>();

@@ -11,7 +11,7 @@ import type { Situation } from "./situation";
  * pieces make, alone on the bed and without a walk. No plan costs less a part; if it has no order, none has.
  */
 export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): OrderProblem {
-  const { moves, pairs, machine, part, allowed, runs } = situation;
+  const { moves, pairs, machine, part, allowed, runs, fits } = situation;
   const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
     const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));
     return { punch: least(punch), die: least(die) };
@@ -30,6 +30,15 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
     const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
     return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };
   };
+  /** What every pair that fits leaves unmet at least; all gauge alike. */
+  const leastDemerit = (move: number, formed: number): number => {
+    const usable = pairs.filter(({ index }) => moves[move]?.bends.every((bend) => fits[bend]?.[index]?.ok));
+    const first = usable[0];
+    if (first === undefined) return 0;
+    const gauge = checks.gauges(move, formed, first.index)[0];
+    const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
+    return gaugeDemerits(fingers) + Math.min(...usable.map(({ index }) => checks.wishes(move, index)));
+  };
   const known = new Map<number, StepOption | null>();
   return {
     bends: part.bends.length,
@@ -42,7 +51,8 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
       const key = formed * moves.length + move;
       const answer = known.get(key);
       if (answer !== undefined) return answer;
-      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), checks.gaugesAgree(move, formed));
+      const agree = checks.gaugesAgree(move, formed);
+      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), agree, agree ? leastDemerit(move, formed) : 0);
       known.set(key, best);
       return best;
     },
@@ -50,9 +60,9 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
 }
 
 /** The option of least demerit; its gauge is left open when not every pair would gauge alike. */
-function bestOf(pairs: number, option: (pair: number) => StepOption | null, gaugesAgree: boolean): StepOption | null {
+function bestOf(pairs: number, option: (pair: number) => StepOption | null, gaugesAgree: boolean, least: number): StepOption | null {
   let best: StepOption | null = null;
-  for (let pair = 0; pair < pairs && best?.demerit !== 0; pair += 1) {
+  for (let pair = 0; pair < pairs && (best === null || best.demerit > least); pair += 1) {
     const found = option(pair);
     if (found && (best === null || found.demerit < best.demerit)) best = found;
   }

@@ -11,7 +11,7 @@ import type { ToolPair } from "./toolPair";
 export type ToolFit =
   | {
     readonly ok: true;
-    /** Wishes left unmet: a V far from the rule, a tip larger than the inside radius. */
+    /** Wishes left unmet: a V far from the rule or from the radius asked for. */
     readonly wishes: readonly FitProblem[];
     /** Angle that the stroke goes to, springback allowed for. */
     readonly demanded: Rad;

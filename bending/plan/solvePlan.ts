@@ -1,6 +1,6 @@
 import { MAX_BENDS, DEMERIT_SECONDS } from "../order/orderProblem";
 import { candidatePairs } from "./candidatePairs";
-import { createSituation } from "./createSituation";
+import { createSituation, withPairs } from "./createSituation";
 import { createStepChecks, type StepChecks } from "./createStepChecks";
 import { emptyPlan } from "./emptyPlan";
 import { flatLength } from "./flatLength";
@@ -11,6 +11,7 @@ import { planFlat } from "./planFlat";
 import type { PlanDocument, PlanReason } from "./planDocument";
 import type { PlanRequest } from "./planRequest";
 import { proofMethod } from "./proofMethod";
+import { shortlist } from "./shortlist";
 import type { SearchBudget } from "./searchBudget";
 import type { Situation } from "./situation";
 import { solveVariant, type Candidate, type VariantAnswer } from "./solveVariant";
@@ -35,23 +36,28 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   const budget = budgetOf(request);
   const solved: Solved[] = [];
   const toolReasons: PlanReason[] = [];
-  let under = Infinity;
   for (const variant of variants.value) {
-    const outcome = solveOne(request, variant, budget, under, order);
+    const outcome = solveOne(request, variant, budget, order);
     if ("reasons" in outcome) { toolReasons.push(...outcome.reasons); continue; }
     solved.push(outcome);
-    under = Math.min(under, outcome.answer.candidates[budget.keep - 1]?.weight ?? Infinity);
+    if (outcome.answer.candidates.length > 0) break;
   }
   return withFlat(joined(request, solved, toolReasons), first, request);
 }
 
-function solveOne(request: PlanRequest, variant: PartVariant, budget: SearchBudget, under: number, order: readonly number[] | undefined): Solved | { readonly reasons: readonly PlanReason[] } {
+function solveOne(request: PlanRequest, variant: PartVariant, budget: SearchBudget, order: readonly number[] | undefined): Solved | { readonly reasons: readonly PlanReason[] } {
   const { machine, tools, document } = request;
   const found = candidatePairs(tools, machine, variant.part.thickness, variant.wantedV, document.units);
   if (found.pairs.length > 0) {
     const situation = createSituation({ variant, machine, units: document.units, pairs: found.pairs, ...(order ? { order } : {}) });
+    const short = withPairs(situation, shortlist(situation));
+    if (short.pairs.length > 0) {
+      const checks = createStepChecks(short);
+      const answer = solveVariant(short, checks, budget, Infinity);
+      if (answer.candidates.length > 0 || answer.stopped || short.pairs.length === situation.pairs.length) return { situation: short, checks, answer };
+    }
     const checks = createStepChecks(situation);
-    if (situation.pairs.length > 0) return { situation, checks, answer: solveVariant(situation, checks, budget, under) };
+    if (situation.pairs.length > 0) return { situation, checks, answer: solveVariant(situation, checks, budget, Infinity) };
     const reasons = explain(situation, checks, []);
     return { reasons: reasons.length > 0 ? reasons : found.reasons };
   }

@@ -1,10 +1,12 @@
 import type { OrderStep } from "../order/orderProblem";
+import { unhindered } from "./unhindered";
 import { remainingBound } from "../order/remainingBound";
 import { searchOrder } from "../order/searchOrder";
 import { combineStations } from "../setup/combineStations";
 import type { Layout } from "../setup/layout";
 import { placeStations } from "../setup/placeStations";
-import { createGaugeNumbers } from "./gaugeNumbers";
+import { diveOrder } from "../order/diveOrder";
+import { createGaugeNumbers, type GaugeNumbers } from "./gaugeNumbers";
 import type { StepChecks } from "./createStepChecks";
 import { layoutProblem } from "./layoutProblem";
 import { layoutWishes } from "./layoutWishes";
@@ -48,14 +50,15 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
     shouldStop: budget.shouldStop,
     onExpand: (count: number) => budget.onProgress({ expanded: expanded + count, fraction: null, message: "Looking for the order" }),
   };
-  const relaxed = searchOrder(relaxedProblem(situation, checks, numbers), limits);
+  const first = divedFirst(situation, checks, numbers, budget);
+  const none = { candidates: first ? [first] : [], layouts: 0, pairs: situation.pairs.length, deadEnds: null };
+  const relaxed = unhindered(relaxedProblem(situation, checks, numbers), limits);
   expanded += relaxed.expanded;
-  const none = { candidates: [], layouts: 0, pairs: situation.pairs.length, deadEnds: null };
-  if (relaxed.kind === "stopped") return { ...none, expanded, bound: relaxed.bound * budget.batch, stopped: true };
-  if (relaxed.kind === "none") return { ...none, expanded, bound: Infinity, stopped: false, deadEnds: relaxed.deadEnds };
+  if (relaxed.kind === "stopped") return { ...none, expanded, bound: Math.max(floor, relaxed.bound * budget.batch + cheapestBed(situation, 1)), stopped: true };
+  if (relaxed.kind === "none") return { ...none, candidates: [], expanded, bound: Infinity, stopped: false, deadEnds: relaxed.deadEnds };
   const favoured = favouredPairs(situation, checks, relaxed.steps);
   const least = relaxed.weight * budget.batch;
-  const candidates: Candidate[] = [];
+  const candidates: Candidate[] = first ? [first] : [];
   const worst = () => Math.min(under, candidates.length < budget.keep ? Infinity : candidates[budget.keep - 1]?.weight ?? Infinity);
   const keep = (candidate: Candidate) => {
     candidates.push(candidate);
@@ -64,13 +67,12 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   };
   let layouts = 0;
   let open = Infinity;
-  const { times } = situation.machine;
   for (const count of [1, 2, 3] as const) {
-    const cheapest = count * (times.stationSetup + 2 * times.sectionPlace);
+    const cheapest = cheapestBed(situation, count);
     if (open < Infinity || count > situation.part.bends.length || cheapest + least >= worst() - SAME_SECONDS) break;
     for (const layout of layoutsByCost(situation, count, favoured)) {
       if (layout.setupSeconds + least >= worst() - SAME_SECONDS) break;
-      const outcome = searchOrder(layoutProblem(situation, checks, numbers, layout), { ...limits, under: (worst() - layout.setupSeconds) / budget.batch });
+      const outcome = searchOrder(layoutProblem(situation, checks, numbers, layout), { ...limits, ...relaxed.better, under: (worst() - layout.setupSeconds) / budget.batch });
       layouts += 1;
       expanded += outcome.expanded;
       if (outcome.kind === "stopped" || budget.shouldStop()) open = cheapest + least;
@@ -82,12 +84,28 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   return { candidates, expanded, bound, layouts, pairs: situation.pairs.length, deadEnds: null, stopped: open < Infinity };
 }
 
+/** Beds of one station that are dived into for a first plan, and how far. */
+const DIVES = 4;
+const DIVE_STATES = 200;
+
+/** Some plan, early, so that a search that is ended has something to show. */
+function divedFirst(situation: Situation, checks: StepChecks, numbers: GaugeNumbers, budget: SearchBudget): Candidate | null {
+  for (const layout of layoutsByCost(situation, 1, new Set()).slice(0, DIVES)) {
+    const dived = diveOrder(layoutProblem(situation, checks, numbers, layout), DIVE_STATES, budget.shouldStop);
+    if (dived) return { layout, steps: dived.steps, perPart: dived.seconds, demerits: dived.demerits, weight: layout.setupSeconds + dived.weight * budget.batch };
+  }
+  return null;
+}
+
 /** What the cheapest bed and the fewest strokes, flips and turns cost: no plan is under it. */
+function cheapestBed({ machine: { times } }: Situation, count: number): number {
+  return count * (times.stationSetup + 2 * times.sectionPlace);
+}
+
 function floorOf(situation: Situation, batch: number): number {
-  const { times } = situation.machine;
   const all = 2 ** situation.part.bends.length - 1;
   const bends = relaxedBound(situation, all);
-  return times.stationSetup + 2 * times.sectionPlace + batch * bends;
+  return cheapestBed(situation, 1) + batch * bends;
 }
 
 function relaxedBound({ part, moves, machine: { times } }: Situation, all: number): number {
@@ -96,7 +114,7 @@ function relaxedBound({ part, moves, machine: { times } }: Situation, all: numbe
 }
 
 /** The pairs that the unhindered order uses: those that a bed of several stations needs most likely. */
-function favouredPairs(situation: Situation, checks: StepChecks, steps: readonly OrderStep[]): ReadonlySet<number> {
+function favouredPairs(situation: Situation, checks: StepChecks, steps: readonly { readonly move: number; readonly formed: number }[]): ReadonlySet<number> {
   return new Set(steps.flatMap(({ move, formed }) => {
     const pair = situation.pairs.find(({ index }) => checks.possible(move, formed, index));
     return pair === undefined ? [] : [pair.index];

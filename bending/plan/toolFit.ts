@@ -29,7 +29,7 @@ export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): Tool
   const { part } = question;
   const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
   const force = airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening);
-  const problem = radiusProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
+  const problem = radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
     ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
   if (problem) return { ok: false, problem };
   const tangentToApex = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2);
@@ -43,6 +43,14 @@ function radiusProblem({ part, units, vOpening }: FitQuestion, bend: Bend, { die
   return {
     kind: "no-die", tools: [die.id], off: Math.abs(Math.log(die.vOpening / vOpening)),
     message: `the flat of bend ${bend.id} is for the inside radius ${formatLength(bend.insideRadius, units)} of a V ${formatLength(vOpening, units)}; ${die.id} gives ${formatLength(gives, units)}`,
+  };
+}
+
+function tipProblem({ units }: FitQuestion, bend: Bend, { punch }: ToolPair): FitProblem | null {
+  if (punch.tipRadius <= bend.insideRadius + MEANT_CONTACT_MM) return null;
+  return {
+    kind: "radius", tools: [punch.id], off: punch.tipRadius / Math.max(bend.insideRadius, 0.01),
+    message: `the tip of ${punch.id} has a radius of ${formatLength(punch.tipRadius, units)}, larger than the ${formatLength(bend.insideRadius, units)} inside bend ${bend.id}; ${formatLength(bend.insideRadius, units)} or less is needed`,
   };
 }
 
@@ -76,7 +84,7 @@ function piecesProblem({ runs, units }: FitQuestion, bend: Bend, { punch, die }:
   };
 }
 
-function wishes({ part, units, vOpening }: FitQuestion, bend: Bend, { punch, die }: ToolPair): readonly FitProblem[] {
+function wishes({ part, units, vOpening }: FitQuestion, bend: Bend, { die }: ToolPair): readonly FitProblem[] {
   const found: FitProblem[] = [];
   const asked = bend.radiusSource === "document";
   const gives = naturalRadius(part.material, die.vOpening);
@@ -87,9 +95,6 @@ function wishes({ part, units, vOpening }: FitQuestion, bend: Bend, { punch, die
   }
   if (off > Math.log(WISHED_RATIO) && !asked && vOpening !== null) {
     found.push({ kind: "tool-choice", tools: [die.id], off, message: `${die.id} has a V of ${formatLength(die.vOpening, units)}; the usual one for ${formatLength(part.thickness, units)} is ${formatLength(vOpeningRule(part.thickness), units)}` });
-  }
-  if (punch.tipRadius > bend.insideRadius + MEANT_CONTACT_MM) {
-    found.push({ kind: "radius", tools: [punch.id], off: punch.tipRadius - bend.insideRadius, message: `the tip of ${punch.id} has a radius of ${formatLength(punch.tipRadius, units)}; bend ${bend.id} asks for ${formatLength(bend.insideRadius, units)} inside` });
   }
   return found;
 }
