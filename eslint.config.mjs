@@ -41,7 +41,7 @@ const env = {
   message: "process.env is read in lib/env.ts only.",
 };
 
-export default [
+const config = [
   { ignores: [".next/**", "node_modules/**", ".data/**", "next-env.d.ts", "test-results/**", "playwright-report/**", "public/**"] },
   ...nextVitals,
   ...nextTypescript,
@@ -78,3 +78,5 @@ export default [
     rules: { "no-restricted-imports": ["error", { patterns: ["three", "three/*", "@react-three/*", "knex", "pg"] }] },
   },
 ];
+
+export default config;
