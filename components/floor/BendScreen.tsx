@@ -32,7 +32,7 @@ export function BendScreen({ view, step, onStep }: BendScreenProps) {
 
 function SolidStep({ view, step, onStep }: BendScreenProps) {
   const model = useMemo(() => planModel(view.source), [view.source]);
-  return <StepStage model={model} step={step.number - 1} onStep={onStep} theme="dark" className="flex min-h-0 grow flex-col border-2 border-rule-strong bg-sheet" />;
+  return <StepStage model={model} step={step.number - 1} onStep={onStep} theme="dark" large className="flex min-h-0 grow flex-col border-2 border-rule-strong bg-sheet" />;
 }
 
 function Picture({ title, children }: { readonly title: string; readonly children: React.ReactNode }) {

@@ -28,7 +28,7 @@ export function ProfileMesh({ profile, from, to, x = 0, y, colour, line, clip, g
   return (
     <group position={[x, y, from]}>
       <mesh geometry={solid} renderOrder={glass ? 2 : 0}>
-        <meshStandardMaterial color={colour} metalness={0.35} roughness={0.5} side={DoubleSide} clippingPlanes={planes} transparent={glass} opacity={glass ? 0.22 : 1} depthWrite={!glass}
+        <meshStandardMaterial color={colour} metalness={0.1} roughness={0.6} side={DoubleSide} clippingPlanes={planes} transparent={glass} opacity={glass ? 0.22 : 1} depthWrite={!glass}
           polygonOffset polygonOffsetFactor={1} polygonOffsetUnits={1} />
       </mesh>
       <lineSegments geometry={edges}><lineBasicMaterial color={line} clippingPlanes={planes} transparent={glass} opacity={glass ? 0.35 : 0.8} /></lineSegments>

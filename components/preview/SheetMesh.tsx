@@ -42,7 +42,7 @@ function SheetMaterials({ theme, clip }: Pick<PieceProps, "theme" | "clip">) {
   const colours = stageColours[theme];
   const planes = clip ? [...clip] : null;
   return [colours.sideA, colours.sideB, colours.edge].map((colour, index) => (
-    <meshStandardMaterial key={index} attach={`material-${index}`} color={colour} metalness={index === 2 ? 0 : 0.25} roughness={0.55} side={DoubleSide} clippingPlanes={planes}
+    <meshStandardMaterial key={index} attach={`material-${index}`} color={colour} metalness={index === 2 ? 0 : 0.1} roughness={0.6} side={DoubleSide} clippingPlanes={planes}
       polygonOffset polygonOffsetFactor={1} polygonOffsetUnits={1} />
   ));
 }

@@ -20,7 +20,8 @@ export function StageCanvas({ theme, label, onLost, children }: StageCanvasProps
       }}>
       <color attach="background" args={[stageColours[theme].ground]} />
       <hemisphereLight args={["#ffffff", "#b8b2a4", 1.6]} />
-      <directionalLight position={[-600, 900, 500]} intensity={1.7} />
+      <directionalLight position={[-900, 700, 300]} intensity={1.5} />
+      <directionalLight position={[-100, 300, 900]} intensity={0.9} />
       <directionalLight position={[500, 300, -700]} intensity={0.7} />
       {children}
     </Canvas>

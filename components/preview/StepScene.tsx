@@ -1,6 +1,7 @@
 "use client";
 import { useMemo } from "react";
 import { Plane, Vector3 } from "three";
+import type { Vec3 } from "@/bending/geometry/vec3";
 import { gaugedEdge } from "@/lib/sheet/gaugedEdge";
 import type { PlanModel, StepModel } from "@/lib/sheet/planModel";
 import { sectionPlane } from "@/lib/sheet/sectionPlane";
@@ -29,6 +30,8 @@ export interface StepSceneProps {
   readonly onLost: () => void;
 }
 
+const between = (a: Vec3, b: Vec3): Vec3 => [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2, (a[2] + b[2]) / 2];
+
 /** One moment of a step, in the machine. */
 export default function StepScene({ model, step, at, preset, section, theme, label, onLost }: StepSceneProps) {
   const { angle, lift } = strokeAt(at, step.demanded, step.finished);
@@ -45,7 +48,7 @@ export default function StepScene({ model, step, at, preset, section, theme, lab
       <SheetMesh part={model.part} frames={moment.frames} angles={moment.angles} theme={theme} clip={clip} />
       <ToolMeshes model={model} step={step} tip={tip} theme={theme} clip={clip} />
       {section ? <SectionCaps model={model} step={step} moment={moment} tip={tip} plane={plane} theme={theme} /> : null}
-      {edge ? <EdgeMark from={edge[0]} to={edge[1]} radius={Math.max(1, model.part.thickness * 0.7, target.radius * 0.008)} colour={stageColours[theme].mark} /> : null}
+      {edge ? <EdgeMark from={between(edge[0], edge[3])} to={between(edge[1], edge[2])} radius={Math.max(1, model.part.thickness * 0.8, target.radius * 0.009)} colour={stageColours[theme].mark} /> : null}
     </StageCanvas>
   );
 }

@@ -21,11 +21,13 @@ interface StepStageProps {
   readonly step: number;
   readonly onStep: (step: number) => void;
   readonly theme?: StageTheme;
+  /** At the brake: only play and scrub, in sizes for gloves. */
+  readonly large?: boolean;
   readonly className?: string;
 }
 
 /** The machine at every moment of every step: scrub, play, orbit, cut open; in 3D or drawn. Space plays, arrows scrub, page keys change the step. */
-export function StepStage({ model, step, onStep, theme = "light", className }: StepStageProps) {
+export function StepStage({ model, step, onStep, theme = "light", large = false, className }: StepStageProps) {
   const able = useHasWebGl();
   const [lost, setLost] = useState(false);
   const [look, setLook] = useState<StageLook>({ preset: "3d", section: false, drawn: false });
@@ -36,7 +38,7 @@ export function StepStage({ model, step, onStep, theme = "light", className }: S
   const drawn = <DrawnStep model={model} step={current} at={stroke.at} number={step + 1} />;
   return (
     <div className={className ?? "flex flex-col border border-rule-strong bg-sheet"} onKeyDown={(event) => onKey(event, stroke, step, model.steps.length, onStep)}>
-      <StageBar look={look} onLook={setLook} canDraw3d={canDraw3d} />
+      {large ? null : <StageBar look={look} onLook={setLook} canDraw3d={canDraw3d} />}
       <div className="relative min-h-72 grow overflow-hidden outline-offset-[-3px]" tabIndex={0} role="group" aria-label={`Step ${step + 1} of ${model.steps.length}: space plays, left and right scrub, page keys change the step`}>
         <div className="absolute inset-0">
           {able === null ? null : !canDraw3d || look.drawn ? drawn : (
@@ -49,7 +51,7 @@ export function StepStage({ model, step, onStep, theme = "light", className }: S
         </div>
         <StageSigns model={model} step={current} number={step + 1} />
       </div>
-      <StrokeBar stroke={stroke} step={step} steps={model.steps.length} onStep={onStep} demanded={current.demanded} finished={current.finished} />
+      <StrokeBar large={large} stroke={stroke} step={step} steps={model.steps.length} onStep={onStep} demanded={current.demanded} finished={current.finished} />
     </div>
   );
 }
