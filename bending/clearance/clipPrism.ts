@@ -1,16 +1,17 @@
 /** What the clip found: `separation` > 0 when a side of the piece parts them, else the z-extent of what they share (empty when from > to). */
 export interface Clipped {
+  /** Below 0: how far the piece would have to move, across one of its sides, to come free. */
   separation: number;
   from: number;
   to: number;
-  /** How far in the deepest shared corner lies, mm. */
-  depth: number;
 }
 
-/** Corners that a clipped side of a prism can have; a face's convex piece has at most as many less the piece's sides. */
+/** Corners that a clipped side of a prism can have: its own and one more for each half-plane. */
 const MOST = 4096;
 let source = new Float64Array(3 * MOST);
 let target = new Float64Array(3 * MOST);
+/** The half-planes that cut the prism at all (nx, ny, c with the lift in it). */
+const cutting = new Float64Array(3 * MOST);
 
 /**
  * A convex prism against a convex piece of a profile swept along z. The shared solid's z-extent is reached on the prism's
@@ -21,54 +22,64 @@ let target = new Float64Array(3 * MOST);
 export function clipPrism(points: Float64Array, count: number, planes: Float64Array, lift: number, out: Clipped): void {
   out.from = Infinity;
   out.to = -Infinity;
-  out.depth = 0;
-  out.separation = separation(points, count, planes, lift);
+  const cuts = separate(points, planes, lift, out);
   if (out.separation > 0) return;
-  clipSide(points, planes, lift, out, count, (i) => i);
-  clipSide(points, planes, lift, out, count, (i) => count + i);
+  for (let first = 0; first <= 3 * count; first += 3 * count) {
+    for (let i = 0; i < 3 * count; i++) source[i] = points[first + i] as number;
+    clipSide(count, cuts, out);
+  }
   for (let k = 0; k < count; k++) {
-    const next = (k + 1) % count;
-    clipSide(points, planes, lift, out, 4, (i) => (i === 0 ? k : i === 1 ? next : i === 2 ? count + next : count + k));
+    const [here, next] = [3 * k, 3 * ((k + 1) % count)];
+    for (let j = 0; j < 3; j++) {
+      source[j] = points[here + j] as number;
+      source[3 + j] = points[next + j] as number;
+      source[6 + j] = points[3 * count + next + j] as number;
+      source[9 + j] = points[3 * count + here + j] as number;
+    }
+    clipSide(4, cuts, out);
   }
 }
 
-function separation(points: Float64Array, count: number, planes: Float64Array, lift: number): number {
+/** Writes the widest separation, and gives how many half-planes cut the prism. */
+function separate(points: Float64Array, planes: Float64Array, lift: number, out: Clipped): number {
   let widest = -Infinity;
+  let cuts = 0;
   for (let p = 0; p < planes.length; p += 3) {
-    const [nx, ny] = [planes[p] as number, planes[p + 1] as number];
+    const nx = planes[p] as number;
+    const ny = planes[p + 1] as number;
     const c = (planes[p + 2] as number) + ny * lift;
     let least = Infinity;
-    for (let i = 0; i < 6 * count; i += 3) {
+    let most = -Infinity;
+    for (let i = 0; i < points.length; i += 3) {
       const off = nx * (points[i] as number) + ny * (points[i + 1] as number) - c;
       if (off < least) least = off;
+      if (off > most) most = off;
     }
     if (least > widest) widest = least;
+    if (most > 0) {
+      cutting[cuts] = nx;
+      cutting[cuts + 1] = ny;
+      cutting[cuts + 2] = c;
+      cuts += 3;
+    }
   }
-  return widest;
+  out.separation = widest;
+  return cuts;
 }
 
-/** Sutherland and Hodgman's clip of one side of the prism, in x and y, with z carried along. */
-function clipSide(points: Float64Array, planes: Float64Array, lift: number, out: Clipped, count: number, corner: (i: number) => number): void {
-  for (let i = 0; i < count; i++) {
-    const from = 3 * corner(i);
-    for (let j = 0; j < 3; j++) source[3 * i + j] = points[from + j] as number;
-  }
+/** Sutherland and Hodgman's clip of the side in `source`, in x and y, with z carried along. */
+function clipSide(count: number, cuts: number, out: Clipped): void {
   let left = count;
-  for (let p = 0; p < planes.length && left > 0; p += 3) {
-    left = cut(left, planes[p] as number, planes[p + 1] as number, (planes[p + 2] as number) + (planes[p + 1] as number) * lift);
-    [source, target] = [target, source];
+  for (let p = 0; p < cuts && left > 0; p += 3) {
+    left = cut(left, cutting[p] as number, cutting[p + 1] as number, cutting[p + 2] as number);
+    const swap = source;
+    source = target;
+    target = swap;
   }
-  for (let i = 0; i < 3 * left; i += 3) {
-    const z = source[i + 2] as number;
+  for (let i = 2; i < 3 * left; i += 3) {
+    const z = source[i] as number;
     if (z < out.from) out.from = z;
     if (z > out.to) out.to = z;
-    let depth = Infinity;
-    for (let p = 0; p < planes.length; p += 3) {
-      const ny = planes[p + 1] as number;
-      const inside = (planes[p + 2] as number) + ny * lift - (planes[p] as number) * (source[i] as number) - ny * (source[i + 1] as number);
-      if (inside < depth) depth = inside;
-    }
-    if (depth > out.depth) out.depth = depth;
   }
 }
 
@@ -77,23 +88,22 @@ function cut(count: number, nx: number, ny: number, c: number): number {
   let kept = 0;
   let previous = 3 * (count - 1);
   let offPrevious = nx * (source[previous] as number) + ny * (source[previous + 1] as number) - c;
-  for (let i = 0; i < count; i++) {
-    const here = 3 * i;
+  for (let here = 0; here < 3 * count; here += 3) {
     const off = nx * (source[here] as number) + ny * (source[here + 1] as number) - c;
     if (off <= 0 !== offPrevious <= 0) {
       const share = offPrevious / (offPrevious - off);
       for (let j = 0; j < 3; j++) {
         const from = source[previous + j] as number;
-        target[3 * kept + j] = from + share * ((source[here + j] as number) - from);
+        target[kept + j] = from + share * ((source[here + j] as number) - from);
       }
-      kept++;
+      kept += 3;
     }
     if (off <= 0) {
-      for (let j = 0; j < 3; j++) target[3 * kept + j] = source[here + j] as number;
-      kept++;
+      for (let j = 0; j < 3; j++) target[kept + j] = source[here + j] as number;
+      kept += 3;
     }
     previous = here;
     offPrevious = off;
   }
-  return kept;
+  return kept / 3;
 }

@@ -8,6 +8,7 @@ import type { Die, Punch } from "../tooling/tool";
 import { accessShapes, type AccessMotion, type AccessShapes } from "./accessMotion";
 import type { ClearanceHit } from "./clearance";
 import type { Shape } from "./convexPiece";
+import { createKeys } from "./createKeys";
 import type { Obstacles } from "./createObstacles";
 import type { FaceMeeting, HitTable } from "./hitTable";
 import { NO_MEETING, type Meeting } from "./meeting";
@@ -36,79 +37,94 @@ const EVERYWHERE: Interval = [-1e6, 1e6];
  * counts as trapped.
  */
 export function createAccess(thickness: Mm, machine: Machine, margin: Mm, obstacles: Obstacles, count: () => void): Access {
-  const shapes = new Map<string, AccessShapes>();
-  const ways = new WeakMap<HitTable, Map<string, Way>>();
+  const situations = new WeakMap<object, AccessSituation>();
+  const shapes = new WeakMap<object, AccessShapes>();
+  const keys = createKeys();
 
-  const poseOf = (table: HitTable, punch: Punch, die: Die, angle: Rad) => {
+  const situationOf = (table: HitTable, punch: Punch, die: Die, angle: Rad): AccessSituation => {
+    const key = keys(table, punch, die, angle);
+    const known = situations.get(key);
+    if (known) return known;
     const { depth, tipHeight } = strokePlacement(table.bend, thickness, die, angle);
-    return { depth, tipHeight, opening: Math.max(0, Math.min(machine.stroke, machine.daylight - punch.height - die.height - tipHeight)) };
+    const opening = Math.max(0, Math.min(machine.stroke, machine.daylight - punch.height - die.height - tipHeight));
+    const made = { angle, tipHeight, opening, motions: motionsFor(depth + 2 * margin, opening - 2 * margin), ways: new Map<number, Way>() };
+    situations.set(key, made);
+    return made;
   };
-  const met = (table: HitTable, formed: number, punch: Punch, die: Die, obstacle: Obstacle, angle: Rad, motion: AccessMotion): readonly FaceMeeting[] => {
-    const { tipHeight, opening } = poseOf(table, punch, die, angle);
-    const base = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - tipHeight;
-    const key = `${motion.kind}/${motion.lift}/${obstacle.key}/${base}/${opening}/${angle}`;
-    const passing = shapes.get(key) ?? accessShapes(motion, obstacle, base, opening, margin);
-    shapes.set(key, passing);
-    return table.ask(key, formed, (path, prisms): Meeting => {
-      const at = (shape: Shape): Meeting => shape.length === 0 ? NO_MEETING : meetStroke({
-        bend: table.bend, thickness, prisms, inFront: path.inFront, shape, lift: () => 0, from: angle / 2, to: angle / 2, steps: 0, margin, count,
+  const met = (table: HitTable, formed: number, at: AccessSituation, obstacle: Obstacle, motion: AccessMotion): readonly FaceMeeting[] => {
+    const base = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - at.tipHeight;
+    const place = keys(obstacle, motion.kind, motion.lift, base, at.opening);
+    let passing = shapes.get(place);
+    if (!passing) {
+      passing = accessShapes(motion, obstacle, base, at.opening, margin);
+      shapes.set(place, passing);
+    }
+    const { everywhere, passed } = passing;
+    return table.ask(keys(passing, at.angle), formed, (path, plates): Meeting => {
+      const meet = (shape: Shape): Meeting => shape.length === 0 ? NO_MEETING : meetStroke({
+        bend: table.bend, thickness, plates, inFront: path.inFront, shape, lift: () => 0, from: at.angle / 2, to: at.angle / 2, steps: 0, margin, count,
       });
-      const everywhere = at(passing.everywhere);
-      return everywhere.intervals.length ? { ...everywhere, intervals: [EVERYWHERE] } : at(passing.passed);
+      const anywhere = meet(everywhere);
+      return anywhere.intervals.length ? { ...anywhere, intervals: [EVERYWHERE] } : meet(passed);
     });
   };
-  const way = (table: HitTable, formed: number, punch: Punch, die: Die, angle: Rad): Way => {
-    const known = ways.get(table) ?? new Map<string, Way>();
-    ways.set(table, known);
-    const key = `${obstacles.number(punch)}/${obstacles.number(die)}/${angle}/${formed & allBends(table)}`;
-    const kept = known.get(key);
+  const way = (table: HitTable, formed: number, punch: Punch, die: Die, at: AccessSituation): Way => {
+    const state = formed & allBends(table);
+    const kept = at.ways.get(state);
     if (kept) return kept;
-    const found = findWay(poseOf(table, punch, die, angle), margin, table.lines, (motion) => ({
-      tools: [obstacles.ofTool(punch, punch, die), obstacles.ofTool(die, punch, die)].flatMap((tool) => met(table, formed, punch, die, tool, angle, motion)),
-      machine: [obstacles.ram(punch), obstacles.bed(die)].flatMap((thing) => met(table, formed, punch, die, thing, angle, motion)),
-    }));
-    known.set(key, found);
+    const tools = [obstacles.ofTool(punch, punch, die), obstacles.ofTool(die, punch, die)];
+    const fixed = [obstacles.ram(punch), obstacles.bed(die)];
+    const found = findWay(at.motions, table.lines, (motion, of) => (of === "tools" ? tools : fixed).flatMap((thing) => met(table, formed, at, thing, motion)));
+    at.ways.set(state, found);
     return found;
   };
   return {
     meetings: (table, formed, punch, die, obstacle, end) => [rad(0), end].flatMap((angle) => {
-      const { motion } = way(table, formed, punch, die, angle);
-      return motion ? met(table, formed, punch, die, obstacle, angle, motion) : [];
+      const at = situationOf(table, punch, die, angle);
+      const { motion } = way(table, formed, punch, die, at);
+      return motion ? met(table, formed, at, obstacle, motion) : [];
     }),
     trapped: (table, formed, punch, die, end) => [rad(0), end].flatMap((angle) => {
-      const { motion, blocking } = way(table, formed, punch, die, angle);
+      const { motion, blocking } = way(table, formed, punch, die, situationOf(table, punch, die, angle));
       return motion ? [] : trappedHits(blocking, angle);
     }),
   };
+}
+
+/** One moment with one pair of tools: what does not depend on the other bends. */
+interface AccessSituation {
+  readonly angle: Rad;
+  readonly tipHeight: number;
+  readonly opening: number;
+  readonly motions: readonly AccessMotion[];
+  readonly ways: Map<number, Way>;
 }
 
 function allBends(table: HitTable): number {
   return table.paths.reduce((mask, path) => mask | path.mask, 0);
 }
 
-function findWay(
-  pose: { readonly depth: number; readonly opening: number },
-  margin: Mm,
-  lines: readonly Interval[],
-  meet: (motion: AccessMotion) => { readonly tools: readonly FaceMeeting[]; readonly machine: readonly FaceMeeting[] },
-): Way {
-  const lift = pose.depth + 2 * margin;
-  const high = pose.opening - 2 * margin;
-  const lifts = [lift, high].filter((by, i) => by >= lift && by <= high && (i === 0 || by > lift));
-  const motions: readonly AccessMotion[] = [
-    ...lifts.map((by): AccessMotion => ({ kind: "pull", lift: by })),
-    ...lifts.map((by): AccessMotion => ({ kind: "slide", lift: by })),
+/** `low`: just out of the die; `high`: as far as the open ram lets it. */
+function motionsFor(low: number, high: number): readonly AccessMotion[] {
+  const lifts = [low, high].filter((by, i) => by >= low && by <= high && (i === 0 || by > low));
+  return [
+    ...lifts.map((lift): AccessMotion => ({ kind: "pull", lift })),
+    ...lifts.map((lift): AccessMotion => ({ kind: "slide", lift })),
     { kind: "closed", lift: 0 },
   ];
+}
+
+function findWay(motions: readonly AccessMotion[], lines: readonly Interval[], meet: (motion: AccessMotion, of: "tools" | "machine") => readonly FaceMeeting[]): Way {
   const length = measure(lines);
   let best: { readonly motion: AccessMotion; readonly covered: number } | null = null;
   const blocking: FaceMeeting[] = [];
   for (const motion of motions) {
-    const { tools, machine } = meet(motion);
-    const covered = machine.length ? length : measure(intersectIntervals(mergeIntervals(tools.flatMap(({ meeting }) => meeting.intervals)), mergeIntervals(lines)));
-    if (covered === 0 && !machine.length) return { motion, blocking: [] };
+    const fixed = meet(motion, "machine");
+    const tools = fixed.length ? [] : meet(motion, "tools");
+    const covered = fixed.length ? length : measure(intersectIntervals(mergeIntervals(tools.flatMap(({ meeting }) => meeting.intervals)), mergeIntervals(lines)));
+    if (covered === 0) return { motion, blocking: [] };
     if (covered < length - SAME_POINT_MM && (!best || covered < best.covered)) best = { motion, covered };
-    blocking.push(...tools, ...machine);
+    blocking.push(...tools, ...fixed);
   }
   return best ? { motion: best.motion, blocking: [] } : { motion: null, blocking };
 }

@@ -44,7 +44,7 @@ const near = (a: readonly Interval[], b: readonly Interval[]) => {
   });
 };
 
-describe("laws of clearance", () => {
+describe("laws of clearance", { timeout: 120_000 }, () => {
   it("a mirrored part has mirrored intervals, wherever its sheet lies", () => {
     fc.assert(fc.property(seeds, fc.nat(3), fc.double({ min: -500, max: 500, noNaN: true }), (seed, tool, shift) => {
       const dice = createDice(seed);
@@ -52,7 +52,7 @@ describe("laws of clearance", () => {
       const hit = randomHit(part, dice);
       const straight = ask(part, hit, tools[tool]);
       near(ask(mirrored(part, shift), hit, tools[tool]), straight.map(([from, to]): Interval => [-to, -from]).reverse());
-    }), { numRuns: 60 });
+    }), { numRuns: 40 });
   });
 
   it("more clearance never frees anything", () => {

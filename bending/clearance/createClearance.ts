@@ -9,6 +9,7 @@ import type { Die, Punch } from "../tooling/tool";
 import { createAccess } from "./createAccess";
 import type { Clearance, ClearanceHit, ClearanceOptions } from "./clearance";
 import { clearanceHit } from "./clearanceHit";
+import { createKeys } from "./createKeys";
 import { createObstacles } from "./createObstacles";
 import type { Hit } from "./hit";
 import { hitTable, type FaceMeeting, type HitTable } from "./hitTable";
@@ -32,11 +33,12 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
   const clip = () => { counts.clips++; };
   const obstacles = createObstacles(machine, margin);
   const pieces = part.faces.map((face) => convexPieces(face.outline, face.holes));
-  const tables = new Map<string, HitTable>();
+  const tables = new Map<object, HitTable>();
+  const keys = createKeys();
   const access = createAccess(part.thickness, machine, margin, obstacles, clip);
 
   const tableOf = (hit: Hit): HitTable => {
-    const key = `${hit.bends.join(",")}|${hit.front}`;
+    const key = keys(hit.front, ...hit.bends);
     const known = tables.get(key);
     if (known) return known;
     const bend = part.bends[hit.bends[0] ?? -1];
@@ -55,11 +57,10 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     const end = demanded(hit, die);
     const place = obstacle.on === "ram" ? () => obstacle.lift
       : (h: number) => obstacle.lift - strokePlacement(bend, part.thickness, die, (2 * h) as Rad).tipHeight;
-    const key = obstacle.on === "ram" ? `${obstacle.key}/${end}` : `${obstacle.key}/${obstacles.number(die)}/${end}`;
-    return table.ask(key, hit.formed, (path, prisms) => {
-      const reach = { a: hull(prisms.map((prism) => prism.a)), b: hull(prisms.map((prism) => prism.b)) };
-      const steps = strokeSamples(bend, part.thickness, obstacle.on === "ram" ? null : die, reach, end, margin);
-      return meetStroke({ bend, thickness: part.thickness, prisms, inFront: path.inFront, shape: obstacle.shape, lift: place, from: 0, to: end / 2, steps, margin, count: clip });
+    const key = keys(obstacle, obstacle.on === "ram" ? null : die, end);
+    return table.ask(key, hit.formed, (path, plates) => {
+      const steps = strokeSamples(bend, part.thickness, obstacle.on === "ram" ? null : die, plates, end, margin);
+      return meetStroke({ bend, thickness: part.thickness, plates, inFront: path.inFront, shape: obstacle.shape, lift: place, from: 0, to: end / 2, steps, margin, count: clip });
     });
   };
   const check = (hit: Hit, punch: Punch, die: Die, obstacle: Obstacle): { readonly hits: readonly ClearanceHit[]; readonly intervals: readonly Interval[] } => {
@@ -85,8 +86,4 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     },
     counts: () => ({ ...counts }),
   };
-}
-
-function hull(ranges: readonly (readonly [number, number])[]): readonly [number, number] {
-  return [Math.min(...ranges.map((range) => range[0])), Math.max(...ranges.map((range) => range[1]))];
 }

@@ -1,14 +1,13 @@
 import type { Mm } from "../core/units";
 import type { Machine } from "../tooling/machine";
 import type { Die, Punch, Tool } from "../tooling/tool";
+import type { Shape } from "./convexPiece";
 import { dieShape } from "./dieShape";
 import type { Obstacle } from "./obstacle";
 import { punchShape } from "./punchShape";
 import { shapeOf } from "./shapeOf";
 
 export interface Obstacles {
-  /** A number for a tool, the same for the same object. */
-  number(tool: Tool): number;
   ofTool(tool: Tool, punch: Punch, die: Die): Obstacle;
   ram(punch: Punch): Obstacle;
   bed(die: Die): Obstacle;
@@ -16,22 +15,27 @@ export interface Obstacles {
 
 /** Tools, ram and bed as obstacles. All punches hang at one seat and all dies stand on one, so a higher neighbour reaches farther in. */
 export function createObstacles(machine: Machine, margin: Mm): Obstacles {
-  const known = new Map<Tool, { readonly number: number; readonly shape: Obstacle["shape"] }>();
+  const shapes = new Map<Tool, Shape>();
   const ramShape = shapeOf(machine.ramProfile, margin, null);
   const bedShape = shapeOf(machine.bedProfile, margin, null);
-  const look = (tool: Tool) => {
-    const found = known.get(tool) ?? { number: known.size, shape: tool.kind === "punch" ? punchShape(tool, margin) : dieShape(tool, margin) };
-    known.set(tool, found);
+  const known = new Map<Tool | "ram" | "bed", Map<number, Obstacle>>();
+  const once = (what: Tool | "ram" | "bed", lift: number, make: () => Omit<Obstacle, "lift">): Obstacle => {
+    const placed = known.get(what) ?? new Map<number, Obstacle>();
+    known.set(what, placed);
+    const found = placed.get(lift) ?? { ...make(), lift };
+    placed.set(lift, found);
+    return found;
+  };
+  const shape = (tool: Tool): Shape => {
+    const found = shapes.get(tool) ?? (tool.kind === "punch" ? punchShape(tool, margin) : dieShape(tool, margin));
+    shapes.set(tool, found);
     return found;
   };
   return {
-    number: (tool) => look(tool).number,
-    ofTool: (tool, punch, die) => {
-      const { number, shape } = look(tool);
-      const lift = tool.kind === "punch" ? punch.height - tool.height : tool.height - die.height;
-      return { kind: tool.kind, tool: tool.id, key: `${number}/${lift}`, shape, on: tool.kind === "punch" ? "ram" : "bed", lift };
-    },
-    ram: (punch) => ({ kind: "ram", tool: null, key: `ram/${punch.height}`, shape: ramShape, on: "ram", lift: punch.height }),
-    bed: (die) => ({ kind: "bed", tool: null, key: `bed/${die.height}`, shape: bedShape, on: "bed", lift: -die.height }),
+    ofTool: (tool, punch, die) =>
+      once(tool, tool.kind === "punch" ? punch.height - tool.height : tool.height - die.height,
+        () => ({ kind: tool.kind, tool: tool.id, shape: shape(tool), on: tool.kind === "punch" ? "ram" : "bed" })),
+    ram: (punch) => once("ram", punch.height, () => ({ kind: "ram", tool: null, shape: ramShape, on: "ram" })),
+    bed: (die) => once("bed", -die.height, () => ({ kind: "bed", tool: null, shape: bedShape, on: "bed" })),
   };
 }

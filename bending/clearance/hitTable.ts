@@ -4,7 +4,7 @@ import type { Bend, PartModel } from "../part/partModel";
 import { facePaths, type FacePath } from "./facePath";
 import type { Hit } from "./hit";
 import type { Meeting } from "./meeting";
-import type { Prism } from "./prism";
+import { platesOf, type Plates } from "./plates";
 import { prismsOf } from "./prismsOf";
 
 /** What one face meets: the face, the state of the bends that decide it, and the meeting. */
@@ -20,42 +20,46 @@ export interface HitTable {
   readonly paths: readonly FacePath[];
   /** The bend lines, from the middle of the hit. */
   readonly lines: readonly Interval[];
-  prisms(path: FacePath, formed: number): readonly Prism[];
+  plates(path: FacePath, formed: number): Plates;
   /** Every face that meets something, asked once for each question (`key`) and each state of the bends on the face's path. */
-  ask(key: string, formed: number, answer: (path: FacePath, prisms: readonly Prism[]) => Meeting): readonly FaceMeeting[];
+  ask(key: object, formed: number, answer: (path: FacePath, plates: Plates) => Meeting): readonly FaceMeeting[];
 }
 
 /** A table for one hit. A face's place depends only on the bends on its path, so answers are kept by those bits alone. */
 export function hitTable(part: PartModel, hit: Hit, bend: Bend, pieces: readonly (readonly (readonly Vec2[])[])[], count: () => void): HitTable {
   const paths = facePaths(part, hit);
-  const plates = paths.map(() => new Map<number, readonly Prism[]>());
-  const answers = new Map<string, Map<number, FaceMeeting>[]>();
-  const prismsAt = (i: number, path: FacePath, state: number): readonly Prism[] => {
-    const known = plates[i]?.get(state);
+  const made = paths.map(() => new Map<number, Plates>());
+  const answers = new Map<object, Map<number, FaceMeeting>[]>();
+  const platesAt = (i: number, path: FacePath, state: number): Plates => {
+    const known = made[i]?.get(state);
     if (known) return known;
-    const made = prismsOf(part, path, state, pieces[path.face] ?? []);
-    plates[i]?.set(state, made);
-    return made;
+    const plates = platesOf(prismsOf(part, path, state, pieces[path.face] ?? []));
+    made[i]?.set(state, plates);
+    return plates;
   };
   return {
     bend,
     paths,
     lines: hit.bends.flatMap((which) => lineOf(part, paths, which)),
-    prisms: (path, formed) => prismsAt(paths.indexOf(path), path, formed & path.mask),
+    plates: (path, formed) => platesAt(paths.indexOf(path), path, formed & path.mask),
     ask: (key, formed, answer) => {
-      const columns = answers.get(key) ?? paths.map(() => new Map<number, FaceMeeting>());
-      answers.set(key, columns);
+      let columns = answers.get(key);
+      if (!columns) {
+        columns = paths.map(() => new Map<number, FaceMeeting>());
+        answers.set(key, columns);
+      }
       const met: FaceMeeting[] = [];
-      paths.forEach((path, i) => {
+      for (let i = 0; i < paths.length; i++) {
+        const path = paths[i] as FacePath;
         const state = formed & path.mask;
         let known = columns[i]?.get(state);
         if (!known) {
           count();
-          known = { path, state, meeting: answer(path, prismsAt(i, path, state)) };
+          known = { path, state, meeting: answer(path, platesAt(i, path, state)) };
           columns[i]?.set(state, known);
         }
         if (known.meeting.intervals.length) met.push(known);
-      });
+      }
       return met;
     },
   };

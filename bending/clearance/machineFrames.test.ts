@@ -12,7 +12,7 @@ const punch = straightPunch("P88");
 const die = vDie("V16");
 const cross = (a: Vec3, b: Vec3): Vec3 => [a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]];
 
-describe("machineFrames", () => {
+describe("machineFrames", { timeout: 120_000 }, () => {
   it("turns the part without mirroring it, puts the front face in front, and lays both wings on the shoulder circles", () => {
     fc.assert(fc.property(fc.integer({ min: 1, max: 5000 }), fc.double({ min: 0, max: 1, noNaN: true }), (seed, share) => {
       const dice = createDice(seed);

@@ -20,7 +20,7 @@ export function meetOwnZone(part: PartModel, table: HitTable, die: Die, obstacle
   const steps = Math.max(8, Math.ceil((die.vOpening + bend.allowance) / margin));
   const found: Interval[] = [];
   let [first, depth] = [Infinity, 0];
-  const clipped: Clipped = { separation: 0, from: 0, to: 0, depth: 0 };
+  const clipped: Clipped = { separation: 0, from: 0, to: 0 };
   for (let sample = 0; sample <= steps; sample++) {
     const angle = ((end * sample) / steps) as Rad;
     const lift = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - strokePlacement(bend, part.thickness, die, angle).tipHeight;
@@ -30,7 +30,7 @@ export function meetOwnZone(part: PartModel, table: HitTable, die: Die, obstacle
         if (clipped.separation > 0 || clipped.from > clipped.to) continue;
         found.push([clipped.from - margin, clipped.to + margin]);
         first = Math.min(first, angle);
-        depth = Math.max(depth, clipped.depth);
+        depth = Math.max(depth, -clipped.separation);
       }
     }
   }

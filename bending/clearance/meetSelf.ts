@@ -49,7 +49,7 @@ function gapAt(question: SelfQuestion, front: readonly Prism[], back: readonly P
   const pose = wingPose(question.bend, question.thickness, h);
   const place = (prism: Prism, inFront: boolean): Float64Array => {
     const into = new Float64Array(prism.points.length);
-    posePrism(prism, pose, inFront, into);
+    posePrism(prism.points, pose, inFront, into);
     return into;
   };
   const placed = back.map((prism) => place(prism, false));

@@ -4,7 +4,7 @@ import type { Interval } from "../geometry/interval";
 export interface Meeting {
   /** z-intervals from the hit's middle, kept off by the margin; sorted, apart; empty when nothing is met. */
   readonly intervals: readonly Interval[];
-  /** Angle turned through at which it is met first, and the depth of the deepest corner over the stroke. */
+  /** Angle turned through at which it is met first, and how far in the face was at the deepest sample looked at. */
   readonly strokeAngle: number;
   readonly depth: number;
 }

@@ -1,11 +1,9 @@
 import type { Shape } from "./convexPiece";
 
-/** Something on the ram or on the bed, placed against the tools that make the hit. */
+/** Something on the ram or on the bed, placed against the tools that make the hit; the same object for the same shape and place. */
 export interface Obstacle {
   readonly kind: "punch" | "die" | "ram" | "bed";
   readonly tool: string | null;
-  /** Names shape and place, so that answers can be kept. */
-  readonly key: string;
   readonly shape: Shape;
   /** Things on the ram move with the punch, things on the bed stand with the die. */
   readonly on: "ram" | "bed";

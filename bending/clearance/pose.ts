@@ -1,6 +1,5 @@
 import type { Mm } from "../core/units";
 import type { Bend } from "../part/partModel";
-import type { Prism } from "./prism";
 
 /** Where the wings stand, seen from the punch's tip (x to the back, y up). */
 export interface WingPose {
@@ -20,10 +19,9 @@ export function wingPose(bend: Bend, thickness: Mm, h: number): WingPose {
   return { sin, cos, x: neutral * (h < 1e-9 ? 1 : sin / h) + outer * sin, y: neutral * rise + outer * (1 - cos) - thickness };
 }
 
-/** Writes the corners of a prism into `into` (x, y, z a corner), seen from the punch's tip. */
-export function posePrism(prism: Prism, pose: WingPose, inFront: boolean, into: Float64Array): void {
+/** Turns corners of a prism (a, b, z each) into x, y, z seen from the punch's tip, written into `into`. */
+export function posePrism(points: Float64Array, pose: WingPose, inFront: boolean, into: Float64Array): void {
   const side = inFront ? -1 : 1;
-  const { points } = prism;
   for (let i = 0; i < points.length; i += 3) {
     const a = points[i] as number;
     const b = points[i + 1] as number;

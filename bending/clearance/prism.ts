@@ -3,6 +3,8 @@
  * a (away from the bend, from the tangent on the wing's outside surface), b (from the outside surface to the inside), z.
  */
 export interface Prism {
+  /** A piece of a face, or a facet of the bend zone beside it. */
+  readonly of: "face" | "zone";
   readonly count: number;
   readonly points: Float64Array;
   /** How the prism lies to its wing: `plane` in the wing's plane, `inside` on or over its outside surface, `outside` else. */

@@ -33,14 +33,14 @@ export function prismsOf(part: PartModel, path: FacePath, state: number, pieces:
     at = outward ? bend.child : bend.parent;
     if (k < path.bends.length - 1) return;
     const facets = bendFacets(part, index, angle, facetCount(part, bend, angle));
-    zone = facets.map((facet) => prism(part, path, outward ? near : frame, facet.outside, facet.inside));
+    zone = facets.map((facet) => prism("zone", part, path, outward ? near : frame, facet.outside, facet.inside));
   });
   const t = part.thickness;
-  const plates = pieces.map((piece) => prism(part, path, frame, piece.map(([x, y]): Vec3 => [x, y, 0]), piece.map(([x, y]): Vec3 => [x, y, t])));
+  const plates = pieces.map((piece) => prism("face", part, path, frame, piece.map(([x, y]): Vec3 => [x, y, 0]), piece.map(([x, y]): Vec3 => [x, y, t])));
   return [...plates, ...zone];
 }
 
-function prism(part: PartModel, path: FacePath, frame: Frame, one: readonly Vec3[], other: readonly Vec3[]): Prism {
+function prism(of: Prism["of"], part: PartModel, path: FacePath, frame: Frame, one: readonly Vec3[], other: readonly Vec3[]): Prism {
   const { bend, across, along, middle } = path.line;
   const [start] = bend.line;
   const sign = path.wingIsParent ? -1 : 1;
@@ -60,5 +60,5 @@ function prism(part: PartModel, path: FacePath, frame: Frame, one: readonly Vec3
   const range = (j: number): readonly [number, number] => [low[j] ?? 0, high[j] ?? 0];
   const b = range(1);
   const lies = b[0] < -MEANT_CONTACT_MM ? "outside" : b[1] > part.thickness + MEANT_CONTACT_MM ? "inside" : "plane";
-  return { count: one.length, points, lies, a: range(0), b, z: range(2) };
+  return { of, count: one.length, points, lies, a: range(0), b, z: range(2) };
 }

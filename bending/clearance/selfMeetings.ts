@@ -8,22 +8,23 @@ import { meetSelf } from "./meetSelf";
 import type { Prism } from "./prism";
 import { strokeSamples } from "./strokeSamples";
 
-const kept = new WeakMap<HitTable, Map<string, Meeting>>();
+const kept = new WeakMap<HitTable, Map<number, Meeting>[]>();
 
 /** Every pair of a front and a back face that meet in the stroke; kept by the state of the bends between the two. */
 export function selfMeetings(part: PartModel, table: HitTable, formed: number, margin: Mm, count: () => void): readonly ClearanceHit[] {
-  const known = kept.get(table) ?? new Map<string, Meeting>();
+  const { length } = table.paths;
+  const known = kept.get(table) ?? Array.from({ length: length * length }, () => new Map<number, Meeting>());
   kept.set(table, known);
   const hits: ClearanceHit[] = [];
   table.paths.forEach((front, i) => table.paths.forEach((back, j) => {
     if (!front.inFront || back.inFront) return;
     const mask = front.mask | back.mask;
-    const key = `${i},${j},${formed & mask}`;
-    let meeting = known.get(key);
+    const column = known[i * length + j];
+    let meeting = column?.get(formed & mask);
     if (!meeting) {
       count();
       meeting = pair(part, table, front, back, formed, margin);
-      known.set(key, meeting);
+      column?.set(formed & mask, meeting);
     }
     const [z] = meeting.intervals;
     if (z) hits.push({ kind: "self", face: front.face, otherFace: back.face, tool: null, strokeAngle: rad(meeting.strokeAngle), depth: mm(meeting.depth), z, mask, value: formed & mask, need: null });
@@ -33,15 +34,15 @@ export function selfMeetings(part: PartModel, table: HitTable, formed: number, m
 
 function pair(part: PartModel, table: HitTable, front: FacePath, back: FacePath, formed: number, margin: Mm): Meeting {
   const { bend } = table;
-  const [frontPrisms, backPrisms] = [table.prisms(front, formed), table.prisms(back, formed)];
+  const [frontPrisms, backPrisms] = [table.plates(front, formed).all, table.plates(back, formed).all];
   const speed = (prisms: readonly Prism[]) => Math.max(...prisms.map((prism) => strokeSamples(bend, part.thickness, null, prism, bend.angle, margin)));
   return meetSelf({
     bend,
     thickness: part.thickness,
     front: frontPrisms,
     back: backPrisms,
-    finishedFront: table.prisms(front, -1),
-    finishedBack: table.prisms(back, -1),
+    finishedFront: table.plates(front, -1).all,
+    finishedBack: table.plates(back, -1).all,
     to: bend.angle / 2,
     steps: speed(frontPrisms) + speed(backPrisms),
     margin,

@@ -10,7 +10,7 @@ import { strokeSamples } from "./strokeSamples";
 const bend = profilePart([60, 60], [90]).bends[0]!;
 const thickness = mm(2);
 
-describe("strokeSamples", () => {
+describe("strokeSamples", { timeout: 120_000 }, () => {
   it("lets no corner travel more than the margin between two samples, seen from the punch and from the die", () => {
     fc.assert(fc.property(
       fc.double({ min: -80, max: 400, noNaN: true }), fc.double({ min: -200, max: 200, noNaN: true }), fc.double({ min: 0.2, max: 2.4, noNaN: true }),
