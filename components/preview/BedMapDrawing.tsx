@@ -27,8 +27,8 @@ export function BedMapDrawing({ map, className, placed, step, close = false }: B
           <text x={(station.from + station.to) / 2} y={rows.title} textAnchor="middle" fontSize={unit * 1.3} fontWeight={700} fill="var(--ink)">{station.id}</text>
           <text x={(station.from + station.to) / 2} y={rows.punchName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.punch}</text>
           <text x={(station.from + station.to) / 2} y={rows.dieName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.die}</text>
-          <text x={station.from} y={rows.places} textAnchor="end" fontSize={unit * 0.9} fill="var(--ink-soft)" className="num">{station.fromText}</text>
-          <text x={station.to} y={rows.places} textAnchor="start" fontSize={unit * 0.9} fill="var(--ink-soft)" className="num">{station.toText}</text>
+          <text x={station.from} y={rows.places} textAnchor="end" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.fromText}</text>
+          <text x={station.to} y={rows.places} textAnchor="start" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.toText}</text>
         </g>
       ))}
       {bends.map((bend) => {

@@ -2,7 +2,8 @@ import type { Vec2 } from "@/bending/geometry/vec2";
 import { clipToBox, type Bounds } from "./clipToBox";
 import type { PictureLabel, PictureShape, StepPicture } from "./pictureShape";
 
-const round = (value: number): number => Math.round(value * 100) / 100;
+/** To 0.01, and never -0 (JSON has none). */
+const round = (value: number): number => Math.round(value * 100) / 100 + 0;
 const roundPoint = ([x, y]: Vec2): Vec2 => [round(x), round(y)];
 
 /** Cuts a drawing to its box and rounds it to 0.01 (it is stored with the sheet). Open lines are left whole. */
