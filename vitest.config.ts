@@ -4,6 +4,9 @@ export default defineConfig({
   resolve: { tsconfigPaths: true },
   test: {
     pool: "threads",
+    // Wide: a test says what is right, not how fast the machine under it is.
+    testTimeout: 60_000,
+    hookTimeout: 180_000,
     projects: [
       {
         extends: true,
