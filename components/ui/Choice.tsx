@@ -18,7 +18,7 @@ export function Choice<Value extends string>({ label, value, onChange, options, 
     <div className="min-w-0">
       {labelHidden ? null : <p aria-hidden className="mb-1 text-sm font-medium text-ink-soft">{label}</p>}
       <ToggleGroup.Root type="single" value={value} aria-label={label} onValueChange={(next) => { const found = options.find((option) => option.value === next); if (found) onChange(found.value); }}
-        className="inline-flex max-w-full flex-wrap rounded border border-rule-strong bg-sheet">
+        className={classes("inline-flex max-w-full rounded border border-rule-strong bg-sheet", !small && "flex-wrap")}>
         {options.map((option, index) => (
           <ToggleGroup.Item key={option.value} value={option.value} aria-label={option.name}
             className={classes("inline-flex items-center justify-center gap-1.5 hover:bg-wash data-[state=on]:bg-ink data-[state=on]:text-paper [&_svg]:size-4",

@@ -10,8 +10,8 @@ type NumberInputProps = FieldFrame & Omit<InputHTMLAttributes<HTMLInputElement>,
 };
 
 /** A number as people type it (text, so that `1/8` and `16 ga` can stand there); whoever owns it parses it. */
-export function NumberInput({ id, label, hint, error, labelHidden, className, unit, ...rest }: NumberInputProps) {
-  const frame = { id, label, hint, error, className, ...(labelHidden === undefined ? {} : { labelHidden }) };
+export function NumberInput({ id, label, hint, error, labelHidden, errorHidden, className, unit, ...rest }: NumberInputProps) {
+  const frame = { id, label, hint, error, className, ...(labelHidden === undefined ? {} : { labelHidden }), ...(errorHidden === undefined ? {} : { errorHidden }) };
   return (
     <Field {...frame}>
       <div className="relative">

@@ -14,8 +14,8 @@ interface SelectProps extends FieldFrame {
   readonly disabled?: boolean;
 }
 
-export function Select({ id, label, hint, error, labelHidden, className, value, onChange, options, placeholder, disabled = false }: SelectProps) {
-  const frame = { id, label, hint, error, className, ...(labelHidden === undefined ? {} : { labelHidden }) };
+export function Select({ id, label, hint, error, labelHidden, errorHidden, className, value, onChange, options, placeholder, disabled = false }: SelectProps) {
+  const frame = { id, label, hint, error, className, ...(labelHidden === undefined ? {} : { labelHidden }), ...(errorHidden === undefined ? {} : { errorHidden }) };
   return (
     <Field {...frame}>
       <Parts.Root value={value} onValueChange={onChange} disabled={disabled}>

@@ -10,9 +10,9 @@ import { bendLook } from "./bendLook";
 export function BendTable({ part, units }: { readonly part: PartModel; readonly units: LengthUnit }) {
   const length = (value: number) => <span className="num">{formatFixed(value / mmPer(units), units === "in" ? 4 : 2)}</span>;
   const columns: readonly Column<Bend>[] = [
-    { key: "id", header: "Bend", rowHeader: true, cell: (bend) => <span className="font-medium">{bend.id}</span> },
+    { key: "id", header: "Bend", rowHeader: true, cell: (bend) => <span className="font-medium whitespace-nowrap">{bend.id}</span> },
     { key: "angle", header: "Angle", align: "right", cell: (bend) => <span className="num">{formatAngle((bend.angle * 180) / Math.PI)}</span> },
-    { key: "direction", header: "Way", cell: (bend) => <span>{bendLook[bend.direction].letter}, {bend.direction}{bend.hem === null ? "" : `, ${bend.hem} hem`}</span> },
+    { key: "direction", header: "Way", cell: (bend) => <span className="whitespace-nowrap">{bendLook[bend.direction].letter}, {bend.direction}{bend.hem === null ? "" : `, ${bend.hem} hem`}</span> },
     { key: "radius", header: "Radius", align: "right", cell: (bend) => length(bend.insideRadius) },
     { key: "allowance", header: "Allowance", align: "right", cell: (bend) => length(bend.allowance) },
     { key: "deduction", header: "Deduction", align: "right", cell: (bend) => length(bend.deduction) },

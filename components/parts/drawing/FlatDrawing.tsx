@@ -43,7 +43,7 @@ function BendLine({ bend, view, named }: { readonly bend: FlatBendLine; readonly
   const [a, b] = [view.at(bend.line[0]), view.at(bend.line[1])];
   const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
   const turned = (Math.atan2(b[1] - a[1], b[0] - a[0]) * 180) / Math.PI;
-  const upright = turned > 90 || turned <= -90 ? turned + 180 : turned;
+  const upright = turned > 89.9 || turned <= -90.1 ? turned + 180 : turned;
   const look = bendLook[bend.direction];
   const label = `${bend.id} ${look.letter} ${formatAngle((bend.angle * 180) / Math.PI)}`;
   return (

@@ -10,7 +10,7 @@ import { fitView, type View } from "@/components/ui/drawing/fitView";
 import { Hatch } from "@/components/ui/drawing/Hatch";
 import { formatAngle } from "@/lib/format/formatAngle";
 import { formatLength } from "@/lib/format/formatLength";
-import { crossSection, type CrossSection, type SectionBend } from "./crossSection";
+import { crossSection, type CrossSection, type SectionBend, type SectionLeg } from "./crossSection";
 import { sectionPath } from "./sectionPath";
 
 interface SectionDrawingProps {
@@ -52,15 +52,22 @@ export function SectionDrawing({ part, units, dimension, stale = false }: Sectio
   );
 }
 
+/** The side of a leg, left (1) or right (-1), on which less of the section lies. */
+function awayFromMiddle({ legs }: CrossSection, leg: SectionLeg): 1 | -1 {
+  const sum = legs.reduce((total, one) => total + ((one.from[0] + one.to[0]) / 2 - leg.from[0]) * leg.left[0] + ((one.from[1] + one.to[1]) / 2 - leg.from[1]) * leg.left[1], 0);
+  return sum > 0 ? -1 : 1;
+}
+
 function LegDimension({ section, index, view, units, kind }: { readonly section: CrossSection; readonly index: number; readonly view: View; readonly units: LengthUnit; readonly kind: DimensionKind }) {
   const leg = section.legs[index];
   if (leg === undefined) return null;
   const before = section.bends[index - 1];
   const after = section.bends[index];
-  const outward = -(Math.sign((after?.turn ?? 0) + (before?.turn ?? 0)) || Math.sign(after?.turn ?? before?.turn ?? 1));
+  const mixed = before !== undefined && after !== undefined && Math.sign(before.turn) !== Math.sign(after.turn);
+  const outward = mixed ? awayFromMiddle(section, leg) : -Math.sign(after?.turn ?? before?.turn ?? 1);
   const side = (section.thickness / 2) * outward;
   const from = step(step(leg.from, leg.along, -setback(before, section.thickness, kind)), leg.left, side);
   const to = step(step(leg.to, leg.along, setback(after, section.thickness, kind)), leg.left, side);
   const length = Math.hypot(to[0] - from[0], to[1] - from[1]);
-  return <DimensionLine from={view.at(from)} to={view.at(to)} offset={24 * outward} label={formatLength(length, units, false)} />;
+  return <DimensionLine from={view.at(from)} to={view.at(to)} offset={(mixed ? 46 : 24) * outward} label={formatLength(length, units, false)} />;
 }

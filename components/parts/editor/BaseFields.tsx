@@ -9,6 +9,7 @@ import type { BaseDraft, VertexDraft } from "../draft/partDraft";
 import { useEditor } from "./editorContext";
 import { HoleRows } from "./HoleRows";
 import { PathField } from "./PathField";
+import { RowProblems } from "./RowProblems";
 
 /** Outline of the base, as a rectangle or by its corners, and its holes. */
 export function BaseFields() {
@@ -35,13 +36,11 @@ export function BaseFields() {
 
 function VertexRows({ vertices, onChange }: { readonly vertices: readonly VertexDraft[]; readonly onChange: (vertices: readonly VertexDraft[]) => void }) {
   const edit = (key: string, change: Partial<VertexDraft>) => onChange(vertices.map((vertex) => (vertex.key === key ? { ...vertex, ...change } : vertex)));
-  const { problemAt } = useEditor();
   return (
     <div>
       <p className="mb-1 text-sm text-ink-faint">Counter-clockwise, seen from the top. A bulge makes the edge that starts there an arc (tangent of a quarter of its angle).</p>
       <ol className="border-t border-rule">
         {vertices.map((vertex, i) => {
-          const wrong = problemAt(`base.outline[${i}]`);
           return (
             <li key={vertex.key} className="border-b border-rule py-1.5">
               <div className="grid grid-cols-[2rem_repeat(3,minmax(4.5rem,8rem))_auto] items-start gap-3">
@@ -51,7 +50,7 @@ function VertexRows({ vertices, onChange }: { readonly vertices: readonly Vertex
                 <PathField path={`base.outline[${i}][2]`} label={`Corner ${i} bulge`} labelHidden kind="number" value={vertex.bulge} onChange={(bulge) => edit(vertex.key, { bulge })} placeholder="bulge" />
                 <IconButton label={`Remove corner ${i}`} danger disabled={vertices.length <= 3} onClick={() => onChange(vertices.filter((one) => one.key !== vertex.key))}><Trash2 aria-hidden /></IconButton>
               </div>
-              {wrong === undefined ? null : <p className="mt-1 text-sm text-brick-ink">{wrong}</p>}
+              <RowProblems paths={[`base.outline[${i}]`, `base.outline[${i}][0]`, `base.outline[${i}][1]`, `base.outline[${i}][2]`]} />
             </li>
           );
         })}

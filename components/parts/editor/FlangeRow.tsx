@@ -12,6 +12,7 @@ import { useEditor } from "./editorContext";
 import { fieldId } from "./fieldId";
 import { FlangeOptions } from "./FlangeOptions";
 import { PathField } from "./PathField";
+import { RowProblems } from "./RowProblems";
 
 interface FlangeRowProps {
   readonly flange: FlangeDraft;
@@ -28,15 +29,14 @@ export function FlangeRow({ flange, index, depth, onChange, onRemove, onAdd }: F
   const [open, setOpen] = useState(false);
   const at = `flanges[${index}]`;
   const edges = edgeNames(draft, flange.on);
-  const problem = problemAt(at);
   return (
     <li className="border-b border-rule py-2" style={{ paddingLeft: `${Math.min(depth, 4) * 1.25}rem` }}>
       <div className="flex items-start gap-2">
         {depth === 0 ? null : <CornerDownRight aria-hidden className="mt-2.5 size-4 shrink-0 text-steel-400" />}
-        <div className="grid grow grid-cols-2 gap-2 sm:grid-cols-[minmax(6rem,1.2fr)_minmax(7rem,1.2fr)_minmax(5rem,0.8fr)_minmax(4.5rem,0.7fr)_auto]">
-          <TextInput id={fieldId(`${at}.id`)} label="Name of the flange" labelHidden value={flange.id} onChange={(event) => onChange({ id: event.target.value })} error={problemAt(`${at}.id`)} />
-          <Select id={fieldId(`${at}.edge`)} label={`Edge of ${flange.on}`} labelHidden value={String(flange.edge)} onChange={(edge) => onChange({ edge: Number(edge) })} error={problemAt(`${at}.edge`)}
-            options={edges.map(({ edge, name }) => ({ value: String(edge), label: flange.on === "base" ? name : name }))} placeholder="edge" />
+        <div className="grid grow grid-cols-2 gap-2 sm:grid-cols-[minmax(4rem,1.1fr)_minmax(5rem,1.2fr)_minmax(4.5rem,0.8fr)_minmax(4rem,0.6fr)_auto]">
+          <TextInput id={fieldId(`${at}.id`)} label="Name of the flange" labelHidden value={flange.id} onChange={(event) => onChange({ id: event.target.value })} error={problemAt(`${at}.id`)} errorHidden />
+          <Select id={fieldId(`${at}.edge`)} label={`Edge of ${flange.on}`} labelHidden value={String(flange.edge)} onChange={(edge) => onChange({ edge: Number(edge) })} error={problemAt(`${at}.edge`)} errorHidden
+            options={edges.map(({ edge, name }) => ({ value: String(edge), label: name }))} placeholder="edge" />
           {flange.outline === null
             ? <PathField path={`${at}.length`} label="Length" labelHidden value={flange.length} onChange={(length) => onChange({ length })} placeholder="length" />
             : <span className="pt-2 text-sm text-ink-faint">own outline</span>}
@@ -51,7 +51,7 @@ export function FlangeRow({ flange, index, depth, onChange, onRemove, onAdd }: F
           <IconButton label={`Remove ${flange.id} and what hangs on it`} danger onClick={onRemove}><Trash2 aria-hidden /></IconButton>
         </span>
       </div>
-      {problem === undefined ? null : <p className="mt-1 text-sm text-brick-ink">{problem}</p>}
+      <RowProblems paths={[`${at}.id`, `${at}.edge`, `${at}.length`, `${at}.angle`, at]} />
       {open ? <FlangeOptions at={at} flange={flange} onChange={onChange} /> : null}
     </li>
   );

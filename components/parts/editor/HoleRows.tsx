@@ -4,8 +4,8 @@ import { Button } from "@/components/ui/Button";
 import { IconButton } from "@/components/ui/IconButton";
 import { rowKey } from "../draft/newRows";
 import type { HoleDraft } from "../draft/partDraft";
-import { useEditor } from "./editorContext";
 import { PathField } from "./PathField";
+import { RowProblems } from "./RowProblems";
 
 interface HoleRowsProps {
   /** Path of the face in the document: `base` or `flanges[2]`. */
@@ -16,7 +16,6 @@ interface HoleRowsProps {
 
 /** Round holes by middle and diameter; slots and polygons that a document brought are kept. */
 export function HoleRows({ at, holes, onChange }: HoleRowsProps) {
-  const { problemAt } = useEditor();
   const edit = (key: string, change: { readonly x?: string; readonly y?: string; readonly diameter?: string }) =>
     onChange(holes.map((hole) => (hole.key === key && hole.kind === "circle" ? { ...hole, ...change } : hole)));
   return (
@@ -25,7 +24,6 @@ export function HoleRows({ at, holes, onChange }: HoleRowsProps) {
       <ol>
         {holes.map((hole, i) => {
           const path = `${at}.holes[${i}]`;
-          const wrong = problemAt(path);
           return (
             <li key={hole.key} className="py-1">
               <div className="grid grid-cols-[repeat(3,minmax(4.5rem,8rem))_auto] items-start gap-3">
@@ -38,7 +36,7 @@ export function HoleRows({ at, holes, onChange }: HoleRowsProps) {
                 )}
                 <IconButton label={`Remove hole ${i + 1}`} danger onClick={() => onChange(holes.filter((one) => one.key !== hole.key))}><Trash2 aria-hidden /></IconButton>
               </div>
-              {wrong === undefined ? null : <p className="text-sm text-brick-ink">{wrong}</p>}
+              <RowProblems paths={[path, `${path}.circle`, `${path}.circle[0]`, `${path}.circle[1]`, `${path}.diameter`]} />
             </li>
           );
         })}

@@ -7,6 +7,7 @@ import type { BendDirection } from "@/bending/part/partDocument";
 import type { BendDraft, LegDraft } from "../draft/partDraft";
 import { BendOptions } from "./BendOptions";
 import { PathField } from "./PathField";
+import { RowProblems } from "./RowProblems";
 
 interface LegRowProps {
   readonly leg: LegDraft;
@@ -45,6 +46,7 @@ export function LegRow({ leg, index, last, only, onLength, onBend, onInsert, onR
           <IconButton label={`Remove leg ${index + 1}`} danger disabled={only} onClick={onRemove}><Trash2 aria-hidden /></IconButton>
         </span>
       </div>
+      <RowProblems paths={last ? [`profile.legs[${index}]`] : [`profile.legs[${index}]`, `${at}.angle`, at]} />
       {open && !last ? <BendOptions at={at} bend={leg.bend} onChange={onBend} /> : null}
     </li>
   );

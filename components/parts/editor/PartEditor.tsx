@@ -16,6 +16,7 @@ import type { PartDraft } from "../draft/partDraft";
 import { addFlange } from "./addFlange";
 import { BaseFields } from "./BaseFields";
 import { CommonFields } from "./CommonFields";
+import { computePreview } from "./computePreview";
 import { EditorContext } from "./editorContext";
 import { EditorHead } from "./EditorHead";
 import { FlangeFields } from "./FlangeFields";
@@ -51,8 +52,10 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
   const save = (event: FormEvent) => {
     event.preventDefault();
     setTried(true);
-    if (preview.model !== null) { onSave(draft, preview.model.document); return; }
-    const first = preview.problems[0];
+    // The drawing may lag behind the typing; what is saved may not.
+    const now = computePreview(draft, materials);
+    if (now.model !== null && now.problems.length === 0) { onSave(draft, now.model.document); return; }
+    const first = now.problems[0];
     if (first !== undefined) document.getElementById(fieldId(first.path))?.focus();
   };
   const { shown } = preview;
@@ -60,7 +63,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
   return (
     <EditorContext value={editor}>
       <form noValidate onSubmit={save}>
-        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.model?.document ?? null} changed={store.changed} onStartAgain={store.startAgain}
+        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onStartAgain={store.startAgain}
           onImport={(document) => update((old) => ({ ...draftFromDocument(document, old.number), note: old.note }))} />
         <div className="mb-6 space-y-3 empty:hidden">
           {store.restoredAt === null ? null : <Notice tone="note" title="Your unsaved entries were brought back">They were last changed {formatMoment(store.restoredAt)} and are not saved yet.</Notice>}

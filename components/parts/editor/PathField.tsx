@@ -18,13 +18,13 @@ interface PathFieldProps {
   readonly onKeyDown?: (event: KeyboardEvent<HTMLInputElement>) => void;
 }
 
-/** A length, angle or plain number of the part being edited. */
+/** A length, angle or plain number of the part being edited. In a row (label hidden) its error is drawn by `RowProblems`. */
 export function PathField({ path, label, value, onChange, kind = "length", hint, placeholder, labelHidden, className, onKeyDown }: PathFieldProps) {
   const { draft, problemAt } = useEditor();
   const unit = kind === "length" ? { unit: draft.units } : kind === "angle" ? { unit: "°" } : {};
   return (
     <NumberInput id={fieldId(path)} label={label} value={value} onChange={(event) => onChange(event.target.value)} error={problemAt(path)} {...unit}
-      {...(hint === undefined ? {} : { hint })} {...(placeholder === undefined ? {} : { placeholder })} {...(labelHidden === undefined ? {} : { labelHidden })}
+      {...(labelHidden === true ? { errorHidden: true } : {})} {...(hint === undefined ? {} : { hint })} {...(placeholder === undefined ? {} : { placeholder })} {...(labelHidden === undefined ? {} : { labelHidden })}
       {...(className === undefined ? {} : { className })} {...(onKeyDown === undefined ? {} : { onKeyDown })} />
   );
 }

@@ -11,13 +11,19 @@ import type { PartDraft } from "../draft/partDraft";
 export interface PreviewModel { readonly document: PartDocument; readonly part: PartModel; readonly flat: FlatPattern }
 
 export interface Preview {
-  /** Null while something is wrong. */
+  /** Null while the part cannot be built. */
   readonly model: PreviewModel | null;
   readonly problems: readonly FieldProblem[];
 }
 
-/** From what was typed to the part, its flat and every problem found on the way. */
+/** From what was typed to the part, its flat and every problem found on the way. A part without a name is drawn all the same. */
 export function computePreview(draft: PartDraft, materials: readonly MaterialFacts[]): Preview {
+  if (draft.name.trim() !== "") return build(draft, materials);
+  const { model, problems } = build({ ...draft, name: "-" }, materials);
+  return { model, problems: [{ path: "name", message: "Give the part a name." }, ...problems] };
+}
+
+function build(draft: PartDraft, materials: readonly MaterialFacts[]): Preview {
   const byId = (id: string) => materials.find((material) => material.id === id);
   const typed = documentFromDraft(draft, byId(draft.material)?.group);
   if (typed.problems.length > 0) return { model: null, problems: typed.problems };

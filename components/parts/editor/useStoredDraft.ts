@@ -10,7 +10,8 @@ const version = 1;
 function read(key: string): Stored | null {
   try {
     const text = window.localStorage.getItem(key);
-    return text === null ? null : (JSON.parse(text) as Stored);
+    const stored = text === null ? null : (JSON.parse(text) as Partial<Stored> | null);
+    return stored?.draft?.shape !== undefined && Array.isArray(stored.draft.legs) ? (stored as Stored) : null;
   } catch {
     return null;
   }

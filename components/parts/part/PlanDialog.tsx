@@ -38,7 +38,7 @@ export function PlanDialog({ part, onClose }: { readonly part: PartDetail; reado
         {machines.isError ? <Notice tone="wrong" title="The brakes could not be listed" live>{machines.error.message}</Notice> : null}
         <Select id="plan-machine" label="Brake" value={machine} onChange={setChosen} error={refused?.messageAt("machineId")} placeholder={machines.isPending ? "Loading…" : "No brake is set up"}
           options={(machines.data ?? []).map((one) => ({ value: one.id, label: one.name, note: `${one.bedLengthMm} mm, ${formatForce(one.maxForceKN)}` }))} />
-        <NumberInput id="plan-batch" label="Batch" unit="parts" className="max-w-48" value={batch} onChange={(event) => setBatch(event.target.value)} error={batchProblem ?? refused?.messageAt("batch")}
+        <NumberInput id="plan-batch" label="Batch" unit="parts" className="max-w-64" value={batch} onChange={(event) => setBatch(event.target.value)} error={batchProblem ?? refused?.messageAt("batch")}
           hint="Setup time is weighed against it." />
       </form>
     </DialogBox>

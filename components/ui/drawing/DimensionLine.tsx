@@ -24,7 +24,8 @@ export function DimensionLine({ from, to, offset, label, size = 11 }: DimensionL
   const arrow = (tip: Vec2, way: number) => [tip, on(tip, 7 * way, 1.6), on(tip, 7 * way, -1.6)].map((p) => p.map((v) => v.toFixed(2)).join(",")).join(" ");
   const middle = on(from, length / 2, offset);
   const turned = (Math.atan2(u[1], u[0]) * 180) / Math.PI;
-  const upright = turned > 90 || turned <= -90 ? turned + 180 : turned;
+  // Read from below or from the right.
+  const upright = turned > 89.9 || turned <= -90.1 ? turned + 180 : turned;
   const line = (p: Vec2, q: Vec2) => <line x1={p[0]} y1={p[1]} x2={q[0]} y2={q[1]} />;
   return (
     <g stroke="var(--ink-soft)" strokeWidth="0.7">

@@ -19,7 +19,7 @@ interface DrawingSheetProps {
 /** A drawing on its own sheet: a thin frame, a title line below as in a title block. */
 export function DrawingSheet({ title, note, width, height, description, children, stale = false, live = false }: DrawingSheetProps) {
   return (
-    <figure className="border border-steel-500 bg-sheet">
+    <figure className="self-start border border-steel-500 bg-sheet">
       <svg viewBox={`0 0 ${width} ${height.toFixed(1)}`} className={classes("block h-auto w-full transition-opacity", stale && "opacity-40")}
         role={live ? "group" : "img"} aria-label={description}>
         {children}
