@@ -1,9 +1,11 @@
 import fc from "fast-check";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, vi } from "vitest";
 import { everyOrder } from "./everyOrder";
 import type { OrderProblem } from "./orderProblem";
 import { poseOf } from "./pose";
 import { searchOrder } from "./searchOrder";
+
+vi.setConfig({ testTimeout: 60_000 });
 
 interface Pattern { readonly move: number; readonly station: number; readonly mask: number; readonly value: number }
 

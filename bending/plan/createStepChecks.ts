@@ -5,6 +5,7 @@ import { fingerMeetsTools } from "../setup/fingerMeetsTools";
 import type { GaugeOption } from "../setup/gaugeOption";
 import { gaugeOptions } from "../setup/gaugeOptions";
 import type { Tool } from "../tooling/tool";
+import { blockersOf } from "./blockersOf";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
 import type { ToolPair } from "./toolPair";
@@ -53,7 +54,7 @@ export function createStepChecks(situation: Situation): StepChecks {
     const agrees = ({ mask, value }: Pattern) => (formed & mask) === value;
     const ofPair = patterns[pair]?.get(move) ?? [];
     if (selfPatterns.get(move)?.some(agrees) || ofPair.some(agrees)) return false;
-    const hits = clearance.blocked(hitOf(move, formed), punch, die);
+    const hits = blockersOf(situation, hitOf(move, formed), punch, die);
     if (hits.length === 0) return true;
     const own = hits.filter(({ kind }) => kind === "self");
     if (own.length > 0) selfPatterns.set(move, [...(selfPatterns.get(move) ?? []), ...own.map(({ mask, value }) => ({ mask, value }))]);

@@ -3,6 +3,7 @@ import { hitSides } from "../clearance/hitSides";
 import { mmPer, toDeg } from "../core/units";
 import { formatLength } from "../part/formatLength";
 import type { StepChecks } from "./createStepChecks";
+import { blockersOf } from "./blockersOf";
 import { formatBends } from "./formatBends";
 import type { PlanReason } from "./planDocument";
 import { rounded } from "./rounded";
@@ -74,7 +75,7 @@ function stopsOf(situation: Situation, checks: StepChecks, move: number, formed:
     return reason("minimum-flange", [part.faces[face]?.id ?? ""], [tools.die.id], `${name}: ${formatLength(held, units)} of level sheet beside the bend line is too short for ${tools.die.id} (V ${formatLength(tools.die.vOpening, units)}); ` +
       `${formatLength(needed, units)} is needed: ${formatLength(needed - held, units)} more flange or a narrower V`, 10 + needed / Math.max(held, 0.1));
   }
-  const blocked = clearance.blocked(hit, tools.punch, tools.die);
+  const blocked = blockersOf(situation, hit, tools.punch, tools.die);
   const met = blocked.length > 0 ? blocked : [tools.punch, tools.die].flatMap((tool) => clearance.evidence(hit, tools.punch, tools.die, tool));
   const worst = [...met].sort((a, b) => b.depth - a.depth)[0];
   if (worst === undefined) return reason("sections", [], [tools.punch.id, tools.die.id], `${name}: no run of real pieces of ${tools.punch.id} and ${tools.die.id} fits the room there is`, 5);

@@ -1,0 +1,71 @@
+import { z } from "zod";
+
+const number = z.number();
+const range = z.tuple([number, number]);
+const text = z.string();
+
+const section = z.union([
+  z.strictObject({ length: number.positive(), piece: text.optional(), horn: z.enum(["left", "right", "both"]).optional() }),
+  z.strictObject({ gap: number.positive() }),
+]);
+
+const reason = z.strictObject({
+  kind: z.enum(["clearance", "self-collision", "minimum-flange", "no-punch", "no-die", "force", "tool-force", "sections", "bed", "daylight", "gauge", "angle",
+    "radius", "lift", "throat", "hem", "order", "budget", "part", "whip-up", "tool-choice"]),
+  bends: z.array(text),
+  faces: z.array(text),
+  tools: z.array(text),
+  message: text,
+  evidence: z.strictObject({ strokeAngle: number, depth: number, zFrom: number, zTo: number }).optional(),
+});
+
+const step = z.strictObject({
+  bends: z.array(text).min(1),
+  front: text,
+  punch: text,
+  die: text,
+  station: text,
+  bendZ: range,
+  angle: number.positive().max(180),
+  demandedAngle: number.positive(),
+  insideRadius: number.nonnegative(),
+  forceKN: number.nonnegative(),
+  depthMm: number,
+  toolWindow: range,
+  gauge: z.strictObject({
+    x: number, r: number, fingers: z.array(z.strictObject({ x: number, r: number, z: number })), face: text, edge: z.int(), on: z.enum(["edge", "face"]).optional(),
+  }),
+  handling: z.strictObject({ flip: z.boolean(), turn: number.min(0).max(180) }),
+});
+
+const flat = z.strictObject({
+  width: number, depth: number, area: number, massKg: number,
+  bends: z.array(z.strictObject({ id: text, allowance: number, deduction: number, k: number, insideRadius: number, source: text })),
+});
+
+const common = {
+  format: z.literal("plan/1"),
+  engine: text,
+  units: z.enum(["mm", "in"]),
+  part: text,
+  machine: text,
+  batch: z.int().min(1),
+  status: z.enum(["optimal", "feasible", "infeasible", "unknown"]),
+  gap: number.min(0).max(1),
+  flat,
+  flatLength: number,
+  steps: z.array(step),
+  order: z.array(text),
+  stations: z.array(z.strictObject({
+    id: text, punch: text, die: text, from: number, to: number, punchSections: z.array(section), dieSections: z.array(section),
+  })),
+  seconds: z.strictObject({ setup: number, perPart: number, total: number }),
+  cost: number,
+  proof: z.strictObject({ method: text, expanded: z.int(), bound: number }),
+  reasons: z.array(reason),
+  cautions: z.array(reason),
+  elapsedMs: number,
+};
+
+/** The plan document, format `plan/1`; unknown keys are refused. */
+export const planSchema = z.strictObject({ ...common, alternatives: z.array(z.strictObject(common).partial({ flat: true, elapsedMs: true })).optional() });

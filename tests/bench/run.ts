@@ -1,0 +1,62 @@
+import { createHash } from "node:crypto";
+import { everyOrder } from "@/bending/order/everyOrder";
+import { searchOrder } from "@/bending/order/searchOrder";
+import { planPart } from "@/bending/plan/planPart";
+import { planCorpus } from "../corpus/planCorpus";
+import { randomProblem } from "./randomProblem";
+
+interface Row {
+  readonly name: string;
+  readonly size: number;
+  readonly medianMs: number;
+  readonly runs: number;
+  readonly checksum: string;
+  readonly peakMB: number;
+  readonly reference?: string;
+  readonly ratio?: number;
+}
+
+const RUNS = 3;
+const median = (values: readonly number[]) => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)] ?? 0;
+const peakMB = () => Math.round(process.resourceUsage().maxRSS / 1024);
+const digest = (value: unknown) => createHash("sha256").update(JSON.stringify(value)).digest("hex").slice(0, 12);
+
+function timed<T>(run: () => T): { readonly medianMs: number; readonly answer: T } {
+  const times: number[] = [];
+  let answer = run();
+  for (let i = 0; i < RUNS; i += 1) {
+    const started = performance.now();
+    answer = run();
+    times.push(performance.now() - started);
+  }
+  return { medianMs: Math.round(median(times) * 100) / 100, answer };
+}
+
+/** Whole plans of a corrugated sheet: tools, order, stations, gauge. */
+function plans(): readonly Row[] {
+  return [4, 6, 8, 10, 12].map((size): Row => {
+    const { medianMs, answer } = timed(() => planPart(planCorpus(`corrugated-${size}`)));
+    return { name: "plan a corrugated sheet", size, medianMs, runs: RUNS, checksum: digest([answer.status, answer.cost, answer.order]), peakMB: peakMB() };
+  });
+}
+
+/** The order search alone on made-up patterns, against trying every order in the same process. */
+function searches(): readonly Row[] {
+  return [3, 4, 5, 6, 8, 10, 12].map((size): Row => {
+    const problem = randomProblem(size);
+    const { medianMs, answer } = timed(() => searchOrder(problem));
+    const row: Row = { name: "search an order", size, medianMs, runs: RUNS, checksum: digest(answer.kind === "found" ? Math.round(answer.weight * 1e6) : answer.kind), peakMB: peakMB() };
+    if (size > 6) return row;
+    const slow = timed(() => everyOrder(problem));
+    return { ...row, reference: "every order tried", ratio: Math.round((slow.medianMs / Math.max(medianMs, 0.01)) * 10) / 10 };
+  });
+}
+
+const rows = [...searches(), ...plans()];
+if (process.argv.includes("--json")) process.stdout.write(`${JSON.stringify(rows, null, 2)}\n`);
+else {
+  for (const row of rows) {
+    const ratio = row.ratio === undefined ? "" : `  ${row.ratio} times as fast as ${row.reference ?? ""}`;
+    process.stdout.write(`${row.name.padEnd(26)} ${String(row.size).padStart(3)} bends ${row.medianMs.toFixed(2).padStart(10)} ms  ${row.peakMB} MB  ${row.checksum}${ratio}\n`);
+  }
+}
