@@ -27,8 +27,8 @@ export function BedMapDrawing({ map, className, placed, step, close = false }: B
           <text x={(station.from + station.to) / 2} y={rows.title} textAnchor="middle" fontSize={unit * 1.3} fontWeight={700} fill="var(--ink)">{station.id}</text>
           <text x={(station.from + station.to) / 2} y={rows.punchName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.punch}</text>
           <text x={(station.from + station.to) / 2} y={rows.dieName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.die}</text>
-          <text x={station.from} y={rows.places} textAnchor="end" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.fromText}</text>
-          <text x={station.to} y={rows.places} textAnchor="start" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.toText}</text>
+          <text x={station.from} y={rows.places} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.fromText}</text>
+          <text x={station.to} y={rows.places + unit * 1.1} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.toText}</text>
         </g>
       ))}
       {bends.map((bend) => {
@@ -53,10 +53,10 @@ function Piece({ piece, layout, done }: { readonly piece: BedPiece; readonly lay
     <g>
       <title>{`${piece.id}, ${piece.length}`}</title>
       <path d={layout.pieceOutline(piece)} fill={done ? "var(--accent)" : "var(--steel-300)"} stroke="var(--steel-700)" strokeWidth={1} vectorEffect="non-scaling-stroke" />
-      {(lettering === "level" ? [piece.id, piece.length] : []).map((line, index) => (
+      {(lettering === "level" ? [layout.mark(piece), piece.length] : []).map((line, index) => (
         <text key={index} x={x} y={y + layout.unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fontSize={layout.unit * 0.8} fill={ink}>{line}</text>
       ))}
-      {lettering === "upright" ? <text x={x} y={y} transform={`rotate(-90 ${x} ${y})`} dy={layout.unit * 0.22} textAnchor="middle" fontSize={layout.unit * 0.62} fill={ink}>{piece.id}</text> : null}
+      {lettering === "upright" ? <text x={x} y={y} transform={`rotate(-90 ${x} ${y})`} dy={layout.unit * 0.22} textAnchor="middle" fontSize={layout.unit * 0.62} fill={ink}>{layout.mark(piece)}</text> : null}
     </g>
   );
 }

@@ -23,11 +23,11 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
             return (
               <G key={`${piece.kind} ${piece.from}`}>
                 <Path d={layout.pieceOutline(piece)} fill={colours["steel-300"]} stroke={colours["steel-700"]} strokeWidth={thin} />
-                {(lettering === "level" ? [piece.id, piece.length] : []).map((line, index) => (
+                {(lettering === "level" ? [layout.mark(piece), piece.length] : []).map((line, index) => (
                   <Text key={index} x={x} y={y + unit * (index === 0 ? -0.15 : 0.95)} textAnchor="middle" fill={colours.ink} style={letter(0.8)}>{line}</Text>
                 ))}
                 {lettering === "upright" ? (
-                  <G transform={`rotate(-90 ${x} ${y})`}><Text x={x} y={y + unit * 0.22} textAnchor="middle" fill={colours.ink} style={letter(0.62)}>{piece.id}</Text></G>
+                  <G transform={`rotate(-90 ${x} ${y})`}><Text x={x} y={y + unit * 0.22} textAnchor="middle" fill={colours.ink} style={letter(0.62)}>{layout.mark(piece)}</Text></G>
                 ) : null}
               </G>
             );
@@ -35,8 +35,8 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
           <Text x={(station.from + station.to) / 2} y={rows.title} textAnchor="middle" fill={colours.ink} style={letter(1.3, 600)}>{station.id}</Text>
           <Text x={(station.from + station.to) / 2} y={rows.punchName} textAnchor="middle" fill={colours.ink} style={letter(0.9)}>{station.punch}</Text>
           <Text x={(station.from + station.to) / 2} y={rows.dieName} textAnchor="middle" fill={colours.ink} style={letter(0.9)}>{station.die}</Text>
-          <Text x={station.from} y={rows.places} textAnchor="end" fill={colours["ink-soft"]} style={letter(0.9)}>{station.fromText}</Text>
-          <Text x={station.to} y={rows.places} textAnchor="start" fill={colours["ink-soft"]} style={letter(0.9)}>{station.toText}</Text>
+          <Text x={station.from} y={rows.places} textAnchor="middle" fill={colours["ink-soft"]} style={letter(0.9)}>{station.fromText}</Text>
+          <Text x={station.to} y={rows.places + unit * 1.1} textAnchor="middle" fill={colours["ink-soft"]} style={letter(0.9)}>{station.toText}</Text>
         </G>
       ))}
       {map.bends.map((bend) => (

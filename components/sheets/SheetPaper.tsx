@@ -1,4 +1,5 @@
 import { BedMapDrawing } from "@/components/preview/BedMapDrawing";
+import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
 import type { SheetView } from "@/lib/sheet/sheetView";
 import { PaperSteps } from "./PaperSteps";
 import { PaperTable } from "./PaperTable";
@@ -12,12 +13,12 @@ export function SheetPaper({ view, code }: { readonly view: SheetView; readonly 
       <div className="grid gap-x-6 gap-y-4 lg:grid-cols-[3fr_2fr] print:grid-cols-[3fr_2fr]">
         <section>
           <h2 className="caption mb-1">Tools to fetch</h2>
-          <PaperTable heads={["Piece", "Tool", "Length", "Horn", "Rack", "At"]} wide={[0, 4]}
-            rows={view.pickList.map((line) => [line.piece, `${line.tool} (${line.kind})`, line.length, line.horn, line.rack, line.station])} />
+          <PaperTable heads={["Piece", "Kind", "Length", "Horn", "Rack", "At"]} wide={[0, 4]}
+            rows={view.pickList.map((line) => [line.piece, line.kind, line.length, line.horn, line.rack, line.station])} />
         </section>
         <section>
           <h2 className="caption mb-1">Measure on the first part</h2>
-          <PaperTable heads={["What", "Nominal", "Tolerance"]} rows={view.measurements.map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
+          <PaperTable heads={["What", "Nominal", "Tolerance"]} rows={groupMeasurements(view.measurements).map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
           <p className="mt-1 text-xs text-ink-soft">Tolerances: {[...new Set(view.measurements.map((entry) => entry.source))].join(", ")}.</p>
         </section>
       </div>

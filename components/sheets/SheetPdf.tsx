@@ -1,5 +1,6 @@
 import { Document, Page, Path, Svg, Text, View } from "@react-pdf/renderer";
 import type { SheetState } from "@/lib/schemas/views";
+import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
 import { qrPath } from "@/lib/sheet/qrPath";
 import { paperColours } from "@/lib/sheet/shapeLook";
 import type { SheetView } from "@/lib/sheet/sheetView";
@@ -34,11 +35,11 @@ export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
         <View style={styles.columns}>
           <View style={{ flexGrow: 3, flexShrink: 1, flexBasis: 0, paddingRight: 14 }}>
             <Text style={styles.heading}>Tools to fetch</Text>
-            <PdfTable heads={["Piece", "Tool", "Length", "Horn", "Rack", "At"]} shares={[3, 3.4, 2, 2, 2, 0.8]} rows={view.pickList.map((line) => [line.piece, `${line.tool} (${line.kind})`, line.length, line.horn, line.rack, line.station])} />
+            <PdfTable heads={["Piece", "Kind", "Length", "Horn", "Rack", "At"]} shares={[5.2, 1.5, 1.7, 1.9, 1.7, 0.7]} rows={view.pickList.map((line) => [line.piece, line.kind, line.length, line.horn, line.rack, line.station])} />
           </View>
           <View style={{ flexGrow: 2, flexShrink: 1, flexBasis: 0 }}>
             <Text style={styles.heading}>Measure on the first part</Text>
-            <PdfTable heads={["What", "Nominal", "Tolerance"]} shares={[4, 2, 2.2]} rows={view.measurements.map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
+            <PdfTable heads={["What", "Nominal", "Tolerance"]} shares={[4, 2, 2.2]} rows={groupMeasurements(view.measurements).map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
             <Text style={{ fontSize: 6.5, marginTop: 2 }}>Tolerances: {[...new Set(view.measurements.map((entry) => entry.source))].join(", ")}</Text>
           </View>
         </View>

@@ -16,6 +16,8 @@ export interface BedMapLayout {
   readonly bendLine: (step: number) => number;
   readonly pieceOutline: (piece: BedPiece) => string;
   /** How a piece is lettered: its mark and length level, its mark alone upright, or not at all. */
+  /** A piece's mark as it fits a drawing: without the tool's name, which stands at the station. */
+  readonly mark: (piece: BedPiece) => string;
   readonly lettering: (piece: BedPiece) => "level" | "upright" | "none";
 }
 
@@ -31,7 +33,7 @@ export function bedMapLayout(map: BedMap, close: boolean): BedMapLayout {
   const punch = [0, unit * 4] as const;
   const die = [punch[1] + gap, punch[1] + gap + unit * 4] as const;
   const top = -unit * 4;
-  const bottom = die[1] + unit * 3;
+  const bottom = die[1] + unit * 4;
   return {
     box: [from - unit, top, to - from + 2 * unit, bottom - top],
     bed: [Math.max(map.from, from), Math.min(map.to, to)],
@@ -39,10 +41,15 @@ export function bedMapLayout(map: BedMap, close: boolean): BedMapLayout {
     rows: { title: -unit * 2.2, punchName: -unit * 0.6, punch, die, dieName: die[1] + unit * 1.2, places: die[1] + unit * 2.3 },
     bendLine: (step) => punch[1] + unit * 0.95 * step,
     pieceOutline: (piece) => outline(piece, piece.kind === "punch" ? punch : die, unit),
-    lettering: ({ from: left, to: right, id, length }) =>
-      right - left > unit * 0.52 * Math.max(id.length, length.length) ? "level" : right - left > unit * 0.7 && id.length <= 11 ? "upright" : "none",
+    mark: markOf,
+    lettering: (piece) => {
+      const [wide, letters] = [piece.to - piece.from, markOf(piece).length];
+      return wide > unit * 0.52 * Math.max(letters, piece.length.length) ? "level" : wide > unit * 0.7 && letters <= 11 ? "upright" : "none";
+    },
   };
 }
+
+const markOf = ({ id, tool }: BedPiece): string => (id.startsWith(tool) ? id.slice(tool.length).replace(/^[-/ ]+/, "") || id : id);
 
 /** At least 600 mm, the tools in its middle. */
 function closeRun({ stations, from, to }: BedMap): readonly [number, number] {
