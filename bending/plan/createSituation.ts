@@ -23,7 +23,7 @@ export function createSituation({ variant: { part, vOpening }, machine, units, p
   const moves = collectMoves(part);
   const runs = createRuns(machine.settings);
   const demanded = part.bends.map((bend) => springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle);
-  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, runs, units, vOpening }, bend, pair)));
+  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, machine, runs, units, vOpening }, bend, pair)));
   const useful = pairs.filter((_, index) => fits.some((ofBend) => ofBend[index]?.ok));
   const kept = new Set(useful.map(({ index }) => index));
   const next = nextMask(order);

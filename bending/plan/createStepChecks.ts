@@ -6,6 +6,7 @@ import type { GaugeOption } from "../setup/gaugeOption";
 import { gaugeOptions } from "../setup/gaugeOptions";
 import type { Tool } from "../tooling/tool";
 import { blockersOf } from "./blockersOf";
+import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
 import type { ToolPair } from "./toolPair";
@@ -51,6 +52,7 @@ export function createStepChecks(situation: Situation): StepChecks {
     if ((force * moveOf(move).bentLength) / 1000 > machine.maxForce) return false;
     const reach = sheetReach(part, hitOf(move, formed));
     if (Math.min(reach.front, reach.back) < needed) return false;
+    if (!passesFrames(part, hitOf(move, formed), reach.back, machine)) return false;
     const agrees = ({ mask, value }: Pattern) => (formed & mask) === value;
     const ofPair = patterns[pair]?.get(move) ?? [];
     if (selfPatterns.get(move)?.some(agrees) || ofPair.some(agrees)) return false;

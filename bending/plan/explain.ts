@@ -7,6 +7,7 @@ import { blockersOf } from "./blockersOf";
 import { formatBends } from "./formatBends";
 import type { PlanReason } from "./planDocument";
 import { rounded } from "./rounded";
+import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
 
@@ -74,6 +75,9 @@ function stopsOf(situation: Situation, checks: StepChecks, move: number, formed:
     const face = bend && (reach.front <= reach.back) === side[bend.parent] ? bend.parent : bend?.child ?? 0;
     return reason("minimum-flange", [part.faces[face]?.id ?? ""], [tools.die.id], `${name}: ${formatLength(held, units)} of level sheet beside the bend line is too short for ${tools.die.id} (V ${formatLength(tools.die.vOpening, units)}); ` +
       `${formatLength(needed, units)} is needed: ${formatLength(needed - held, units)} more flange or a narrower V`, 10 + needed / Math.max(held, 0.1));
+  }
+  if (!passesFrames(part, hit, reach.back, machine)) {
+    return reason("throat", [], [], `${name}: ${formatLength(reach.back, units)} of sheet behind the die does not go between the frames of ${machine.name} (${formatLength(machine.betweenFrames, units)} apart, throat ${formatLength(machine.throatDepth, units)} deep)`, 50);
   }
   const blocked = blockersOf(situation, hit, tools.punch, tools.die);
   const met = blocked.length > 0 ? blocked : [tools.punch, tools.die].flatMap((tool) => clearance.evidence(hit, tools.punch, tools.die, tool));

@@ -8,6 +8,7 @@ import { vOpeningRule } from "../handbook/vOpeningRule";
 import { formatLength } from "../part/formatLength";
 import type { Bend, PartModel } from "../part/partModel";
 import type { RunsOf } from "../setup/createRuns";
+import type { Machine } from "../tooling/machine";
 import type { FitProblem, ToolFit } from "./situation";
 import type { ToolPair } from "./toolPair";
 
@@ -18,6 +19,7 @@ const SAME_ANGLE_DEG = 0.05;
 
 export interface FitQuestion {
   readonly part: PartModel;
+  readonly machine: Machine;
   readonly runs: RunsOf;
   readonly units: LengthUnit;
   /** The V whose natural radius the bend was given, when its radius follows from the die. */
@@ -72,9 +74,12 @@ function forceProblem(force: number, { punch, die }: ToolPair): FitProblem | nul
   return { kind: "tool-force", tools: [weak.id], off: force / weak.maxForcePerMetre - 1, message: `${weak.id} is rated ${weak.maxForcePerMetre.toFixed(0)} kN/m; this V needs ${force.toFixed(0)} kN/m` };
 }
 
-function piecesProblem({ runs, units }: FitQuestion, bend: Bend, { punch, die }: ToolPair): FitProblem | null {
+function piecesProblem({ runs, machine, units }: FitQuestion, bend: Bend, { punch, die }: ToolPair): FitProblem | null {
   const [[ax, ay], [bx, by]] = bend.line;
   const length = Math.hypot(bx - ax, by - ay);
+  if (length - 2 * machine.settings.maxUncoveredEnd > machine.bedLength) {
+    return { kind: "bed", tools: [], off: length / machine.bedLength, message: `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}` };
+  }
   const short = [punch, die].find((tool) => runs(tool, length).length === 0);
   if (short === undefined) return null;
   const have = short.pieces.reduce((sum, piece) => sum + piece.length, 0);
