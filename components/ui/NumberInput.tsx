@@ -16,7 +16,7 @@ export function NumberInput({ id, label, hint, error, labelHidden, errorHidden, 
     <Field {...frame}>
       <div className="relative">
         <input inputMode="text" autoComplete="off" spellCheck={false} {...rest} {...describedBy(frame)} id={id} type="text"
-          className={controlClasses(error !== undefined, classes("num text-right", unit === undefined ? "pr-3" : unit.length > 2 ? "pr-14" : "pr-9"))} />
+          className={controlClasses(error !== undefined, classes("num text-right", unit === undefined ? "pr-3" : unit.length > 2 ? "pr-14" : unit.length > 1 ? "pr-9" : "pr-6"))} />
         {unit === undefined ? null : <span aria-hidden className="pointer-events-none absolute inset-y-0 right-2.5 flex items-center text-sm text-ink-faint">{unit}</span>}
       </div>
     </Field>

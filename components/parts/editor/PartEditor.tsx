@@ -87,7 +87,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
           <div className="space-y-6">
             {shown === null ? <p className="border border-dashed border-rule-strong p-8 text-center text-ink-soft">The drawings appear here as soon as the part can be built.</p> : (
               <>
-                <div className={stale ? "opacity-40" : undefined}><FlatFacts part={shown.part} flat={shown.flat} units={shown.document.units} /></div>
+                <FlatFacts part={shown.part} flat={shown.flat} units={shown.document.units} stale={stale} />
                 <PartDrawings part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={stale}
                   {...(shown.document.base === undefined ? {} : {
                     edges: faceEdges(shown.part, shown.document.base, mmPer(shown.document.units)),
