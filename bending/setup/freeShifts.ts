@@ -25,7 +25,7 @@ export function freeShifts(reach: number, standing: readonly Standing[]): readon
   }
   blocked.sort((a, b) => a[0] - b[0]);
   const free: Interval[] = [];
-  let at = -limit;
+  let at = 0 - limit;
   for (const [from, to] of blocked) {
     if (from >= limit) break;
     if (from >= at) free.push([at, from]);
