@@ -18,14 +18,14 @@ export function PdfStep({ step }: { readonly step: SheetStep }) {
         <Text style={styles.number}>{step.number}</Text>
         <Text style={styles.side}>{step.upSide}</Text>
       </View>
-      <PdfDrawing picture={step.picture} width={112} height={78} />
+      <PdfDrawing picture={step.picture} width={102} height={74} />
       <View style={{ width: 4 }} />
-      <PdfDrawing picture={step.above} width={112} height={78} />
+      <PdfDrawing picture={step.above} width={102} height={74} />
       <View style={{ flexGrow: 1, flexShrink: 1, flexBasis: 0, paddingLeft: 6 }}>
         <Text style={styles.strong}>{step.bends}</Text>
         <View style={styles.cells}>
           {numbers.map(([label, value]) => (
-            <View key={label} style={{ marginRight: 9, marginTop: 2 }}><Text style={styles.caption}>{label}</Text><PdfNumber strong>{value}</PdfNumber></View>
+            <View key={label} style={{ marginRight: 7, marginTop: 2 }}><Text style={styles.caption}>{label}</Text><PdfNumber strong>{value}</PdfNumber></View>
           ))}
         </View>
         <View style={{ ...styles.cells, marginTop: 3 }}>

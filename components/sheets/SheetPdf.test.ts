@@ -42,6 +42,11 @@ describe("the PDF, read back", () => {
     expect(released.text.replaceAll(" ", "")).toContain("Łódźchannel");
   });
 
+  it("numbers its pages and says on each that it is advice", () => {
+    expect(released.text).toContain("Page 1 of 1");
+    expect(released.text).toContain("Advice only");
+  });
+
   it("says on a draft, and only there, that it is not for the floor", () => {
     expect(draft.text).toContain("not for the floor");
     expect(released.text).not.toContain("not for the floor");

@@ -23,6 +23,11 @@ export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
   return (
     <Document title={`Setup sheet ${view.header.number}`} subject={`${view.header.partNumber} ${view.header.partName}`} creator="Foldwright" producer="Foldwright">
       <Page size="A4" style={styles.page}>
+        <View style={styles.footer} fixed>
+          <Text>{view.header.number} · {view.header.partNumber} revision {view.header.revision}</Text>
+          <Text>Advice only: makers’ ratings, local codes and trained people decide.</Text>
+        </View>
+        <Text fixed style={styles.pageNumber} render={({ pageNumber, totalPages }) => `Page ${pageNumber} of ${totalPages}`} />
         <PdfHead view={view} released={released} address={address} />
         {state === "released" ? null : <Text style={styles.state}>{state === "draft" ? "DRAFT: not for the floor" : "SUPERSEDED: do not work from this sheet"}</Text>}
         <View style={styles.cautions}>
@@ -52,11 +57,6 @@ export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
         <View style={{ marginTop: 6, fontSize: 7, color: paperColours["ink-soft"] }} wrap={false}>
           <Text>Blank {view.flat.width} × {view.flat.depth}, {view.flat.mass}. Allowances: {view.flat.bends.map((bend) => `${bend.id} ${bend.allowance} (${bend.source})`).join("; ")}.</Text>
           <Text>{view.header.conventions.join(" ")}</Text>
-        </View>
-        <View style={styles.footer} fixed>
-          <Text>{view.header.number} · {view.header.partNumber} revision {view.header.revision}</Text>
-          <Text>Advice only: makers’ ratings, local codes and trained people decide.</Text>
-          <Text render={({ pageNumber, totalPages }) => `Page ${pageNumber} of ${totalPages}`} />
         </View>
       </Page>
     </Document>

@@ -4,9 +4,9 @@ import { paperColours as colours } from "@/lib/sheet/shapeLook";
 const rule = `0.5pt solid ${colours["steel-300"]}`;
 const ink = `1pt solid ${colours.ink}`;
 
-/** Look of the PDF sheet, in points on A4. */
+/** Look of the PDF sheet, in points on A4. No line height on the page: with one, texts made while paging are dropped. */
 export const pdfStyles = StyleSheet.create({
-  page: { paddingTop: 28, paddingBottom: 40, paddingHorizontal: 30, fontFamily: ["Barlow", "Barlow ext"], fontSize: 8.5, color: colours.ink, lineHeight: 1.25 },
+  page: { paddingTop: 28, paddingBottom: 40, paddingHorizontal: 30, fontFamily: ["Barlow", "Barlow ext"], fontSize: 8.5, color: colours.ink },
   head: { flexDirection: "row", borderTop: `2pt solid ${colours.ink}`, borderBottom: ink, paddingVertical: 5 },
   title: { fontSize: 15, fontWeight: 600, lineHeight: 1.35 },
   cells: { flexDirection: "row", flexWrap: "wrap" },
@@ -26,5 +26,6 @@ export const pdfStyles = StyleSheet.create({
   stepNumber: { width: 28, alignItems: "center" },
   number: { fontFamily: "Plex Mono", fontWeight: 600, fontSize: 15, lineHeight: 1.1 },
   side: { marginTop: 3, width: 20, height: 20, border: `1.5pt solid ${colours.ink}`, textAlign: "center", fontWeight: 700, fontSize: 13, lineHeight: 1.2 },
-  footer: { position: "absolute", bottom: 18, left: 30, right: 30, flexDirection: "row", justifyContent: "space-between", borderTop: rule, paddingTop: 3, fontSize: 7, color: colours["ink-soft"] },
+  pageNumber: { position: "absolute", top: 812, right: 30, width: 120, height: 14, textAlign: "right", fontSize: 7, color: colours["ink-soft"] },
+  footer: { position: "absolute", top: 808, height: 20, left: 30, right: 30, flexDirection: "row", borderTop: rule, paddingTop: 3, gap: 24, fontSize: 7, color: colours["ink-soft"] },
 });

@@ -1,14 +1,21 @@
 import type { SheetMeasurement } from "./sheetView";
 
+interface MeasurementRow { readonly what: string; readonly nominal: string; readonly tolerance: string }
+
+/** What a row is about: "Included angle at" + "b1", or "Flange" + "front" + "outside". */
+const shape = /^(Included angle at|Flange) ([^,]+)(?:, (\w+))?$/;
+
 /** Rows for paper: what has the same nominal and tolerance stands in one, "Included angle at b1, b2". */
-export function groupMeasurements(measurements: readonly SheetMeasurement[]): readonly { readonly what: string; readonly nominal: string; readonly tolerance: string }[] {
-  const groups = new Map<string, { what: string[]; nominal: string; tolerance: string }>();
-  for (const { what, kind, nominal, tolerance } of measurements) {
-    const lead = kind === "angle" ? "Included angle at " : "Flange ";
-    const grouped = what.startsWith(lead) ? `${lead}|${nominal}|${tolerance}` : what;
-    const group = groups.get(grouped);
-    if (group) group.what.push(what.slice(lead.length));
-    else groups.set(grouped, { what: [what], nominal, tolerance });
+export function groupMeasurements(measurements: readonly SheetMeasurement[]): readonly MeasurementRow[] {
+  const groups = new Map<string, { lead: string; names: string[]; end: string; nominal: string; tolerance: string }>();
+  for (const { what, nominal, tolerance } of measurements) {
+    const [, lead = "", name = what, end = ""] = shape.exec(what) ?? [];
+    const key = lead === "" ? what : [lead, end, nominal, tolerance].join("|");
+    const group = groups.get(key);
+    if (group) group.names.push(name);
+    else groups.set(key, { lead, names: [name], end, nominal, tolerance });
   }
-  return [...groups.values()].map((group) => ({ ...group, what: group.what.join(", ") }));
+  return [...groups.values()].map(({ lead, names, end, nominal, tolerance }) => ({
+    what: `${lead} ${names.join(", ")}${end === "" ? "" : ` (${end})`}`.trim(), nominal, tolerance,
+  }));
 }
