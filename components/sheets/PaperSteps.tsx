@@ -23,16 +23,16 @@ function Step({ step }: { readonly step: SheetStep }) {
     ["Force", step.force], ["Depth", step.depth],
   ] as const;
   return (
-    <li className="grid break-inside-avoid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-3 border-b border-rule-strong py-2 sm:grid-cols-[2.5rem_11rem_11rem_minmax(0,1fr)] print:grid-cols-[2rem_4.2cm_4.2cm_minmax(0,1fr)]">
+    <li className="grid break-inside-avoid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-3 border-b border-rule-strong py-2 sm:grid-cols-[2.5rem_11rem_11rem_minmax(0,1fr)] print:grid-cols-[2rem_3.6cm_3.6cm_minmax(0,1fr)]">
       <div className="text-center"><p className="num text-2xl font-semibold">{step.number}</p><p className="mx-auto mt-1 flex size-8 items-center justify-center border-2 border-ink text-lg font-bold">{step.upSide}</p></div>
-      <StepDrawing picture={step.picture} label={`Step ${step.number}, section`} className="h-32 w-full print:h-[2.7cm]" />
-      <StepDrawing picture={step.above} label={`Step ${step.number}, from above`} className="h-32 w-full print:h-[2.7cm]" />
+      <StepDrawing picture={step.picture} label={`Step ${step.number}, section`} className="h-32 w-full print:h-[2.3cm]" />
+      <StepDrawing picture={step.above} label={`Step ${step.number}, from above`} className="h-32 w-full print:h-[2.3cm]" />
       <div>
         <p className="font-semibold">{step.bends}</p>
         <dl className="mt-0.5 flex flex-wrap gap-x-4 gap-y-0.5">
           {numbers.map(([label, value]) => <div key={label}><dt className="caption leading-none">{label}</dt><dd className="num font-semibold">{value}</dd></div>)}
         </dl>
-        <dl className="mt-1 flex flex-wrap gap-x-4 gap-y-0.5 text-sm print:text-xs">
+        <dl className="mt-1 flex flex-wrap gap-x-4 gap-y-0.5 text-sm">
           {cells.map(([label, value]) => <div key={label} className="flex gap-1"><dt className="text-ink-soft">{label}</dt><dd>{value}</dd></div>)}
         </dl>
       </div>

@@ -8,7 +8,7 @@ interface PaperTableProps {
 /** A ruled table of texts; the first column heads its row. */
 export function PaperTable({ heads, rows, wide = [0] }: PaperTableProps) {
   return (
-    <table className="w-full border-collapse border-y border-ink text-left text-sm print:text-xs">
+    <table className="w-full border-collapse border-y border-ink text-left text-sm">
       <thead><tr className="border-b border-rule-strong">{heads.map((head) => <th key={head} scope="col" className="py-0.5 pr-2 font-medium text-ink-soft">{head}</th>)}</tr></thead>
       <tbody>
         {rows.map((row, index) => (

@@ -57,7 +57,7 @@ function Cautions({ view }: { readonly view: SheetView }) {
   return (
     <section className="break-inside-avoid border-l-4 border-amber pl-3">
       <h2 className="caption mb-1">Cautions</h2>
-      <ul className="gap-x-8 text-sm md:columns-2 print:columns-2 print:text-xs">
+      <ul className="gap-x-8 text-sm md:columns-2 print:columns-2">
         {view.cautions.map((caution, index) => (
           <li key={index} className={caution.level === "stop" ? "mb-0.5 break-inside-avoid font-semibold" : "mb-0.5 break-inside-avoid"}>
             {caution.level === "stop" ? "Stop: " : ""}{caution.text}{caution.steps.length > 0 ? ` (step ${caution.steps.join(", ")})` : ""}
