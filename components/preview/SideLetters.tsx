@@ -8,13 +8,13 @@ import { frameMatrix } from "./frameMatrix";
 import { stageColours, type StageTheme } from "./stageColours";
 import { useDispose } from "./useDispose";
 
-/** "A" on the base's top, "B" on its underside, lying on the sheet. */
+/** "T" on the base's top, "U" on its underside, lying on the sheet. */
 export function SideLetters({ part, frames, theme }: { readonly part: PartModel; readonly frames: readonly Frame[]; readonly theme: StageTheme }) {
   const base = part.faces[0];
   const frame = frames[0];
   const ink = stageColours[theme].letter;
-  const a = useMemo(() => letterTexture("A", ink), [ink]);
-  const b = useMemo(() => letterTexture("B", ink), [ink]);
+  const a = useMemo(() => letterTexture("T", ink), [ink]);
+  const b = useMemo(() => letterTexture("U", ink), [ink]);
   useDispose(a);
   useDispose(b);
   if (!base || !frame) return null;

@@ -13,7 +13,7 @@ export function sheetStep(model: PlanModel, stepModel: StepModel, index: number)
     ...stepNumbers(stepModel.step, model.units),
     number: index + 1,
     upSide: side,
-    up: side === "A" ? "A up (top)" : "B up (underside)",
+    up: side === "T" ? "T up (top)" : "U up (underside)",
     front: stepModel.step.front,
     toGauge: edgeName(model, stepModel),
     picture: stepPicture(model, stepModel),

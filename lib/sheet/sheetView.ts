@@ -71,8 +71,8 @@ export interface PickLine {
 export interface SheetStep {
   readonly number: number;
   readonly bends: string;
-  /** "A" is the side that is the base's top, "B" its underside. */
-  readonly upSide: "A" | "B";
+  /** "T" is the side that is the base's top, "U" its underside. */
+  readonly upSide: "T" | "U";
   readonly up: string;
   readonly front: string;
   readonly toGauge: string;
