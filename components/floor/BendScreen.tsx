@@ -47,8 +47,8 @@ function BendNumbers({ step }: { readonly step: SheetStep }) {
   return (
     <div className="flex flex-col border-2 border-rule-strong bg-sheet">
       <div className="flex items-center gap-4 border-b-2 border-rule-strong p-3">
-        <span className="flex size-24 shrink-0 items-center justify-center border-4 border-ink text-7xl font-bold">{step.upSide}</span>
-        <p className="min-w-0 text-2xl leading-tight"><span className="font-semibold">{step.upSide === "T" ? "top up" : "underside up"}</span><br /><span className="text-ink-soft">in front</span> <span className="font-semibold break-words">{step.front}</span></p>
+        <span className="flex h-24 shrink-0 items-center justify-center border-4 border-ink px-3 text-4xl font-bold">{step.upSide}</span>
+        <p className="min-w-0 text-2xl leading-tight"><span className="font-semibold">{step.up} up</span><br /><span className="text-ink-soft">in front</span> <span className="font-semibold break-words">{step.front}</span></p>
       </div>
       <div className="border-b-2 border-rule-strong px-3 pt-2 pb-3">
         <p className="text-xl text-ink-soft">Gauge X</p>

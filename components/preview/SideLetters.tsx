@@ -8,18 +8,18 @@ import { frameMatrix } from "./frameMatrix";
 import { stageColours, type StageTheme } from "./stageColours";
 import { useDispose } from "./useDispose";
 
-/** "T" on the base's top, "U" on its underside, lying on the sheet. */
+/** "TOP" on the base's top, "UNDER" on its underside, lying on the sheet. */
 export function SideLetters({ part, frames, theme }: { readonly part: PartModel; readonly frames: readonly Frame[]; readonly theme: StageTheme }) {
   const base = part.faces[0];
   const frame = frames[0];
   const ink = stageColours[theme].letter;
-  const a = useMemo(() => letterTexture("T", ink), [ink]);
-  const b = useMemo(() => letterTexture("U", ink), [ink]);
+  const a = useMemo(() => wordTexture("TOP", ink), [ink]);
+  const b = useMemo(() => wordTexture("UNDER", ink), [ink]);
   useDispose(a);
   useDispose(b);
   if (!base || !frame) return null;
   const { min: [left, bottom], max: [right, top] } = polygonBounds(base.outline);
-  const size = Math.min(right - left, top - bottom, 120) * 0.7;
+  const size = Math.min(right - left, top - bottom, 120) * 0.9;
   const at = (z: number, turned: boolean): Matrix4 =>
     frameMatrix(frame).multiply(new Matrix4().makeTranslation((left + right) / 2, (bottom + top) / 2, z)).multiply(new Matrix4().makeRotationY(turned ? Math.PI : 0));
   return (
@@ -39,16 +39,16 @@ function Letter({ texture, matrix, size }: { readonly texture: CanvasTexture; re
   );
 }
 
-function letterTexture(letter: string, ink: string): CanvasTexture {
+function wordTexture(word: string, ink: string): CanvasTexture {
   const canvas = document.createElement("canvas");
-  canvas.width = canvas.height = 128;
+  canvas.width = canvas.height = 256;
   const context = canvas.getContext("2d");
   if (context) {
     context.fillStyle = ink;
-    context.font = "700 104px Barlow, sans-serif";
+    context.font = "700 68px Barlow, sans-serif";
     context.textAlign = "center";
     context.textBaseline = "middle";
-    context.fillText(letter, 64, 70);
+    context.fillText(word, 128, 134);
   }
   return new CanvasTexture(canvas);
 }

@@ -68,7 +68,7 @@ function StageSigns({ model, step, number }: { readonly model: PlanModel; readon
     <div className="pointer-events-none absolute inset-x-0 top-0 flex items-start justify-between gap-4 p-3">
       <p className="flex items-center gap-2">
         <span className="num text-ink-soft">{number}</span>
-        <span className="inline-flex size-9 items-center justify-center border-2 border-ink bg-sheet text-xl font-bold">{upSide(model, step)}</span>
+        <span className="inline-flex h-9 items-center justify-center border-2 border-ink bg-sheet px-1.5 text-lg font-bold">{upSide(model, step)}</span>
         <span className="bg-sheet/80 px-1 leading-tight">up<br /><span className="text-sm text-ink-soft">{step.step.front} in front</span></span>
       </p>
       <p className="bg-sheet/80 px-1 text-right leading-tight">

@@ -24,7 +24,7 @@ function Step({ step }: { readonly step: SheetStep }) {
   ] as const;
   return (
     <li className="grid break-inside-avoid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-3 border-b border-rule-strong py-2 sm:grid-cols-[2.5rem_11rem_11rem_minmax(0,1fr)] print:grid-cols-[2rem_3.6cm_3.6cm_minmax(0,1fr)]">
-      <div className="text-center"><p className="num text-2xl font-semibold">{step.number}</p><p className="mx-auto mt-1 flex size-8 items-center justify-center border-2 border-ink text-lg font-bold">{step.upSide}</p></div>
+      <div className="text-center"><p className="num text-2xl font-semibold">{step.number}</p><p className="mt-1 border-2 border-ink text-center text-[0.65rem] leading-snug font-bold">{step.upSide}</p></div>
       <StepDrawing picture={step.picture} label={`Step ${step.number}, section`} className="h-32 w-full print:h-[2.3cm]" />
       <StepDrawing picture={step.above} label={`Step ${step.number}, from above`} className="h-32 w-full print:h-[2.3cm]" />
       <div>

@@ -23,9 +23,9 @@ export const pdfStyles = StyleSheet.create({
   row: { flexDirection: "row", borderBottom: rule, paddingVertical: 1.2 },
   tableHead: { flexDirection: "row", borderTop: ink, borderBottom: rule, paddingVertical: 1.2, color: colours["ink-soft"], fontSize: 7 },
   step: { flexDirection: "row", borderBottom: rule, paddingVertical: 4 },
-  stepNumber: { width: 28, alignItems: "center" },
+  stepNumber: { width: 34, alignItems: "center" },
   number: { fontFamily: "Plex Mono", fontWeight: 600, fontSize: 15, lineHeight: 1.1 },
-  side: { marginTop: 3, width: 20, height: 20, border: `1.5pt solid ${colours.ink}`, textAlign: "center", fontWeight: 700, fontSize: 13, lineHeight: 1.2 },
+  side: { marginTop: 3, width: 30, border: `1.2pt solid ${colours.ink}`, textAlign: "center", fontWeight: 700, fontSize: 7, paddingTop: 2, paddingBottom: 1 },
   pageNumber: { position: "absolute", top: 812, right: 30, width: 120, height: 14, textAlign: "right", fontSize: 7, color: colours["ink-soft"] },
   footer: { position: "absolute", top: 808, height: 20, left: 30, right: 30, flexDirection: "row", borderTop: rule, paddingTop: 3, gap: 24, fontSize: 7, color: colours["ink-soft"] },
 });

@@ -52,7 +52,7 @@ function header({ plan, document, material, machine, part, sheet }: SheetInput, 
     bends: String(model.part.bends.length),
     stations: String(model.stations.length),
     conventions: [
-      "T is the top of the base as drawn, U its underside.",
+      "TOP is the top of the base as drawn, UNDER its underside.",
       `Lengths are ${document.dimension ?? "outside"} dimensions. Places along the bed count from its middle, + to the operator's right.`,
       "Gauge X from the punch line, R from the die's top.",
     ],

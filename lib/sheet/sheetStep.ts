@@ -13,7 +13,7 @@ export function sheetStep(model: PlanModel, stepModel: StepModel, index: number)
     ...stepNumbers(stepModel.step, model.units),
     number: index + 1,
     upSide: side,
-    up: side === "T" ? "T up (top)" : "U up (underside)",
+    up: side === "TOP" ? "top" : "underside",
     front: stepModel.step.front,
     toGauge: edgeName(model, stepModel),
     picture: stepPicture(model, stepModel),

@@ -71,8 +71,8 @@ export interface PickLine {
 export interface SheetStep {
   readonly number: number;
   readonly bends: string;
-  /** "T" is the side that is the base's top, "U" its underside. */
-  readonly upSide: "T" | "U";
+  /** "TOP" is the side that is the base's top, "UNDER" its underside. */
+  readonly upSide: "TOP" | "UNDER";
   readonly up: string;
   readonly front: string;
   readonly toGauge: string;
