@@ -59,7 +59,7 @@ function BendNumbers({ step }: { readonly step: SheetStep }) {
       <div className="border-b-2 border-rule-strong px-3 py-2">
         <p className="text-xl text-ink-soft">Angle of the bend</p>
         <p className="num text-[4rem] leading-none font-semibold">{step.angle}</p>
-        <p className="mt-1 text-2xl"><span className="text-ink-soft">set</span> <span className="num font-semibold">{step.demandedAngle}</span>&ensp;<span className="text-ink-soft">inside</span> <span className="num font-semibold">{step.includedAngle}</span></p>
+        <p className="mt-1 text-2xl"><span className="text-ink-soft">demanded</span> <span className="num font-semibold">{step.demandedAngle}</span>&ensp;<span className="text-ink-soft">included</span> <span className="num font-semibold">{step.includedAngle}</span></p>
       </div>
       <p className="grow px-3 py-2 text-xl"><span className="text-ink-soft">Station</span> <span className="text-3xl font-bold">{step.station}</span>&ensp;<span className="num">{step.punch}</span> / <span className="num">{step.die}</span>&ensp;<span className="num text-ink-soft">{step.force}</span></p>
     </div>

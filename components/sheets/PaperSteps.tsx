@@ -19,7 +19,7 @@ function Step({ step }: { readonly step: SheetStep }) {
     ["Punch", step.punch], ["Die", step.die], ["Station", step.station], ["Bend along the bed", step.bendZ],
   ] as const;
   const numbers = [
-    ["Gauge X", step.gaugeX], ["R", step.gaugeR], ["Z", step.gaugeZ], ["Angle", step.angle], ["Inside the bend", step.includedAngle], ["Demanded", step.demandedAngle],
+    ["Gauge X", step.gaugeX], ["R", step.gaugeR], ["Z", step.gaugeZ], ["Angle", step.angle], ["Included", step.includedAngle], ["Demanded", step.demandedAngle],
     ["Force", step.force], ["Depth", step.depth],
   ] as const;
   return (

@@ -7,7 +7,7 @@ import { pdfStyles as styles } from "./pdfStyles";
 /** One row of the bend table, never broken over pages. */
 export function PdfStep({ step }: { readonly step: SheetStep }) {
   const numbers = [
-    ["Gauge X", step.gaugeX], ["R", step.gaugeR], ["Z", step.gaugeZ], ["Angle", step.angle], ["Inside the bend", step.includedAngle], ["Demanded", step.demandedAngle], ["Force", step.force], ["Depth", step.depth],
+    ["Gauge X", step.gaugeX], ["R", step.gaugeR], ["Z", step.gaugeZ], ["Angle", step.angle], ["Included", step.includedAngle], ["Demanded", step.demandedAngle], ["Force", step.force], ["Depth", step.depth],
   ] as const;
   const words = [
     ["Up", step.up], ["In front", step.front], ["To gauge", step.toGauge], ["Handling", step.handling], ["Punch", step.punch], ["Die", step.die], ["Station", step.station], ["Along the bed", step.bendZ],
