@@ -1,7 +1,7 @@
 "use client";
 import { X } from "lucide-react";
 import { Dialog } from "radix-ui";
-import type { ReactNode } from "react";
+import { useRef, type ReactNode } from "react";
 
 interface DialogBoxProps {
   readonly open: boolean;
@@ -14,12 +14,16 @@ interface DialogBoxProps {
   readonly wide?: boolean;
 }
 
+/** Whatever opened it has the focus again when it closes. */
 export function DialogBox({ open, onOpenChange, title, description, children, actions, wide = false }: DialogBoxProps) {
+  const opener = useRef<Element | null>(null);
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
       <Dialog.Portal>
         <Dialog.Overlay className="fixed inset-0 z-40 bg-ink/45" />
         <Dialog.Content {...(description === undefined ? { "aria-describedby": undefined } : {})}
+          onOpenAutoFocus={() => { opener.current = document.activeElement; }}
+          onCloseAutoFocus={(event) => { event.preventDefault(); if (opener.current instanceof HTMLElement) opener.current.focus(); }}
           className={`fixed top-1/2 left-1/2 z-40 flex max-h-[calc(100dvh-2rem)] w-[calc(100vw-2rem)] ${wide ? "max-w-3xl" : "max-w-lg"} -translate-x-1/2 -translate-y-1/2 flex-col border border-ink bg-paper outline-offset-0`}>
           <header className="flex items-start justify-between gap-4 border-b border-ink px-5 py-3">
             <Dialog.Title className="text-lg font-semibold">{title}</Dialog.Title>
