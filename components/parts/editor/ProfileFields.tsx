@@ -1,6 +1,7 @@
 "use client";
 import { Plus } from "lucide-react";
 import { useRef } from "react";
+import { flushSync } from "react-dom";
 import { Button } from "@/components/ui/Button";
 import { Notice } from "@/components/ui/Notice";
 import { newBend, newLeg } from "../draft/newRows";
@@ -15,14 +16,15 @@ export function ProfileFields() {
   const { draft, update, problemAt } = useEditor();
   const list = useRef<HTMLOListElement>(null);
   const setLegs = (change: (legs: readonly LegDraft[]) => readonly LegDraft[]) => update((old) => ({ ...old, legs: change(old.legs) }));
-  const focusLeg = (index: number) => requestAnimationFrame(() => list.current?.querySelector<HTMLInputElement>(`#${CSS.escape(fieldId(`profile.legs[${index}]`))}`)?.focus());
+  const focusLeg = (index: number) => list.current?.querySelector<HTMLInputElement>(`#${CSS.escape(fieldId(`profile.legs[${index}]`))}`)?.focus();
   const insert = (index: number) => {
-    setLegs((legs) => [...legs.slice(0, index + 1), newLeg("", newBend("90", legs[index]?.bend.direction ?? "up")), ...legs.slice(index + 1)]);
+    // Drawn at once: the next key already belongs to the new leg.
+    flushSync(() => setLegs((legs) => [...legs.slice(0, index + 1), newLeg("", newBend("90", legs[index]?.bend.direction ?? "up")), ...legs.slice(index + 1)]));
     focusLeg(index + 1);
   };
   const remove = (index: number) => {
     if (draft.legs.length <= 1) return;
-    setLegs((legs) => legs.filter((_, i) => i !== index));
+    flushSync(() => setLegs((legs) => legs.filter((_, i) => i !== index)));
     focusLeg(Math.max(0, index - 1));
   };
   const problem = problemAt("profile.bends") ?? problemAt("profile.legs");
