@@ -7,6 +7,8 @@ export interface CostToGo {
   /** Sets of formed bends in which no move can be made, fullest first. */
   readonly deadEnds: () => readonly number[];
   readonly states: () => number;
+  /** Every set of formed bends that an order can come to, the full one left out; ascending. */
+  readonly sets: () => readonly number[];
   /** The cheapest moves from the start; empty when there is no way. */
   readonly moves: () => readonly { readonly move: number; readonly formed: number }[];
 }
@@ -37,10 +39,10 @@ export function createCostToGo(problem: OrderProblem, shouldStop: () => boolean)
     const key = formed * count + (last ?? count - 1);
     const answer = known.get(key);
     if (answer !== undefined) return answer;
-    if ((known.size & 15) === 0 && shouldStop()) throw new Stopped();
     let best = Infinity;
     let any = false;
     for (let move = 0; move < problem.moves.length; move += 1) {
+      if (shouldStop()) throw new Stopped();
       const seconds = step(formed, last, move);
       if (seconds === null) continue;
       any = true;
@@ -75,6 +77,7 @@ export function createCostToGo(problem: OrderProblem, shouldStop: () => boolean)
     from,
     deadEnds: () => [...dead].sort((a, b) => bits(b) - bits(a) || a - b),
     states: () => known.size,
+    sets: () => [...new Set([...known.keys()].map((key) => Math.floor(key / count)))].sort((a, b) => a - b),
     moves: cheapest,
   };
 }

@@ -29,13 +29,13 @@ export function diveOrder(problem: OrderProblem, most: number, shouldStop: () =>
       return true;
     }
     entered += 1;
-    if (entered > most || shouldStop()) return false;
-    for (const child of childrenOf(problem, formed, before, all, bound)) {
+    if (entered > most) return false;
+    for (const child of childrenOf(problem, formed, before, all, bound, shouldStop)) {
       if (dead.has(child.next)) continue;
       steps.push({ move: child.step.move, station: child.step.station, formed });
       if (enter(child.next, child.step, seconds + child.seconds, demerits + child.demerit)) return true;
       steps.pop();
-      if (entered > most) return false;
+      if (entered > most || shouldStop()) return false;
     }
     dead.add(formed);
     return false;
@@ -44,10 +44,10 @@ export function diveOrder(problem: OrderProblem, most: number, shouldStop: () =>
   return answer;
 }
 
-function childrenOf(problem: OrderProblem, formed: number, before: StepBefore | null, all: number, bound: ReturnType<typeof remainingBound>): readonly Child[] {
+function childrenOf(problem: OrderProblem, formed: number, before: StepBefore | null, all: number, bound: ReturnType<typeof remainingBound>, shouldStop: () => boolean): readonly Child[] {
   const children: Child[] = [];
   problem.moves.forEach(({ mask, pose }, move) => {
-    if (mask & formed) return;
+    if (mask & formed || shouldStop()) return;
     for (let station = 0; station < problem.stations; station += 1) {
       const option = problem.option(move, formed, station);
       if (option === null) continue;

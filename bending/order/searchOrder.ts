@@ -33,7 +33,6 @@ interface Node {
 
 /** Seconds; two totals nearer than this are equal: over rounding noise, under anything a clock shows. */
 const SAME_SECONDS = 1e-7;
-const ASK_EVERY = 16;
 
 /**
  * Best first over (formed set, last move, station), each state kept once with its cheapest way: exact, since
@@ -50,6 +49,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
   let expanded = 0;
   let serial = 0;
   let pruned = false;
+  let stopped = false;
 
   const expand = (node: Node | null): void => {
     const formed = node === null ? 0 : node.formed;
@@ -57,6 +57,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
     for (let move = 0; move < problem.moves.length; move += 1) {
       const mask = problem.moves[move]?.mask ?? 0;
       if (mask & formed) continue;
+      if (limits.shouldStop?.()) { stopped = true; return; }
       for (let station = 0; station < problem.stations; station += 1) {
         const option = problem.option(move, formed, station);
         if (option === null) continue;
@@ -78,16 +79,15 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
   };
 
   expand(null);
+  if (stopped) return { kind: "stopped", bound: bound(all, null), expanded };
   for (let node = queue.pop(); node !== undefined; node = queue.pop()) {
     const key = (node.formed * problem.moves.length + node.move) * problem.stations + node.station;
     if ((best.get(key) ?? Infinity) < node.weight - SAME_SECONDS) continue;
     if (node.formed === all) return found(node, expanded);
-    if (expanded % ASK_EVERY === 0) {
-      limits.onExpand?.(expanded);
-      if (limits.shouldStop?.()) return { kind: "stopped", bound: node.total, expanded };
-    }
     expanded += 1;
+    limits.onExpand?.(expanded);
     expand(node);
+    if (stopped) return { kind: "stopped", bound: node.total, expanded };
   }
   return { kind: "none", deadEnds: [...deadEnds].sort((a, b) => bitCount(b) - bitCount(a) || a - b), pruned, expanded };
 }

@@ -1,13 +1,29 @@
-import type { VariantAnswer } from "./solveVariant";
+import { MOST_STATIONS, type VariantAnswer } from "./solveVariant";
 
-/** Says what an answer is proven over, and nothing more. */
-export function proofMethod(answers: readonly VariantAnswer[]): string {
-  const layouts = answers.reduce((sum, answer) => sum + answer.layouts, 0);
-  const pairs = Math.max(0, ...answers.map((answer) => answer.pairs));
-  const flats = answers.length > 1 ? `, ${answers.length} V openings` : "";
-  if (answers.length > 0 && answers.every(({ deadEnds }) => deadEnds !== null)) {
-    return `every order and front with all ${pairs} tool pairs${flats}, each bend with the shortest station that the pieces make: none clears`;
-  }
-  return `best first over all orders and fronts with ${pairs} tool pairs${flats}: all beds of one station, and of two or three stations of the likeliest pairs; ` +
-    `${layouts} beds searched, the rest cannot be better by the bound of the unhindered order`;
+export interface ProvenOver {
+  /** The V that the flat pattern's radii follow from; null when the document gives them. */
+  readonly vOpening: number | null;
+  readonly answer: VariantAnswer;
+  /** Pairs that fit some bend, looked over or not. */
+  readonly allPairs: number;
 }
+
+/** Says what an answer is proven over, and nothing more. `flats`: how many flat patterns there are, planned or not. */
+export function proofMethod(over: readonly ProvenOver[], flats: number): string {
+  if (over.length === 0) return "no punch and die fit any bend: decided before any search";
+  const layouts = over.reduce((sum, { answer }) => sum + answer.layouts, 0);
+  const last = over[over.length - 1];
+  const pairs = last === undefined ? "" : pairsText(last);
+  if (over.every(({ answer }) => answer.deadEnds !== null)) {
+    const all = over.every(({ answer, allPairs }) => answer.pairs === allPairs);
+    return `every order and front${flatsText(over.length)} with ${all ? `all ${Math.max(...over.map(({ allPairs }) => allPairs))} tool pairs that fit a bend` : pairs}, each bend with the shortest solid runs that the pieces make: none clears`;
+  }
+  const flat = last?.vOpening === null || last === undefined ? "" : `, the flat for a V of ${last.vOpening} mm${flats > 1 ? ` (${flats} flats are possible; the nearest to the usual V that gives a plan is taken)` : ""}`;
+  return `least total time over every order and front with ${pairs}${flat}, on beds of up to ${MOST_STATIONS} stations of solid runs: ` +
+    `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given allowed" : ""}`;
+}
+
+const pairsText = ({ answer: { pairs }, allPairs }: ProvenOver): string =>
+  pairs === allPairs ? `all ${pairs} tool pairs that fit a bend` : `${pairs} of the ${allPairs} tool pairs that fit a bend (each shape of tool, the nearest V first)`;
+
+const flatsText = (flats: number): string => (flats > 1 ? ` of each of ${flats} flats, one for each V` : "");

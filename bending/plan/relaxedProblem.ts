@@ -7,8 +7,9 @@ import type { GaugeNumbers } from "./gaugeNumbers";
 import type { Situation } from "./situation";
 
 /**
- * The order question with the bed left out: every stroke has the best pair and the shortest station that real
- * pieces make, alone on the bed and without a walk. No plan costs less a part; if it has no order, none has.
+ * The order question with the bed left out: every stroke has the best pair and the shortest runs that real
+ * pieces make, punch and die each where it suits it, alone on the bed and without a walk. Where a longer run may
+ * stand a shorter one within it may, so no plan costs less a part; if it has no order, none has.
  */
 export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): OrderProblem {
   const { moves, pairs, machine, part, allowed, runs, fits } = situation;
@@ -20,12 +21,11 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
     const length = shortest[move]?.[pair];
     const tools = pairs[pair];
     if (!length || !tools || !Number.isFinite(length.punch) || !Number.isFinite(length.die) || !checks.possible(move, formed, pair)) return null;
-    const reach = Math.min(length.punch, length.die) / 2 - (moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd;
-    const shifts = freeShifts(reach, [
-      { offset: 0, length: length.punch, forbidden: checks.forbidden(move, formed, pair, tools.punch) },
-      { offset: 0, length: length.die, forbidden: checks.forbidden(move, formed, pair, tools.die) },
-    ]);
-    if (shifts.length === 0) return null;
+    const fits = (tool: typeof tools.punch | typeof tools.die, run: number) => freeShifts(
+      run / 2 - (moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd,
+      [{ offset: 0, length: run, forbidden: checks.forbidden(move, formed, pair, tool) }],
+    ).length > 0;
+    if (!fits(tools.punch, length.punch) || !fits(tools.die, length.die)) return null;
     const gauge = checks.gauges(move, formed, pair)[0];
     const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
     return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };

@@ -12,15 +12,19 @@ import type { PlanDocument, PlanReason } from "./planDocument";
 import type { PlanRequest } from "./planRequest";
 import { proofMethod } from "./proofMethod";
 import { shortlist } from "./shortlist";
-import type { SearchBudget } from "./searchBudget";
+import { createBudget, type SearchBudget } from "./createBudget";
 import type { Situation } from "./situation";
-import { solveVariant, type Candidate, type VariantAnswer } from "./solveVariant";
+import type { Candidate } from "./createCandidateKeeper";
+import { solveVariant, type VariantAnswer } from "./solveVariant";
 import { writePlan } from "./writePlan";
 
 interface Solved {
+  readonly variant: PartVariant;
   readonly situation: Situation;
   readonly checks: StepChecks;
   readonly answer: VariantAnswer;
+  /** Pairs that fit some bend, looked over or not. */
+  readonly allPairs: number;
 }
 
 /** The plan, free or along a person's own order (bends of each stroke as masks). */
@@ -33,48 +37,54 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   if (bends > MAX_BENDS) return withFlat(refused(request, [reasonOf("order", `the part has ${bends} bends; up to ${MAX_BENDS} are planned`)]), first, request);
   const hems = first.part.bends.flatMap((bend) => hemReason(bend) ?? []);
   if (hems.length > 0) return withFlat(refused(request, hems), first, request);
-  const budget = budgetOf(request);
+  const { solved, toolReasons } = solveVariants(request, variants.value, createBudget(request), order);
+  return withFlat(joined(request, solved, toolReasons, variants.value.length), first, request);
+}
+
+/** Flat by flat the shortlist of pairs; only when none of them gives a plan, flat by flat all pairs. */
+function solveVariants(request: PlanRequest, variants: readonly PartVariant[], budget: SearchBudget, order: readonly number[] | undefined): { readonly solved: readonly Solved[]; readonly toolReasons: readonly PlanReason[] } {
   const solved: Solved[] = [];
   const toolReasons: PlanReason[] = [];
-  for (const variant of variants.value) {
-    const outcome = solveOne(request, variant, budget, order);
-    if ("reasons" in outcome) { toolReasons.push(...outcome.reasons); continue; }
-    solved.push(outcome);
-    if (outcome.answer.candidates.length > 0) break;
-  }
-  return withFlat(joined(request, solved, toolReasons), first, request);
-}
-
-function solveOne(request: PlanRequest, variant: PartVariant, budget: SearchBudget, order: readonly number[] | undefined): Solved | { readonly reasons: readonly PlanReason[] } {
-  const { machine, tools, document } = request;
-  const found = candidatePairs(tools, machine, variant.part.thickness, variant.wantedV, document.units);
-  if (found.pairs.length > 0) {
-    const situation = createSituation({ variant, machine, units: document.units, pairs: found.pairs, ...(order ? { order } : {}) });
-    const short = withPairs(situation, shortlist(situation));
-    if (short.pairs.length > 0) {
-      const checks = createStepChecks(short);
-      const answer = solveVariant(short, checks, budget, Infinity);
-      if (answer.candidates.length > 0 || answer.stopped || short.pairs.length === situation.pairs.length) return { situation: short, checks, answer };
-    }
+  const left: Situation[] = [];
+  const solve = (variant: PartVariant, situation: Situation, allPairs: number): boolean => {
     const checks = createStepChecks(situation);
-    if (situation.pairs.length > 0) return { situation, checks, answer: solveVariant(situation, checks, budget, Infinity) };
-    const reasons = explain(situation, checks, []);
-    return { reasons: reasons.length > 0 ? reasons : found.reasons };
+    const answer = solveVariant(situation, checks, budget);
+    solved.push({ variant, situation, checks, answer, allPairs });
+    return answer.candidates.length > 0 || answer.stopped;
+  };
+  for (const variant of variants) {
+    const found = candidatePairs(request.tools, request.machine, variant.part.thickness, variant.wantedV, request.document.units);
+    toolReasons.push(...(found.pairs.length === 0 ? found.reasons : []));
+    if (found.pairs.length === 0) continue;
+    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, ...(order ? { order } : {}) });
+    if (situation.pairs.length === 0) {
+      const reasons = explain(situation, createStepChecks(situation), []);
+      toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));
+      continue;
+    }
+    const short = withPairs(situation, shortlist(situation));
+    if (solve(variant, short, situation.pairs.length)) return { solved, toolReasons };
+    if (short.pairs.length < situation.pairs.length) left.push(situation);
   }
-  return { reasons: found.reasons };
+  for (const situation of left) {
+    const place = solved.findIndex((one) => one.situation.part === situation.part);
+    const [one] = solved.splice(place, 1);
+    if (one && solve(one.variant, situation, situation.pairs.length)) break;
+  }
+  return { solved, toolReasons };
 }
 
-function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: readonly PlanReason[]): PlanDocument {
+function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: readonly PlanReason[], flats: number): PlanDocument {
   const expanded = solved.reduce((sum, { answer }) => sum + answer.expanded, 0);
   const all = solved.flatMap((one) => one.answer.candidates.map((candidate) => ({ one, candidate }))).sort((a, b) => a.candidate.weight - b.candidate.weight);
-  const method = proofMethod(solved.map(({ answer }) => answer));
+  const method = proofMethod(solved.map(({ variant, answer, allPairs }) => ({ vOpening: variant.vOpening, answer, allPairs })), flats);
   const best = all[0];
   if (best === undefined) {
     const stopped = solved.some(({ answer }) => answer.stopped);
     const possible = solved.some(({ answer }) => answer.deadEnds === null);
     const reasons = [...toolReasons, ...solved.flatMap(({ situation, checks, answer }) => (answer.deadEnds ? explain(situation, checks, answer.deadEnds) : []))];
     if (stopped) return unknown(request, method, expanded, reasonOf("budget", `no order was found in the time given, after ${expanded} states; more time may find one`));
-    if (possible) return unknown(request, method, expanded, reasonOf("sections", "every bend can be made, but no bed of up to three stations that was tried holds them all; more pieces or another pair may"));
+    if (possible) return unknown(request, method, expanded, reasonOf("sections", "every bend can be made, but no bed that was tried holds them all; more pieces or another pair may"));
     return { ...refused(request, onceEach(reasons)), proof: { method, expanded, bound: 0 } };
   }
   const bound = Math.min(...solved.map(({ answer }) => answer.bound));
@@ -105,13 +115,4 @@ function withFlat(plan: PlanDocument, { part }: PartVariant, { document }: PlanR
 function onceEach(reasons: readonly PlanReason[]): readonly PlanReason[] {
   const seen = new Set<string>();
   return reasons.filter(({ message }) => !seen.has(message) && seen.add(message));
-}
-
-function budgetOf(request: PlanRequest): SearchBudget {
-  return {
-    shouldStop: request.shouldStop ?? (() => false),
-    onProgress: request.onProgress ?? (() => undefined),
-    batch: request.batch,
-    keep: 1 + (request.alternatives ?? 0),
-  };
 }

@@ -5,7 +5,7 @@ import { planFlat } from "./planFlat";
 import type { PlanDocument, PlanFlat } from "./planDocument";
 import { rounded } from "./rounded";
 import type { Situation } from "./situation";
-import type { Candidate } from "./solveVariant";
+import type { Candidate } from "./createCandidateKeeper";
 import { writeStation } from "./writeStation";
 import { writeStep } from "./writeStep";
 

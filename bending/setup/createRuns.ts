@@ -1,7 +1,7 @@
 import type { MachineSettings } from "../tooling/machine";
 import type { Tool } from "../tooling/tool";
 import type { Run } from "./composeRuns";
-import { runsFor } from "./stationsFor";
+import { runsFor } from "./runsFor";
 
 /** Runs of a tool's whole stock for a line, each worked out once. */
 export type RunsOf = (tool: Tool, lineLength: number) => readonly Run[];

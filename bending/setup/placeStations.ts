@@ -2,21 +2,20 @@ import type { Machine } from "../tooling/machine";
 import { stationLength, type Layout, type Station } from "./layout";
 
 /** mm between stations that stand near each other: room for a hand to set the tools. Common practice, no source. */
-const NEAR_MM = 100;
+export const NEAR_GAP_MM = 100;
 
-/**
- * The ways to stand stations on the bed that are tried: every order from left to right, near each other and
- * so far apart that the overhanging sheet passes clear of the next one; the whole about the middle of the bed.
- */
-export function placeStations(stations: readonly Station[], overhang: number, machine: Machine): readonly Layout[] {
+/** Up to so many stations are tried in every order from left to right; more stand in the order given and in its reverse. */
+const EVERY_ORDER_UP_TO = 4;
+
+/** Ways to stand stations on the bed: each order from left to right with each of the gaps between two; the whole about the middle of the bed. */
+export function placeStations(stations: readonly Station[], gaps: readonly number[], machine: Machine): readonly Layout[] {
   const { times, bedLength } = machine;
   const count = stations.reduce((sum, { punch, die }) => sum + punch.pieces.length + die.pieces.length, 0);
   const setupSeconds = stations.length * times.stationSetup + count * times.sectionPlace;
-  const gaps = stations.length < 2 ? [0] : [...new Set([NEAR_MM, Math.max(NEAR_MM, Math.ceil(overhang))])];
-  return gaps.flatMap((gap) => {
+  return (stations.length < 2 ? [0] : [...new Set(gaps)]).flatMap((gap) => {
     const total = stations.reduce((sum, station) => sum + stationLength(station), 0) + gap * (stations.length - 1);
     if (total > bedLength) return [];
-    return orders(stations.length).map((order): Layout => {
+    return ordersOf(stations.length).map((order): Layout => {
       const z = new Map<number, number>();
       let at = -total / 2;
       for (const index of order) {
@@ -31,6 +30,11 @@ export function placeStations(stations: readonly Station[], overhang: number, ma
 
 function missing(): never {
   throw new Error("invariant: an order names the stations there are");
+}
+
+function ordersOf(count: number): readonly (readonly number[])[] {
+  const plain = Array.from({ length: count }, (_, i) => i);
+  return count > EVERY_ORDER_UP_TO ? [plain, [...plain].reverse()] : orders(count);
 }
 
 function orders(count: number): readonly (readonly number[])[] {

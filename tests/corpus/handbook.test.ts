@@ -1,20 +1,8 @@
 import { readFileSync, readdirSync } from "node:fs";
 import { join } from "node:path";
 import { describe, expect, test } from "vitest";
-import { handbookFormulas, type CaseInput } from "./handbookFormulas";
-
-/** Marks: V seen in a text, M recalled from memory, C computed beforehand and independently of the code. */
-interface Corpus {
-  readonly formula: string;
-  readonly note?: string;
-  readonly cases: readonly {
-    readonly input: CaseInput;
-    readonly expected: number;
-    readonly tolerance: number;
-    readonly source: string;
-    readonly mark: "V" | "M" | "C";
-  }[];
-}
+import type { Corpus } from "./handbookCase";
+import { handbookFormulas } from "./handbookFormulas";
 
 const folder = join(import.meta.dirname, "handbook");
 const files = readdirSync(folder).filter((name) => name.endsWith(".json"));
@@ -31,5 +19,13 @@ describe.each(files)("%s", (file) => {
     expect(entry.source).not.toBe("");
     const actual = handbookFormulas[corpus.formula]?.(entry.input) ?? NaN;
     expect(Math.abs(actual - entry.expected), `${actual} against ${entry.expected} of ${entry.source}`).toBeLessThanOrEqual(entry.tolerance);
+  });
+
+  test.each((corpus.disagreements ?? []).map((entry) => ({ ...entry, title: `[${entry.mark}] not followed: ${entry.name}` })))("$title", (entry) => {
+    expect(entry.source).not.toBe("");
+    expect(entry.why).not.toBe("");
+    const actual = handbookFormulas[corpus.formula]?.(entry.input) ?? NaN;
+    expect(Math.abs(actual - entry.followed), `${actual} against ${entry.followed}`).toBeLessThanOrEqual(entry.tolerance);
+    expect(Math.abs(entry.published - entry.followed)).toBeGreaterThan(entry.tolerance);
   });
 });

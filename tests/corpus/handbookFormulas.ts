@@ -14,11 +14,11 @@ import { penetrationDepth } from "@/bending/handbook/penetrationDepth";
 import { springbackRatio } from "@/bending/handbook/springbackRatio";
 import { straightLength } from "@/bending/handbook/straightLength";
 import { vOpeningRule } from "@/bending/handbook/vOpeningRule";
+import type { CaseInput, CorpusFormulas } from "./handbookCase";
+import { handbookDieFormulas } from "./handbookDieFormulas";
 
-export type CaseInput = Readonly<Record<string, number | string | boolean | readonly number[]>>;
-
-/** How each formula is asked with a corpus case's input; lengths in any one unit, angles in degrees. */
-export const handbookFormulas: Readonly<Record<string, (input: CaseInput) => number>> = {
+export const handbookFormulas: CorpusFormulas = {
+  ...handbookDieFormulas,
   din6935Factor: (i) => din6935Factor(length(i.radius), length(i.thickness)),
   din6935CompensatingValue: (i) => din6935CompensatingValue(angle(i.opening), length(i.radius), length(i.thickness)),
   dinFlatLength,

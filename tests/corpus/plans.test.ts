@@ -12,8 +12,10 @@ import { partVariants } from "@/bending/plan/partVariants";
 import { planPart } from "@/bending/plan/planPart";
 import { readPlanDocument } from "@/bending/plan/readPlanDocument";
 import { relaxedProblem } from "@/bending/plan/relaxedProblem";
-import { combineStations } from "@/bending/setup/combineStations";
-import { placeStations } from "@/bending/setup/placeStations";
+import { createRuns } from "@/bending/setup/createRuns";
+import { createStationMaker } from "@/bending/setup/createStationMaker";
+import { NEAR_GAP_MM, placeStations } from "@/bending/setup/placeStations";
+import { stationKinds } from "@/bending/setup/stationKinds";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import { planCorpus } from "./planCorpus";
 import { verifyPlan } from "./verifyPlan";
@@ -52,8 +54,10 @@ describe("plans of the corpus", () => {
     const pair = situation.pairs[0];
     if (!pair) throw new Error("a pair fits");
     const longest = Math.max(...situation.moves.map(({ halfLength }) => 2 * halfLength));
-    const beds = combineStations([{ pair: 0, punch: pair.punch, die: pair.die, lineLength: longest }], request.machine.settings)
-      .flatMap((stations) => placeStations(stations, 0, request.machine)).slice(0, 2);
+    const make = createStationMaker(() => pair, request.machine.settings);
+    const beds = stationKinds([{ pair: 0, punch: pair.punch, die: pair.die, lineLength: longest }], createRuns(request.machine.settings))
+      .flatMap((kind) => placeStations(make([kind]) ?? [], [NEAR_GAP_MM], request.machine)).slice(0, 2);
+    expect(beds.length).toBeGreaterThan(0);
     for (const problem of [relaxedProblem(situation, checks, numbers), ...beds.map((bed) => layoutProblem(situation, checks, numbers, bed))]) {
       const slow = everyOrder(problem);
       const fast = searchOrder(problem);

@@ -1,0 +1,57 @@
+import type { OrderStep } from "../order/orderProblem";
+import type { Layout, Station } from "../setup/layout";
+import { NEAR_GAP_MM, placeStations } from "../setup/placeStations";
+import { stationLength } from "../setup/layout";
+import type { BedQuestion } from "./bedQuestion";
+import { placeStep } from "./placeStep";
+
+/**
+ * Where real stations may stand: near each other, as near as the wanted steps leave one another's tools free, and so
+ * far apart that the overhanging sheet passes clear of the next one; in every order from left to right.
+ */
+export function bedsOf(question: BedQuestion, stations: readonly Station[], wanted: readonly OrderStep[]): readonly Layout[] {
+  const { situation, checks } = question;
+  const { machine } = situation;
+  const near = placeStations(stations, [NEAR_GAP_MM], machine);
+  if (stations.length < 2) return near;
+  const overhang = Math.max(NEAR_GAP_MM, Math.ceil(partOverhang(question)));
+  const clears = (layout: Layout) => wanted.every((step) => placeStep(situation, checks, layout, step) !== null);
+  const gaps = gapsBeside(question, stations, wanted).filter((gap) => gap > NEAR_GAP_MM && gap < overhang);
+  const between: Layout[] = [];
+  near.forEach((layout, order) => {
+    if (clears(layout)) return;
+    for (const gap of gaps) {
+      const wider = placeStations(stations, [gap], machine)[order];
+      if (wider && clears(wider)) { between.push(wider); return; }
+    }
+  });
+  return [...near, ...between, ...placeStations(stations, [overhang], machine)];
+}
+
+/** Gaps at which a neighbour's run just ends where a wanted step's forbidden room begins. */
+function gapsBeside({ situation: { pairs, moves }, checks }: BedQuestion, stations: readonly Station[], wanted: readonly OrderStep[]): readonly number[] {
+  const gaps = new Set<number>();
+  for (const { move, formed, station } of wanted) {
+    const own = stations[station];
+    if (own === undefined || moves[move] === undefined) continue;
+    for (const other of stations) {
+      const tools = pairs[other.pair];
+      if (other === own || tools === undefined) continue;
+      for (const tool of [tools.punch, tools.die]) {
+        for (const [from, to] of checks.forbidden(move, formed, own.pair, tool)) {
+          for (const edge of [Math.abs(from), Math.abs(to)]) gaps.add(Math.ceil(edge - stationLength(own) / 2) + 1);
+        }
+      }
+    }
+  }
+  return [...gaps].sort((a, b) => a - b);
+}
+
+/** How far the sheet sticks out beyond a bend line at the most: a station this far off is never in the way. */
+function partOverhang({ situation: { part, moves, machine } }: BedQuestion): number {
+  const corners = part.faces.flatMap(({ outline }) => outline);
+  const size = Math.hypot(span(corners.map((p) => p[0])), span(corners.map((p) => p[1])));
+  return size - Math.min(...moves.map(({ halfLength }) => halfLength)) + machine.settings.clearance;
+}
+
+const span = (values: readonly number[]) => Math.max(...values) - Math.min(...values);

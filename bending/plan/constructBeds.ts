@@ -1,0 +1,68 @@
+import { followOrder } from "../order/followOrder";
+import type { OrderStep } from "../order/orderProblem";
+import { createStationMaker } from "../setup/createStationMaker";
+import { stationKinds, type StationKind } from "../setup/stationKinds";
+import type { BedQuestion } from "./bedQuestion";
+import { bedsOf } from "./bedsOf";
+import { layoutProblem } from "./layoutProblem";
+
+/** One stroke of an order that works with the bed left out. */
+export interface WantedStep { readonly move: number; readonly formed: number }
+
+/** Pairs that stations are made of: the likeliest. */
+const PAIRS_TRIED = 12;
+
+/**
+ * Some plan at once: the order that works without a bed, and as few kinds of station as cover its steps (each time the
+ * one that covers most of what is left), set on the bed. Nothing is proven by it.
+ */
+export function constructBeds(question: BedQuestion, steps: readonly WantedStep[]): void {
+  const { situation, checks, numbers, keeper, budget } = question;
+  const make = createStationMaker((pair) => {
+    const found = situation.pairs[pair];
+    if (found === undefined) throw new Error("invariant: a pair of the situation");
+    return found;
+  }, situation.machine.settings);
+  for (const { kinds, wanted } of covers(question, steps)) {
+    const stations = make(kinds);
+    for (const layout of stations === null ? [] : bedsOf(question, stations, wanted)) {
+      if (budget.shouldStop() && keeper.kept().length > 0) return;
+      const made = followOrder(layoutProblem(situation, checks, numbers, layout), steps.map(({ move }) => move));
+      if (made) keeper.keep({ layout, steps: made.steps, perPart: made.seconds, demerits: made.demerits, weight: layout.setupSeconds + made.weight * budget.batch });
+    }
+  }
+}
+
+interface Cover { readonly kinds: readonly StationKind[]; readonly wanted: readonly OrderStep[] }
+
+/** For every shut height that tools have together, the kinds that cover all steps; fewest first. */
+function covers({ situation, alone, budget }: BedQuestion, steps: readonly WantedStep[]): readonly Cover[] {
+  const { pairs, moves, runs } = situation;
+  const lengths = [...new Set(steps.map(({ move }) => (moves[move]?.halfLength ?? 0) * 2))];
+  const byHeight = new Map<string, StationKind[]>();
+  for (const { index, punch, die } of pairs.slice(0, PAIRS_TRIED)) {
+    if (budget.shouldStop()) break;
+    const key = (punch.height + die.height).toFixed(1);
+    const kinds = stationKinds(lengths.map((lineLength) => ({ pair: index, punch, die, lineLength })), runs);
+    byHeight.set(key, [...(byHeight.get(key) ?? []), ...kinds]);
+  }
+  const holds = (kind: StationKind, { move, formed }: WantedStep) => {
+    const need = alone.need(move, formed, kind.pair);
+    return need !== null && alone.holds(kind, need);
+  };
+  return [...byHeight.values()].flatMap((kinds) => cover(kinds, steps, holds) ?? []).sort((a, b) => a.kinds.length - b.kinds.length);
+}
+
+function cover(kinds: readonly StationKind[], steps: readonly WantedStep[], holds: (kind: StationKind, step: WantedStep) => boolean): Cover | null {
+  const chosen: StationKind[] = [];
+  const station = new Map<WantedStep, number>();
+  while (station.size < steps.length) {
+    const left = steps.filter((step) => !station.has(step));
+    const counted = kinds.map((kind) => ({ kind, covered: left.filter((step) => holds(kind, step)) }));
+    const best = counted.reduce<(typeof counted)[number] | null>((a, b) => (a === null || b.covered.length > a.covered.length ? b : a), null);
+    if (best === null || best.covered.length === 0) return null;
+    for (const step of best.covered) station.set(step, chosen.length);
+    chosen.push(best.kind);
+  }
+  return { kinds: chosen, wanted: steps.map((step) => ({ ...step, station: station.get(step) ?? 0 })) };
+}
