@@ -1,4 +1,4 @@
-import { deg, mm, rad, toDeg, toRad } from "@/bending";
+import { deg, mm, toDeg, toRad } from "@/bending";
 import { bendUnderLoad } from "@/bending/handbook/bendUnderLoad";
 import type { DieOpening } from "@/bending/handbook/dieOpening";
 import { flangeAtContact } from "@/bending/handbook/flangeAtContact";
@@ -15,7 +15,7 @@ export const handbookDieFormulas: CorpusFormulas = {
   legToOutermostTangent: (i) => legToOutermostTangent(mm(Number(i.apexLeg)), turned(i), mm(Number(i.radius)), mm(Number(i.thickness))),
   springbackFactor: (i) => springbackFactor(i.material as SpringbackMaterial, Number(i.ratio))?.factor ?? NaN,
   bendUnderLoad: (i) => {
-    const made = bendUnderLoad({ angle: rad(toRad(deg(Number(i.angle)))), radius: mm(Number(i.radius)) }, mm(Number(i.thickness)), Number(i.factor));
+    const made = bendUnderLoad({ angle: toRad(deg(Number(i.angle))), radius: mm(Number(i.radius)) }, mm(Number(i.thickness)), Number(i.factor));
     return i.result === "angle" ? toDeg(made.angle) : made.radius;
   },
 };
