@@ -173,6 +173,22 @@ describe("cases that every shop knows", () => {
     expect(blocked.some(({ kind }) => kind === "self")).toBe(true);
   });
 
+  it("a flange passes the sheet that it is bent from as near as it was drawn, but may not enter it", () => {
+    const slit = (inset: number) => partOf({
+      format: "part/1", name: "Slit", units: "mm", material: "S235", thickness: 2, insideRadius: 2.6,
+      base: { outline: [[0, 0], [200, 0], [200, 140], [0, 140]] },
+      flanges: [{ id: "side", on: "base", edge: 0, length: 40, angle: 90, direction: "up", start: inset, end: inset, relief: { kind: "tear" } }],
+    });
+    const self = (part: PartModel) => [0, 1].flatMap((front) => clear(part, { bends: [0], front, formed: 0 }).blocked.filter(({ kind }) => kind === "self"));
+    for (const inset of [0.5, 2, 5, 12]) expect(self(slit(inset))).toEqual([]);
+    const part = slit(12);
+    const tongue: readonly FlatPoint[] = [[4, -20], [4, 5], [8, 5], [8, -20]].map(([x, y]) => [x, y] as unknown as FlatPoint);
+    const [base, side] = part.faces;
+    if (!base || !side) throw new Error("a part of two faces");
+    const entering = { ...part, faces: [base, { ...side, outline: tongue }] };
+    expect(self(entering).length).toBeGreaterThan(0);
+  });
+
   it("a closed section cannot be lowered off the punch: said with what would help", () => {
     const part = profilePart([20, 60, 60, 60, 20], [90, 90, 90, 90]);
     const { blocked, tool } = clear(part, { bends: [2], front: 2, formed: 0b1011 }, straightPunch("slim", 85, 150, 8));

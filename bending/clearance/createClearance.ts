@@ -63,10 +63,18 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
       return meetStroke({ bend, thickness: part.thickness, plates, inFront: path.inFront, shape: obstacle.shape, lift: place, from: 0, to: end / 2, steps, margin, count: clip });
     });
   };
+  const zones = new WeakMap<object, readonly FaceMeeting[]>();
+  const ownZone = (hit: Hit, die: Die, obstacle: Obstacle): readonly FaceMeeting[] => {
+    const [table, end] = [tableOf(hit), demanded(hit, die)];
+    const key = keys(table, die, obstacle, end);
+    const found = zones.get(key) ?? meetOwnZone(part, table, die, obstacle, end, margin);
+    zones.set(key, found);
+    return found;
+  };
   const check = (hit: Hit, punch: Punch, die: Die, obstacle: Obstacle): { readonly hits: readonly ClearanceHit[]; readonly intervals: readonly Interval[] } => {
     const end = demanded(hit, die);
     const own = obstacle.tool === punch.id || obstacle.tool === die.id || obstacle.tool === null;
-    const zone = own ? [] : meetOwnZone(part, tableOf(hit), die, obstacle, end, margin);
+    const zone = own ? [] : ownZone(hit, die, obstacle);
     const met = [...inStroke(hit, die, obstacle), ...zone, ...access.meetings(tableOf(hit), hit.formed, punch, die, obstacle, end)];
     return {
       hits: met.map((meeting) => clearanceHit(obstacle.kind, obstacle.tool, meeting)),

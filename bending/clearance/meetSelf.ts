@@ -9,65 +9,104 @@ import { prismGap } from "./prismGap";
 export interface SelfQuestion {
   readonly bend: Bend;
   readonly thickness: Mm;
+  /** Are the two faces joined by the bend in the making? */
+  readonly neighbours: boolean;
   /** Plates of a face in front and of one at the back, in the state of the moment. */
   readonly front: readonly Prism[];
   readonly back: readonly Prism[];
   /** The same in the finished part. */
-  readonly finishedFront: readonly Prism[];
-  readonly finishedBack: readonly Prism[];
+  readonly finished: () => { readonly front: readonly Prism[]; readonly back: readonly Prism[] };
   /** Half the finished angle; `steps` equal steps in which no two corners near each other by more than `margin`. */
   readonly to: number;
   readonly steps: number;
   readonly margin: Mm;
 }
 
+/** Up to so many margins a gap is measured exactly where their boxes do not settle it. */
+const EXACT_MARGINS = 4;
+
 /**
  * Two faces on the two sides of a stroke, from flat to the finished angle. The margin holds, unless the faces are nearer by
  * design: in the finished part, or before the stroke; then they may come as near as that (an overlap by design, as of
- * neighbours in a corner that was drawn closed, within `MEANT_CONTACT_MM`).
+ * neighbours in a corner that was drawn closed, within `MEANT_CONTACT_MM`). A flange and the face that it is bent from hang
+ * together and move in the same way in every order: they pass as near as they were drawn, and only may not enter each other.
  */
 export function meetSelf(question: SelfQuestion): Meeting {
-  const drawn = gapAt(question, question.finishedFront, question.finishedBack, question.to, question.margin);
-  const before = gapAt(question, question.front, question.back, 0, question.margin);
-  const wanted = Math.max(0, Math.min(drawn, before, question.margin)) - MEANT_CONTACT_MM;
-  let deepest = 0;
+  const { front, back, margin } = question;
+  const [frontZ, backZ] = [extent(front), extent(back)];
+  const strictest = question.neighbours ? -MEANT_CONTACT_MM : margin - MEANT_CONTACT_MM;
+  if (Math.max(backZ[0] - frontZ[1], frontZ[0] - backZ[1]) >= strictest) return NO_MEETING;
+  const pair: Placed = { front: placed(front), back: placed(back) };
+  if (!question.neighbours && nearest(question, pair, strictest) === null) return NO_MEETING;
+  const met = nearest(question, pair, question.neighbours ? strictest : nearestByDesign(question, pair));
+  if (met === null) return NO_MEETING;
+  const [from, to] = [Math.max(frontZ[0], backZ[0]), Math.min(frontZ[1], backZ[1])];
+  return { intervals: [from <= to ? [from, to] : [to, from]], ...met };
+}
+
+/** How near the faces are by design, at most the margin. */
+function nearestByDesign(question: SelfQuestion, pair: Placed): number {
+  const finished = question.finished();
+  const drawn = gapAt(question, { front: placed(finished.front), back: placed(finished.back) }, question.to, question.margin);
+  const before = gapAt(question, pair, 0, question.margin);
+  return Math.max(0, Math.min(drawn, before, question.margin)) - MEANT_CONTACT_MM;
+}
+
+/** Where the faces come nearer than wanted first, and by how much at the most; null when they do not. */
+function nearest(question: SelfQuestion, pair: Placed, wanted: number): { readonly strokeAngle: number; readonly depth: number } | null {
+  const { to, steps, margin } = question;
+  let depth = 0;
   let first = Infinity;
-  for (let sample = 0; sample <= question.steps; ) {
-    const h = (question.to * sample) / question.steps;
-    const gap = gapAt(question, question.front, question.back, h, 64 * question.margin);
+  for (let sample = 0; sample <= steps; ) {
+    const h = (to * sample) / steps;
+    const gap = gapAt(question, pair, h, wanted + EXACT_MARGINS * margin);
     if (gap < wanted) {
       first = Math.min(first, 2 * h);
-      deepest = Math.max(deepest, wanted - gap);
+      depth = Math.max(depth, wanted - gap);
     }
-    sample += Math.max(1, Math.floor((gap - wanted) / question.margin));
+    sample += Math.max(1, Math.floor((gap - wanted) / margin));
   }
-  if (first === Infinity) return NO_MEETING;
-  return { intervals: [sharedExtent(question)], strokeAngle: first, depth: deepest };
+  return first === Infinity ? null : { strokeAngle: first, depth };
 }
 
-function gapAt(question: SelfQuestion, front: readonly Prism[], back: readonly Prism[], h: number, enough: number): number {
-  const pose = wingPose(question.bend, question.thickness, h);
-  const place = (prism: Prism, inFront: boolean): Float64Array => {
-    const into = new Float64Array(prism.points.length);
-    posePrism(prism.points, pose, inFront, into);
-    return into;
-  };
-  const placed = back.map((prism) => place(prism, false));
+interface PlacedPrism { readonly prism: Prism; readonly into: Float64Array }
+interface Placed { readonly front: readonly PlacedPrism[]; readonly back: readonly PlacedPrism[] }
+
+const placed = (prisms: readonly Prism[]): readonly PlacedPrism[] => prisms.map((prism) => ({ prism, into: new Float64Array(prism.points.length) }));
+
+/** A gap that the faces surely have: exact up to `enough`; over that, what their boxes leave or `enough` at the least. */
+function gapAt({ bend, thickness }: SelfQuestion, { front, back }: Placed, h: number, enough: number): number {
+  const pose = wingPose(bend, thickness, h);
+  for (const { prism, into } of front) posePrism(prism.points, pose, true, into);
+  for (const { prism, into } of back) posePrism(prism.points, pose, false, into);
+  const boxes = boxGap(front, back);
+  if (boxes >= enough) return boxes;
   let least = enough;
-  for (const prism of front) {
-    const points = place(prism, true);
-    back.forEach((other, i) => {
-      const facing = placed[i];
-      if (facing) least = Math.min(least, prismGap(points, prism.count, facing, other.count, least));
-    });
-  }
-  return least;
+  for (const one of front) for (const other of back) least = Math.min(least, prismGap(one.into, one.prism.count, other.into, other.prism.count, least));
+  return Math.max(least, boxes);
 }
 
-/** The z-extent that the two faces have in common. */
-function sharedExtent({ front, back }: SelfQuestion): readonly [number, number] {
-  const low = (prisms: readonly Prism[]) => Math.min(...prisms.map((prism) => prism.z[0]));
-  const high = (prisms: readonly Prism[]) => Math.max(...prisms.map((prism) => prism.z[1]));
-  const [from, to] = [Math.max(low(front), low(back)), Math.min(high(front), high(back))];
-  return from <= to ? [from, to] : [to, from];
+function boxGap(front: readonly PlacedPrism[], back: readonly PlacedPrism[]): number {
+  let widest = -Infinity;
+  for (let axis = 0; axis < 3; axis++) {
+    const [low, high] = [rangeOf(front, axis), rangeOf(back, axis)];
+    widest = Math.max(widest, high[0] - low[1], low[0] - high[1]);
+  }
+  return widest;
+}
+
+function rangeOf(prisms: readonly PlacedPrism[], axis: number): readonly [number, number] {
+  let [low, high] = [Infinity, -Infinity];
+  for (const { into } of prisms) {
+    for (let i = axis; i < into.length; i += 3) {
+      const value = into[i] as number;
+      if (value < low) low = value;
+      if (value > high) high = value;
+    }
+  }
+  return [low, high];
+}
+
+function extent(prisms: readonly Prism[]): readonly [number, number] {
+  return [Math.min(...prisms.map((prism) => prism.z[0])), Math.max(...prisms.map((prism) => prism.z[1]))];
 }

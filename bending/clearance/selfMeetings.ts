@@ -39,12 +39,18 @@ function pair(part: PartModel, table: HitTable, front: FacePath, back: FacePath,
   return meetSelf({
     bend,
     thickness: part.thickness,
+    neighbours: joins(front, back) || joins(back, front),
     front: frontPrisms,
     back: backPrisms,
-    finishedFront: table.plates(front, -1).all,
-    finishedBack: table.plates(back, -1).all,
+    finished: () => ({ front: table.plates(front, -1).all, back: table.plates(back, -1).all }),
     to: bend.angle / 2,
     steps: speed(frontPrisms) + speed(backPrisms),
     margin,
   });
+}
+
+/** Is one face bent right off the other by the stroke? */
+function joins({ face, bends, line: { bend } }: FacePath, other: FacePath): boolean {
+  const ends = [bend.parent, bend.child];
+  return bends.length === 0 && other.bends.length === 0 && ends.includes(face) && ends.includes(other.face);
 }

@@ -48,15 +48,13 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   const fit = fits[move?.bends[0] ?? -1]?.[pair?.index ?? -1];
   if (!move || !pair || !bend || !fit?.ok) return;
   const name = formatBends(step.bends);
-  const hit = { bends: move.bends, front: move.front, formed: orderStep.formed };
-  if (situation.clearance.blocked(hit, pair.punch, pair.die).length > 0) say("self-collision", step.bends, [], `${name}: flange and sheet beside the bend line pass each other within the clearance of ${formatLength(machine.settings.clearance, units)}, as the part is drawn; a relief there gives room`);
   for (const wish of fit.wishes) say(wish.kind, step.bends, wish.tools, wish.message);
   if (step.gauge.fingers.length === 0) say("gauge", step.bends, [], `${name}: nothing behind the die is straight enough for the back gauge; mark the bend line or use a stop`);
   if (step.gauge.fingers.length === 1) say("gauge", step.bends, [], `${name}: only one gauge finger can touch; hold the sheet square by hand or use a side stop`);
   if (step.forceKN > NEAR_RATING * machine.maxForce) say("force", step.bends, [], `${name}: ${step.forceKN.toFixed(0)} kN of ${machine.maxForce.toFixed(0)} kN that ${machine.name} has`);
   const rating = Math.min(pair.punch.maxForcePerMetre, pair.die.maxForcePerMetre);
   if (fit.force > NEAR_RATING * rating) say("tool-force", step.bends, [pair.punch.id, pair.die.id], `${name}: ${fit.force.toFixed(0)} kN/m of the ${rating.toFixed(0)} kN/m that the tools bear`);
-  const reach = sheetReach(part, hit);
+  const reach = sheetReach(part, { bends: move.bends, front: move.front, formed: orderStep.formed });
   if (reach.front > WHIP_UP_MM) say("whip-up", step.bends, [], `${name}: ${formatLength(Math.round(reach.front), units)} of sheet swings up ${(toDeg(bend.angle) / 2).toFixed(0)}° in front; stand clear, support it from behind the swing`);
   const setback = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2) - bend.allowance / 2;
   const flange = Math.min(reach.front, reach.back) + setback;

@@ -5,7 +5,6 @@ import { fingerMeetsTools } from "../setup/fingerMeetsTools";
 import type { GaugeOption } from "../setup/gaugeOption";
 import { gaugeOptions } from "../setup/gaugeOptions";
 import type { Tool } from "../tooling/tool";
-import { blockersOf } from "./blockersOf";
 import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
@@ -56,14 +55,14 @@ export function createStepChecks(situation: Situation): StepChecks {
     const agrees = ({ mask, value }: Pattern) => (formed & mask) === value;
     const ofPair = patterns[pair]?.get(move) ?? [];
     if (selfPatterns.get(move)?.some(agrees) || ofPair.some(agrees)) return false;
-    const hits = blockersOf(situation, hitOf(move, formed), punch, die);
+    const hits = clearance.blocked(hitOf(move, formed), punch, die);
     if (hits.length === 0) return true;
     const own = hits.filter(({ kind }) => kind === "self");
     if (own.length > 0) selfPatterns.set(move, [...(selfPatterns.get(move) ?? []), ...own.map(({ mask, value }) => ({ mask, value }))]);
     else patterns[pair]?.set(move, [...ofPair, ...hits.map(({ mask, value }) => ({ mask, value }))]);
     return false;
   });
-  const intervals = new Map<string, Map<number, readonly Interval[]>>();
+  const intervals = pairs.map(() => new Map<Tool, Map<number, readonly Interval[]>>());
   const allGauges = new Map<number, readonly GaugeOption[]>();
   const fingers = new Map<string, boolean>();
   const meets = (option: GaugeOption, { index, punch, die }: ToolPair): boolean => {
@@ -94,11 +93,12 @@ export function createStepChecks(situation: Situation): StepChecks {
       return first.every((option) => option === first[0]);
     },
     forbidden: (move, formed, pair, obstacle) => {
-      const name = `${pair}/${obstacle.kind}/${obstacle.id}`;
-      const known = intervals.get(name) ?? new Map<number, readonly Interval[]>();
-      intervals.set(name, known);
+      const known = must(intervals[pair]).get(obstacle) ?? new Map<number, readonly Interval[]>();
+      must(intervals[pair]).set(obstacle, known);
       const key = state(move, formed);
-      const found = known.get(key) ?? clearance.forbidden(hitOf(move, formed), pairOf(pair).punch, pairOf(pair).die, obstacle);
+      const answer = known.get(key);
+      if (answer !== undefined) return answer;
+      const found = clearance.forbidden(hitOf(move, formed), pairOf(pair).punch, pairOf(pair).die, obstacle);
       known.set(key, found);
       return found;
     },
@@ -113,9 +113,11 @@ export function createStepChecks(situation: Situation): StepChecks {
     return (move: number, formed: number, pair: number): boolean => {
       const answers = must(known[pair]);
       const key = state(move, formed);
-      const answer = answers.get(key) ?? ask(move, formed, pair);
-      answers.set(key, answer);
-      return answer;
+      const answer = answers.get(key);
+      if (answer !== undefined) return answer;
+      const found = ask(move, formed, pair);
+      answers.set(key, found);
+      return found;
     };
   }
 }

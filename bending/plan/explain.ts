@@ -3,7 +3,6 @@ import { hitSides } from "../clearance/hitSides";
 import { mmPer, toDeg } from "../core/units";
 import { formatLength } from "../part/formatLength";
 import type { StepChecks } from "./createStepChecks";
-import { blockersOf } from "./blockersOf";
 import { formatBends } from "./formatBends";
 import type { PlanReason } from "./planDocument";
 import { rounded } from "./rounded";
@@ -79,7 +78,7 @@ function stopsOf(situation: Situation, checks: StepChecks, move: number, formed:
   if (!passesFrames(part, hit, reach.back, machine)) {
     return reason("throat", [], [], `${name}: ${formatLength(reach.back, units)} of sheet behind the die does not go between the frames of ${machine.name} (${formatLength(machine.betweenFrames, units)} apart, throat ${formatLength(machine.throatDepth, units)} deep)`, 50);
   }
-  const blocked = blockersOf(situation, hit, tools.punch, tools.die);
+  const blocked = clearance.blocked(hit, tools.punch, tools.die);
   const met = blocked.length > 0 ? blocked : [tools.punch, tools.die].flatMap((tool) => clearance.evidence(hit, tools.punch, tools.die, tool));
   const worst = [...met].sort((a, b) => b.depth - a.depth)[0];
   if (worst === undefined) return reason("sections", [], [tools.punch.id, tools.die.id], `${name}: no run of real pieces of ${tools.punch.id} and ${tools.die.id} fits the room there is`, 5);
