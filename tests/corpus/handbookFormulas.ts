@@ -17,10 +17,12 @@ import { vOpeningRule } from "@/bending/handbook/vOpeningRule";
 import type { CaseInput, CorpusFormulas } from "./handbookCase";
 import { handbookDieFormulas } from "./handbookDieFormulas";
 import { handbookForceFormulas } from "./handbookForceFormulas";
+import { handbookShopFormulas } from "./handbookShopFormulas";
 
 export const handbookFormulas: CorpusFormulas = {
   ...handbookDieFormulas,
   ...handbookForceFormulas,
+  ...handbookShopFormulas,
   din6935Factor: (i) => din6935Factor(length(i.radius), length(i.thickness)),
   din6935CompensatingValue: (i) => din6935CompensatingValue(angle(i.opening), length(i.radius), length(i.thickness)),
   dinFlatLength,
