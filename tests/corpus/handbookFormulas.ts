@@ -18,11 +18,13 @@ import type { CaseInput, CorpusFormulas } from "./handbookCase";
 import { handbookDieFormulas } from "./handbookDieFormulas";
 import { handbookForceFormulas } from "./handbookForceFormulas";
 import { handbookShopFormulas } from "./handbookShopFormulas";
+import { handbookTableFormulas } from "./handbookTableFormulas";
 
 export const handbookFormulas: CorpusFormulas = {
   ...handbookDieFormulas,
   ...handbookForceFormulas,
   ...handbookShopFormulas,
+  ...handbookTableFormulas,
   din6935Factor: (i) => din6935Factor(length(i.radius), length(i.thickness)),
   din6935CompensatingValue: (i) => din6935CompensatingValue(angle(i.opening), length(i.radius), length(i.thickness)),
   dinFlatLength,
