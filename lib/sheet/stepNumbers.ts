@@ -28,7 +28,8 @@ export function stepNumbers(step: PlanStep, units: LengthUnit): StepNumbers {
     demandedAngle: format.angle(step.demandedAngle),
     insideRadius: format.fine(step.insideRadius * per),
     force: format.force(step.forceKN),
-    depth: format.fine(step.depthMm * per),
+    // The one length of a step that a plan states in mm whatever its units are.
+    depth: format.fine(step.depthMm),
   };
 }
 
