@@ -21,6 +21,11 @@ export const useSheetList = (query: SheetListQuery = {}) => useQuery(sheetListOp
 
 export const useSheet = (id: string) => useQuery(sheetOptions(id));
 
+const WATCH_MS = 20_000;
+
+/** A sheet that stays open for hours: asked for again and again, since it may be superseded meanwhile. */
+export const useWatchedSheet = (id: string) => useQuery({ ...sheetOptions(id), refetchInterval: WATCH_MS, refetchOnWindowFocus: true });
+
 /** Makes a draft of a plan's setup sheet. */
 export function useCreateSheet() {
   const refresh = useRefreshSheets();
