@@ -22,7 +22,11 @@ export function SheetScreen({ id, ...may }: SheetScreenProps) {
   return (
     <>
       <SheetHead sheet={data} {...may} />
-      {data.latestRevision > data.revision ? (
+      {data.state === "superseded" ? (
+        <div className="mb-6"><Notice tone="wrong" title="Superseded: do not work from this sheet">
+          <Link href={`/sheets?state=released&q=${encodeURIComponent(data.partNumber)}`} className="text-accent-ink underline underline-offset-2">The released sheets of {data.partNumber}</Link>
+        </Notice></div>
+      ) : data.latestRevision > data.revision ? (
         <div className="mb-6"><Notice tone="caution" title={`The part has changed: revision ${data.latestRevision} is newer than this sheet’s revision ${data.revision}`}>Plan the new revision and release its sheet.</Notice></div>
       ) : null}
       <div className="border border-rule-strong bg-white p-6 shadow-[0_2px_0_var(--rule)]"><SheetPaper view={data.view} /></div>
