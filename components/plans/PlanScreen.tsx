@@ -20,7 +20,7 @@ export function PlanScreen({ id, mayWrite }: { readonly id: string; readonly may
   return (
     <>
       <PlanHeader detail={data} mayWrite={mayWrite && works} />
-      {works ? <PlanWork detail={data} /> : <PlanReasons detail={data} />}
+      {works ? <PlanWork detail={data} /> : <PlanReasons detail={data} mayWrite={mayWrite} />}
     </>
   );
 }

@@ -4,6 +4,7 @@ import { BedMapDrawing } from "@/components/preview/BedMapDrawing";
 import { StepStage } from "@/components/preview/StepStage";
 import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
+import { asSentence } from "@/lib/format/asSentence";
 import { bedMap } from "@/lib/sheet/bedMap";
 import { planModel } from "@/lib/sheet/planModel";
 import type { PlanDetail } from "@/lib/schemas/views";
@@ -20,14 +21,14 @@ export function PlanWork({ detail }: { readonly detail: PlanDetail }) {
   return (
     <div className="space-y-8">
       <div className="grid gap-6 xl:grid-cols-[minmax(0,1fr)_minmax(26rem,38%)]">
-        <Panel title="Order" aside="Choose a row to see the step">
+        <Panel title="Order" aside={`Lengths in ${plan.units}; choose a row to see the step`}>
           <OrderTable model={model} selected={step} onSelect={setStep} />
         </Panel>
         <StepStage model={model} step={step} onStep={setStep} className="flex h-[30rem] flex-col border border-rule-strong bg-sheet xl:sticky xl:top-4" />
       </div>
       {plan.cautions.length === 0 ? null : (
         <div className="space-y-2">
-          {plan.cautions.map((caution, index) => <Notice key={index} tone="caution" title={caution.message}>{[...caution.bends, ...caution.tools].join(", ") || undefined}</Notice>)}
+          {plan.cautions.map((caution, index) => <Notice key={index} tone="caution" title={asSentence(caution.message, [...caution.bends, ...caution.tools])}>{[...caution.bends, ...caution.tools].join(", ") || undefined}</Notice>)}
         </div>
       )}
       <Panel title="Bed" aside={`${map.length} between the ends, seen by the operator`}>

@@ -1,3 +1,4 @@
+import { asSentence } from "@/lib/format/asSentence";
 import { createSheetFormat } from "./createSheetFormat";
 import type { PlanModel } from "./planModel";
 import type { PlanSource, SheetCaution } from "./sheetView";
@@ -25,7 +26,7 @@ export function sheetCautions({ plan, machine, tools }: PlanSource, model: PlanM
     ...lift,
     ...plan.cautions.map((caution): SheetCaution => ({
       level: "caution",
-      text: caution.message,
+      text: asSentence(caution.message, [...caution.bends, ...caution.tools]),
       steps: model.steps.flatMap((step, index) => (step.step.bends.some((bend) => caution.bends.includes(bend)) ? [index + 1] : [])),
     })),
     always("caution", "Computed values are advice. The makers' ratings, local codes and the person trained or licensed to set the machine decide."),

@@ -6,6 +6,7 @@ import { NumberInput } from "@/components/ui/NumberInput";
 import { Panel } from "@/components/ui/Panel";
 import { TextArea } from "@/components/ui/TextArea";
 import { TextInput } from "@/components/ui/TextInput";
+import { asSentence } from "@/lib/format/asSentence";
 import { drawnProfile } from "./drawnProfile";
 import type { ToolDraft } from "./toolDraft";
 
@@ -15,10 +16,8 @@ interface ToolFieldsProps {
   readonly problems: readonly FieldProblem[];
 }
 
-const sentence = (text: string): string => `${text.charAt(0).toUpperCase()}${text.slice(1)}${/[.!?]$/.test(text) ? "" : "."}`;
-
 export function ToolFields({ draft, update, problems }: ToolFieldsProps) {
-  const at = (path: string) => { const found = problems.find((problem) => problem.path === path || problem.path.startsWith(`${path}[`)); return found === undefined ? undefined : sentence(found.message); };
+  const at = (path: string) => { const found = problems.find((problem) => problem.path === path || problem.path.startsWith(`${path}[`)); return found === undefined ? undefined : asSentence(found.message); };
   const punch = draft.kind === "punch";
   const draw = (relieved: boolean) => { const profile = drawnProfile(draft, relieved); if (profile !== null) update({ profile }); };
   return (
