@@ -6,6 +6,7 @@ import { SheetPaper } from "@/components/sheets/SheetPaper";
 import { SheetState } from "@/components/sheets/SheetState";
 import { SheetQr } from "@/components/sheets/SheetQr";
 import { publicAddress } from "@/lib/api/publicAddress";
+import { orDatabaseLost } from "@/lib/auth/orDatabaseLost";
 import { requirePage } from "@/lib/auth/requirePage";
 import { idParams } from "@/lib/schemas/idParams";
 import { getSheet } from "@/lib/services/sheets/getSheet";
@@ -18,7 +19,7 @@ export default async function PrintPage({ params }: { readonly params: Promise<{
   const person = await requirePage("/print/[id]");
   const asked = idParams.safeParse(await params);
   if (!asked.success) notFound();
-  const found = await getSheet(person, asked.data.id);
+  const found = await orDatabaseLost(getSheet(person, asked.data.id));
   if (!found.ok) notFound();
   const sheet = found.value;
   const address = `${publicAddress(await headers())}/floor/${sheet.id}`;
