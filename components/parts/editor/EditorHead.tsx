@@ -1,5 +1,5 @@
 "use client";
-import { FileDown, FileUp, RotateCcw, Save } from "lucide-react";
+import { FileDown, FileUp, RotateCcw, Save, Undo2 } from "lucide-react";
 import { useState } from "react";
 import type { PartDocument } from "@/bending/part/partDocument";
 import { Button } from "@/components/ui/Button";
@@ -14,15 +14,18 @@ interface EditorHeadProps {
   readonly changed: boolean;
   readonly document: PartDocument | null;
   readonly onImport: (document: PartDocument) => void;
+  /** Takes the last change back; null when there is none. */
+  readonly onUndo: (() => void) | null;
   readonly onStartAgain: () => void;
 }
 
-export function EditorHead({ title, isNew, saving, changed, document, onImport, onStartAgain }: EditorHeadProps) {
+export function EditorHead({ title, isNew, saving, changed, document, onImport, onUndo, onStartAgain }: EditorHeadProps) {
   const [importing, setImporting] = useState(false);
   return (
     <>
       <PageHeader kicker={isNew ? "New part" : "New revision"} title={title} actions={(
         <>
+          {onUndo === null ? null : <Button look="quiet" size="small" icon={<Undo2 aria-hidden />} onClick={onUndo}>Undo</Button>}
           {changed ? <Button look="quiet" size="small" icon={<RotateCcw aria-hidden />} onClick={onStartAgain}>Throw away my changes</Button> : null}
           <Button look="plain" icon={<FileUp aria-hidden />} onClick={() => setImporting(true)}>Import</Button>
           <Button look="plain" icon={<FileDown aria-hidden />} disabled={document === null}

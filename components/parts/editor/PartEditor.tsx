@@ -63,7 +63,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
   return (
     <EditorContext value={editor}>
       <form noValidate onSubmit={save}>
-        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onStartAgain={store.startAgain}
+        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onUndo={store.undo === null ? null : () => { onChange(); store.undo?.(); }} onStartAgain={store.startAgain}
           onImport={(document) => update((old) => ({ ...draftFromDocument(document, old.number), note: old.note }))} />
         <div className="mb-6 space-y-3 empty:hidden">
           {store.restoredAt === null ? null : <Notice tone="note" title="Your unsaved entries were brought back">They were last changed {formatMoment(store.restoredAt)} and are not saved yet.</Notice>}
