@@ -1,4 +1,5 @@
 import { mm, type Mm, type Rad } from "../core/units";
+import { apexSetback } from "./apexSetback";
 import { outsideSetback } from "./outsideSetback";
 
 /**
@@ -7,6 +8,5 @@ import { outsideSetback } from "./outsideSetback";
  * (r + t)(tan(angle / 2) - 1); up to 90 degrees the two are one. At 180 degrees there is no apex.
  */
 export function legToOutermostTangent(apexLeg: Mm, angle: Rad, insideRadius: Mm, thickness: Mm): Mm {
-  const apexSetback = (insideRadius + thickness) * Math.tan(angle / 2);
-  return mm(apexLeg - apexSetback + outsideSetback(angle, insideRadius, thickness));
+  return mm(apexLeg - apexSetback(angle, insideRadius, thickness) + outsideSetback(angle, insideRadius, thickness));
 }

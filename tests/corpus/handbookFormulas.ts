@@ -17,12 +17,14 @@ import { vOpeningRule } from "@/bending/handbook/vOpeningRule";
 import type { CaseInput, CorpusFormulas } from "./handbookCase";
 import { handbookDieFormulas } from "./handbookDieFormulas";
 import { handbookForceFormulas } from "./handbookForceFormulas";
+import { handbookKFormulas } from "./handbookKFormulas";
 import { handbookShopFormulas } from "./handbookShopFormulas";
 import { handbookTableFormulas } from "./handbookTableFormulas";
 
 export const handbookFormulas: CorpusFormulas = {
   ...handbookDieFormulas,
   ...handbookForceFormulas,
+  ...handbookKFormulas,
   ...handbookShopFormulas,
   ...handbookTableFormulas,
   din6935Factor: (i) => din6935Factor(length(i.radius), length(i.thickness)),
