@@ -59,10 +59,18 @@ function cover(kinds: readonly StationKind[], steps: readonly WantedStep[], hold
   while (station.size < steps.length) {
     const left = steps.filter((step) => !station.has(step));
     const counted = kinds.map((kind) => ({ kind, covered: left.filter((step) => holds(kind, step)) }));
-    const best = counted.reduce<(typeof counted)[number] | null>((a, b) => (a === null || b.covered.length > a.covered.length ? b : a), null);
+    const best = counted.reduce<(typeof counted)[number] | null>((a, b) => (a === null || better(b, a) ? b : a), null);
     if (best === null || best.covered.length === 0) return null;
     for (const step of best.covered) station.set(step, chosen.length);
     chosen.push(best.kind);
   }
   return { kinds: chosen, wanted: steps.map((step) => ({ ...step, station: station.get(step) ?? 0 })) };
+}
+
+interface Counted { readonly kind: StationKind; readonly covered: readonly WantedStep[] }
+
+/** Covers more steps; as many with fewer pieces; as few with less to carry. */
+function better(a: Counted, b: Counted): boolean {
+  const order = b.covered.length - a.covered.length || a.kind.pieces - b.kind.pieces || a.kind.punchLength + a.kind.dieLength - b.kind.punchLength - b.kind.dieLength;
+  return order < 0;
 }

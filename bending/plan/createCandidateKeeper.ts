@@ -28,13 +28,16 @@ export function createCandidateKeeper(most: number): CandidateKeeper {
     keep: (candidate) => {
       if (candidates.some((one) => sameCandidate(one, candidate))) return;
       candidates.push(candidate);
-      candidates.sort((a, b) => a.weight - b.weight);
+      candidates.sort((a, b) => (Math.abs(a.weight - b.weight) < SAME_WEIGHT ? carried(a) - carried(b) : a.weight - b.weight));
       candidates.length = Math.min(candidates.length, most);
     },
     kept: () => [...candidates],
     worst: () => (candidates.length < most ? Infinity : (candidates[most - 1]?.weight ?? Infinity) - SAME_WEIGHT),
   };
 }
+
+/** Length of all tools on the bed: of plans that take the same time, the one with less to carry. */
+const carried = ({ layout }: Candidate) => layout.stations.reduce((sum, { punch, die }) => sum + punch.length + die.length, 0);
 
 /** Plans found twice: the same steps on stations of the same pairs and lengths. */
 function sameCandidate(a: Candidate, b: Candidate): boolean {
