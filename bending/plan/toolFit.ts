@@ -31,7 +31,7 @@ export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): Tool
   const { part } = question;
   const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
   const force = airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening);
-  const problem = radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
+  const problem = bedProblem(question, bend) ?? radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
     ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
   if (problem) return { ok: false, problem };
   const tangentToApex = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2);
@@ -39,11 +39,23 @@ export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): Tool
   return { ok: true, wishes: wishes(question, bend, pair), demanded, force, reach: mm(Math.max(pair.die.vOpening / 2, held)) };
 }
 
+/** The die is for another flat, which is asked about by itself: last of all to be told. */
+const OTHER_FLAT = 1e6;
+/** No tool helps: first to be told. */
+const NO_TOOL_HELPS = -1;
+
+/** The bed is too short, whatever stands on it. */
+function bedProblem({ machine, units }: FitQuestion, bend: Bend): FitProblem | null {
+  const length = lineLength(bend);
+  if (length - 2 * machine.settings.maxUncoveredEnd <= machine.bedLength) return null;
+  return { kind: "bed", tools: [], off: NO_TOOL_HELPS, message: `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}` };
+}
+
 function radiusProblem({ part, units, vOpening }: FitQuestion, bend: Bend, { die }: ToolPair): FitProblem | null {
   if (vOpening === null || bend.radiusSource === "document" || Math.abs(die.vOpening - vOpening) < 1e-6) return null;
   const gives = naturalRadius(part.material, die.vOpening);
   return {
-    kind: "no-die", tools: [die.id], off: Math.abs(Math.log(die.vOpening / vOpening)),
+    kind: "no-die", tools: [die.id], off: OTHER_FLAT,
     message: `the flat of bend ${bend.id} is for the inside radius ${formatLength(bend.insideRadius, units)} of a V ${formatLength(vOpening, units)}; ${die.id} gives ${formatLength(gives, units)}`,
   };
 }
@@ -74,12 +86,10 @@ function forceProblem(force: number, { punch, die }: ToolPair): FitProblem | nul
   return { kind: "tool-force", tools: [weak.id], off: force / weak.maxForcePerMetre - 1, message: `${weak.id} is rated ${weak.maxForcePerMetre.toFixed(0)} kN/m; this V needs ${force.toFixed(0)} kN/m` };
 }
 
-function piecesProblem({ runs, machine, units }: FitQuestion, bend: Bend, { punch, die }: ToolPair): FitProblem | null {
-  const [[ax, ay], [bx, by]] = bend.line;
-  const length = Math.hypot(bx - ax, by - ay);
-  if (length - 2 * machine.settings.maxUncoveredEnd > machine.bedLength) {
-    return { kind: "bed", tools: [], off: length / machine.bedLength, message: `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}` };
-  }
+const lineLength = ({ line: [[ax, ay], [bx, by]] }: Bend) => Math.hypot(bx - ax, by - ay);
+
+function piecesProblem({ runs, units }: FitQuestion, bend: Bend, { punch, die }: ToolPair): FitProblem | null {
+  const length = lineLength(bend);
   const short = [punch, die].find((tool) => runs(tool, length).length === 0);
   if (short === undefined) return null;
   const have = short.pieces.reduce((sum, piece) => sum + piece.length, 0);
