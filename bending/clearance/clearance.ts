@@ -33,6 +33,8 @@ export interface Clearance {
   evidence(hit: Hit, punch: Punch, die: Die, obstacle: Tool): readonly ClearanceHit[];
   /** What no place on the bed and no length of tool helps: ram, bed, the part meeting itself, no way on or off. */
   blocked(hit: Hit, punch: Punch, die: Die): readonly ClearanceHit[];
+  /** The same asked in turn, ended by the first kind of thing that blocks; empty when nothing does. */
+  firstBlock(hit: Hit, punch: Punch, die: Die): readonly ClearanceHit[];
   /** How much was worked out so far. */
   counts(): { readonly clips: number; readonly entries: number };
 }

@@ -81,16 +81,21 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
       intervals: mergeIntervals(met.flatMap(({ meeting }) => meeting.intervals)),
     };
   };
+  const blockers = (hit: Hit, punch: Punch, die: Die): readonly (() => readonly ClearanceHit[])[] => [
+    ...[obstacles.ram(punch), obstacles.bed(die)].map((obstacle) => () => inStroke(hit, die, obstacle).map((meeting) => clearanceHit(obstacle.kind, null, meeting))),
+    () => selfMeetings(part, tableOf(hit), hit.formed, margin, () => { counts.entries++; }),
+    () => access.trapped(tableOf(hit), hit.formed, punch, die, demanded(hit, die)),
+  ];
   return {
     forbidden: (hit, punch, die, tool) => check(hit, punch, die, obstacles.ofTool(tool, punch, die)).intervals,
     evidence: (hit, punch, die, tool) => check(hit, punch, die, obstacles.ofTool(tool, punch, die)).hits,
-    blocked: (hit, punch, die) => {
-      const table = tableOf(hit);
-      const stroke = [obstacles.ram(punch), obstacles.bed(die)].flatMap((obstacle) =>
-        inStroke(hit, die, obstacle).map((meeting) => clearanceHit(obstacle.kind, null, meeting)));
-      const self = selfMeetings(part, table, hit.formed, margin, () => { counts.entries++; });
-      const trapped = access.trapped(table, hit.formed, punch, die, demanded(hit, die));
-      return [...stroke, ...self, ...trapped];
+    blocked: (hit, punch, die) => blockers(hit, punch, die).flatMap((ask) => ask()),
+    firstBlock: (hit, punch, die) => {
+      for (const ask of blockers(hit, punch, die)) {
+        const hits = ask();
+        if (hits.length > 0) return hits;
+      }
+      return [];
     },
     counts: () => ({ ...counts }),
   };

@@ -25,11 +25,20 @@ export interface HitTable {
   ask(key: object, formed: number, answer: (path: FacePath, plates: Plates) => Meeting): readonly FaceMeeting[];
 }
 
+/** The faces on one side of the hit (their places in `paths`), and the bends that decide how they stand. */
+interface Side { readonly own: readonly number[]; readonly mask: number }
+/** Answers to one question about one side: face by face, and together by the state of the side. */
+interface Half { readonly columns: readonly Map<number, FaceMeeting>[]; readonly met: Map<number, readonly FaceMeeting[]> }
+
 /** A table for one hit. A face's place depends only on the bends on its path, so answers are kept by those bits alone. */
 export function hitTable(part: PartModel, hit: Hit, bend: Bend, pieces: readonly (readonly (readonly Vec2[])[])[], count: () => void): HitTable {
   const paths = facePaths(part, hit);
   const made = paths.map(() => new Map<number, Plates>());
-  const answers = new Map<object, Map<number, FaceMeeting>[]>();
+  const answers = new Map<object, readonly Half[]>();
+  const sides = [true, false].map((inFront): Side => {
+    const own = paths.flatMap((path, index) => (path.inFront === inFront ? [index] : []));
+    return { own, mask: own.reduce((mask, index) => mask | (paths[index]?.mask ?? 0), 0) };
+  });
   const platesAt = (i: number, path: FacePath, state: number): Plates => {
     const known = made[i]?.get(state);
     if (known) return known;
@@ -37,30 +46,38 @@ export function hitTable(part: PartModel, hit: Hit, bend: Bend, pieces: readonly
     made[i]?.set(state, plates);
     return plates;
   };
+  /** Front and back of a part stand as they do whatever is formed on the other side. */
+  const askHalf = ({ own, mask }: Side, half: Half, formed: number, answer: (path: FacePath, plates: Plates) => Meeting): readonly FaceMeeting[] => {
+    const known = half.met.get(formed & mask);
+    if (known) return known;
+    const met: FaceMeeting[] = [];
+    own.forEach((index, column) => {
+      const path = paths[index] as FacePath;
+      const state = formed & path.mask;
+      let one = half.columns[column]?.get(state);
+      if (!one) {
+        count();
+        one = { path, state, meeting: answer(path, platesAt(index, path, state)) };
+        half.columns[column]?.set(state, one);
+      }
+      if (one.meeting.intervals.length) met.push(one);
+    });
+    half.met.set(formed & mask, met);
+    return met;
+  };
   return {
     bend,
     paths,
     lines: hit.bends.flatMap((which) => lineOf(part, paths, which)),
     plates: (path, formed) => platesAt(paths.indexOf(path), path, formed & path.mask),
     ask: (key, formed, answer) => {
-      let columns = answers.get(key);
-      if (!columns) {
-        columns = paths.map(() => new Map<number, FaceMeeting>());
-        answers.set(key, columns);
+      let halves = answers.get(key);
+      if (!halves) {
+        halves = sides.map(({ own }) => ({ columns: own.map(() => new Map<number, FaceMeeting>()), met: new Map<number, readonly FaceMeeting[]>() }));
+        answers.set(key, halves);
       }
-      const met: FaceMeeting[] = [];
-      for (let i = 0; i < paths.length; i++) {
-        const path = paths[i] as FacePath;
-        const state = formed & path.mask;
-        let known = columns[i]?.get(state);
-        if (!known) {
-          count();
-          known = { path, state, meeting: answer(path, platesAt(i, path, state)) };
-          columns[i]?.set(state, known);
-        }
-        if (known.meeting.intervals.length) met.push(known);
-      }
-      return met;
+      const [front, back] = sides.map((side, which) => askHalf(side, (halves as readonly Half[])[which] as Half, formed, answer)) as [readonly FaceMeeting[], readonly FaceMeeting[]];
+      return back.length === 0 ? front : front.length === 0 ? back : [...front, ...back];
     },
   };
 }

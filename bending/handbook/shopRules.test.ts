@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { deg, mm, toRad } from "../core/units";
+import { deg, mm, rad, toRad, MM_PER_INCH } from "../core/units";
 import { hemDeduction } from "./hemDeduction";
 import { hemSteps } from "./hemSteps";
 import { holeOverDie } from "./holeOverDie";
@@ -25,6 +25,7 @@ describe("openings and radii", () => {
     expect(vOpeningChart(mm(2.8)).betweenRows).toBe(true);
     expect(vOpeningChart(mm(3)).betweenRows).toBe(false);
     expect(vOpeningChart(mm(0.4), "second").betweenRows).toBe(true);
+    expect(vOpeningChart(mm(12), "second").betweenRows).toBe(true);
     expect(vOpeningChart(mm(11), "second")).toMatchObject({ times: 12, betweenRows: true });
   });
 
@@ -64,12 +65,12 @@ describe("a radius by steps", () => {
   test("the hits add up to the whole angle and length, and no step is coarser than asked", () => {
     fc.assert(fc.property(between(0.2, 3), between(20, 500), between(0.5, 6), between(0.3, 0.5), between(0.5, 6), (angle, radius, t, k, degrees) => {
       const step = toRad(deg(degrees));
-      const found = radiusBySteps(angle as typeof step, mm(radius), mm(t), k, { angle: step });
+      const found = radiusBySteps(rad(angle), mm(radius), mm(t), k, { angle: step });
       expect(found.hits * found.anglePerHit).toBeCloseTo(angle, 9);
       expect(found.hits * found.pitch).toBeCloseTo(found.neutralArc, 7);
       expect(found.anglePerHit).toBeLessThanOrEqual(step + 1e-9);
       expect((found.hits - 1) * step).toBeLessThan(angle + 1e-9);
-      const byPitch = radiusBySteps(angle as typeof step, mm(radius), mm(t), k, { insidePitch: mm(radius * step) });
+      const byPitch = radiusBySteps(rad(angle), mm(radius), mm(t), k, { insidePitch: mm(radius * step) });
       expect(byPitch.hits).toBe(found.hits);
     }));
   });
@@ -102,5 +103,21 @@ describe("holes and reliefs", () => {
   test("a relief clears the whole bend", () => {
     const relief = reliefSize(mm(2), mm(3));
     expect(relief).toEqual({ width: [2, 3], depth: [5, 5.5] });
+  });
+});
+
+describe("units", () => {
+  test("what is a length over lengths alone is the same in inches", () => {
+    const inch = (value: number) => mm(value / MM_PER_INCH);
+    fc.assert(fc.property(between(0.5, 6), between(0, 30), between(0, 3), between(0.1, 3), (t, r, gap, angle) => {
+      const pairs: readonly (readonly [number, number])[] = [
+        [hemDeduction(mm(t), mm(gap)), hemDeduction(inch(t), inch(gap))],
+        [holeToBend({ kind: "round" }, mm(t), mm(r)).least, holeToBend({ kind: "round" }, inch(t), inch(r)).least],
+        [sharpBendLimit(mm(t)), sharpBendLimit(inch(t))],
+        [radiusBySteps(rad(angle), mm(r), mm(t), 0.44).pitch, radiusBySteps(rad(angle), inch(r), inch(t), 0.44).pitch],
+        [reliefSize(mm(t), mm(r)).depth[0], reliefSize(inch(t), inch(r)).depth[0]],
+      ];
+      for (const [inMm, inInch] of pairs) expect(inInch * MM_PER_INCH).toBeCloseTo(inMm, 9);
+    }));
   });
 });

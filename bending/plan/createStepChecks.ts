@@ -55,7 +55,7 @@ export function createStepChecks(situation: Situation): StepChecks {
     const agrees = ({ mask, value }: Pattern) => (formed & mask) === value;
     const ofPair = patterns[pair]?.get(move) ?? [];
     if (selfPatterns.get(move)?.some(agrees) || ofPair.some(agrees)) return false;
-    const hits = clearance.blocked(hitOf(move, formed), punch, die);
+    const hits = clearance.firstBlock(hitOf(move, formed), punch, die);
     if (hits.length === 0) return true;
     const own = hits.filter(({ kind }) => kind === "self");
     if (own.length > 0) selfPatterns.set(move, [...(selfPatterns.get(move) ?? []), ...own.map(({ mask, value }) => ({ mask, value }))]);
