@@ -1,7 +1,9 @@
 "use client";
 import { ArrowDown, ArrowUp, ChevronsUpDown } from "lucide-react";
 import type { ReactNode } from "react";
+import { Button } from "./Button";
 import { classes } from "./classes";
+import { EmptyState } from "./EmptyState";
 import { Pager } from "./Pager";
 
 export interface Column<Row> {
@@ -37,7 +39,9 @@ interface DataTableProps<Row> {
 }
 
 export function DataTable<Row>({ caption, columns, rows, rowKey, list, loading = false, empty, dense = false }: DataTableProps<Row>) {
-  if (rows.length === 0 && !loading) return <>{empty}</>;
+  if (rows.length === 0 && !loading) {
+    return list !== undefined && list.page > 1 ? <BeyondTheLast onFirst={() => list.onChange({ page: 1 })} /> : <>{empty}</>;
+  }
   return (
     <div className="min-w-0">
       <div className="overflow-x-auto border-y border-ink" tabIndex={0} role="region" aria-label={caption} aria-busy={loading}>
@@ -66,6 +70,11 @@ export function DataTable<Row>({ caption, columns, rows, rowKey, list, loading =
       {list === undefined ? null : <Pager list={list} total={list.total} onPage={(page) => list.onChange({ page })} />}
     </div>
   );
+}
+
+/** The list has grown shorter than the page that was asked for. */
+function BeyondTheLast({ onFirst }: { readonly onFirst: () => void }) {
+  return <EmptyState title="The list does not reach this page" action={<Button look="plain" onClick={onFirst}>Go to its first page</Button>}>It has grown shorter since.</EmptyState>;
 }
 
 function Head<Row>({ column, list }: { readonly column: Column<Row>; readonly list: DataTableProps<Row>["list"] }) {
