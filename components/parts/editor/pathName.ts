@@ -6,6 +6,14 @@ const names: Readonly<Record<string, string>> = {
   startAngle: "side at start", endAngle: "side at end", gap: "gap", hem: "hem", id: "name", relief: "relief", outline: "outline", width: "width", depth: "depth", diameter: "diameter",
 };
 
+/** `holes[0].circle[1]` is "hole 1, y". */
+function ownName(path: string): string {
+  const hole = /^holes\[(\d+)\](?:\.(.+))?/.exec(path);
+  if (hole === null) return names[path] ?? path;
+  const at = hole[2] === "circle[0]" ? "x" : hole[2] === "circle[1]" ? "y" : hole[2];
+  return `hole ${Number(hole[1]) + 1}${at === undefined ? "" : `, ${names[at] ?? at}`}`;
+}
+
 /** A path of the document in the words of the form: `flanges[1].length` is "Flange left, length". */
 export function pathName(path: string, draft: PartDraft): string {
   const leg = /^profile\.legs\[(\d+)\]/.exec(path);
@@ -13,8 +21,8 @@ export function pathName(path: string, draft: PartDraft): string {
   const bend = /^profile\.bends\[(\d+)\](?:\.(\w+))?/.exec(path);
   if (bend !== null) return `Bend ${Number(bend[1]) + 1}${bend[2] === undefined ? "" : `, ${names[bend[2]] ?? bend[2]}`}`;
   const flange = /^flanges\[(\d+)\](?:\.(.+))?/.exec(path);
-  if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${names[flange[2]] ?? flange[2]}`}`;
+  if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${ownName(flange[2])}`}`;
   if (path === "profile.width") return "Width";
-  if (path.startsWith("base.")) return `Base, ${names[path.slice(5)] ?? path.slice(5)}`;
+  if (path.startsWith("base.")) return `Base, ${ownName(path.slice(5))}`;
   return names[path] ?? path;
 }

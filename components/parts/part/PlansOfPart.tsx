@@ -19,7 +19,7 @@ const columns: readonly Column<PlanListItem>[] = [
   { key: "machine", header: "Brake", cell: (plan) => plan.machine },
   { key: "status", header: "Answer", cell: (plan) => <StateMark tone={looks[plan.status].tone}>{looks[plan.status].word}</StateMark> },
   { key: "batch", header: "Batch", align: "right", cell: (plan) => <span className="num">{plan.batch}</span> },
-  { key: "time", header: "Setup / each", align: "right", cell: (plan) => <span className="num whitespace-nowrap">{formatSeconds(plan.setupSeconds)} / {formatSeconds(plan.secondsPerPart)}</span> },
+  { key: "time", header: "Setup / each", align: "right", cell: (plan) => <span className="num whitespace-nowrap">{plan.steps === 0 ? "–" : `${formatSeconds(plan.setupSeconds)} / ${formatSeconds(plan.secondsPerPart)}`}</span> },
 ];
 
 export function PlansOfPart({ plans }: { readonly plans: readonly PlanListItem[] }) {
