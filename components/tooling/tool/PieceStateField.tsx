@@ -22,11 +22,11 @@ export function PieceStateField({ piece }: { readonly piece: PieceView }) {
   const value = piece.state === "at brake" ? (machine ?? "") : piece.state;
   const set = (next: string) => {
     const option = options.find((one) => one.value === next);
-    if (option === undefined || next === value) return;
+    if (option === undefined || next === value || update.isPending) return;
     update.mutate({ id: piece.id, state: option.state, ...(option.machineId === null ? {} : { machineId: option.machineId }) }, {
       onSuccess: () => toast("good", "State saved", `${piece.code}: ${option.label}`),
       onError: (error) => toast("wrong", `The state of ${piece.code} was not saved`, error.message),
     });
   };
-  return <Select id={`state-${piece.id}`} label={`State of ${piece.code}`} labelHidden value={value} onChange={set} options={options} disabled={update.isPending} placeholder={piece.machine ?? piece.state} />;
+  return <Select id={`state-${piece.id}`} label={`State of ${piece.code}`} labelHidden value={value} onChange={set} options={options} placeholder={piece.machine ?? piece.state} />;
 }
