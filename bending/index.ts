@@ -101,3 +101,22 @@ export { foldPoint } from "./part/foldPoint";
 export { unfoldPoint } from "./part/unfoldPoint";
 export { bendFacets, type BendFacet, type FacetQuad } from "./part/bendFacets";
 export { flatPattern, type FlatPattern, type FlatBendLine } from "./part/flatPattern";
+
+export type * from "./tooling/tool";
+export type * from "./tooling/machine";
+export type { ToolingDocument } from "./tooling/toolingDocument";
+export type { MachineDocument } from "./tooling/machineDocument";
+export { readToolingDocument } from "./tooling/readToolingDocument";
+export { readMachineDocument } from "./tooling/readMachineDocument";
+export { toolToDocument } from "./tooling/toolToDocument";
+
+export type { Clearance, ClearanceHit, ClearanceOptions } from "./clearance/clearance";
+export type { Hit } from "./clearance/hit";
+export { createClearance } from "./clearance/createClearance";
+export { machineFrames } from "./clearance/machineFrames";
+
+export type * from "./plan/planDocument";
+export type { CheckRequest, PlanProgress, PlanRequest } from "./plan/planRequest";
+export { checkOrder } from "./plan/checkOrder";
+export { planPart } from "./plan/planPart";
+export { readPlanDocument } from "./plan/readPlanDocument";

@@ -8,18 +8,19 @@ export interface ProvenOver {
   readonly allPairs: number;
 }
 
-/** Says what an answer is proven over, and nothing more. `flats`: how many flat patterns there are, planned or not. */
-export function proofMethod(over: readonly ProvenOver[], flats: number): string {
+/** Says what an answer is proven over, and nothing more. `flats`: how many flat patterns there are, planned or not; `ordered`: the order was given. */
+export function proofMethod(over: readonly ProvenOver[], flats: number, ordered: boolean): string {
   if (over.length === 0) return "no punch and die fit any bend: decided before any search";
+  const orders = ordered ? "every front in the order given" : "every order and front";
   const layouts = over.reduce((sum, { answer }) => sum + answer.layouts, 0);
   const last = over[over.length - 1];
   const pairs = last === undefined ? "" : pairsText(last);
   if (over.every(({ answer }) => answer.deadEnds !== null)) {
     const all = over.every(({ answer, allPairs }) => answer.pairs === allPairs);
-    return `every order and front${flatsText(over.length)} with ${all ? `all ${Math.max(...over.map(({ allPairs }) => allPairs))} tool pairs that fit a bend` : pairs}, each bend with the shortest solid runs that the pieces make: none clears`;
+    return `${orders}${flatsText(over.length)} with ${all ? `all ${Math.max(...over.map(({ allPairs }) => allPairs))} tool pairs that fit a bend` : pairs}, each bend with the shortest solid runs that the pieces make: none clears`;
   }
   const flat = last?.vOpening === null || last === undefined ? "" : `, the flat for a V of ${last.vOpening} mm${flats > 1 ? ` (${flats} flats are possible; the nearest to the usual V that gives a plan is taken)` : ""}`;
-  return `least total time over every order and front with ${pairs}${flat}, on beds of up to ${MOST_STATIONS} stations of solid runs: ` +
+  return `least total time over ${orders} with ${pairs}${flat}, on beds of up to ${MOST_STATIONS} stations of solid runs: ` +
     `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given allowed" : ""}`;
 }
 

@@ -38,7 +38,7 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   const hems = first.part.bends.flatMap((bend) => hemReason(bend) ?? []);
   if (hems.length > 0) return withFlat(refused(request, hems), first, request);
   const { solved, toolReasons } = solveVariants(request, variants.value, createBudget(request), order);
-  return withFlat(joined(request, solved, toolReasons, variants.value.length), first, request);
+  return withFlat(joined(request, solved, toolReasons, variants.value.length, order !== undefined), first, request);
 }
 
 /** Flat by flat the shortlist of pairs; only when none of them gives a plan, flat by flat all pairs. */
@@ -74,10 +74,10 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
   return { solved, toolReasons };
 }
 
-function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: readonly PlanReason[], flats: number): PlanDocument {
+function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: readonly PlanReason[], flats: number, ordered: boolean): PlanDocument {
   const expanded = solved.reduce((sum, { answer }) => sum + answer.expanded, 0);
   const all = solved.flatMap((one) => one.answer.candidates.map((candidate) => ({ one, candidate }))).sort((a, b) => a.candidate.weight - b.candidate.weight);
-  const method = proofMethod(solved.map(({ variant, answer, allPairs }) => ({ vOpening: variant.vOpening, answer, allPairs })), flats);
+  const method = proofMethod(solved.map(({ variant, answer, allPairs }) => ({ vOpening: variant.vOpening, answer, allPairs })), flats, ordered);
   const best = all[0];
   if (best === undefined) {
     const stopped = solved.some(({ answer }) => answer.stopped);

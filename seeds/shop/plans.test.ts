@@ -4,6 +4,7 @@ import { checkOrder } from "@/bending/plan/checkOrder";
 import { planPart } from "@/bending/plan/planPart";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import { readToolingDocument } from "@/bending/tooling/readToolingDocument";
+import { verifyPlan } from "../../tests/corpus/verifyPlan";
 import { mustRead } from "../mustRead";
 import { largeBrake } from "./machines";
 import { parts } from "./parts";
@@ -34,6 +35,15 @@ describe("the demonstration's parts on the large brake, with the shop's own tool
 
   it("bends the tray with straight punches", () => {
     expect(planPart(requestFor("RS-102", straight))).toMatchObject({ status: "optimal", reasons: [] });
+  });
+
+  it("bends the battery box on two stations: a short one between the tabs, a long one", () => {
+    const request = requestFor("RS-103");
+    const plan = planPart(request);
+    expect(plan).toMatchObject({ status: "optimal", reasons: [] });
+    expect(plan.stations).toHaveLength(2);
+    expect(plan.proof.bound).toBeCloseTo(plan.cost, 6);
+    expect(verifyPlan(plan, request)).toEqual([]);
   });
 
   it("cannot bend the door with straight punches alone, and says where", () => {

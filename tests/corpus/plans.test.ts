@@ -23,7 +23,7 @@ import { verifyPlan } from "./verifyPlan";
 // A plan takes long on a machine that is busy with other work.
 vi.setConfig({ testTimeout: 180_000 });
 
-const MADE = ["u", "z", "hat", "deep-u", "tray", "tabs", "corrugated-4", "no-radius"];
+const MADE = ["u", "z", "hat", "deep-u", "tray", "tabs", "corrugated-4", "no-radius", "tray-returns"];
 
 /** The questions of the order search for a corpus part, with the first few pairs. */
 function questions(request: PlanRequest, pairs: number) {
@@ -46,6 +46,15 @@ describe("plans of the corpus", () => {
     expect(plan.seconds.total).toBeCloseTo(plan.seconds.setup + plan.batch * plan.seconds.perPart, 5);
     expect(readPlanDocument(JSON.parse(JSON.stringify(plan)))).toEqual({ ok: true, value: plan });
     expect(planPart(request)).toEqual(plan);
+  });
+
+  it("plans ten bends, proven, and an independent check finds nothing wrong", () => {
+    const request = planCorpus("corrugated-10");
+    const plan = planPart(request);
+    expect(plan.status).toBe("optimal");
+    expect(plan.steps).toHaveLength(10);
+    expect(plan.proof.bound).toBeCloseTo(plan.cost, 6);
+    expect(verifyPlan(plan, request)).toEqual([]);
   });
 
   it.each(["u", "z", "hat", "deep-u", "tray", "tabs"])("%s: the search and every permutation agree, with and without the bed", (name) => {
@@ -160,6 +169,50 @@ describe("laws of planning", () => {
     const plan = planPart({ ...planCorpus("tray"), shouldStop: () => true });
     expect(["unknown", "feasible"]).toContain(plan.status);
     if (plan.status === "unknown") expect(plan.reasons[0]?.kind).toBe("budget");
+  });
+
+  it("stopped at any moment it says what it has, with a bound that no plan goes below", () => {
+    for (const name of ["hat", "tray"]) {
+      const request = planCorpus(name);
+      const best = planPart(request);
+      const seen = new Set<string>();
+      for (const after of [0, 3, 30, 100, 300, 1000, 3000, 10_000]) {
+        let asked = 0;
+        const plan = planPart({ ...request, shouldStop: () => (asked += 1) > after });
+        seen.add(plan.status);
+        expect(plan.proof.bound).toBeLessThanOrEqual(best.cost + 1e-6);
+        if (plan.status === "unknown") { expect(plan.reasons[0]?.kind).toBe("budget"); continue; }
+        expect(["feasible", "optimal"]).toContain(plan.status);
+        expect(plan.cost).toBeGreaterThanOrEqual(best.cost - 1e-6);
+        expect(plan.gap).toBeCloseTo((plan.cost - plan.proof.bound) / plan.cost, 6);
+        expect(plan.status === "optimal").toBe(plan.gap === 0);
+        expect(verifyPlan(plan, request)).toEqual([]);
+      }
+      expect(seen.size).toBeGreaterThan(1);
+    }
+  });
+
+  it("says how far it is and asks whether to stop all the time, and ends soon after it is told to", () => {
+    const messages = new Set<string>();
+    let [asked, after] = [0, 0];
+    planPart({
+      ...planCorpus("tray-returns"),
+      onProgress: ({ message }) => { messages.add(message); },
+      shouldStop: () => {
+        asked += 1;
+        if (asked > 2000) after += 1;
+        return asked > 2000;
+      },
+    });
+    expect(messages.size).toBeGreaterThan(1);
+    expect(after).toBeLessThan(100);
+  });
+
+  it("says over what it is proven: a shortlist of pairs where there are more, all of them where none clears", () => {
+    const plan = planPart(planCorpus("hat"));
+    expect(plan.proof.method).toMatch(/every order and front with (all \d+|\d+ of the \d+) tool pairs/);
+    expect(planPart(planCorpus("closed")).proof.method).toMatch(/with all \d+ tool pairs that fit a bend.*none clears/);
+    expect(checkOrder({ ...planCorpus("hat"), order: [...plan.order] }).proof.method).toContain("the order given");
   });
 
   it("works in the document's units", () => {
