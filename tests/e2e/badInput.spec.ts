@@ -151,3 +151,14 @@ test("the connection is lost while saving: nothing is half saved, what was typed
   await expect(page.getByRole("heading", { level: 1 })).toHaveText(name);
   expect(await total(page, "parts")).toBe(before + 1);
 });
+
+test("a search that finds nothing says so, and the way back shows every part again", async ({ page }) => {
+  await enterAs(page, "engineer");
+  await page.goto("/parts");
+  await page.getByRole("searchbox").fill("no part is called this");
+  await expect(page.getByText("No part matches")).toBeVisible();
+  await page.getByRole("button", { name: "Show every part" }).click();
+  await expect(page.getByRole("searchbox")).toHaveValue("");
+  await expect(page.getByRole("table").getByRole("row")).not.toHaveCount(1);
+  await expect(page).toHaveURL(/\/parts$/);
+});

@@ -156,7 +156,6 @@ test("the operator opens the sheet at the brake and steps through it by key", as
   await signIn(page, "operator");
   await expect(page).toHaveURL(/\/floor$/);
   await expect(page.getByText(name)).toBeVisible();
-  await keepPicture(page, "floor-list");
   await page.getByRole("link", { name: new RegExp(known.number) }).click();
   const place = page.locator("header [aria-live]");
   await expect(place).toHaveText("Before you start");
@@ -240,7 +239,6 @@ test("the office page leads to the PDF; the print page prints the sheet without 
   await expect(page.getByRole("button", { name: "Print" })).toBeHidden();
   const printed = await readPdf(await page.pdf({ format: "A4" }));
   expect(printed.words).toContain(known.number);
-  await keepPicture(page, "print");
 });
 
 test("the toolroom opens a tool that the sheet uses and moves a piece to another rack place", async ({ page }) => {
