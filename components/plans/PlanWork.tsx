@@ -1,5 +1,6 @@
 "use client";
 import { useMemo, useState } from "react";
+import { unitName } from "@/lib/format/unitName";
 import { BedMapDrawing } from "@/components/preview/BedMapDrawing";
 import { StepStage } from "@/components/preview/StepStage";
 import { Notice } from "@/components/ui/Notice";
@@ -21,7 +22,7 @@ export function PlanWork({ detail }: { readonly detail: PlanDetail }) {
   return (
     <div className="space-y-8">
       <div className="grid gap-6 xl:grid-cols-[minmax(0,1fr)_minmax(26rem,38%)]">
-        <Panel title="Order" aside={`Lengths in ${plan.units}; choose a row to see the step`}>
+        <Panel title="Order" aside={`Lengths in ${unitName(plan.units)}; choose a row to see the step`}>
           <OrderTable model={model} selected={step} onSelect={setStep} />
         </Panel>
         <StepStage model={model} step={step} onStep={setStep} className="flex h-[30rem] flex-col border border-rule-strong bg-sheet xl:sticky xl:top-4" />

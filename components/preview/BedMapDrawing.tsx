@@ -20,7 +20,7 @@ export function BedMapDrawing({ map, className, placed, step, close = false }: B
   return (
     <svg viewBox={box.join(" ")} role="img" aria-label={`Bed map, ${map.length} bed`} className={className}>
       <rect x={layout.bed[0]} y={rows.punch[0]} width={layout.bed[1] - layout.bed[0]} height={rows.die[1] - rows.punch[0]} fill="var(--steel-100)" stroke="var(--steel-400)" vectorEffect="non-scaling-stroke" />
-      <line x1={0} x2={0} y1={box[1]} y2={box[1] + box[3]} stroke="var(--ink-soft)" strokeDasharray="10 3 2 3" vectorEffect="non-scaling-stroke" />
+      <line x1={0} x2={0} y1={rows.punch[0]} y2={rows.die[1]} stroke="var(--ink-soft)" strokeDasharray="10 3 2 3" vectorEffect="non-scaling-stroke" />
       {map.stations.map((station) => (
         <g key={station.id}>
           {station.pieces.map((piece) => <Piece key={`${piece.kind} ${piece.id} ${piece.from}`} piece={piece} layout={layout} done={placed?.has(piece.id) ?? false} />)}

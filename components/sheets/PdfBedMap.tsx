@@ -13,7 +13,7 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
   return (
     <Svg viewBox={box.join(" ")} width={width} height={box[3] * scale}>
       <Rect x={bed[0]} y={rows.punch[0]} width={bed[1] - bed[0]} height={rows.die[1] - rows.punch[0]} fill={colours["steel-100"]} stroke={colours["steel-400"]} strokeWidth={thin} />
-      <Line x1={0} x2={0} y1={box[1]} y2={box[1] + box[3]} stroke={colours["ink-soft"]} strokeWidth={thin} strokeDasharray={`${6 / scale} ${2 / scale}`} />
+      <Line x1={0} x2={0} y1={rows.punch[0]} y2={rows.die[1]} stroke={colours["ink-soft"]} strokeWidth={thin} strokeDasharray={`${6 / scale} ${2 / scale}`} />
       {map.stations.map((station) => (
         <G key={station.id}>
           {station.pieces.map((piece) => {

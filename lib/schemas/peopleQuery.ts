@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import { listQuerySchema } from "./listQuery";
 
-export const peopleQuerySchema = listQuerySchema(["name", "email", "role"], "name");
+export const peopleSorts = ["name", "email", "role"] as const;
+export const peopleQuerySchema = listQuerySchema(peopleSorts, "name");
 export type PeopleQuery = z.output<typeof peopleQuerySchema>;

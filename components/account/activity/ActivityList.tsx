@@ -5,9 +5,11 @@ import { FilterBox } from "@/components/ui/FilterBox";
 import { ListBar } from "@/components/ui/ListBar";
 import { LoadProblem } from "@/components/ui/LoadProblem";
 import { PageHeader } from "@/components/ui/PageHeader";
+import { oneOf } from "@/components/ui/oneOf";
 import { useListState } from "@/components/ui/useListState";
 import { formatMoment } from "@/lib/format/formatMoment";
 import { useActivity } from "@/lib/queries/activity";
+import { activitySorts } from "@/lib/schemas/activityQuery";
 import type { ActivityItem } from "@/lib/schemas/views";
 
 const columns: readonly Column<ActivityItem>[] = [
@@ -20,7 +22,7 @@ const columns: readonly Column<ActivityItem>[] = [
 
 export function ActivityList() {
   const { state, change } = useListState({ sort: "at", dir: "desc" });
-  const activity = useActivity(state);
+  const activity = useActivity({ ...state, sort: oneOf(activitySorts, state.sort, "at") });
   return (
     <>
       <PageHeader kicker="Register" title="Activity" summary="What was changed, by whom, and when. Nothing here can be edited." />

@@ -6,8 +6,10 @@ import { ListBar } from "@/components/ui/ListBar";
 import { LoadProblem } from "@/components/ui/LoadProblem";
 import { PageHeader } from "@/components/ui/PageHeader";
 import { StateMark } from "@/components/ui/StateMark";
+import { oneOf } from "@/components/ui/oneOf";
 import { useListState } from "@/components/ui/useListState";
 import { usePeople } from "@/lib/queries/people";
+import { peopleSorts } from "@/lib/schemas/peopleQuery";
 import type { PersonItem } from "@/lib/schemas/views";
 
 const does: Readonly<Record<PersonItem["role"], string>> = {
@@ -26,7 +28,7 @@ const columns: readonly Column<PersonItem>[] = [
 
 export function PersonList() {
   const { state, change } = useListState({ sort: "name" });
-  const people = usePeople(state);
+  const people = usePeople({ ...state, sort: oneOf(peopleSorts, state.sort, "name") });
   return (
     <>
       <PageHeader kicker="Register" title="People" summary="Who can sign in, and for what work." />

@@ -1,4 +1,5 @@
 import type { LengthUnit } from "@/bending/core/units";
+import { unitName } from "@/lib/format/unitName";
 import type { Bend, PartModel } from "@/bending/part/partModel";
 import { mmPer } from "@/bending/core/units";
 import { DataTable, type Column } from "@/components/ui/DataTable";
@@ -19,6 +20,6 @@ export function BendTable({ part, units }: { readonly part: PartModel; readonly 
     { key: "k", header: "K", align: "right", cell: (bend) => <span className="num">{formatFixed(bend.k, 3)}</span> },
     { key: "source", header: "Where from", className: "min-w-44 text-sm text-ink-soft", cell: (bend) => <>Allowance: {bend.allowanceSource}. Radius: {bend.radiusSource}.</> },
   ];
-  return <DataTable caption={`Bends, lengths in ${units}`} columns={columns} rows={part.bends} rowKey={(bend) => bend.id} dense
+  return <DataTable caption={`Bends, lengths in ${unitName(units)}`} columns={columns} rows={part.bends} rowKey={(bend) => bend.id} dense
     empty={<p className="text-ink-soft">The part has no bend yet.</p>} />;
 }

@@ -1,5 +1,6 @@
 "use client";
 import { useState, type FormEvent } from "react";
+import { unitName } from "@/lib/format/unitName";
 import type { FieldProblem } from "@/bending/core/problem";
 import type { MaterialFacts } from "@/bending/handbook/material";
 import { mmPer } from "@/bending/core/units";
@@ -93,7 +94,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
                     edges: faceEdges(shown.part, shown.document.base, mmPer(shown.document.units)),
                     onEdge: (edge) => update((old) => addFlange(old, edge.face, edge.edge)),
                   })} />
-                <Panel title="Bends" aside={`lengths in ${shown.document.units}`}><BendTable part={shown.part} units={shown.document.units} /></Panel>
+                <Panel title="Bends" aside={`lengths in ${unitName(shown.document.units)}`}><BendTable part={shown.part} units={shown.document.units} /></Panel>
               </>
             )}
           </div>

@@ -1,5 +1,6 @@
 "use client";
 import { useRouter, useSearchParams } from "next/navigation";
+import { unitName } from "@/lib/format/unitName";
 import { Loading } from "@/components/ui/Loading";
 import { LoadProblem } from "@/components/ui/LoadProblem";
 import { Notice } from "@/components/ui/Notice";
@@ -54,7 +55,7 @@ export function PartPage({ id, mayWrite, mayPlan, maySeePlans }: PartPageProps) 
           {model.ok ? (
             <>
               <FlatFacts part={model.value.part} flat={model.value.flat} units={data.document.units} />
-              <Panel title="Bends" aside={`lengths in ${data.document.units}`}><BendTable part={model.value.part} units={data.document.units} /></Panel>
+              <Panel title="Bends" aside={`lengths in ${unitName(data.document.units)}`}><BendTable part={model.value.part} units={data.document.units} /></Panel>
             </>
           ) : null}
           {maySeePlans ? <PlansOfPart plans={data.plans} /> : null}
