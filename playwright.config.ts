@@ -9,7 +9,7 @@ export default defineConfig({
   forbidOnly: true,
   retries: 0,
   timeout: 90_000,
-  globalTimeout: 12 * 60_000,
+  globalTimeout: 30 * 60_000,
   expect: { timeout: 15_000 },
   reporter: [["list"]],
   use: {
