@@ -3,6 +3,7 @@ import { everyOrder } from "@/bending/order/everyOrder";
 import { searchOrder } from "@/bending/order/searchOrder";
 import { planPart } from "@/bending/plan/planPart";
 import { planCorpus } from "../corpus/planCorpus";
+import { clearanceQuestions } from "./clearanceQuestions";
 import { randomProblem } from "./randomProblem";
 
 interface Row {
@@ -14,6 +15,8 @@ interface Row {
   readonly peakMB: number;
   readonly reference?: string;
   readonly ratio?: number;
+  /** How much longer one bend more takes, against the row before of the same name. */
+  readonly growth?: number;
 }
 
 const RUNS = 3;
@@ -53,11 +56,31 @@ function searches(): readonly Row[] {
   });
 }
 
-const rows = [...searches(), ...plans()];
+/** Faces against a punch at one moment, placed and clipped, and the same asked of a general solid modeller. */
+async function clearances(): Promise<readonly Row[]> {
+  const { faces, clipped, solid } = await clearanceQuestions(200);
+  const own = timed(clipped);
+  const slow = timed(solid);
+  return [{
+    name: "clip faces with a punch", size: faces, medianMs: own.medianMs, runs: RUNS, checksum: digest([own.answer, slow.answer]), peakMB: peakMB(),
+    reference: "a solid modeller", ratio: Math.round((slow.medianMs / Math.max(own.medianMs, 0.01)) * 10) / 10,
+  }];
+}
+
+function withGrowth(rows: readonly Row[]): readonly Row[] {
+  return rows.map((row, i) => {
+    const before = rows[i - 1];
+    if (before === undefined || before.name !== row.name) return row;
+    return { ...row, growth: Math.round((row.medianMs / Math.max(before.medianMs, 0.01)) ** (1 / (row.size - before.size)) * 100) / 100 };
+  });
+}
+
+const rows = [...withGrowth([...searches(), ...plans()]), ...await clearances()];
 if (process.argv.includes("--json")) process.stdout.write(`${JSON.stringify(rows, null, 2)}\n`);
 else {
   for (const row of rows) {
+    const growth = row.growth === undefined ? "" : `  x ${row.growth} a bend`;
     const ratio = row.ratio === undefined ? "" : `  ${row.ratio} times as fast as ${row.reference ?? ""}`;
-    process.stdout.write(`${row.name.padEnd(26)} ${String(row.size).padStart(3)} bends ${row.medianMs.toFixed(2).padStart(10)} ms  ${row.peakMB} MB  ${row.checksum}${ratio}\n`);
+    process.stdout.write(`${row.name.padEnd(26)} ${String(row.size).padStart(4)} ${row.name.startsWith("clip") ? "faces" : "bends"} ${row.medianMs.toFixed(2).padStart(10)} ms  ${row.peakMB} MB  ${row.checksum}${growth}${ratio}\n`);
   }
 }
