@@ -19,18 +19,13 @@ const WHIP_UP_MM = 400;
 
 /** What a person should know before making this plan; none of it forbids it. */
 export function cautionsOf(situation: Situation, layout: Layout, orderSteps: readonly OrderStep[], steps: readonly PlanStep[]): readonly PlanReason[] {
-  const { part, units } = situation;
+  const { part } = situation;
   const cautions: PlanReason[] = [];
   const say = (kind: PlanReason["kind"], bends: readonly string[], tools: readonly string[], message: string) =>
     cautions.push({ kind, bends, faces: [], tools, message });
   const { massKg } = flatPattern(part);
   if (massKg > LIFT_LIMIT_KG) say("lift", [], [], `the blank weighs ${massKg.toFixed(1)} kg; above ${LIFT_LIMIT_KG} kg (NIOSH load constant) plan for two people or a support`);
-  for (const bend of part.bends) {
-    const least = minimumRadius(part.material, part.thickness, bend.angle);
-    if (least && bend.insideRadius < least.radius - 1e-6 && !bend.hem) {
-      say("radius", [bend.id], [], `bend ${bend.id} has ${formatLength(bend.insideRadius, units)} inside; ${least.source} gives ${formatLength(least.radius, units)} at least for ${part.material.id}`);
-    }
-  }
+  radiusCautions(situation, say);
   orderSteps.forEach((orderStep, index) => {
     const step = steps[index];
     if (step) stepCautions(situation, layout, orderStep, step, say);
@@ -39,6 +34,18 @@ export function cautionsOf(situation: Situation, layout: Layout, orderSteps: rea
 }
 
 type Say = (kind: PlanReason["kind"], bends: readonly string[], tools: readonly string[], message: string) => void;
+
+/** Bends tighter than the material bears, those that lack the same together. */
+function radiusCautions({ part, units }: Situation, say: Say): void {
+  const tight = new Map<string, string[]>();
+  for (const bend of part.bends) {
+    const least = minimumRadius(part.material, part.thickness, bend.angle);
+    if (!least || bend.insideRadius >= least.radius - 1e-6 || bend.hem) continue;
+    const lack = `${formatLength(bend.insideRadius, units)} inside; ${least.source} gives ${formatLength(least.radius, units)} at least for ${part.material.id}`;
+    tight.set(lack, [...(tight.get(lack) ?? []), bend.id]);
+  }
+  for (const [lack, bends] of tight) say("radius", bends, [], `${bends.length > 1 ? "bends" : "bend"} ${bends.join(", ")} ${bends.length > 1 ? "have" : "has"} ${lack}`);
+}
 
 function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep, step: PlanStep, say: Say): void {
   const { part, machine, moves, pairs, fits, units } = situation;
