@@ -88,8 +88,9 @@ function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: re
     return { ...refused(request, onceEach(reasons)), proof: { method, expanded, bound: 0 } };
   }
   const bound = Math.min(...solved.map(({ answer }) => answer.bound));
+  const floor = Math.min(...solved.map(({ answer }) => answer.floor));
   const write = ({ one, candidate }: { readonly one: Solved; readonly candidate: Candidate }) => writePlan(one.situation, one.checks, candidate,
-    { batch: request.batch, expanded, method, flatLength: (flat) => flatLength(request.document, flat), bound: Math.max(0, bound - best.candidate.demerits * DEMERIT_SECONDS * request.batch) });
+    { batch: request.batch, expanded, method, flatLength: (flat) => flatLength(request.document, flat), bound: Math.max(floor, bound - best.candidate.demerits * DEMERIT_SECONDS * request.batch) });
   const plan = write(best);
   const others = all.slice(1, 1 + (request.alternatives ?? 0)).map(write);
   return others.length === 0 ? plan : { ...plan, alternatives: others.map((other) => ({ ...other, status: "feasible" as const })) };

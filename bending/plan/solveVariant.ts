@@ -18,6 +18,8 @@ export interface VariantAnswer {
   readonly expanded: number;
   /** No plan of this variant with the pairs and beds looked over weighs less. */
   readonly bound: number;
+  /** Seconds that no plan goes below, whatever wishes it leaves unmet. */
+  readonly floor: number;
   readonly layouts: number;
   readonly pairs: number;
   /** The sets of formed bends where every way ends, when no order can work whatever the bed. */
@@ -38,8 +40,9 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   const limits = { shouldStop: budget.shouldStop, onExpand: budget.onExpand };
   const relaxed = relaxedProblem(situation, checks, numbers);
   const tally = { layouts: 0, expanded: 0 };
+  const floor = floorOf(situation, budget.batch);
   const answer = (bound: number, ends: Partial<VariantAnswer>): VariantAnswer =>
-    ({ candidates: keeper.kept(), ...tally, bound, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
+    ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
 
   budget.doing("Looking for a first order", 0);
   const dived = diveOrder(relaxed, DIVE_STATES, budget.shouldStop);
@@ -47,7 +50,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   budget.doing("Looking for the best order with the bed left out", 0);
   const best = unhindered(relaxed, limits);
   tally.expanded += best.expanded;
-  if (best.kind === "stopped") return answer(Math.max(floorOf(situation, budget.batch), setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
+  if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: best.deadEnds });
 
   const question = bedQuestionOf(situation, checks, numbers, budget, keeper, best);
