@@ -25,8 +25,8 @@ export function BedMapDrawing({ map, className, placed, step, close = false }: B
         <g key={station.id}>
           {station.pieces.map((piece) => <Piece key={`${piece.kind} ${piece.id} ${piece.from}`} piece={piece} layout={layout} done={placed?.has(piece.id) ?? false} />)}
           <text x={(station.from + station.to) / 2} y={rows.title} textAnchor="middle" fontSize={unit * 1.3} fontWeight={700} fill="var(--ink)">{station.id}</text>
-          <text x={(station.from + station.to) / 2} y={rows.punchName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.punch}</text>
-          <text x={(station.from + station.to) / 2} y={rows.dieName} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink)">{station.die}</text>
+          <text x={layout.names(station.id).x} y={rows.punchName} textAnchor={layout.names(station.id).anchor} fontSize={unit * 0.9} fill="var(--ink)">{station.punch}</text>
+          <text x={layout.names(station.id).x} y={rows.dieName} textAnchor={layout.names(station.id).anchor} fontSize={unit * 0.9} fill="var(--ink)">{station.die}</text>
           <text x={station.from} y={rows.places} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.fromText}</text>
           <text x={station.to} y={rows.places + unit * 1.1} textAnchor="middle" fontSize={unit * 0.9} fill="var(--ink-soft)">{station.toText}</text>
         </g>

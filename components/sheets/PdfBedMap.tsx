@@ -33,8 +33,8 @@ export function PdfBedMap({ map, width, close = false }: { readonly map: BedMap;
             );
           })}
           <Text x={(station.from + station.to) / 2} y={rows.title} textAnchor="middle" fill={colours.ink} style={letter(1.3, 600)}>{station.id}</Text>
-          <Text x={(station.from + station.to) / 2} y={rows.punchName} textAnchor="middle" fill={colours.ink} style={letter(0.9)}>{station.punch}</Text>
-          <Text x={(station.from + station.to) / 2} y={rows.dieName} textAnchor="middle" fill={colours.ink} style={letter(0.9)}>{station.die}</Text>
+          <Text x={layout.names(station.id).x} y={rows.punchName} textAnchor={layout.names(station.id).anchor} fill={colours.ink} style={letter(0.9)}>{station.punch}</Text>
+          <Text x={layout.names(station.id).x} y={rows.dieName} textAnchor={layout.names(station.id).anchor} fill={colours.ink} style={letter(0.9)}>{station.die}</Text>
           <Text x={station.from} y={rows.places} textAnchor="middle" fill={colours["ink-soft"]} style={letter(0.9)}>{station.fromText}</Text>
           <Text x={station.to} y={rows.places + unit * 1.1} textAnchor="middle" fill={colours["ink-soft"]} style={letter(0.9)}>{station.toText}</Text>
         </G>

@@ -1,4 +1,5 @@
 import type { BedMap, BedPiece } from "./bedMap";
+import { stationNamePlace, type NamePlace } from "./stationNamePlace";
 
 /** Where things of a bed map go, in mm along the bed; `unit` is the height of a line of lettering. */
 export interface BedMapLayout {
@@ -15,9 +16,11 @@ export interface BedMapLayout {
   };
   readonly bendLine: (step: number) => number;
   readonly pieceOutline: (piece: BedPiece) => string;
-  /** How a piece is lettered: its mark and length level, its mark alone upright, or not at all. */
+  /** Where the names of a station's tools stand. */
+  readonly names: (station: string) => NamePlace;
   /** A piece's mark as it fits a drawing: without the tool's name, which stands at the station. */
   readonly mark: (piece: BedPiece) => string;
+  /** How a piece is lettered: its mark and length level, its mark alone upright, or not at all. */
   readonly lettering: (piece: BedPiece) => "level" | "upright" | "none";
 }
 
@@ -41,6 +44,7 @@ export function bedMapLayout(map: BedMap, close: boolean): BedMapLayout {
     rows: { title: -unit * 2.2, punchName: -unit * 0.6, punch, die, dieName: die[1] + unit * 1.2, places: die[1] + unit * 2.3 },
     bendLine: (step) => punch[1] + unit * 0.95 * step,
     pieceOutline: (piece) => outline(piece, piece.kind === "punch" ? punch : die, unit),
+    names: (station) => stationNamePlace(map.stations, station, unit * 0.9),
     mark: markOf,
     lettering: (piece) => {
       const [wide, letters] = [piece.to - piece.from, markOf(piece).length];
