@@ -55,11 +55,16 @@ describe("laws of clearance", { timeout: 120_000 }, () => {
     }), { numRuns: 40 });
   });
 
-  it("more clearance never frees anything", () => {
-    fc.assert(fc.property(seeds, fc.nat(3), (seed, tool) => {
+  // Of the stroke's own punch and die: a neighbour is also met on the way that these two choose, and more clearance may choose another way.
+  it("more clearance never frees anything: where punch and die might not stand they still may not, or the part is trapped", () => {
+    fc.assert(fc.property(seeds, fc.nat(1), (seed, tool) => {
       const dice = createDice(seed);
       const part = randomPart(dice);
       const hit = randomHit(part, dice);
+      const trappedAt = (margin: Mm) => createClearance(part, trialMachine, { margin }).blocked(hit, punch, die).flatMap(({ kind, strokeAngle }) => (kind === "trapped" ? [strokeAngle] : []));
+      const [before, after] = [trappedAt(mm(1)), trappedAt(mm(2))];
+      expect(after).toEqual(expect.arrayContaining(before));
+      if (after.length > before.length) return;
       const wide = ask(part, hit, tools[tool], mm(2));
       for (const [from, to] of ask(part, hit, tools[tool], mm(1))) {
         expect(wide.some(([a, b]) => a <= from + 1e-9 && b >= to - 1e-9)).toBe(true);
