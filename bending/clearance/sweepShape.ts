@@ -2,7 +2,7 @@ import { MEANT_CONTACT_MM } from "../core/tolerance";
 import type { Mm } from "../core/units";
 import type { Vec2 } from "../geometry/vec2";
 import type { Shape } from "./convexPiece";
-import { convexHull } from "./convexHull";
+import { convexHull } from "../geometry/convexHull";
 import { halfPlanes } from "./halfPlanes";
 
 /** What a shape goes through when it first stands at `from` (an offset) and then moves straight by `by`: exact for each convex piece. */

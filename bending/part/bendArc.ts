@@ -1,4 +1,4 @@
-import type { Bend, PartModel } from "./partModel";
+import type { Bend } from "./partModel";
 
 /**
  * The cross-section of a bend formed to `angle`, in the plane across the bend line: u away from the parent
@@ -15,7 +15,7 @@ export interface BendArc {
   readonly neutralHeight: number;
 }
 
-export function bendArc(part: PartModel, bend: Bend, angle: number): BendArc {
+export function bendArc(part: { readonly thickness: number }, bend: Bend, angle: number): BendArc {
   const up = bend.direction === "up";
   return {
     angle,

@@ -3,7 +3,7 @@ import type { Vec3 } from "@/bending/geometry/vec3";
 import { foldFrames } from "@/bending/part/foldFrames";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
 import { boundsOf } from "@/lib/sheet/boundsOf";
-import { convexHull } from "@/lib/sheet/convexHull";
+import { convexHull } from "@/bending/geometry/convexHull";
 import { sheetPrisms } from "@/lib/sheet/sheetPrisms";
 
 const [COS, SIN] = [Math.cos(Math.PI / 6), Math.sin(Math.PI / 6)];

@@ -3,7 +3,7 @@ import type { Vec2 } from "@/bending/geometry/vec2";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
 import { bendPrisms } from "./bendPrisms";
-import { convexHull } from "./convexHull";
+import { convexHull } from "@/bending/geometry/convexHull";
 
 /** Every bend zone as it is seen in a drawing, slab by slab. */
 export function bendOutlines(part: PartModel, frames: readonly Frame[], angles: FormedAngles, look: (point: Vec3) => Vec2): readonly (readonly Vec2[])[] {

@@ -1,7 +1,10 @@
 import type { Frame } from "@/bending/geometry/frame";
 import { applyFrame } from "@/bending/geometry/applyFrame";
 import type { Vec3 } from "@/bending/geometry/vec3";
+import { bendArc } from "@/bending/part/bendArc";
+import { bendDirections } from "@/bending/part/bendDirections";
 import type { Bend } from "@/bending/part/partModel";
+import { pointOnBendArc } from "@/bending/part/pointOnBendArc";
 
 /** A piece of sheet with plane lower and upper faces, each convex, corner above corner. */
 export interface SheetPrism {
@@ -28,21 +31,10 @@ export function bendPrisms(bend: Bend, bendIndex: number, thickness: number, ang
 /** A point of the bent zone in the parent's sheet frame: `v` from the parent's tangent (0) to the child's (1). */
 export function zonePoint(bend: Bend, thickness: number, angle: number, v: number, end: boolean, z: number): Vec3 {
   const [parentStart, childStart, childEnd, parentEnd] = bend.zone;
-  const near = end ? parentEnd : parentStart;
-  const far = end ? childEnd : childStart;
-  const [lineStart, lineEnd] = bend.line;
-  const length = Math.hypot(lineEnd[0] - lineStart[0], lineEnd[1] - lineStart[1]);
-  const along = [(lineEnd[0] - lineStart[0]) / length, (lineEnd[1] - lineStart[1]) / length] as const;
-  const across = [along[1], -along[0]] as const;
-  const flat = [near[0] + (far[0] - near[0]) * v, near[1] + (far[1] - near[1]) * v] as const;
-  if (angle < 1e-6) return [flat[0], flat[1], z];
-  const width = (far[0] - near[0]) * across[0] + (far[1] - near[1]) * across[1];
-  const radius = width / angle;
-  const up = bend.direction === "up";
-  const neutral = up ? thickness * (1 - bend.k) : thickness * bend.k;
-  const centre = up ? neutral + radius : neutral - radius;
-  const reach = up ? centre - z : z - centre;
-  const shift = reach * Math.sin(angle * v) - width * v;
-  const height = up ? centre - reach * Math.cos(angle * v) : centre + reach * Math.cos(angle * v);
-  return [flat[0] + across[0] * shift, flat[1] + across[1] * shift, height];
+  const [near, far] = end ? [parentEnd, childEnd] : [parentStart, childStart];
+  const { along, outward } = bendDirections(bend);
+  const arc = bendArc({ thickness }, bend, angle);
+  const [away, height] = pointOnBendArc(arc, v, arc.sense * (arc.neutralHeight - z));
+  const shift = ((far[0] - near[0]) * along[0] + (far[1] - near[1]) * along[1]) * v;
+  return [near[0] + along[0] * shift + outward[0] * away, near[1] + along[1] * shift + outward[1] * away, height];
 }

@@ -3,7 +3,7 @@ import type { Frame } from "@/bending/geometry/frame";
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import type { PartModel } from "@/bending/part/partModel";
-import { convexHull } from "./convexHull";
+import { convexHull } from "@/bending/geometry/convexHull";
 
 /** A face seen along one axis: its outline and holes, or the edge-on slab. `depth` orders faces along the line of sight. */
 export interface FaceOutline {

@@ -1,7 +1,7 @@
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { Vec3 } from "@/bending/geometry/vec3";
 import type { SheetPrism } from "./bendPrisms";
-import { convexHull } from "./convexHull";
+import { convexHull } from "@/bending/geometry/convexHull";
 
 /** The polygon (x, y) in which the plane z = `at` cuts a prism; empty when it misses. */
 export function prismSection(prism: SheetPrism, at: number): readonly Vec2[] {
