@@ -1,5 +1,6 @@
 import { mm, type Mm } from "../core/units";
 import { gaugeThickness, type GaugeSystem } from "./gaugeThickness";
+import { GAUGE_RANGE } from "./usStandardGauge";
 
 export interface NearestGauge {
   readonly gauge: number;
@@ -8,7 +9,7 @@ export interface NearestGauge {
   readonly deviation: Mm;
 }
 
-const [THICKEST, THINNEST] = [7, 30];
+const { from: THICKEST, to: THINNEST } = GAUGE_RANGE;
 
 /**
  * The gauge whose nominal thickness is nearest, of the charts of `gaugeThickness` (7 to 30). Null for a sheet that lies

@@ -26,6 +26,10 @@ describe("gauges", () => {
     }));
   });
 
+  test.each([["steel", 0.0299], ["stainless", 1 / 32], ["aluminium", 0.0253]] as const)("22 ga of %s is what its standard prints, to the last digit", (name, inches) => {
+    expect(gaugeThickness(22, name)).toBeCloseTo(inches * MM_PER_INCH, 12);
+  });
+
   test("no other gauge lies nearer, and off the chart there is none", () => {
     fc.assert(fc.property(system, between(0.27, 4.2), (name, t) => {
       const found = gaugeForThickness(mm(t), name);

@@ -4,7 +4,7 @@ import type { LengthUnit } from "../core/units";
 import type { Interval } from "../geometry/interval";
 import type { Vec2 } from "../geometry/vec2";
 import { edgeAxes, fromEdge, onEdge, type EdgeAxes } from "./edgeCut";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 
 /** Drawings often end a bend line short of the sheet's edge; it must cover this part of the sheet, so that no tab is meant. */
 const LEAST_COVER = 0.8;

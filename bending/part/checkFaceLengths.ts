@@ -1,7 +1,7 @@
 import type { FieldProblem } from "../core/problem";
 import type { LengthUnit, Mm } from "../core/units";
 import type { FlangeWork } from "./faceWork";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 import type { DimensionKind } from "./partDocument";
 import type { PartSource } from "./partSource";
 import { setback } from "./setback";

@@ -1,6 +1,6 @@
 import type { FieldProblem } from "../core/problem";
 import { mmPer, type LengthUnit } from "../core/units";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 import { PART_LIMITS } from "./partLimits";
 
 const NO_LENGTH = new Set(["angle", "kFactor", "edge", "startAngle", "endAngle", "toleranceAngle"]);

@@ -3,7 +3,7 @@ import { EMPTY_AREA_MM2, SAME_POINT_MM } from "../core/tolerance";
 import type { LengthUnit } from "../core/units";
 import { selfCrossing } from "../geometry/selfCrossing";
 import { signedArea } from "../geometry/signedArea";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 import { outlineAsChords } from "./outlineAsChords";
 import type { DocumentVertex } from "./partDocument";
 

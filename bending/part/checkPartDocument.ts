@@ -7,7 +7,7 @@ import { checkFlanges } from "./checkFlanges";
 import { checkLengths } from "./checkLengths";
 import { checkOutline } from "./checkOutline";
 import { documentInUnits } from "./documentInUnits";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 import { holeAsChords } from "./holeAsChords";
 import type { BaseShape, DocumentHole, FlangeEntry, FlatShape, PartDocument, ProfileShape } from "./partDocument";
 

@@ -10,7 +10,7 @@ import { edgeAxes, fromEdge, type EdgeAxes } from "./edgeCut";
 import { edgeCutsOf } from "./edgeCutsOf";
 import { edgeRange } from "./edgeRange";
 import type { FaceWork, FlangeWork } from "./faceWork";
-import { formatLength } from "./formatLength";
+import { formatLength } from "../core/formatLength";
 import type { DimensionKind } from "./partDocument";
 import type { Bend } from "./partModel";
 import { placeOnSheet, turnOnSheet } from "./sheetPlacement";

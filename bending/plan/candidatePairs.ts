@@ -1,6 +1,6 @@
 import type { LengthUnit, Mm } from "../core/units";
 import { FORCE_V_RANGE } from "../handbook/airBendForce";
-import { formatLength } from "../part/formatLength";
+import { formatLength } from "../core/formatLength";
 import type { Machine } from "../tooling/machine";
 import type { Die, Punch, Tool } from "../tooling/tool";
 import type { PlanReason } from "./planDocument";

@@ -1,7 +1,7 @@
 import { toDeg } from "../core/units";
 import { advisedFlange, minimumFlange } from "../handbook/minimumFlange";
 import { minimumRadius } from "../handbook/minimumRadius";
-import { formatLength } from "../part/formatLength";
+import { formatLength } from "../core/formatLength";
 import { flatPattern } from "../part/flatPattern";
 import type { Layout } from "../setup/layout";
 import type { OrderStep } from "../order/orderProblem";

@@ -1,7 +1,7 @@
 import type { ClearanceHit } from "../clearance/clearance";
 import { hitSides } from "../clearance/hitSides";
 import { mmPer, toDeg } from "../core/units";
-import { formatLength } from "../part/formatLength";
+import { formatLength } from "../core/formatLength";
 import type { StepChecks } from "./createStepChecks";
 import { formatBends } from "./formatBends";
 import type { PlanReason } from "./planDocument";

@@ -5,7 +5,7 @@ import { minimumFlange } from "../handbook/minimumFlange";
 import { naturalRadius } from "../handbook/naturalRadius";
 import { springback } from "../handbook/springback";
 import { vOpeningRule } from "../handbook/vOpeningRule";
-import { formatLength } from "../part/formatLength";
+import { formatLength } from "../core/formatLength";
 import type { Bend, PartModel } from "../part/partModel";
 import type { RunsOf } from "../setup/createRuns";
 import type { Machine } from "../tooling/machine";

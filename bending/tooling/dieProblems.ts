@@ -1,7 +1,7 @@
 import type { FieldProblem } from "../core/problem";
 import { deg, toDeg, rad, type LengthUnit } from "../core/units";
 import type { ProfilePoint } from "../geometry/vec2";
-import { lengthText } from "./lengthText";
+import { formatLength } from "../core/formatLength";
 import { PROFILE_TOLERANCE_MM, PROFILE_TOLERANCE_RAD } from "./profileTolerance";
 import type { Die } from "./tool";
 
@@ -10,7 +10,7 @@ import type { Die } from "./tool";
  * shoulder arcs stand at +-vOpening / 2 (a plain corner there is taken for an arc); nothing stands over the arcs.
  */
 export function dieProblems(die: Die, path: string, units: LengthUnit): readonly FieldProblem[] {
-  const text = (value: number) => lengthText(value, units);
+  const text = (value: number) => formatLength(value, units);
   const at = (field: string, message: string): FieldProblem => ({ path: `${path}.${field}`, message });
   const top = Math.max(...die.profile.map((p) => p[1]));
   const bottom = Math.min(...die.profile.map((p) => p[1]));

@@ -1,14 +1,14 @@
 import type { FieldProblem } from "../core/problem";
 import type { LengthUnit } from "../core/units";
 import type { ProfilePoint } from "../geometry/vec2";
-import { lengthText } from "./lengthText";
+import { formatLength } from "../core/formatLength";
 import type { Machine } from "./machine";
 import { profileProblem } from "./profileProblem";
 import { PROFILE_TOLERANCE_MM } from "./profileTolerance";
 
 /** Where a machine's cross-sections and numbers do not agree with the machine frame. */
 export function machineProblems(machine: Machine, units: LengthUnit): readonly FieldProblem[] {
-  const text = (value: number) => lengthText(value, units);
+  const text = (value: number) => formatLength(value, units);
   const problems: FieldProblem[] = [];
   const check = (path: string, profile: readonly ProfilePoint[], seat: number, message: string) => {
     const crossing = profileProblem(profile, units);

@@ -1,6 +1,6 @@
 import type { FieldProblem } from "../core/problem";
 import { mm } from "../core/units";
-import { lengthText } from "./lengthText";
+import { formatLength } from "../core/formatLength";
 import type { ToolPiece } from "./tool";
 import type { SectionEntry, ToolEntry } from "./toolingDocument";
 
@@ -29,7 +29,7 @@ export function piecesOf(tool: ToolEntry, path: string, scale: number): { readon
 function piece(tool: ToolEntry, section: SectionEntry, mark: string | undefined, counted: Map<string, number>, scale: number): ToolPiece {
   const length = section.length * scale;
   const suffix = section.horn ? section.horn.charAt(0).toUpperCase() : "";
-  const kind = `${tool.id}-${lengthText(length, "mm").replace(" mm", "")}${suffix}`;
+  const kind = `${tool.id}-${formatLength(length, "mm").replace(" mm", "")}${suffix}`;
   const number = (counted.get(kind) ?? 0) + 1;
   if (mark === undefined) counted.set(kind, number);
   return { id: mark ?? `${kind}-${number}`, length: mm(length), horn: section.horn ?? null, rack: section.rack ?? null };

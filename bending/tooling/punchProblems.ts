@@ -1,13 +1,13 @@
 import type { FieldProblem } from "../core/problem";
 import type { LengthUnit } from "../core/units";
-import { lengthText } from "./lengthText";
+import { formatLength } from "../core/formatLength";
 import { PROFILE_TOLERANCE_MM } from "./profileTolerance";
 import type { Punch } from "./tool";
 
 /** Where a punch's cross-section and its numbers do not agree: tip at the origin, body above, height as stated. */
 export function punchProblems(punch: Punch, path: string, units: LengthUnit): readonly FieldProblem[] {
   const problems: FieldProblem[] = [];
-  const text = (value: number) => lengthText(value, units);
+  const text = (value: number) => formatLength(value, units);
   const lowest = punch.profile.reduce((low, p) => (p[1] < low[1] || (p[1] === low[1] && Math.abs(p[0]) < Math.abs(low[0])) ? p : low));
   const top = Math.max(...punch.profile.map((p) => p[1]));
   if (Math.hypot(lowest[0], lowest[1]) > PROFILE_TOLERANCE_MM) {

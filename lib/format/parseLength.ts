@@ -1,8 +1,10 @@
 import { fail, ok, type Result } from "@/bending/core/result";
 import { mmPer, MM_PER_INCH, type LengthUnit } from "@/bending/core/units";
+import { gaugeSystemOf } from "@/bending/handbook/gaugeSystemOf";
+import { gaugeThickness } from "@/bending/handbook/gaugeThickness";
 import type { MaterialGroup } from "@/bending/handbook/material";
+import { GAUGE_RANGE } from "@/bending/handbook/usStandardGauge";
 import { parseNumber } from "./parseNumber";
-import { sheetGaugeInches, sheetGaugeRange } from "./sheetGaugeInches";
 
 const mmInUnit: Readonly<Record<string, number>> = {
   mm: 1, cm: 10, m: 1000, "µm": 0.001, in: MM_PER_INCH, inch: MM_PER_INCH, inches: MM_PER_INCH, '"': MM_PER_INCH, "”": MM_PER_INCH, "″": MM_PER_INCH, "''": MM_PER_INCH,
@@ -38,11 +40,12 @@ export function parseLength(text: string, unit: LengthUnit, options: ParseLength
 
 function gauge(number: string, unit: LengthUnit, { gaugeGroup }: ParseLengthOptions): Result<number, string> {
   if (gaugeGroup === undefined) return fail("A gauge can stand for a sheet thickness only. Type this length in mm or inches.");
-  const inches = sheetGaugeInches(Number(number), gaugeGroup);
-  if (inches !== undefined) return ok(cleared((inches * MM_PER_INCH) / mmPer(unit)));
-  return fail(gaugeGroup === "copper" || gaugeGroup === "brass"
-    ? `There is no gauge table for ${gaugeGroup}. Type the thickness in mm or inches.`
-    : `Gauge ${number.trim()} is not in the table. Type a whole gauge from ${sheetGaugeRange.from} to ${sheetGaugeRange.to}, or the thickness.`);
+  const system = gaugeSystemOf(gaugeGroup);
+  if (system === null) return fail(`There is no gauge table for ${gaugeGroup}. Type the thickness in mm or inches.`);
+  const thickness = gaugeThickness(Number(number), system);
+  return thickness === null
+    ? fail(`Gauge ${number.trim()} is not in the table. Type a whole gauge from ${GAUGE_RANGE.from} to ${GAUGE_RANGE.to}, or the thickness.`)
+    : ok(cleared(thickness / mmPer(unit)));
 }
 
 /** Takes the noise of conversion off the last digits, far under anything that can be measured. */

@@ -1,6 +1,6 @@
-import { mmPer, type LengthUnit } from "../core/units";
+import { mmPer, type LengthUnit } from "./units";
 
-/** A length of the model (mm) as a person reads it in the document's unit: "4.25 mm", "0.167 in". */
+/** A length in mm as a person reads it in the document's unit: "4.25 mm", "0.167 in". */
 export function formatLength(lengthMm: number, units: LengthUnit): string {
   const value = lengthMm / mmPer(units);
   const places = units === "in" ? 4 : 3;
