@@ -24,9 +24,9 @@ const zones = [
   zone("./db", "./lib", "db/ imports lib/env only.", ["./env.ts"]),
   zone("./lib", "./app", "lib/ never imports app."),
   zone("./lib", "./components", "lib/ never imports components."),
-  ...["schemas", "format", "queries", "exchange", "sheet", "mail"].map((folder) =>
+  ...["schemas", "format", "queries", "exchange", "csv", "sheet", "mail"].map((folder) =>
     zone(`./lib/${folder}`, "./db", "Only lib/services, lib/jobs and lib/auth touch the database.")),
-  ...["schemas", "format", "queries", "sheet"].map((folder) =>
+  ...["schemas", "format", "queries", "csv", "sheet"].map((folder) =>
     zone(`./lib/${folder}`, "./lib/services", "lib/services is for the server only.")),
   ...["./db", "./lib/services", "./lib/jobs", "./app"].map((from) =>
     zone("./components", from, "components/ imports ui, bending and lib/{queries,schemas,format,sheet} only.")),
