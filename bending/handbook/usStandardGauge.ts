@@ -1,5 +1,5 @@
 /** The gauges that have an entry. */
-export const GAUGE_RANGE = { from: 7, to: 30 } as const;
+export const GAUGE_RANGE: Readonly<Record<"from" | "to", number>> = { from: 7, to: 30 };
 
 /** US Standard Gauge, inches: pounds a square foot over 40 gives inches of wrought iron; sixteenths down to 640ths (15 U.S.C. 206). */
 export const usStandardGauge: Readonly<Record<number, number>> = {
