@@ -22,7 +22,11 @@ export interface PartCommon {
   readonly dimension?: DimensionKind;
   readonly toleranceAngle?: number;
   readonly toleranceLength?: number;
+  /** Rolling direction in the unfolded sheet: along x, along y, or degrees from x, counter-clockwise. */
+  readonly grain?: GrainDirection;
 }
+
+export type GrainDirection = "x" | "y" | number;
 
 /** How the bend allowance is found; see part-document conventions in README.md. */
 export type AllowanceRule = "shop" | "din6935" | "machinery" | "faa" | "k";

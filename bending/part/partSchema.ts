@@ -92,6 +92,7 @@ export const partSchema = z.strictObject({
   dimension: dimension.optional(),
   toleranceAngle: toleranceAngle.optional(),
   toleranceLength: positive.optional(),
+  grain: z.union([z.enum(["x", "y"]), z.number().min(-180).max(180)], 'must be "x", "y", or degrees from x, from -180 to 180').optional(),
   profile: profile.optional(),
   base: z.strictObject({ outline, holes: holes.optional() }).optional(),
   flanges: z.array(flange).max(PART_LIMITS.bends).optional(),
