@@ -2,6 +2,7 @@ import { mm, type LengthUnit } from "../core/units";
 import type { FieldProblem } from "../core/problem";
 import { fail, ok, type Result } from "../core/result";
 import type { MaterialFacts } from "../handbook/material";
+import type { BendContext } from "./bendContext";
 import { checkFaceLengths } from "./checkFaceLengths";
 import { drawnBase } from "./drawnBase";
 import { edgeCutsOf } from "./edgeCutsOf";
@@ -14,18 +15,18 @@ import type { PartSource } from "./partSource";
 import { placeFlange } from "./placeFlange";
 import { placeOnSheet } from "./sheetPlacement";
 import { planeOutline } from "./planeOutline";
-import { resolveBend, type RadiusOf } from "./resolveBend";
+import { resolveBend } from "./resolveBend";
 
 /**
  * Base and flanges as faces and bends of the unfolded sheet, parents first. A flange whose parent failed is
  * left out, so that each problem is told once, where it begins.
  */
 export function buildFaces(
-  source: PartSource, document: PartDocument, units: LengthUnit, material: MaterialFacts, radiusOf: RadiusOf | undefined,
+  source: PartSource, document: PartDocument, units: LengthUnit, material: MaterialFacts, context: BendContext,
 ): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
   const thickness = mm(document.thickness);
   const dimension = document.dimension ?? "outside";
-  const flanges = parentsFirst(source.flanges).map((flange): FlangeWork => ({ ...flange, bend: resolveBend(flange.entry, document, material, radiusOf) }));
+  const flanges = parentsFirst(source.flanges).map((flange): FlangeWork => ({ ...flange, bend: resolveBend(flange.entry, document, material, context) }));
   const childrenOf = (id: string) => flanges.filter(({ entry }) => entry.on === id);
   const problems: FieldProblem[] = [...checkFaceLengths(source, flanges, dimension, thickness, units)];
   if (problems.length > 0) return fail(problems);

@@ -9,13 +9,14 @@ import { polygonContains } from "../geometry/polygonContains";
 import { signedArea } from "../geometry/signedArea";
 import type { Vec2 } from "../geometry/vec2";
 import type { MaterialFacts } from "../handbook/material";
+import type { BendContext } from "./bendContext";
 import { bendStrip, stripCorners, type BendStrip } from "./bendStrip";
 import { fromEdge } from "./edgeCut";
 import { faceHolesOfFlat } from "./faceHolesOfFlat";
 import { outlineAsChords } from "./outlineAsChords";
 import type { FlatShape, PartDocument } from "./partDocument";
 import type { Bend, Face, PartModel } from "./partModel";
-import { resolveBend, type RadiusOf, type ResolvedBend } from "./resolveBend";
+import { resolveBend, type ResolvedBend } from "./resolveBend";
 
 /** Zones may lap by rounding (mm); strips are cut this much longer than the sheet, so that no sliver stays. */
 const LAP_MM = 1e-3;
@@ -32,14 +33,14 @@ interface FlatBend {
  * after the bend that carries it. The flat is kept as it is; the folded part follows from it.
  */
 export function buildFlat(
-  flat: FlatShape, document: PartDocument, units: LengthUnit, material: MaterialFacts, radiusOf: RadiusOf | undefined,
+  flat: FlatShape, document: PartDocument, units: LengthUnit, material: MaterialFacts, context: BendContext,
 ): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
   const { points } = outlineAsChords(flat.outline);
   const problems: FieldProblem[] = [];
   const bends: FlatBend[] = [];
   flat.bends.forEach((entry, i) => {
     const path = `flat.bends[${i}].line`;
-    const bend = resolveBend(entry, document, material, radiusOf);
+    const bend = resolveBend(entry, document, material, context);
     const strip = bendStrip(points, entry.line, bend.allowance, path, units);
     if (!strip.ok) problems.push(strip.error);
     else {
@@ -95,12 +96,13 @@ function joinPieces(pieces: readonly (readonly Vec2[])[], bends: readonly FlatBe
 }
 
 function bendOf({ bend, strip }: FlatBend, leftIsParent: boolean, parent: number, child: number): Bend {
-  const { source, ...resolved } = bend;
+  const { source, basis, ...resolved } = bend;
   const [rightStart, rightEnd, leftEnd, leftStart] = stripCorners(strip);
   const line = [fromEdge(strip.axes, [strip.middle[0], 0]), fromEdge(strip.axes, [strip.middle[1], 0])] as const;
   return {
     ...resolved,
     allowanceSource: source,
+    allowanceBasis: basis,
     parent,
     child,
     // Drawn the other way round when the parent would lie on its right.

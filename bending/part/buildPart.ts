@@ -2,6 +2,7 @@ import { mm } from "../core/units";
 import type { FieldProblem } from "../core/problem";
 import { fail, ok, type Result } from "../core/result";
 import type { MaterialFacts, MaterialLookup } from "../handbook/material";
+import type { BendContext } from "./bendContext";
 import { buildFaces } from "./buildFaces";
 import { buildFlat } from "./buildFlat";
 import { checkPartDocument } from "./checkPartDocument";
@@ -10,13 +11,10 @@ import { flatsOverlap } from "./flatsOverlap";
 import type { PartDocument } from "./partDocument";
 import type { PartModel } from "./partModel";
 import { partSource } from "./partSource";
-import type { RadiusOf } from "./resolveBend";
 import { unknownMaterial } from "./unknownMaterial";
 
-export interface BuildPartOptions {
+export interface BuildPartOptions extends BendContext {
   readonly materials: MaterialLookup;
-  /** The inside radius that the chosen die gives a bend; used where the document gives none. */
-  readonly radiusOf?: RadiusOf;
   /** The ids that `materials` knows, to list them when one is not known. */
   readonly knownMaterials?: readonly string[];
 }
@@ -29,16 +27,16 @@ export function buildPart(document: PartDocument, options: BuildPartOptions): Re
   const material = options.materials(document.material);
   const early = [...checkPartDocument(document), ...(material ? [] : [unknownMaterial(document.material, options.knownMaterials)])];
   if (early.length > 0 || !material) return fail(early);
-  const built = buildShape(document, material, options.radiusOf);
+  const built = buildShape(document, material, options);
   if (!built.ok) return built;
   const part: PartModel = { name: document.name, thickness: mm(documentInUnits(document, "mm").thickness), material, ...built.value };
   const overlaps = flatsOverlap(part, document);
   return overlaps.length > 0 ? fail(overlaps) : ok(part);
 }
 
-function buildShape(document: PartDocument, material: MaterialFacts, radiusOf: RadiusOf | undefined): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
+function buildShape(document: PartDocument, material: MaterialFacts, context: BendContext): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
   const inMm = documentInUnits(document, "mm");
-  if (inMm.flat) return buildFlat(inMm.flat, inMm, document.units, material, radiusOf);
+  if (inMm.flat) return buildFlat(inMm.flat, inMm, document.units, material, context);
   const source = partSource(inMm);
-  return buildFaces(source, inMm, document.units, material, radiusOf);
+  return buildFaces(source, inMm, document.units, material, context);
 }

@@ -1,5 +1,6 @@
 import type { Mm, Rad } from "../core/units";
 import type { FlatPoint } from "../geometry/vec2";
+import type { AllowanceBasis } from "../handbook/allowanceBasis";
 import type { MaterialFacts } from "../handbook/material";
 import type { BendDirection, HemKind } from "./partDocument";
 
@@ -57,6 +58,8 @@ export interface Bend {
   readonly k: number;
   /** Names the rule that gave the allowance, e.g. "DIN 6935". */
   readonly allowanceSource: string;
+  /** The same as data; null when the allowance was taken over from a plan that does not keep it. */
+  readonly allowanceBasis: AllowanceBasis | null;
   /** Middle of the bend zone. */
   readonly line: readonly [FlatPoint, FlatPoint];
   /**

@@ -74,10 +74,11 @@ function sheetPointBeside(parent: FaceWork, axes: EdgeAxes, originAlong: number,
   return (along, across) => placeOnSheet(parent.placement, fromEdge(axes, [originAlong + along, depth - across]));
 }
 
-function bendBetween({ source, ...bend }: FlangeWork["bend"], parent: number, child: number, [from, to]: Interval, at: SheetPointBeside): Bend {
+function bendBetween({ source, basis, ...bend }: FlangeWork["bend"], parent: number, child: number, [from, to]: Interval, at: SheetPointBeside): Bend {
   return {
     ...bend,
     allowanceSource: source,
+    allowanceBasis: basis,
     parent,
     child,
     line: [at(from, bend.allowance / 2), at(to, bend.allowance / 2)],

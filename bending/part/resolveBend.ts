@@ -1,6 +1,11 @@
 import { deg, mm, toRad, type Mm, type Rad } from "../core/units";
 import type { MaterialFacts } from "../handbook/material";
-import { resolveAllowance, type ResolvedAllowance } from "../handbook/resolveAllowance";
+import type { AllowanceBasis } from "../handbook/allowanceBasis";
+import { bendDeduction } from "../handbook/bendDeduction";
+import { kFromAllowance } from "../handbook/kFromAllowance";
+import { resolveAllowance, type AllowanceQuestion, type ResolvedAllowance } from "../handbook/resolveAllowance";
+import { vOpeningRule } from "../handbook/vOpeningRule";
+import type { BendContext, DecidedAllowance } from "./bendContext";
 import type { BendDirection, HemKind, PartDocument } from "./partDocument";
 
 export interface BendEntry {
@@ -14,7 +19,9 @@ export interface BendEntry {
   readonly toleranceAngle?: number;
 }
 
-export interface ResolvedBend extends ResolvedAllowance {
+export interface ResolvedBend extends Omit<ResolvedAllowance, "basis"> {
+  /** Null when it was decided before, by a plan that keeps no more than its source's name. */
+  readonly basis: AllowanceBasis | null;
   readonly id: string;
   readonly angle: Rad;
   readonly direction: BendDirection;
@@ -24,23 +31,24 @@ export interface ResolvedBend extends ResolvedAllowance {
   readonly toleranceAngle: Rad | null;
 }
 
-export type RadiusOf = (bendId: string) => { readonly radius: Mm; readonly source: string } | null;
-
 /** Radius, allowance and setback of one bend; the document and the entry are in mm. */
-export function resolveBend(entry: BendEntry, document: PartDocument, material: MaterialFacts, radiusOf: RadiusOf | undefined): ResolvedBend {
+export function resolveBend(entry: BendEntry, document: PartDocument, material: MaterialFacts, context: BendContext): ResolvedBend {
   const angle = toRad(deg(entry.angle));
-  const { radius, source } = insideRadius(entry, document, material, radiusOf);
+  const { radius, source } = insideRadius(entry, document, material, context);
   const tolerance = entry.toleranceAngle ?? document.toleranceAngle;
+  const thickness = mm(document.thickness);
+  const decided = context.decidedOf?.(entry.id);
   return {
-    ...resolveAllowance({
+    ...(decided ? takenOver(decided, angle, radius, thickness) : resolveAllowance({
       rule: document.rule,
       kOverride: entry.kFactor ?? document.kFactor,
       material,
-      thickness: mm(document.thickness),
+      thickness,
       insideRadius: radius,
       angle,
       closedHem: entry.hem === "closed",
-    }),
+      shop: entry.hem === undefined ? shopFor(entry.id, { radius, source, thickness, material }, context) : undefined,
+    })),
     id: entry.id,
     angle,
     direction: entry.direction,
@@ -51,8 +59,23 @@ export function resolveBend(entry: BendEntry, document: PartDocument, material: 
   };
 }
 
+function takenOver({ allowance, source, basis }: DecidedAllowance, angle: Rad, radius: Mm, thickness: Mm): Omit<ResolvedAllowance, "basis"> & { readonly basis: AllowanceBasis | null } {
+  return { allowance, deduction: bendDeduction(angle, radius, thickness, allowance), k: kFromAllowance(allowance, angle, radius, thickness), source, basis };
+}
+
+/** The shop's table, and the V to ask it for: the die's, else the one whose natural radius the bend has, else the usual one. */
+function shopFor(id: string, bend: { readonly radius: Mm; readonly source: string; readonly thickness: Mm; readonly material: MaterialFacts }, { shopTable, openingOf, radiusOf }: BendContext): AllowanceQuestion["shop"] {
+  if (!shopTable || shopTable.cells.length === 0) return undefined;
+  const ofDie = openingOf?.(id);
+  if (ofDie) return { table: shopTable, vOpening: ofDie, openingFrom: "die" };
+  const given = bend.source === "document" || radiusOf?.(id);
+  return given
+    ? { table: shopTable, vOpening: mm(bend.radius / bend.material.naturalRadiusRatio), openingFrom: "radius" }
+    : { table: shopTable, vOpening: vOpeningRule(bend.thickness), openingFrom: "usual" };
+}
+
 /** The hem's gap, else the bend's own radius, the part's, the die's, the material's; the first that is given. */
-function insideRadius(entry: BendEntry, document: PartDocument, material: MaterialFacts, radiusOf: RadiusOf | undefined): { radius: Mm; source: string } {
+function insideRadius(entry: BendEntry, document: PartDocument, material: MaterialFacts, { radiusOf }: BendContext): { radius: Mm; source: string } {
   if (entry.hem === "closed") return { radius: mm(0), source: "closed hem" };
   if (entry.hem && entry.gap !== undefined) return { radius: mm(entry.gap / 2), source: "half the hem's gap" };
   if (entry.insideRadius !== undefined) return { radius: mm(entry.insideRadius), source: "document" };
