@@ -20,7 +20,8 @@ export { polygonCentroid } from "./geometry/polygonCentroid";
 export { polygonContains } from "./geometry/polygonContains";
 export { signedArea } from "./geometry/signedArea";
 
-export type { MaterialFacts, MaterialGroup, MaterialLookup, MinimumRadius } from "./handbook/material";
+export type { MaterialAllowance, MaterialFacts, MaterialField, MaterialGroup, MaterialLookup, MinimumRadius, MinimumRadiusTable, Origin } from "./handbook/material";
+export { completeMaterial, type RecordedMaterial } from "./handbook/completeMaterial";
 export { builtInMaterials, materialById } from "./handbook/materials";
 export { bendAllowance } from "./handbook/bendAllowance";
 export { bendDeduction } from "./handbook/bendDeduction";
@@ -119,6 +120,9 @@ export { foldPoint } from "./part/foldPoint";
 export { unfoldPoint } from "./part/unfoldPoint";
 export { bendFacets, type BendFacet, type FacetQuad } from "./part/bendFacets";
 export { flatPattern, type FlatPattern, type FlatBendLine } from "./part/flatPattern";
+export { flatContours, type FlatContours } from "./part/flatContours";
+export { flatOverlaps, type FlatOverlap } from "./part/flatOverlaps";
+export { contourArea } from "./part/contourArea";
 
 export type * from "./tooling/tool";
 export type * from "./tooling/machine";

@@ -1,18 +1,22 @@
 import { mm, type LengthUnit } from "../core/units";
+import type { Vec2 } from "../geometry/vec2";
 import type { FieldProblem } from "../core/problem";
 import { fail, ok, type Result } from "../core/result";
 import type { MaterialFacts } from "../handbook/material";
 import type { BendContext } from "./bendContext";
 import { checkFaceLengths } from "./checkFaceLengths";
+import { developedOutline } from "./developedOutline";
 import { drawnBase } from "./drawnBase";
 import { edgeCutsOf } from "./edgeCutsOf";
 import type { FaceWork, FlangeWork } from "./faceWork";
-import { faceHoles } from "./faceHoles";
+import { holeAsChords } from "./holeAsChords";
+import { holeContour } from "./holeContour";
 import { parentsFirst } from "./parentsFirst";
 import type { PartDocument } from "./partDocument";
-import type { Bend, Face, PartModel } from "./partModel";
+import type { Bend, Face, PartShape } from "./partModel";
 import type { PartSource } from "./partSource";
 import { placeFlange } from "./placeFlange";
+import { sheetHoles, type SheetHole } from "./sheetHoles";
 import { placeOnSheet } from "./sheetPlacement";
 import { planeOutline } from "./planeOutline";
 import { resolveBend } from "./resolveBend";
@@ -23,10 +27,11 @@ import { resolveBend } from "./resolveBend";
  */
 export function buildFaces(
   source: PartSource, document: PartDocument, units: LengthUnit, material: MaterialFacts, context: BendContext,
-): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
+): Result<PartShape, readonly FieldProblem[]> {
   const thickness = mm(document.thickness);
   const dimension = document.dimension ?? "outside";
   const flanges = parentsFirst(source.flanges).map((flange): FlangeWork => ({ ...flange, bend: resolveBend(flange.entry, document, material, context) }));
+  const entries = new Map(flanges.map((flange) => [flange.entry.id, flange]));
   const childrenOf = (id: string) => flanges.filter(({ entry }) => entry.on === id);
   const problems: FieldProblem[] = [...checkFaceLengths(source, flanges, dimension, thickness, units)];
   if (problems.length > 0) return fail(problems);
@@ -47,16 +52,31 @@ export function buildFaces(
     works.set(flange.entry.id, placed.value.face);
     bends.push(placed.value.bend);
   }
-  const faces = [...works.values()].map((work): Face => {
-    const flange = flanges.find(({ entry }) => entry.id === work.id);
-    const holes = faceHoles(work, flange ? flange.entry.holes : source.base.holes, flange ? `${flange.path}.holes` : "base.holes", flange !== undefined);
-    problems.push(...holes.problems);
+  if (problems.length > 0) return fail(problems);
+  const faces = [...works.values()].map((work): Face => ({
+    id: work.id,
+    outline: work.plane.map((p) => placeOnSheet(work.placement, p)),
+    holes: [],
+    holeContours: [],
+    bend: work.index === 0 ? null : work.index - 1,
+  }));
+  const holes = sheetHoles({ faces, bends }, () => developedOutline({ faces, bends }), [...works.values()].flatMap((work) => holesOf(work, source, entries.get(work.id))));
+  if (holes.problems.length > 0) return fail(holes.problems);
+  const circles = [...works.values()].flatMap(({ drawn: { circles: local }, placement }) =>
+    local.map(({ centre, radius }) => ({ centre: placeOnSheet(placement, centre), radius })));
+  return ok({ faces: holes.faces, bends, holesAcross: holes.across, circles, drawnFlat: null });
+}
+
+/** The holes that were drawn on a face, laid into the sheet; a flange's own plane is turned over on the way. */
+function holesOf({ index, placement }: FaceWork, source: PartSource, flange: FlangeWork | undefined): readonly SheetHole[] {
+  const place = ([x, y]: Vec2) => placeOnSheet(placement, flange ? [x, -y] : [x, y]);
+  return ((flange ? flange.entry.holes : source.base.holes) ?? []).map((hole, i): SheetHole => {
+    const points = holeAsChords(hole).map(place);
     return {
-      id: work.id,
-      outline: work.plane.map((p) => placeOnSheet(work.placement, p)),
-      holes: holes.outlines.map((hole) => hole.map((p) => placeOnSheet(work.placement, p))),
-      bend: work.index === 0 ? null : work.index - 1,
+      path: `${flange ? flange.path : "base"}.holes[${i}]`,
+      outline: flange ? points.reverse() : points,
+      contour: holeContour(hole, place, flange !== undefined),
+      face: index,
     };
   });
-  return problems.length > 0 ? fail(problems) : ok({ faces, bends });
 }

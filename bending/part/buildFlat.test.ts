@@ -64,7 +64,7 @@ describe("what cannot be folded is said", () => {
     ["a line along the edge", { outline: sheet, bends: [{ id: "a", line: [[1, 0], [1, 80]], ...up }] }, "flat.bends[0].line: the bend line is too near the edge: the bend takes 2.081 mm on each side of it"],
     ["lines that cross", { outline: sheet, bends: [{ id: "a", line: [[20, 0], [20, 80]], ...up }, { id: "b", line: [[0, 20], [120, 20]], ...up }] }, 'flat.bends[1].line: the bends "b" and "a" run into one another; move their lines further apart or cut the corner out'],
     ["a corner in the bend", { outline: [[0, 0], [120, 0], [120, 39], [100, 39], [100, 80], [0, 80]], bends: [{ id: "a", line: [[0, 40], [100, 40]], ...up }] }, "flat.bends[0].line: the outline has a corner within the bend, which reaches 2.081 mm to each side of the line; move the corner or the line"],
-    ["a hole across the bend", { outline: sheet, holes: [{ circle: [20, 40], diameter: 10 }], bends: [{ id: "a", line: [[20, 0], [20, 80]], ...up }] }, "flat.holes[0]: the hole must lie in one face: it reaches into a bend or over the outline"],
+    ["a hole over the edge", { outline: sheet, holes: [{ circle: [20, 78], diameter: 10 }], bends: [{ id: "a", line: [[20, 0], [20, 80]], ...up }] }, "flat.holes[0]: the hole reaches over the edge of the sheet; move it inwards or make it smaller"],
     ["a name twice", { outline: sheet, bends: [{ id: "a", line: [[20, 0], [20, 80]], ...up }, { id: "a", line: [[60, 0], [60, 80]], ...up }] }, 'flat.bends[1].id: "a" is already the name of flat.bends[0]; each bend needs a name of its own'],
   ])("%s", (_, flat, expected) => {
     expect(said(flat)).toContain(expected);

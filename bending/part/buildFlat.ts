@@ -12,10 +12,13 @@ import type { MaterialFacts } from "../handbook/material";
 import type { BendContext } from "./bendContext";
 import { bendStrip, stripCorners, type BendStrip } from "./bendStrip";
 import { fromEdge } from "./edgeCut";
-import { faceHolesOfFlat } from "./faceHolesOfFlat";
+import { holeAsChords } from "./holeAsChords";
+import { holeContour } from "./holeContour";
 import { outlineAsChords } from "./outlineAsChords";
+import { outlineCircles } from "./outlineCircles";
+import { sheetHoles } from "./sheetHoles";
 import type { FlatShape, PartDocument } from "./partDocument";
-import type { Bend, Face, PartModel } from "./partModel";
+import type { Bend, Face, PartModel, PartShape } from "./partModel";
 import { resolveBend, type ResolvedBend } from "./resolveBend";
 
 /** Zones may lap by rounding (mm); strips are cut this much longer than the sheet, so that no sliver stays. */
@@ -34,7 +37,7 @@ interface FlatBend {
  */
 export function buildFlat(
   flat: FlatShape, document: PartDocument, units: LengthUnit, material: MaterialFacts, context: BendContext,
-): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
+): Result<PartShape, readonly FieldProblem[]> {
   const { points } = outlineAsChords(flat.outline);
   const problems: FieldProblem[] = [];
   const bends: FlatBend[] = [];
@@ -54,9 +57,14 @@ export function buildFlat(
   const pieces = cutUp(points, bends);
   const joined = joinPieces(pieces, bends);
   if (!joined.ok) return joined;
-  const holes = faceHolesOfFlat(flat.holes, joined.value.faces.map((face) => face.outline));
+  const holes = sheetHoles(joined.value, () => points, (flat.holes ?? []).map((hole, i) => ({
+    path: `flat.holes[${i}]`, outline: holeAsChords(hole), contour: holeContour(hole, (p) => p, false), face: null,
+  })));
   if (holes.problems.length > 0) return fail(holes.problems);
-  return ok({ ...joined.value, faces: joined.value.faces.map((face, i) => ({ ...face, holes: holes.byFace[i] ?? [] })) });
+  return ok({
+    faces: holes.faces, bends: joined.value.bends, holesAcross: holes.across, circles: outlineCircles(flat.outline),
+    drawnFlat: { outline: { kind: "path", vertices: flat.outline.map(([x, y, bulge]) => [x, y, bulge ?? 0]) }, holes: [] },
+  });
 }
 
 function cutUp(points: readonly Vec2[], bends: readonly FlatBend[]): readonly (readonly Vec2[])[] {
@@ -79,7 +87,7 @@ function joinPieces(pieces: readonly (readonly Vec2[])[], bends: readonly FlatBe
   if (bad >= 0) return fail([{ path: bends[bad]?.path ?? "flat.bends", message: "the bend line does not part the sheet in two; it must run from edge to edge" }]);
   const largest = pieces.reduce((best, piece, i) => (signedArea(piece) > signedArea(pieces[best] ?? []) + EMPTY_AREA_MM2 ? i : best), 0);
   const index = new Map([[largest, 0]]);
-  const faces: Face[] = [{ id: "base", outline: pieces[largest] ?? [], holes: [], bend: null }];
+  const faces: Face[] = [{ id: "base", outline: pieces[largest] ?? [], holes: [], holeContours: [], bend: null }];
   const made: Bend[] = [];
   const waiting = bends.map((flatBend, i) => ({ ...flatBend, ...sides[i] }));
   while (waiting.length > 0) {
@@ -90,7 +98,7 @@ function joinPieces(pieces: readonly (readonly Vec2[])[], bends: readonly FlatBe
     const [parent, child] = leftIsParent ? [taken.left ?? 0, taken.right ?? 0] : [taken.right ?? 0, taken.left ?? 0];
     made.push(bendOf(taken, leftIsParent, index.get(parent) ?? 0, faces.length));
     index.set(child, faces.length);
-    faces.push({ id: taken.bend.id, outline: pieces[child] ?? [], holes: [], bend: made.length - 1 });
+    faces.push({ id: taken.bend.id, outline: pieces[child] ?? [], holes: [], holeContours: [], bend: made.length - 1 });
   }
   return ok({ faces, bends: made });
 }
@@ -105,6 +113,8 @@ function bendOf({ bend, strip }: FlatBend, leftIsParent: boolean, parent: number
     allowanceBasis: basis,
     parent,
     child,
+    region: null,
+    strokeWith: null,
     // Drawn the other way round when the parent would lie on its right.
     line: leftIsParent ? line : [line[1], line[0]],
     zone: leftIsParent ? [leftStart, rightStart, rightEnd, leftEnd] : [rightEnd, leftEnd, leftStart, rightStart],

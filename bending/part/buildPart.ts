@@ -7,9 +7,9 @@ import { buildFaces } from "./buildFaces";
 import { buildFlat } from "./buildFlat";
 import { checkPartDocument } from "./checkPartDocument";
 import { documentInUnits } from "./documentInUnits";
-import { flatsOverlap } from "./flatsOverlap";
+import { overlapProblems } from "./overlapProblems";
 import type { PartDocument } from "./partDocument";
-import type { PartModel } from "./partModel";
+import type { PartModel, PartShape } from "./partModel";
 import { partSource } from "./partSource";
 import { unknownMaterial } from "./unknownMaterial";
 
@@ -17,6 +17,8 @@ export interface BuildPartOptions extends BendContext {
   readonly materials: MaterialLookup;
   /** The ids that `materials` knows, to list them when one is not known. */
   readonly knownMaterials?: readonly string[];
+  /** Give the part even when its flat overlaps, so that `flatOverlaps` can show where. */
+  readonly keepOverlaps?: boolean;
 }
 
 /**
@@ -30,11 +32,11 @@ export function buildPart(document: PartDocument, options: BuildPartOptions): Re
   const built = buildShape(document, material, options);
   if (!built.ok) return built;
   const part: PartModel = { name: document.name, thickness: mm(documentInUnits(document, "mm").thickness), material, ...built.value };
-  const overlaps = flatsOverlap(part, document);
+  const overlaps = options.keepOverlaps ? [] : overlapProblems(part, document);
   return overlaps.length > 0 ? fail(overlaps) : ok(part);
 }
 
-function buildShape(document: PartDocument, material: MaterialFacts, context: BendContext): Result<Pick<PartModel, "faces" | "bends">, readonly FieldProblem[]> {
+function buildShape(document: PartDocument, material: MaterialFacts, context: BendContext): Result<PartShape, readonly FieldProblem[]> {
   const inMm = documentInUnits(document, "mm");
   if (inMm.flat) return buildFlat(inMm.flat, inMm, document.units, material, context);
   const source = partSource(inMm);

@@ -12,7 +12,10 @@ interface BendEntry {
 export function checkBendEntry(bend: BendEntry, path: string): readonly FieldProblem[] {
   const problems: FieldProblem[] = [];
   const say = (field: string, message: string) => problems.push({ path: `${path}.${field}`, message });
-  if (bend.hem && bend.angle !== 180) say("angle", `is ${bend.angle}, but a hem is turned through 180 degrees`);
+  const most = bend.hem === "teardrop" ? 270 : 180;
+  if (!bend.hem && bend.angle > most) say("angle", "must be over 0 and at most 180 degrees turned through");
+  else if (bend.hem === "teardrop" && (bend.angle < 180 || bend.angle > most)) say("angle", `is ${bend.angle}, but a teardrop hem is turned through 180 degrees and on until it closes, 270 at most; give 180 to have it closed`);
+  else if (bend.hem && bend.hem !== "teardrop" && bend.angle !== 180) say("angle", `is ${bend.angle}, but a hem is turned through 180 degrees`);
   if (bend.hem === "closed" && (bend.gap ?? 0) > 0) say("gap", 'must be left out: a closed hem has no gap; use "hem": "open"');
   if (bend.hem === "closed" && (bend.insideRadius ?? 0) > 0) say("insideRadius", "must be left out: a closed hem has no inside radius");
   if (bend.hem && bend.hem !== "closed") {

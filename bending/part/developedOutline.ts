@@ -7,7 +7,7 @@ import type { Bend, PartModel } from "./partModel";
  * The outer outline of the unfolded sheet, counter-clockwise: each child's outline spliced into its parent's
  * edge by way of the bend zone. Exact, as nothing is intersected: faces and zones meet along whole edges.
  */
-export function developedOutline(part: PartModel): readonly FlatPoint[] {
+export function developedOutline(part: Pick<PartModel, "faces" | "bends">): readonly FlatPoint[] {
   const carried = part.faces.map((): Bend[] => []);
   for (const bend of part.bends) carried[bend.parent]?.push(bend);
 

@@ -1,5 +1,5 @@
 import { mmPer, type LengthUnit } from "../core/units";
-import type { BaseShape, DocumentHole, DocumentVertex, FlangeEntry, FlatShape, PartDocument, ProfileShape } from "./partDocument";
+import type { BaseShape, CornerEntry, DocumentHole, DocumentVertex, FlangeEntry, FlatShape, PartDocument, ProfileShape, ReliefEntry } from "./partDocument";
 
 /** The same part with its lengths in the given unit; angles, bulges and names stay. */
 export function documentInUnits(document: PartDocument, units: LengthUnit): PartDocument {
@@ -11,7 +11,7 @@ export function documentInUnits(document: PartDocument, units: LengthUnit): Part
     : document.flat
       ? { flat: flatScaled(document.flat, length) }
       : { base: baseScaled(document.base, length), ...(document.flanges ? { flanges: document.flanges.map((f) => flangeScaled(f, length)) } : {}) };
-  return { ...scaled(document, ["thickness", "insideRadius", "toleranceLength"], length), ...shape, units } as PartDocument;
+  return { ...cutsScaled(scaled(document, ["thickness", "insideRadius", "toleranceLength"], length), length), ...shape, units } as PartDocument;
 }
 
 type Length = (value: number) => number;
@@ -24,6 +24,15 @@ function scaled<T extends object>(value: T, fields: readonly (keyof T)[], length
     if (typeof old === "number") copy[field] = length(old) as T[keyof T] & number;
   }
   return copy;
+}
+
+/** A copy with the sizes of its reliefs and corners scaled. */
+function cutsScaled<T extends { readonly relief?: ReliefEntry; readonly corner?: CornerEntry }>(value: T, length: Length): T {
+  return {
+    ...value,
+    ...(value.relief ? { relief: scaled(value.relief, ["width", "depth"], length) } : {}),
+    ...(value.corner?.kind === "mitre" ? { corner: { ...value.corner, gap: length(value.corner.gap) } } : {}),
+  };
 }
 
 const pointScaled = (p: readonly [number, number], length: Length): readonly [number, number] => [length(p[0]), length(p[1])];
@@ -55,15 +64,16 @@ const flatScaled = (flat: FlatShape, length: Length): FlatShape => ({
   ...holesScaled(flat, length),
   outline: flat.outline.map((v) => vertexScaled(v, length)),
   bends: flat.bends.map((bend) => ({
-    ...scaled(bend, ["insideRadius"], length),
+    ...scaled(bend, ["insideRadius", "gap"], length),
     line: [pointScaled(bend.line[0], length), pointScaled(bend.line[1], length)],
   })),
+  ...(flat.base ? { base: pointScaled(flat.base, length) } : {}),
 });
 
 function flangeScaled(flange: FlangeEntry, length: Length): FlangeEntry {
   return {
-    ...holesScaled(scaled(flange, ["length", "gap", "start", "end", "insideRadius", "toleranceLength"], length), length),
+    ...holesScaled(cutsScaled(scaled(flange, ["length", "gap", "start", "end", "insideRadius", "toleranceLength"], length), length), length),
     ...(flange.outline ? { outline: flange.outline.map((v) => vertexScaled(v, length)) } : {}),
-    ...(flange.relief ? { relief: scaled(flange.relief, ["width", "depth"], length) } : {}),
+    ...(flange.offset ? { offset: { height: length(flange.offset.height) } } : {}),
   };
 }

@@ -1,5 +1,6 @@
 import type { Vec2 } from "../geometry/vec2";
 import type { DimensionKind } from "./partDocument";
+import type { FlatCircle } from "./partModel";
 
 /**
  * A face as drawn, in local coordinates in which it is seen from the base's top: the base's own, or for a
@@ -12,6 +13,8 @@ export interface DrawnFace {
   readonly edges: readonly DrawnEdge[];
   /** How the face's lengths are measured to its bends. */
   readonly dimension: DimensionKind;
+  /** Of the arcs that the chords stand for, in local coordinates. */
+  readonly circles: readonly FlatCircle[];
 }
 
 export interface DrawnEdge {

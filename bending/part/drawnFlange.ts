@@ -1,6 +1,7 @@
 import type { Vec2 } from "../geometry/vec2";
 import type { DrawnFace } from "./drawnFace";
 import { outlineAsChords } from "./outlineAsChords";
+import { outlineCircles } from "./outlineCircles";
 import type { DimensionKind, DocumentVertex } from "./partDocument";
 
 export interface FlangeDrawing {
@@ -34,5 +35,6 @@ export function drawnFromOwnOutline(outline: readonly DocumentVertex[], dimensio
     points: [...local].reverse(),
     edges: firstPoint.map((_, k) => ({ from: corner(k + 1), to: corner(k) })),
     dimension,
+    circles: outlineCircles(outline).map(({ centre, radius }) => ({ centre: [centre[0], -centre[1]], radius })),
   };
 }

@@ -22,7 +22,7 @@ export function edgeCutsOf(face: DrawnFace, children: readonly FlangeWork[], thi
     const own = entry.outline ? ownRange(entry.outline, bend, thickness) : null;
     const start = (entry.start ?? 0) + (own ? own[0] : 0);
     const end = own ? length - (entry.start ?? 0) - own[1] : entry.end ?? 0;
-    const relief = entry.relief
+    const relief = entry.relief && entry.relief.kind !== "none"
       ? { kind: entry.relief.kind, width: entry.relief.width ?? thickness, depth: entry.relief.depth ?? depth + RELIEF_BEYOND_BEND_MM }
       : null;
     return [{ edge, depth, start, end, relief }];

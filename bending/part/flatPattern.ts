@@ -1,9 +1,11 @@
-import { SAME_POINT_MM } from "../core/tolerance";
 import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import { signedArea } from "../geometry/signedArea";
 import type { FlatPoint } from "../geometry/vec2";
 import { mm, type Mm, type Rad } from "../core/units";
-import { developedOutline } from "./developedOutline";
+import { contourArea } from "./contourArea";
+import { contourAsChords } from "./contourAsChords";
+import { flatContours } from "./flatContours";
+import { flatOutline } from "./flatOutline";
 import type { BendDirection } from "./partDocument";
 import type { PartModel } from "./partModel";
 
@@ -12,33 +14,34 @@ export interface FlatBendLine {
   readonly line: readonly [FlatPoint, FlatPoint];
   readonly angle: Rad;
   readonly direction: BendDirection;
+  readonly insideRadius: Mm;
 }
 
 /** The blank that the laser or punch cuts, in the frame of the unfolded sheet (millimetres). */
 export interface FlatPattern {
-  /** Counter-clockwise; a tear relief is a slit without width. */
+  /** Counter-clockwise, arcs as chords; a tear relief is a slit without width. `flatContours` has the arcs. */
   readonly outline: readonly FlatPoint[];
-  /** Clockwise. */
+  /** Clockwise, arcs as chords. */
   readonly holes: readonly (readonly FlatPoint[])[];
   readonly bendLines: readonly FlatBendLine[];
   readonly bounds: Bounds2;
   /** Size along x and along y. */
   readonly width: Mm;
   readonly depth: Mm;
-  /** mm², holes taken off. */
+  /** mm², holes taken off, arcs exact. */
   readonly area: number;
   readonly massKg: number;
 }
 
 export function flatPattern(part: PartModel): FlatPattern {
-  const outline = developedOutline(part);
-  const holes = part.faces.flatMap((face) => face.holes.map(clockwise));
+  const outline = flatOutline(part);
+  const contours = flatContours(part);
   const bounds = polygonBounds(outline);
-  const area = signedArea(outline) + holes.reduce((sum, hole) => sum + signedArea(hole), 0);
+  const area = contourArea(contours.outline) - contours.holes.reduce((sum, hole) => sum + Math.abs(contourArea(hole)), 0);
   return {
-    outline: withoutMidpoints(outline),
-    holes,
-    bendLines: part.bends.map(({ id, line, angle, direction }) => ({ id, line, angle, direction })),
+    outline,
+    holes: contours.holes.map((hole) => clockwise(contourAsChords(hole))),
+    bendLines: part.bends.map(({ id, line, angle, direction, insideRadius }) => ({ id, line, angle, direction, insideRadius })),
     bounds,
     width: mm(bounds.max[0] - bounds.min[0]),
     depth: mm(bounds.max[1] - bounds.min[1]),
@@ -48,16 +51,3 @@ export function flatPattern(part: PartModel): FlatPattern {
 }
 
 const clockwise = (hole: readonly FlatPoint[]): readonly FlatPoint[] => (signedArea(hole) > 0 ? [...hole].reverse() : hole);
-
-/** Leaves out points in the middle of straight runs; the tip of a slit, where the outline turns back, stays. */
-function withoutMidpoints(outline: readonly FlatPoint[]): readonly FlatPoint[] {
-  const kept: FlatPoint[] = [];
-  outline.forEach((q, i) => {
-    const p = kept[kept.length - 1] ?? outline[outline.length - 1] ?? q;
-    const r = outline[(i + 1) % outline.length] ?? q;
-    const [ux, uy, vx, vy] = [q[0] - p[0], q[1] - p[1], r[0] - q[0], r[1] - q[1]];
-    const straightOn = ux * vx + uy * vy > 0 && Math.abs(ux * vy - uy * vx) <= SAME_POINT_MM * Math.max(Math.hypot(ux, uy), Math.hypot(vx, vy));
-    if (!straightOn) kept.push(q);
-  });
-  return kept;
-}

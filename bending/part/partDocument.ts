@@ -24,7 +24,27 @@ export interface PartCommon {
   readonly toleranceLength?: number;
   /** Rolling direction in the unfolded sheet: along x, along y, or degrees from x, counter-clockwise. */
   readonly grain?: GrainDirection;
+  /** What is cut beside every bend that ends next to unbent sheet, unless its flange says otherwise; absent: nothing. */
+  readonly relief?: ReliefEntry;
+  /** How neighbouring flanges meet, unless one of them says otherwise; absent: open. */
+  readonly corner?: CornerEntry;
 }
+
+/**
+ * Sizes left out come from the handbook: one thickness wide, half a millimetre deeper than inside radius and
+ * thickness. `tear`: nothing is cut away, the sheet tears or is slit; `none`: the corner is left to itself.
+ */
+export interface ReliefEntry {
+  readonly kind: "rectangular" | "round" | "tear" | "none";
+  readonly width?: number;
+  readonly depth?: number;
+}
+
+/**
+ * `open`: each flange ends where the neighbour's bend begins. `mitre`: both are carried on or cut back until their
+ * nearest edges stand `gap` apart in the folded part.
+ */
+export type CornerEntry = { readonly kind: "open" } | { readonly kind: "mitre"; readonly gap: number };
 
 export type GrainDirection = "x" | "y" | number;
 
@@ -48,6 +68,7 @@ export interface ProfileBend {
   readonly hem?: HemKind;
   readonly gap?: number;
   readonly toleranceAngle?: number;
+  readonly strokeWith?: string;
 }
 
 /** [x, y] or [x, y, bulge of the edge that starts here]. */
@@ -80,7 +101,13 @@ export interface FlangeEntry {
   readonly endAngle?: number;
   readonly insideRadius?: number;
   readonly kFactor?: number;
-  readonly relief?: { readonly kind: "rectangular" | "round" | "tear"; readonly width?: number; readonly depth?: number };
+  readonly relief?: ReliefEntry;
+  /** At both ends of the flange, where a neighbour meets it. */
+  readonly corner?: CornerEntry;
+  /** Two opposite bends in one stroke: the flange runs on beside the parent, `height` above or below it. */
+  readonly offset?: { readonly height: number };
+  /** The bend that is formed in the same stroke: the parent's or a child's, turned the other way. */
+  readonly strokeWith?: string;
   readonly holes?: readonly DocumentHole[];
   readonly toleranceAngle?: number;
   readonly toleranceLength?: number;
@@ -89,12 +116,20 @@ export interface FlangeEntry {
 export interface FlatShape {
   readonly outline: readonly DocumentVertex[];
   readonly holes?: readonly DocumentHole[];
-  readonly bends: readonly {
-    readonly id: string;
-    readonly line: readonly [readonly [number, number], readonly [number, number]];
-    readonly angle: number;
-    readonly direction: BendDirection;
-    readonly insideRadius?: number;
-    readonly kFactor?: number;
-  }[];
+  readonly bends: readonly FlatBendEntry[];
+  /** A point of the face that stays where it is; absent: the largest face. */
+  readonly base?: readonly [number, number];
+}
+
+export interface FlatBendEntry {
+  readonly id: string;
+  readonly line: readonly [readonly [number, number], readonly [number, number]];
+  readonly angle: number;
+  readonly direction: BendDirection;
+  readonly hem?: HemKind;
+  readonly gap?: number;
+  readonly insideRadius?: number;
+  readonly kFactor?: number;
+  readonly toleranceAngle?: number;
+  readonly strokeWith?: string;
 }

@@ -2,9 +2,9 @@
 export const PART_LIMITS = {
   length: 100_000,
   thickness: 100,
-  bends: 200,
-  vertices: 2_000,
-  holes: 1_000,
+  bends: 500,
+  vertices: 10_000,
+  holes: 2_000,
   name: 200,
   id: 64,
 } as const;

@@ -21,6 +21,53 @@ export interface PartModel {
   readonly material: MaterialFacts;
   readonly faces: readonly Face[];
   readonly bends: readonly Bend[];
+  /** Holes that reach into bends; they belong to no face's `holes`. */
+  readonly holesAcross: readonly HoleAcross[];
+  /** Circles whose arcs run along the outlines, to give arcs back for chords. */
+  readonly circles: readonly FlatCircle[];
+  /** The contours as they were drawn, when the part was drawn as a flat. */
+  readonly drawnFlat: DrawnFlat | null;
+}
+
+/** What is read out of a document's shape. */
+export type PartShape = Omit<PartModel, "name" | "thickness" | "material">;
+
+/** A hole over one or more bend zones: its shape holds in the flat, the folded one follows by bending it. */
+export interface HoleAcross {
+  /** Where it stands in the document, e.g. `base.holes[0]`. */
+  readonly path: string;
+  /** In the unfolded sheet, counter-clockwise, arcs as chords. */
+  readonly outline: readonly FlatPoint[];
+  readonly contour: FlatContour;
+  /** Indices of the bends whose zones it reaches into. */
+  readonly bends: readonly number[];
+  /** Indices of the faces whose plane part it reaches into. */
+  readonly faces: readonly number[];
+}
+
+export interface FlatCircle {
+  readonly centre: FlatPoint;
+  readonly radius: number;
+}
+
+export interface DrawnFlat {
+  readonly outline: FlatContour;
+  /** Holes that part faces from one another (a tab cut free within the sheet). */
+  readonly holes: readonly FlatContour[];
+}
+
+/** [x, y, bulge of the edge that starts here]; a bulge of 0 is a straight edge. */
+export type BulgeVertex = readonly [number, number, number];
+
+/** A closed contour of the flat, exact: arcs are arcs. */
+export type FlatContour =
+  | { readonly kind: "circle"; readonly centre: FlatPoint; readonly radius: number }
+  | { readonly kind: "path"; readonly vertices: readonly BulgeVertex[] };
+
+/** A piece of sheet with holes in it; arcs as chords, outline counter-clockwise. */
+export interface FlatRegion {
+  readonly outline: readonly FlatPoint[];
+  readonly holes: readonly (readonly FlatPoint[])[];
 }
 
 export interface Face {
@@ -29,6 +76,8 @@ export interface Face {
   readonly outline: readonly FlatPoint[];
   /** Clockwise or counter-clockwise, arcs as chords. */
   readonly holes: readonly (readonly FlatPoint[])[];
+  /** The holes once more, exact, in the same order. */
+  readonly holeContours: readonly FlatContour[];
   /** Index of the bend that carries this face; null for the base. */
   readonly bend: number | null;
 }
@@ -41,7 +90,7 @@ export interface Bend {
   readonly id: BendId;
   readonly parent: number;
   readonly child: number;
-  /** Angle turned through when finished, 0 < angle <= pi. */
+  /** Angle turned through when finished, 0 < angle <= pi; the loop of a teardrop hem turns up to 3/2 pi. */
   readonly angle: Rad;
   /** `up`: the child turns towards the side that is the base's top. */
   readonly direction: BendDirection;
@@ -67,6 +116,10 @@ export interface Bend {
    * child (start, end): [parentStart, childStart, childEnd, parentEnd] with start and end as along `line`.
    */
   readonly zone: readonly [FlatPoint, FlatPoint, FlatPoint, FlatPoint];
+  /** The sheet within the zone where it is not simply the whole zone (notches and windows taken off); else null. */
+  readonly region: readonly FlatRegion[] | null;
+  /** Index of the bend that is formed in the same stroke, turned the other way (an offset); else null. */
+  readonly strokeWith: number | null;
   /** Angular tolerance in radians, null when the general tolerance holds. */
   readonly toleranceAngle: Rad | null;
 }

@@ -7,7 +7,8 @@ const notNegative = z.number().min(0);
 const point = z.tuple([number, number]);
 const vertex = z.union([point, z.tuple([number, number, number])], "must be [x, y] or [x, y, bulge]");
 const outline = z.array(vertex).min(3, "needs at least 3 vertices").max(PART_LIMITS.vertices);
-const angle = z.number().gt(0, "must be over 0 (0 = flat, no bend) and at most 180 degrees turned through").max(180, "must be over 0 and at most 180 degrees turned through");
+// Over 180 degrees is for teardrop hems alone, which the check of the bend says.
+const angle = z.number().gt(0, "must be over 0 (0 = flat, no bend) and at most 180 degrees turned through").max(270, "must be over 0 and at most 180 degrees turned through");
 const direction = z.enum(["up", "down"]);
 const dimension = z.enum(["outside", "inside", "tangent"]);
 const hem = z.enum(["closed", "open", "teardrop"]);
@@ -17,6 +18,13 @@ const taper = z.number().gt(0, "must be over 0 and under 180 degrees (90 = squar
 // Ids are joined with "+" and "," where an order is written down.
 const id = z.string().min(1, "must not be empty").max(PART_LIMITS.id)
   .refine((text) => text.trim() === text && !/[+,\p{Cc}]/u.test(text), "must not hold '+', ',' or control characters, nor start or end with a space");
+
+const relief = z.strictObject({ kind: z.enum(["rectangular", "round", "tear", "none"]), width: positive.optional(), depth: positive.optional() });
+const corner = z.strictObject({ kind: z.enum(["open", "mitre"]), gap: notNegative.optional() }).superRefine((value, context) => {
+  const say = (message: string) => context.addIssue({ code: "custom", path: ["gap"], message });
+  if (value.kind === "mitre" && value.gap === undefined) say("is missing: a mitre needs the gap that stays between the flanges");
+  if (value.kind === "open" && value.gap !== undefined) say("belongs to a mitre only");
+});
 
 const hole = z.strictObject({
   circle: point.optional(),
@@ -50,6 +58,7 @@ const profile = z.strictObject({
     hem: hem.optional(),
     gap: notNegative.optional(),
     toleranceAngle: toleranceAngle.optional(),
+    strokeWith: id.optional(),
   })).max(PART_LIMITS.bends),
 });
 
@@ -67,7 +76,10 @@ const flange = z.strictObject({
   end: notNegative.optional(),
   startAngle: taper.optional(),
   endAngle: taper.optional(),
-  relief: z.strictObject({ kind: z.enum(["rectangular", "round", "tear"]), width: positive.optional(), depth: positive.optional() }).optional(),
+  relief: relief.optional(),
+  corner: corner.optional(),
+  offset: z.strictObject({ height: positive }).optional(),
+  strokeWith: id.optional(),
   holes: holes.optional(),
   toleranceAngle: toleranceAngle.optional(),
   toleranceLength: positive.optional(),
@@ -76,7 +88,16 @@ const flange = z.strictObject({
 const flat = z.strictObject({
   outline,
   holes: holes.optional(),
-  bends: z.array(z.strictObject({ id, line: z.tuple([point, point]), ...bendOptions })).max(PART_LIMITS.bends),
+  bends: z.array(z.strictObject({
+    id,
+    line: z.tuple([point, point]),
+    ...bendOptions,
+    hem: hem.optional(),
+    gap: notNegative.optional(),
+    toleranceAngle: toleranceAngle.optional(),
+    strokeWith: id.optional(),
+  })).max(PART_LIMITS.bends),
+  base: point.optional(),
 });
 
 /** The shape of a part document; unknown keys are refused. Lengths are checked against limits elsewhere. */
@@ -93,6 +114,8 @@ export const partSchema = z.strictObject({
   toleranceAngle: toleranceAngle.optional(),
   toleranceLength: positive.optional(),
   grain: z.union([z.enum(["x", "y"]), z.number().min(-180).max(180)], 'must be "x", "y", or degrees from x, from -180 to 180').optional(),
+  relief: relief.optional(),
+  corner: corner.optional(),
   profile: profile.optional(),
   base: z.strictObject({ outline, holes: holes.optional() }).optional(),
   flanges: z.array(flange).max(PART_LIMITS.bends).optional(),

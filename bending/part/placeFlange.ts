@@ -83,6 +83,8 @@ function bendBetween({ source, basis, ...bend }: FlangeWork["bend"], parent: num
     child,
     line: [at(from, bend.allowance / 2), at(to, bend.allowance / 2)],
     zone: [at(from, 0), at(from, bend.allowance), at(to, bend.allowance), at(to, 0)],
+    region: null,
+    strokeWith: null,
   };
 }
 
