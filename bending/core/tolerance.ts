@@ -16,3 +16,18 @@ export const CLEARANCE_MARGIN_MM = 1;
 
 /** Area under which a polygon counts as empty, mm². */
 export const EMPTY_AREA_MM2 = 1e-6;
+
+/** mm. Points, lines and distances of a solid read from a file that differ by less are the same: modellers keep 1e-3 mm or better, and a brake holds 0.05 mm at best. */
+export const SOLID_MATCH_MM = 2e-3;
+
+/** Radians. Directions of a solid read from a file that differ by less are parallel: at 1 m they are 0.2 mm apart. */
+export const SOLID_PARALLEL_RAD = 2e-4;
+
+/** mm. Points of a drawing file nearer than this are one point and no gap: many programs write three decimals. */
+export const DRAWN_POINT_MM = 0.002;
+
+/** mm. Gaps in a drawn contour up to this are closed unless another tolerance is asked for: common practice, no source; far under what a laser's cut is wide. */
+export const DRAWN_GAP_MM = 0.1;
+
+/** mm. Farthest that the arcs put in place of a drawn ellipse or spline stand off it. */
+export const CURVE_FIT_MM = 0.01;

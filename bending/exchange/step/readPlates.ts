@@ -1,0 +1,52 @@
+import type { FlatLoop } from "./flattenLoop";
+import type { GrownBend, GrownPlate } from "./growTree";
+import { outlineArea } from "./outlineArea";
+import { plateHoles } from "./plateHoles";
+import { plateShape } from "./plateShape";
+import { pulledIn } from "./pulledIn";
+import { readHole } from "./readHole";
+import type { OutlineVertex, RecognisedBend, RecognisedPlate } from "./recognisedPart";
+import type { Solid } from "./solid";
+
+export interface ReadPlate {
+  readonly plate: RecognisedPlate;
+  /** For each edge of the outline the solid's edge. */
+  readonly edges: readonly number[];
+  readonly widenedHoles: number;
+  /** Its sides differ in size by this part: its rims are not square. */
+  readonly uneven: number;
+  /** Curves that became chords are in it. */
+  readonly chords: boolean;
+}
+
+/** A plate's outline and holes in its own coordinates, seen from the base's top. */
+export function readPlate(solid: Solid, { top, bottom, frame }: GrownPlate, bends: readonly GrownBend[]): ReadPlate | null {
+  const [shape, below] = [plateShape(solid, top, frame), plateShape(solid, bottom, frame)];
+  if (!shape) return null;
+  const outline = withoutOverrun(shape.outline, bends);
+  const holes = plateHoles(shape.holes, below?.holes ?? []);
+  const area = outlineArea(shape.outline.vertices);
+  return {
+    plate: { faces: [top, bottom], frame, outline, holes: holes.outlines.map(readHole) },
+    edges: shape.outline.edges,
+    widenedHoles: holes.widened,
+    uneven: bends.some(({ joint }) => joint.overrun > 0) ? 0 : Math.abs(outlineArea(below?.outline.vertices ?? []) - area) / area,
+    chords: shape.outline.chords || shape.holes.some(({ chords }) => chords),
+  };
+}
+
+/** At a sharp outside corner the face is drawn on to the corner; the plate ends where a round bend would begin. */
+function withoutOverrun({ vertices, edges }: FlatLoop, bends: readonly GrownBend[]): readonly OutlineVertex[] {
+  return bends.filter(({ overrun }) => overrun > 0).reduce((outline, { parentEdge, childEdge, overrun }) => {
+    const at = edges.findIndex((edge) => edge === parentEdge || edge === childEdge);
+    return at < 0 ? outline : pulledIn(outline, at, overrun);
+  }, vertices);
+}
+
+export function readBend(bend: GrownBend, parentEdges: readonly number[], childEdges: readonly number[]): RecognisedBend {
+  const { parent, child, direction, joint, start, length } = bend;
+  return {
+    parent, child, direction, angle: joint.angle, insideRadius: joint.insideRadius, start, length, faces: joint.faces,
+    parentEdge: parentEdges.indexOf(bend.parentEdge), childEdge: childEdges.indexOf(bend.childEdge),
+  };
+}

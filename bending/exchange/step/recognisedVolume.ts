@@ -1,0 +1,18 @@
+import type { DocumentHole } from "../../part/partDocument";
+import { outlineArea } from "./outlineArea";
+import type { RecognisedBend, RecognisedPlate } from "./recognisedPart";
+
+/** mm³ of plates and bends: plate area times thickness; a bend is a sector of a ring, angle x ((r + t)² - r²) / 2 times its length. */
+export function recognisedVolume(plates: readonly RecognisedPlate[], bends: readonly RecognisedBend[], thickness: number): number {
+  const flat = plates.reduce((sum, { outline, holes }) => sum + outlineArea(outline) - holes.reduce((holed, hole) => holed + holeArea(hole), 0), 0);
+  return bends.reduce((sum, { angle, insideRadius, length }) => sum + (angle * length * ((insideRadius + thickness) ** 2 - insideRadius ** 2)) / 2, flat * thickness);
+}
+
+function holeArea(hole: DocumentHole): number {
+  if ("circle" in hole) return (Math.PI * hole.diameter ** 2) / 4;
+  if ("slot" in hole) {
+    const [[ax, ay], [bx, by]] = hole.slot;
+    return (Math.PI * hole.width ** 2) / 4 + Math.hypot(bx - ax, by - ay) * hole.width;
+  }
+  return Math.abs(outlineArea(hole.polygon.map(([x, y, bulge]) => [x, y, bulge ?? 0])));
+}

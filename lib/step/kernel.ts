@@ -1,0 +1,4 @@
+import type { OpenCascadeInstance } from "replicad-opencascadejs";
+
+/** The geometry kernel, loaded. */
+export type Kernel = OpenCascadeInstance;
