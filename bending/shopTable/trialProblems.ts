@@ -16,7 +16,9 @@ const MOST_OFF_NOMINAL = 0.2;
 /** What cannot be true of a trial, field by field, and what would be right, in the trial's own units. */
 export function trialProblems(trial: BendTrial, material: MaterialFacts): readonly FieldProblem[] {
   const single = [...lengthProblems(trial), ...angleProblems(trial), ...instrumentProblems(trial), ...dateProblems(trial)];
-  return single.length > 0 ? single : [...togetherProblems(trial), ...bendProblems(trial, material)];
+  if (single.length > 0) return single;
+  const together = togetherProblems(trial);
+  return together.length > 0 ? together : bendProblems(trial, material);
 }
 
 function lengthProblems(trial: BendTrial): readonly FieldProblem[] {
