@@ -1,0 +1,42 @@
+import type { Vec2 } from "../geometry/vec2";
+import { holesMeet, holeWithin } from "../part/holeWithin";
+import { mmPer } from "../core/units";
+import type { FindingsContext } from "./context";
+import type { DrawnHole } from "./drawnHoles";
+import type { Cure } from "./finding";
+import { holeNeeds } from "./holeNeeds";
+import { lengthCure } from "./lengthCure";
+import { zoneGap } from "./zoneGap";
+
+/** Under this much of the way an axis does not lead away from the bend. */
+const LEAST_PART = 0.3;
+
+/**
+ * A round hole moved along one of its coordinates so that it comes `by` (mm) farther `away` (unit vector in the sheet), unless it would
+ * leave its face, meet another hole or come too near another bend.
+ */
+export function movedHole(context: FindingsContext, holes: readonly DrawnHole[], hole: DrawnHole, away: Vec2, by: number): Cure | null {
+  const entry = hole.entry;
+  const face = context.part.faces[hole.face];
+  if (!entry || !face || !("circle" in entry.hole)) return null;
+  const parts = entry.axes.map((axis) => axis[0] * away[0] + axis[1] * away[1]);
+  const axis = Math.abs(parts[0] ?? 0) >= Math.abs(parts[1] ?? 0) ? 0 : 1;
+  const part = parts[axis] ?? 0;
+  if (Math.abs(part) < LEAST_PART) return null;
+  const now = entry.hole.circle[axis];
+  const cure = lengthCure(`${entry.path}.circle[${axis}]`, now + by / part, part > 0 ? "up" : "down", context.units);
+  const shift = typeof cure.value === "number" ? cure.value * mmPer(context.units) - now : 0;
+  const [dx, dy] = [shift * entry.axes[axis][0], shift * entry.axes[axis][1]];
+  const outline = hole.outline.map(([x, y]): Vec2 => [x + dx, y + dy]);
+  const others = holes.filter((other) => other !== hole && other.face === hole.face);
+  const clear = holeWithin(outline, face.outline) && !others.some((other) => holesMeet(other.outline, outline))
+    && (context.bendsOn[hole.face] ?? []).every((index) => {
+      const bend = context.part.bends[index];
+      if (!bend) return true;
+      const { gap, into } = zoneGap(outline, bend);
+      const before = zoneGap(hole.outline, bend);
+      const needs = holeNeeds(context, hole, bend);
+      return into === 0 && (gap >= Math.max(needs.guide, bend.hem === null ? needs.opening : 0) - 1e-6 || gap >= before.gap);
+    });
+  return clear ? cure : null;
+}
