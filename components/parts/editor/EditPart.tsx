@@ -15,6 +15,7 @@ import { PartEditor } from "./PartEditor";
 import { problemsOfSave } from "./problemsOfSave";
 import { SaveProblem } from "./SaveProblem";
 import { useStoredDraft } from "./useStoredDraft";
+import { WaitingToSave } from "./WaitingToSave";
 
 export function EditPart({ id }: { readonly id: string }) {
   const materials = useMaterials();
@@ -41,7 +42,7 @@ function EditPartForm({ part, materials, newest }: EditPartFormProps) {
   return (
     <PartEditor title={`${part.number} ${store.draft.name}`} materials={materials} store={store} isNew={false} saving={add.isPending || add.isSuccess}
       refused={problemsOfSave(add.error)} onChange={() => { if (add.isError && !stale) add.reset(); }}
-      message={add.error === null ? null : (
+      message={add.isPaused ? <WaitingToSave /> : add.error === null ? null : (
         <SaveProblem error={add.error}>
           {stale ? (
             <>

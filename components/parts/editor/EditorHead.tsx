@@ -1,8 +1,9 @@
 "use client";
-import { FileDown, FileUp, RotateCcw, Save, Undo2 } from "lucide-react";
+import { FileDown, FileUp, Redo2, RotateCcw, Save, Undo2 } from "lucide-react";
 import { useState } from "react";
 import type { PartDocument } from "@/bending/part/partDocument";
 import { Button } from "@/components/ui/Button";
+import { IconButton } from "@/components/ui/IconButton";
 import { PageHeader } from "@/components/ui/PageHeader";
 import { ImportDialog } from "./ImportDialog";
 import { saveAsFile } from "./saveAsFile";
@@ -16,16 +17,19 @@ interface EditorHeadProps {
   readonly onImport: (document: PartDocument) => void;
   /** Takes the last change back; null when there is none. */
   readonly onUndo: (() => void) | null;
+  /** Brings back what was taken back last; null when there is none. */
+  readonly onRedo: (() => void) | null;
   readonly onStartAgain: () => void;
 }
 
-export function EditorHead({ title, isNew, saving, changed, document, onImport, onUndo, onStartAgain }: EditorHeadProps) {
+export function EditorHead({ title, isNew, saving, changed, document, onImport, onUndo, onRedo, onStartAgain }: EditorHeadProps) {
   const [importing, setImporting] = useState(false);
   return (
     <>
       <PageHeader kicker={isNew ? "New part" : "New revision"} title={title} actions={(
         <>
-          {onUndo === null ? null : <Button look="quiet" size="small" icon={<Undo2 aria-hidden />} onClick={onUndo}>Undo</Button>}
+          <IconButton label="Undo (Ctrl+Z)" disabled={onUndo === null} onClick={() => onUndo?.()}><Undo2 aria-hidden /></IconButton>
+          <IconButton label="Redo (Ctrl+Y)" disabled={onRedo === null} onClick={() => onRedo?.()}><Redo2 aria-hidden /></IconButton>
           {changed ? <Button look="quiet" size="small" icon={<RotateCcw aria-hidden />} onClick={onStartAgain}>Throw away my changes</Button> : null}
           <Button look="plain" icon={<FileUp aria-hidden />} onClick={() => setImporting(true)}>Import</Button>
           <Button look="plain" icon={<FileDown aria-hidden />} disabled={document === null}

@@ -1,5 +1,5 @@
 "use client";
-import { useState, type FormEvent } from "react";
+import { useRef, useState, type FormEvent } from "react";
 import { unitName } from "@/lib/format/unitName";
 import type { FieldProblem } from "@/bending/core/problem";
 import type { MaterialFacts } from "@/bending/handbook/material";
@@ -27,6 +27,7 @@ import { problemFinder } from "./problemFinder";
 import { ProblemList } from "./ProblemList";
 import { ProfileFields } from "./ProfileFields";
 import { QuickStarts } from "./QuickStarts";
+import { useEditorKeys } from "./useEditorKeys";
 import { usePreview } from "./usePreview";
 import type { useStoredDraft } from "./useStoredDraft";
 
@@ -59,12 +60,16 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
     const first = now.problems[0];
     if (first !== undefined) document.getElementById(fieldId(first.path))?.focus();
   };
+  const stepping = (step: (() => void) | null) => (step === null ? null : () => { onChange(); step(); });
+  const steps = { undo: stepping(store.undo), redo: stepping(store.redo) };
+  const form = useRef<HTMLFormElement>(null);
+  useEditorKeys({ ...steps, save: () => { if (!saving) form.current?.requestSubmit(); } });
   const { shown } = preview;
   const stale = preview.model === null;
   return (
     <EditorContext value={editor}>
-      <form noValidate onSubmit={save}>
-        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onUndo={store.undo === null ? null : () => { onChange(); store.undo?.(); }} onStartAgain={store.startAgain}
+      <form ref={form} noValidate onSubmit={save}>
+        <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onUndo={steps.undo} onRedo={steps.redo} onStartAgain={store.startAgain}
           onImport={(document) => update((old) => ({ ...draftFromDocument(document, old.number), note: old.note }))} />
         <div className="mb-6 space-y-3 empty:hidden">
           {store.restoredAt === null ? null : <Notice tone="note" title="Your unsaved entries were brought back">They were last changed {formatMoment(store.restoredAt)} and are not saved yet.</Notice>}

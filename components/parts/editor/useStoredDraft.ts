@@ -1,15 +1,9 @@
 "use client";
-import { useEffect, useState } from "react";
+import { useEffect, useEffectEvent, useState } from "react";
 import type { PartDraft } from "../draft/partDraft";
+import { beginHistory, changeHistory, redoHistory, undoHistory } from "./draftHistory";
 
 interface Stored { readonly savedAt: string; readonly basedOn: number; readonly draft: PartDraft }
-
-/** What is typed now, what it was before each change, and when the last change came. */
-interface History { readonly draft: PartDraft; readonly past: readonly PartDraft[]; readonly at: number }
-
-/** Changes that follow one another faster are taken back together: a number that is typed is one change. */
-const TOGETHER_MS = 800;
-const KEPT_MOST = 50;
 
 /** Grows when the shape of a draft changes, so that an old one is not read as a new one. */
 const version = 1;
@@ -31,33 +25,39 @@ function read(key: string): Stored | null {
 export function useStoredDraft(name: string, basedOn: number, start: () => PartDraft) {
   const key = `foldwright.part-draft.${version}.${name}`;
   const [begun] = useState(() => ({ stored: read(key), start: start() }));
-  const [{ draft, past }, setHistory] = useState<History>({ draft: begun.stored?.draft ?? begun.start, past: [], at: 0 });
+  const [history, setHistory] = useState(() => beginHistory(begun.stored?.draft ?? begun.start));
+  const { draft, past, future } = history;
   const [restoredAt, setRestoredAt] = useState(begun.stored?.savedAt ?? null);
   const [base, setBase] = useState(begun.stored?.basedOn ?? basedOn);
   const changed = draft !== begun.start;
+  const store = useEffectEvent(() => {
+    if (!changed) return;
+    try {
+      window.localStorage.setItem(key, JSON.stringify({ savedAt: new Date().toISOString(), basedOn: base, draft } satisfies Stored));
+    } catch {
+      // A full or forbidden store only means that a reload starts afresh.
+    }
+  });
   useEffect(() => {
-    if (!changed) return undefined;
-    const timer = setTimeout(() => {
-      try {
-        window.localStorage.setItem(key, JSON.stringify({ savedAt: new Date().toISOString(), basedOn: base, draft } satisfies Stored));
-      } catch {
-        // A full or forbidden store only means that a reload starts afresh.
-      }
-    }, 300);
+    const timer = setTimeout(() => store(), 300);
     return () => clearTimeout(timer);
-  }, [key, draft, base, changed]);
+  }, [draft, base]);
+  useEffect(() => {
+    const leave = () => store();
+    window.addEventListener("pagehide", leave);
+    return () => window.removeEventListener("pagehide", leave);
+  }, []);
   const forget = () => window.localStorage.removeItem(key);
   const change = (next: (old: PartDraft) => PartDraft, together: boolean) => {
-    const at = Date.now();
-    setHistory((old) => ({ draft: next(old.draft), past: together && at - old.at < TOGETHER_MS ? old.past : [...old.past.slice(1 - KEPT_MOST), old.draft], at }));
+    const now = Date.now();
+    setHistory((old) => changeHistory(old, next(old.draft), now, together));
   };
   const setDraft = (next: (old: PartDraft) => PartDraft) => change(next, true);
   const undo = () => {
-    const back = past.at(-1);
-    if (back === undefined) return;
-    if (back === begun.start) forget();
-    setHistory({ draft: back, past: past.slice(0, -1), at: 0 });
+    if (past.at(-1) === begun.start) forget();
+    setHistory(undoHistory);
   };
+  const redo = () => setHistory(redoHistory);
   const startAgain = () => { forget(); change(() => begun.start, false); setBase(basedOn); setRestoredAt(null); };
-  return { draft, setDraft, undo: past.length === 0 ? null : undo, basedOn: base, setBasedOn: setBase, restoredAt, changed, forget, startAgain };
+  return { draft, setDraft, undo: past.length === 0 ? null : undo, redo: future.length === 0 ? null : redo, basedOn: base, setBasedOn: setBase, restoredAt, changed, forget, startAgain };
 }

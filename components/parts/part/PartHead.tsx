@@ -1,5 +1,5 @@
 "use client";
-import { FileDown, PencilRuler, Route, Trash2 } from "lucide-react";
+import { Copy, FileDown, PencilRuler, Route, Trash2 } from "lucide-react";
 import Link from "next/link";
 import { useState } from "react";
 import { mmPer } from "@/bending/core/units";
@@ -41,6 +41,7 @@ export function PartHead({ part, newest, mayWrite, mayPlan }: PartHeadProps) {
         <>
           {mayWrite ? <IconButton label="Delete this part" danger onClick={() => setDeleting(true)}><Trash2 aria-hidden /></IconButton> : null}
           <Button look="plain" icon={<FileDown aria-hidden />} onClick={download}>Download JSON</Button>
+          {mayWrite ? <Link href={`/parts/new?copy=${part.id}&revision=${part.revision.revision}`} className={buttonClasses("plain")}><Copy aria-hidden />Copy</Link> : null}
           {mayWrite && current ? <Link href={`/parts/${part.id}/edit`} className={buttonClasses("plain")}><PencilRuler aria-hidden />Edit</Link> : null}
           {mayPlan ? <Button icon={<Route aria-hidden />} onClick={() => setPlanning(true)}>Plan the bends</Button> : null}
         </>
