@@ -37,7 +37,9 @@ export function placeFlange(question: PlaceFlangeQuestion): Result<{ readonly fa
   const axes = edgeAxes(edge);
   const parentDepth = setback(parent.drawn.dimension, bend.angle, bend.insideRadius, thickness);
   const inset = entry.start ?? 0;
-  const wanted: Interval = entry.outline ? [-Infinity, Infinity] : [inset, axes.length - (entry.end ?? 0)];
+  // Where the bend takes nothing of the parent, the edge is the edge as drawn, and another one in line with it is not meant.
+  const ownOutline: Interval = parentDepth === 0 ? [0, axes.length] : [-Infinity, Infinity];
+  const wanted: Interval = entry.outline ? ownOutline : [inset, axes.length - (entry.end ?? 0)];
   if (wanted[1] - wanted[0] <= 0) {
     return fail({ path: `${path}.${entry.start ? "start" : "end"}`, message: `the insets leave nothing of edge ${entry.edge} of "${entry.on}", which is ${formatLength(axes.length, units)} long` });
   }

@@ -1,0 +1,55 @@
+import { SAME_POINT_MM } from "../../core/tolerance";
+import type { DocumentVertex } from "../../part/partDocument";
+import type { OutlineVertex, RecognisedBend, RecognisedPlate } from "./recognisedPart";
+import { tidy } from "./tidy";
+
+/** Where the edges of a plate's outline are in its document. */
+export interface DrawnPlate {
+  readonly edges: readonly {
+    /** Of the plate's outline. */
+    readonly edge: number;
+    /** In the document. */
+    readonly number: number;
+    /** How much earlier it begins there, running counter-clockwise. */
+    readonly extended: number;
+  }[];
+}
+
+/**
+ * A plate as a flange's own outline: first axis along the bend, second away from it, edge 0 on the bend's outside line, which lies
+ * one setback before the plate. Seen that way the plate is turned over, so its edges come in the opposite order.
+ */
+export function drawFlange({ outline }: RecognisedPlate, { childEdge, length }: RecognisedBend, setback: number): { readonly outline: readonly DocumentVertex[]; readonly plate: DrawnPlate } {
+  const n = outline.length;
+  const at = (i: number): OutlineVertex => outline[((i % n) + n) % n] ?? [0, 0, 0];
+  const edges: { edge: number; number: number; extended: number }[] = [];
+  const vertices: DocumentVertex[] = [[0, 0]];
+  const width = tidy(length);
+  const endsSquare = straightOn(at(childEdge), at(childEdge - 1), length, at(childEdge - 1)[2]);
+  const startsSquare = straightOn(at(childEdge + 1), at(childEdge + 2), 0, at(childEdge + 1)[2]);
+  // From the bend's end round the plate to its start; on a square side the corner on the tangent line is left out.
+  vertices.push([width, 0]);
+  if (!endsSquare) vertices.push(placed(at(childEdge), setback, at(childEdge - 1)[2]));
+  for (let i = childEdge - 1; i > childEdge - n; i -= 1) {
+    const last = i === childEdge - n + 1;
+    edges.push({ edge: ((i % n) + n) % n, number: vertices.length - 1, extended: last && startsSquare ? setback : 0 });
+    if (last && startsSquare) break;
+    vertices.push(placed(at(i), setback, last ? 0 : at(i - 1)[2]));
+  }
+  return { outline: vertices, plate: { edges } };
+}
+
+/** Turned over, and with the edge that starts there when run the other way round: twice a change of sign, so the bulge stays. */
+function placed([x, y]: OutlineVertex, setback: number, bulge: number): DocumentVertex {
+  // A corner on the tangent line lies there exactly.
+  const away = Math.abs(y) <= ON_TANGENT_MM ? setback : tidy(setback - y);
+  return bulge === 0 ? [tidy(x), away] : [tidy(x), away, bulge];
+}
+
+/** A corner nearer to the tangent line is on it (mm). */
+const ON_TANGENT_MM = 1e-4;
+
+/** Whether the plate's side runs on from the bend's end square to it. */
+function straightOn([x, y]: OutlineVertex, [nextX, nextY]: OutlineVertex, wanted: number, bulge: number): boolean {
+  return bulge === 0 && Math.abs(x - wanted) <= SAME_POINT_MM * 10 && Math.abs(nextX - wanted) <= SAME_POINT_MM * 10 && nextY < y;
+}

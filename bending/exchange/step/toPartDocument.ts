@@ -1,0 +1,48 @@
+import { outsideSetback } from "../../handbook/outsideSetback";
+import { deg, mm, toDeg, toRad, rad } from "../../core/units";
+import type { FlangeEntry, PartDocument } from "../../part/partDocument";
+import { drawFlange, type DrawnPlate } from "./drawFlange";
+import type { ImportChoices } from "./importChoices";
+import { placedHole } from "./placedHole";
+import { tidy } from "./tidy";
+import type { RecognisedPart } from "./recognisedPart";
+
+/**
+ * A recognised part as a part document: the base and a flange a bend. The plates keep their plane shape (`dimension` tangent: lengths end
+ * where a bend begins), radius and angle stand with each bend, so the folded part is the solid and the flat follows from the rule.
+ */
+export function toPartDocument(part: RecognisedPart, choices: ImportChoices): PartDocument {
+  const thickness = choices.thickness ?? tidy(part.thickness);
+  const names = part.plates.map((_, i) => (i === 0 ? "base" : `b${i}`));
+  const base = part.plates[0];
+  const flanges: FlangeEntry[] = [];
+  const drawn: DrawnPlate[] = [{ edges: (base?.outline ?? []).map((_, i) => ({ edge: i, number: i, extended: 0 })) }];
+  part.bends.forEach((bend, i) => {
+    const plate = part.plates[bend.child];
+    if (!plate) return;
+    const insideRadius = choices.bends?.[i]?.insideRadius ?? tidy(bend.insideRadius);
+    const angle = choices.bends?.[i]?.angle ?? Math.min(180, tidy(toDeg(rad(bend.angle))));
+    const setback = outsideSetback(toRad(deg(angle)), mm(insideRadius), mm(thickness));
+    const parentEdge = drawn[bend.parent]?.edges.find(({ edge }) => edge === bend.parentEdge);
+    const flange = drawFlange(plate, bend, setback);
+    drawn.push(flange.plate);
+    const start = tidy(bend.start + (parentEdge?.extended ?? 0));
+    flanges.push({
+      id: names[bend.child] ?? "", on: names[bend.parent] ?? "base", edge: parentEdge?.number ?? 0,
+      outline: flange.outline, angle, direction: bend.direction,
+      ...(angle === 180 ? { hem: "open" as const, gap: 2 * insideRadius } : { insideRadius }),
+      ...(start > 0 ? { start } : {}),
+      ...(plate.holes.length > 0 ? { holes: plate.holes.map((hole) => placedHole(hole, ([x, y]) => [x, setback - y], true)) } : {}),
+    });
+  });
+  return {
+    format: "part/1", name: choices.name, units: "mm", material: choices.material, thickness, dimension: "tangent",
+    ...(choices.rule ? { rule: choices.rule } : {}),
+    ...(choices.kFactor === undefined ? {} : { kFactor: choices.kFactor }),
+    base: {
+      outline: (base?.outline ?? []).map(([x, y, bulge]) => (bulge === 0 ? [tidy(x), tidy(y)] : [tidy(x), tidy(y), bulge])),
+      ...(base && base.holes.length > 0 ? { holes: base.holes.map((hole) => placedHole(hole, (p) => p, false)) } : {}),
+    },
+    ...(flanges.length > 0 ? { flanges } : {}),
+  };
+}
