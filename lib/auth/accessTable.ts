@@ -45,6 +45,7 @@ export const apiAccess = {
   "POST /api/tools/[code]/pieces": "tools:write",
   "PATCH /api/pieces/[id]": "tools:write",
   "GET /api/machines": "machines:read",
+  "GET /api/shop-limits": "parts:read",
   "GET /api/materials": "materials:read",
   "GET /api/plans": "plans:read",
   "POST /api/plans": "plans:write",
