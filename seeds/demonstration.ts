@@ -4,7 +4,7 @@ import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import { readToolingDocument } from "@/bending/tooling/readToolingDocument";
 import { insertEvent } from "@/db/audit/insertEvent";
 import { insertMachine } from "@/db/machines/insertMachine";
-import { upsertMaterials } from "@/db/materials/upsertMaterials";
+import { insertMaterials } from "@/db/materials/insertMaterials";
 import { insertPart } from "@/db/parts/insertPart";
 import { insertTool } from "@/db/tools/insertTool";
 import { insertUser } from "@/db/users/insertUser";
@@ -24,7 +24,7 @@ export async function seedDemonstration(knex: Knex): Promise<boolean> {
   return knex.transaction(async (db) => {
     await db.raw("lock table users in exclusive mode");
     if (await db("users").first("id")) return false;
-    await upsertMaterials(db, materials);
+    await insertMaterials(db, materials, "built-in values, each with its source");
     const engineer = await seedPeople(db);
     const brakes = await seedMachines(db);
     await seedTools(db, brakes);

@@ -1,6 +1,7 @@
 import { MM_PER_INCH, mm, type Mm } from "../core/units";
 
-const COLUMNS = [1 / 64, 1 / 32, 1 / 16, 1 / 8, 3 / 16, 1 / 4, 3 / 8, 1 / 2];
+/** The printed thicknesses, in. */
+export const aluminiumThicknesses: readonly number[] = [1 / 64, 1 / 32, 1 / 16, 1 / 8, 3 / 16, 1 / 4, 3 / 8, 1 / 2];
 
 /** Inside radius over thickness of a cold bend of 90 degrees, for 1/64, 1/32, 1/16, 1/8, 3/16, 1/4, 3/8 and 1/2 in. */
 export const aluminiumRadii = {
@@ -25,20 +26,20 @@ export interface AluminiumRadius {
 }
 
 /** Half the rounding of a sheet thickness given in thousandths of an inch, mm. */
-const SAME_SHEET = 0.013;
+export const SAME_SHEET_MM = 0.013;
 
 /**
  * Smallest inside radius of aluminium bent cold through 90 degrees (Aluminum Association table, as reproduced on a design
  * page). Null over 1/2 in.
  */
 export function aluminiumMinimumRadius(temper: AluminiumTemper, thickness: Mm): AluminiumRadius | null {
-  const column = COLUMNS.findIndex((head) => thickness <= head * MM_PER_INCH + SAME_SHEET);
-  const [head, times] = [COLUMNS[column], aluminiumRadii[temper][column]];
+  const column = aluminiumThicknesses.findIndex((head) => thickness <= head * MM_PER_INCH + SAME_SHEET_MM);
+  const [head, times] = [aluminiumThicknesses[column], aluminiumRadii[temper][column]];
   if (head === undefined || times === undefined) return null;
   return {
     radius: mm(times * thickness),
     timesThickness: times,
-    betweenColumns: Math.abs(head * MM_PER_INCH - thickness) > SAME_SHEET,
+    betweenColumns: Math.abs(head * MM_PER_INCH - thickness) > SAME_SHEET_MM,
     source: `Aluminum Association bend table, ${temper}, 90 degrees`,
   };
 }

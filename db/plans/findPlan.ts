@@ -1,3 +1,4 @@
+import { completeMaterial } from "@/bending/handbook/completeMaterial";
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PlanDocument } from "@/bending/plan/planDocument";
@@ -11,6 +12,8 @@ export interface PlanRow extends PlanListRow {
   readonly plan: PlanDocument;
   readonly part_document: PartDocument;
   readonly material: MaterialFacts;
+  /** The recorded version that `material` is; null for plans from before versions were kept. */
+  readonly material_version_id: string | null;
   readonly machine_document: unknown;
   readonly tools: readonly Tool[];
 }
@@ -18,6 +21,7 @@ export interface PlanRow extends PlanListRow {
 export async function findPlan(db: Connection, id: string): Promise<PlanRow | undefined> {
   const rows: PlanRow[] = await planQuery(db)
     .where("plan.id", id)
-    .select([...planListColumns, "plan.document as plan", "revision.document as part_document", "plan.material", "plan.machine_document", "plan.tools"]);
-  return rows[0];
+    .select([...planListColumns, "plan.document as plan", "revision.document as part_document", "plan.material", "plan.material_version_id", "plan.machine_document", "plan.tools"]);
+  const [row] = rows;
+  return row && { ...row, material: completeMaterial(row.material) };
 }

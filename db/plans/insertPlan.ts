@@ -18,6 +18,7 @@ export async function insertPlan(db: Connection, entry: NewPlan): Promise<{ read
       setup_seconds: plan.seconds.setup,
       document: JSON.stringify(plan),
       material: JSON.stringify(entry.material),
+      material_version_id: entry.materialVersionId,
       machine_document: JSON.stringify(entry.machineDocument),
       tools: JSON.stringify(entry.tools),
       inputs_digest: entry.inputsDigest,

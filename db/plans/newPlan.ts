@@ -9,6 +9,8 @@ export interface NewPlan {
   readonly plan: PlanDocument;
   /** What the plan was made of, as it was. */
   readonly material: MaterialFacts;
+  /** The recorded version that `material` is. */
+  readonly materialVersionId: string | null;
   readonly machineDocument: unknown;
   /** The tools that the plan uses, with the pieces that were in service. */
   readonly tools: readonly Tool[];

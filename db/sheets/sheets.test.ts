@@ -28,7 +28,7 @@ beforeAll(async () => {
 });
 
 const plan = (inputsDigest: string, changes = {}) => insertPlan(database(), {
-  partId, revisionId, machineId, plan: { ...bracketPlan, ...changes }, material: builtInMaterials[0]!, machineDocument: bracketMachine,
+  partId, revisionId, machineId, plan: { ...bracketPlan, ...changes }, material: builtInMaterials[0]!, materialVersionId: null, machineDocument: bracketMachine,
   tools: [bracketPunch, bracketDie], inputsDigest, by: null,
 });
 const draft = async (letter: string) => insertSheet(database(), { planId: (await plan(digest(letter))).id, partId, machineId, by: null });

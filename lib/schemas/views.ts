@@ -59,7 +59,7 @@ export interface PartDetail {
   readonly plans: readonly PlanListItem[];
 }
 
-export type MaterialView = MaterialFacts;
+export type { MaterialView } from "./materialViews";
 
 export interface MachineView {
   readonly id: string;

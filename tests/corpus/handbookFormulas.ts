@@ -8,6 +8,7 @@ import { gaugeThickness, type GaugeSystem } from "@/bending/handbook/gaugeThickn
 import { kFactorFromDeduction } from "@/bending/handbook/kFactorFromDeduction";
 import { advisedFlange, minimumFlange } from "@/bending/handbook/minimumFlange";
 import { minimumRadius } from "@/bending/handbook/minimumRadius";
+import { steelRadiusTable } from "@/bending/handbook/steelRadiusTable";
 import { naturalRadius } from "@/bending/handbook/naturalRadius";
 import { outsideSetback } from "@/bending/handbook/outsideSetback";
 import { penetrationDepth } from "@/bending/handbook/penetrationDepth";
@@ -48,7 +49,7 @@ export const handbookFormulas: CorpusFormulas = {
     return ratio?.[i.result as "radiusRatio" | "finalRadius" | "angleRatio"] ?? NaN;
   },
   minimumRadius: (i) => {
-    const steel = { ...material("S235"), tensile: [mpa(Number(i.tensile)), mpa(Number(i.tensile))] as const };
+    const steel = { ...material("S235"), minimumRadii: steelRadiusTable(mpa(Number(i.tensile))) };
     return minimumRadius(steel, length(i.thickness), angle(i.angle), i.alongGrain === true)?.radius ?? NaN;
   },
   gaugeThickness: (i) => (gaugeThickness(Number(i.gauge), i.system as GaugeSystem) ?? NaN) / 25.4,

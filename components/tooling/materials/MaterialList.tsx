@@ -23,7 +23,7 @@ const columns: readonly Column<MaterialFacts>[] = [
   { key: "radius", header: "Natural radius / V", align: "right", cell: (material) => number(material.naturalRadiusRatio, 3) },
   { key: "default", header: "Usual radius / t", align: "right", cell: (material) => number(material.defaultRadiusPerThickness, 2) },
   { key: "straight", header: "Straight length", cell: (material) => material.straightLengthGroup },
-  { key: "source", header: "Source", className: "min-w-56 text-sm text-ink-soft", cell: (material) => <>{material.standard}. {material.source}</> },
+  { key: "source", header: "Source", className: "min-w-56 text-sm text-ink-soft", cell: (material) => <>{material.standard}. {material.origins.tensile.text}</> },
 ];
 
 /** The materials with every value that the formulas use, and where it was taken from. */

@@ -1,9 +1,9 @@
 import type { z } from "zod";
-import { materialLookup } from "../materialLookup";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import type { Connection } from "@/db/connection";
 import { findMachine } from "@/db/machines/findMachine";
+import { findMaterial } from "@/db/materials/findMaterial";
 import { findPart } from "@/db/parts/findPart";
 import { findToolsInService } from "@/db/tools/findToolsInService";
 import type { Failure } from "@/lib/api/failure";
@@ -18,6 +18,7 @@ export interface PlanInputs {
   readonly revisionId: string;
   readonly machineId: string;
   readonly machineDocument: unknown;
+  readonly materialVersionId: string;
   /** For the record: "P-1001 rev 2 on Brake 1". */
   readonly subject: string;
   readonly task: PlanTask;
@@ -32,7 +33,7 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
   const machine = readMachineDocument(row.document);
   if (!machine.ok) return refuse("machineId", `The machine ${row.name} cannot be used: ${machine.error.map(({ path, message }) => `${path} ${message}`).join("; ")}.`);
   const { document } = found.revision;
-  const material = (await materialLookup(db))(document.material);
+  const material = await findMaterial(db, document.material);
   if (!material) return refuse("partId", `The material ${document.material} of the part is not known to the shop.`);
   const tools = await findToolsInService(db);
   if (tools.length === 0) return fail({ kind: "conflict", message: "No tool has a piece in service, so nothing can be planned. The toolroom enters tools." });
@@ -41,8 +42,9 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
     revisionId: found.revision.id,
     machineId: row.id,
     machineDocument: row.document,
+    materialVersionId: material.version_id,
     subject: `${found.part.number} rev ${found.revision.revision} on ${row.name}`,
-    task: { document, material, tools, machine: machine.value, batch: input.batch, alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
+    task: { document, material: material.facts, tools, machine: machine.value, batch: input.batch, alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
   });
 }
 
