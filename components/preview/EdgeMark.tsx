@@ -3,8 +3,17 @@ import { useMemo } from "react";
 import { Quaternion, Vector3 } from "three";
 import type { Vec3 } from "@/bending/geometry/vec3";
 
-/** A round bar along an edge: what stands at the gauge. */
-export function EdgeMark({ from, to, radius, colour }: { readonly from: Vec3; readonly to: Vec3; readonly radius: number; readonly colour: string }) {
+interface EdgeMarkProps {
+  readonly from: Vec3;
+  readonly to: Vec3;
+  readonly radius: number;
+  readonly colour: string;
+  /** 0: not seen, but still there for the pointer. */
+  readonly opacity?: number;
+}
+
+/** A round bar along an edge. */
+export function EdgeMark({ from, to, radius, colour, opacity = 1 }: EdgeMarkProps) {
   const { middle, length, turn } = useMemo(() => {
     const [a, b] = [new Vector3(...from), new Vector3(...to)];
     const along = b.clone().sub(a);
@@ -17,7 +26,7 @@ export function EdgeMark({ from, to, radius, colour }: { readonly from: Vec3; re
   return (
     <mesh position={middle} quaternion={turn}>
       <cylinderGeometry args={[radius, radius, length, 12]} />
-      <meshBasicMaterial color={colour} />
+      <meshBasicMaterial color={colour} transparent={opacity < 1} opacity={opacity} depthWrite={opacity > 0} />
     </mesh>
   );
 }

@@ -3,6 +3,8 @@ import { lazy, Suspense, useState } from "react";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
 import { DrawnOnFailure } from "./DrawnOnFailure";
 import { PartDrawing } from "./PartDrawing";
+import type { PartPicking } from "./partPicking";
+import type { MarkedSheet } from "./markedSheet";
 import type { StageTheme } from "./stageColours";
 import { useHasWebGl } from "./useHasWebGl";
 
@@ -12,10 +14,11 @@ interface PartPreviewProps {
   readonly part: PartModel;
   readonly angles: FormedAngles;
   readonly theme?: StageTheme;
+  readonly picking?: PartPicking | undefined;
 }
 
 /** The folded part in 3D, filling its parent; a drawn view takes its place where 3D is not to be had. */
-export function PartPreview({ part, angles, theme = "light" }: PartPreviewProps) {
+export function PartPreview({ part, angles, theme = "light", picking }: PartPreviewProps) {
   const able = useHasWebGl();
   const [lost, setLost] = useState(false);
   const drawn = <PartDrawing part={part} angles={angles} className="size-full" />;
@@ -24,7 +27,7 @@ export function PartPreview({ part, angles, theme = "light" }: PartPreviewProps)
   return (
     <DrawnOnFailure instead={drawn}>
       <Suspense fallback={<div className="size-full" aria-busy />}>
-        <PartScene part={part} angles={angles} theme={theme} onLost={() => setLost(true)} />
+        <PartScene part={part} angles={angles} theme={theme} picking={picking} onLost={() => setLost(true)} />
       </Suspense>
     </DrawnOnFailure>
   );

@@ -4,30 +4,40 @@ import { applyFrame } from "@/bending/geometry/applyFrame";
 import { foldFrames } from "@/bending/part/foldFrames";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
 import { FitView, type FitTarget } from "./FitView";
+import type { MarkedSheet } from "./markedSheet";
+import { SheetMarks } from "./SheetMarks";
 import { SheetMesh } from "./SheetMesh";
+import type { PartPicking } from "./partPicking";
+import { PickEdges } from "./PickEdges";
 import { StageCanvas } from "./StageCanvas";
-import type { StageTheme } from "./stageColours";
+import { stageColours, type StageTheme } from "./stageColours";
 
 export interface PartSceneProps {
   readonly part: PartModel;
   readonly angles: FormedAngles;
   readonly theme: StageTheme;
+  readonly marked?: MarkedSheet | undefined;
   readonly onLost: () => void;
+  readonly picking?: PartPicking | undefined;
 }
 
 /** The folded part on its own, base flat, its top up. */
-export default function PartScene({ part, angles, theme, onLost }: PartSceneProps) {
+export default function PartScene({ part, angles, theme, onLost, picking }: PartSceneProps) {
   const frames = useMemo(() => foldFrames(part, angles), [part, angles]);
   const target = useMemo(() => partTarget(part, angles), [part, angles]);
   return (
     <StageCanvas theme={theme} label={`The part ${part.name}, folded`} onLost={onLost}>
       <FitView preset="part" target={target} />
       <group rotation={[-Math.PI / 2, 0, 0]}>
-        <SheetMesh part={part} frames={frames} angles={angles} theme={theme} />
+        <SheetMesh part={part} frames={frames} angles={angles} theme={theme} picking={picking} />
+        {picking === undefined ? null : <PickEdges part={part} frames={frames} picking={picking} radius={target.radius * EDGE_SHARE} colour={stageColours[theme].edge} />}
       </group>
     </StageCanvas>
   );
 }
+
+/** Thickness of a bar along an edge, as a part of the view. */
+const EDGE_SHARE = 0.018;
 
 /** In the view's axes: the part's z stands up. */
 function partTarget(part: PartModel, angles: FormedAngles): FitTarget {

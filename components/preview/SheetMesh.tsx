@@ -1,4 +1,6 @@
 "use client";
+import { Line } from "@react-three/drei";
+import type { ThreeEvent } from "@react-three/fiber";
 import { useMemo } from "react";
 import { DoubleSide, EdgesGeometry, type Plane } from "three";
 import type { Frame } from "@/bending/geometry/frame";
@@ -6,6 +8,8 @@ import type { Bend, Face, FormedAngles, PartModel } from "@/bending/part/partMod
 import { bendGeometry } from "./bendGeometry";
 import { faceGeometry } from "./faceGeometry";
 import { frameMatrix } from "./frameMatrix";
+import type { PartPicking } from "./partPicking";
+import { DRAGGED_PX } from "./PickEdges";
 import { SideLetters } from "./SideLetters";
 import { stageColours, type StageTheme } from "./stageColours";
 import { useDispose } from "./useDispose";
@@ -17,15 +21,17 @@ interface SheetMeshProps {
   readonly theme: StageTheme;
   readonly clip?: readonly Plane[] | undefined;
   readonly letters?: boolean;
+  readonly picking?: PartPicking | undefined;
 }
 
 /** The sheet folded so far: faces, bend arcs, edges, and the letters of its two sides. */
-export function SheetMesh({ part, frames, angles, theme, clip, letters = true }: SheetMeshProps) {
+export function SheetMesh({ part, frames, angles, theme, clip, letters = true, picking }: SheetMeshProps) {
   return (
     <group>
       {part.faces.map((face, index) => {
         const frame = frames[index];
-        return frame ? <FaceMesh key={face.id} face={face} thickness={part.thickness} frame={frame} theme={theme} clip={clip} /> : null;
+        return frame ? <FaceMesh key={face.id} face={face} thickness={part.thickness} frame={frame} theme={theme} clip={clip}
+          picked={picking?.picked === face.id} onPick={picking === undefined ? undefined : () => picking.onFace(face.id)} /> : null;
       })}
       {part.bends.map((bend, index) => {
         const frame = frames[bend.parent];
@@ -47,18 +53,28 @@ function SheetMaterials({ theme, clip }: Pick<PieceProps, "theme" | "clip">) {
   ));
 }
 
-function FaceMesh({ face, thickness, frame, theme, clip }: PieceProps & { readonly face: Face }) {
+interface FaceMeshProps extends PieceProps {
+  readonly face: Face;
+  readonly picked: boolean;
+  readonly onPick: (() => void) | undefined;
+}
+
+function FaceMesh({ face, thickness, frame, theme, clip, picked, onPick }: FaceMeshProps) {
   const solid = useMemo(() => faceGeometry(face, thickness), [face, thickness]);
   const edges = useMemo(() => new EdgesGeometry(solid, 30), [solid]);
   useDispose(solid);
   useDispose(edges);
   return (
     <group matrixAutoUpdate={false} matrix={frameMatrix(frame)}>
-      <mesh geometry={solid}><SheetMaterials theme={theme} clip={clip} /></mesh>
+      <mesh geometry={solid} {...(onPick === undefined ? {} : { onClick: (event: ThreeEvent<MouseEvent>) => { if (event.delta <= DRAGGED_PX) { event.stopPropagation(); onPick(); } } })}>
+        <SheetMaterials theme={theme} clip={clip} /></mesh>
+      {picked ? [0, thickness].map((z) => <Line key={z} points={closed(face).map(([x, y]) => [x, y, z] as const)} color={stageColours[theme].mark} lineWidth={3} />) : null}
       <lineSegments geometry={edges}><lineBasicMaterial color={stageColours[theme].line} clippingPlanes={clip ? [...clip] : null} /></lineSegments>
     </group>
   );
 }
+
+const closed = ({ outline }: Face) => [...outline, ...outline.slice(0, 1)];
 
 function BendMesh({ bend, thickness, angle, frame, theme, clip }: PieceProps & { readonly bend: Bend; readonly angle: number }) {
   const solid = useMemo(() => bendGeometry(bend, thickness, angle), [bend, thickness, angle]);

@@ -1,6 +1,6 @@
 "use client";
 import type { Vec2 } from "@/bending/geometry/vec2";
-import type { FaceEdge } from "./faceEdges";
+import type { FaceEdge } from "@/components/preview/partPicking";
 
 interface EdgeButtonProps {
   readonly edge: FaceEdge;

@@ -1,9 +1,7 @@
 import type { Vec2 } from "@/bending/geometry/vec2";
 import type { BaseShape } from "@/bending/part/partDocument";
 import type { PartModel } from "@/bending/part/partModel";
-
-/** A free edge of the unfolded part on which a flange may stand, by the document's own count. */
-export interface FaceEdge { readonly face: string; readonly edge: number; readonly line: readonly [Vec2, Vec2] }
+import type { FaceEdge } from "@/components/preview/partPicking";
 
 interface Way { readonly edge: number; readonly out: Vec2; readonly offset: number | null }
 

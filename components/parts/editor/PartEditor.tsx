@@ -3,18 +3,16 @@ import { useRef, useState, type FormEvent } from "react";
 import { unitName } from "@/lib/format/unitName";
 import type { FieldProblem } from "@/bending/core/problem";
 import type { MaterialFacts } from "@/bending/handbook/material";
-import { mmPer } from "@/bending/core/units";
 import { Choice } from "@/components/ui/Choice";
 import { Notice } from "@/components/ui/Notice";
 import { Panel } from "@/components/ui/Panel";
 import { formatMoment } from "@/lib/format/formatMoment";
 import { BendTable } from "../drawing/BendTable";
-import { faceEdges } from "../drawing/faceEdges";
 import { FlatFacts } from "../drawing/FlatFacts";
 import { PartDrawings } from "../drawing/PartDrawings";
 import { draftFromDocument } from "../draft/draftFromDocument";
 import type { PartDraft } from "../draft/partDraft";
-import { addFlange } from "./addFlange";
+import { PartFindings } from "../findings/PartFindings";
 import { BaseFields } from "./BaseFields";
 import { CommonFields } from "./CommonFields";
 import { computePreview } from "./computePreview";
@@ -28,6 +26,7 @@ import { ProblemList } from "./ProblemList";
 import { ProfileFields } from "./ProfileFields";
 import { QuickStarts } from "./QuickStarts";
 import { useEditorKeys } from "./useEditorKeys";
+import { usePicking } from "./usePicking";
 import { usePreview } from "./usePreview";
 import type { useStoredDraft } from "./useStoredDraft";
 
@@ -66,9 +65,10 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
   useEditorKeys({ ...steps, save: () => { if (!saving) form.current?.requestSubmit(); } });
   const { shown } = preview;
   const stale = preview.model === null;
+  const { picking, onFocus } = usePicking({ draft, shown, update });
   return (
     <EditorContext value={editor}>
-      <form ref={form} noValidate onSubmit={save}>
+      <form ref={form} noValidate onSubmit={save} onFocus={onFocus}>
         <EditorHead title={title} isNew={isNew} saving={saving} document={preview.problems.length === 0 ? (preview.model?.document ?? null) : null} changed={store.changed} onUndo={steps.undo} onRedo={steps.redo} onStartAgain={store.startAgain}
           onImport={(document) => update((old) => ({ ...draftFromDocument(document, old.number), note: old.note }))} />
         <div className="mb-6 space-y-3 empty:hidden">
@@ -94,11 +94,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
             {shown === null ? <p className="border border-dashed border-rule-strong p-8 text-center text-ink-soft">The drawings appear here as soon as the part can be built.</p> : (
               <>
                 <FlatFacts part={shown.part} flat={shown.flat} units={shown.document.units} stale={stale} />
-                <PartDrawings part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={stale}
-                  {...(shown.document.base === undefined ? {} : {
-                    edges: faceEdges(shown.part, shown.document.base, mmPer(shown.document.units)),
-                    onEdge: (edge) => update((old) => addFlange(old, edge.face, edge.edge)),
-                  })} />
+                <PartFindings model={shown} editing={{ draft, update }}>{(marks) => <PartDrawings {...marks} part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={stale} picking={picking} />}</PartFindings>
                 <Panel title="Bends" aside={`lengths in ${unitName(shown.document.units)}`}><BendTable part={shown.part} units={shown.document.units} /></Panel>
               </>
             )}
