@@ -2,6 +2,7 @@ import type { Knex } from "knex";
 import * as access from "./migrations/001_access";
 import * as shop from "./migrations/002_shop";
 import * as materials from "./migrations/003_materials";
+import * as bendTrials from "./migrations/004_bend_trials";
 
 export interface Migration {
   /** The file's name, so that the knex command line and the application agree on what has run. */
@@ -15,4 +16,5 @@ export const migrationList: readonly Migration[] = [
   { name: "001_access.ts", up: access.up, down: access.down },
   { name: "002_shop.ts", up: shop.up, down: shop.down },
   { name: "003_materials.ts", up: materials.up, down: materials.down },
+  { name: "004_bend_trials.ts", up: bendTrials.up, down: bendTrials.down },
 ];

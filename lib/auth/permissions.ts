@@ -16,6 +16,11 @@ export const permissions = {
   "tools:write": ["toolroom"],
   "machines:read": ["engineer", "toolroom", "manager"],
   "materials:read": ["engineer", "toolroom", "manager"],
+  "bendTable:read": ["engineer", "operator", "toolroom", "manager"],
+  /** Entering trials and looking after the instruments. */
+  "bendTable:write": ["engineer", "toolroom"],
+  /** Whether a trial counts: leaving it out, bringing it back, withdrawing it. */
+  "bendTable:judge": ["engineer"],
   "people:read": ["manager"],
   "activity:read": ["manager"],
 } as const satisfies Record<string, readonly Role[]>;

@@ -1,0 +1,28 @@
+"use client";
+import { useState } from "react";
+import { Button } from "@/components/ui/Button";
+import { useToast } from "@/components/ui/ToastProvider";
+import { useJudgeTrial } from "@/lib/queries/bendTable";
+import type { TrialView } from "@/lib/schemas/bendTableViews";
+import { JudgeDialog } from "./JudgeDialog";
+
+/** What an engineer can do with a trial: leave it out, bring it back, withdraw it. */
+export function TrialActions({ trial }: { readonly trial: TrialView }) {
+  const toast = useToast();
+  const judge = useJudgeTrial();
+  const [asking, setAsking] = useState<"excluded" | "withdrawn" | null>(null);
+  if (trial.state === "withdrawn") return null;
+  const bringBack = () => judge.mutate({ id: trial.id, state: "counted" }, {
+    onSuccess: () => toast("good", `${trial.number} counts again`),
+    onError: (error) => toast("wrong", `${trial.number} was not brought back`, error.message),
+  });
+  return (
+    <div className="flex justify-end gap-1">
+      {trial.state === "excluded"
+        ? <Button look="plain" size="small" busy={judge.isPending} aria-label={`Bring back ${trial.number}`} onClick={bringBack}>Bring back</Button>
+        : <Button look="plain" size="small" aria-label={`Leave out ${trial.number}`} onClick={() => setAsking("excluded")}>Leave out</Button>}
+      <Button look="quiet" size="small" aria-label={`Withdraw ${trial.number}`} onClick={() => setAsking("withdrawn")}>Withdraw</Button>
+      {asking === null ? null : <JudgeDialog trial={trial} to={asking} onClose={() => setAsking(null)} />}
+    </div>
+  );
+}

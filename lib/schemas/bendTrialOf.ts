@@ -1,0 +1,45 @@
+import { mmPer, type LengthUnit } from "@/bending/core/units";
+import type { BendTrial, Instrument } from "@/bending/shopTable/bendTrial";
+
+/** What a line of the notebook says, in its own units; instruments are named by their ids. */
+export interface TrialEntry {
+  readonly id: string;
+  readonly material: string;
+  readonly batch: string;
+  readonly nominal: number | null;
+  readonly thickness: number;
+  readonly vOpening: number;
+  readonly punchRadius: number;
+  readonly angle: number;
+  readonly blank: number;
+  readonly flangeA: number;
+  readonly flangeB: number;
+  readonly insideRadius: number | null;
+  readonly lengthInstrument: string;
+  readonly thicknessInstrument: string | null;
+  readonly angleInstrument: string;
+  readonly radiusInstrument: string | null;
+  readonly measuredOn: string;
+}
+
+/** Resolution and limit of error in millimetres, of a protractor in degrees. */
+export type InstrumentLookup = (id: string) => Instrument | undefined;
+
+/** The line as the library evaluates it, in the line's units; undefined when an instrument is not known. */
+export function bendTrialOf(entry: TrialEntry, units: LengthUnit, instruments: InstrumentLookup): BendTrial | undefined {
+  const scaled = (found: Instrument | undefined): Instrument | undefined =>
+    found && { uncertainty: found.uncertainty / mmPer(units), resolution: found.resolution / mmPer(units) };
+  const length = scaled(instruments(entry.lengthInstrument));
+  const angle = instruments(entry.angleInstrument);
+  const thickness = entry.thicknessInstrument === null ? null : scaled(instruments(entry.thicknessInstrument));
+  const radius = entry.radiusInstrument === null ? null : scaled(instruments(entry.radiusInstrument));
+  if (length === undefined || angle === undefined || thickness === undefined || radius === undefined) return undefined;
+  return {
+    id: entry.id, units, material: entry.material, batch: entry.batch,
+    ...(entry.nominal === null ? {} : { nominalThickness: entry.nominal }),
+    thickness: entry.thickness, vOpening: entry.vOpening, punchRadius: entry.punchRadius, angle: entry.angle,
+    blankLength: entry.blank, flanges: [entry.flangeA, entry.flangeB], insideRadius: entry.insideRadius,
+    instruments: { length: { ...length }, thickness, angle: { uncertainty: angle.uncertainty, resolution: angle.resolution }, radius },
+    measuredOn: entry.measuredOn,
+  };
+}
