@@ -7,7 +7,7 @@ import { bendDeduction } from "./bendDeduction";
 import { din6935CompensatingValue } from "./din6935CompensatingValue";
 import { faaAllowance } from "./faaAllowance";
 import { kFromAllowance } from "./kFromAllowance";
-import type { MaterialFacts } from "./material";
+import type { MaterialAllowance, MaterialFacts } from "./material";
 import { outsideSetback } from "./outsideSetback";
 import { straightLength } from "./straightLength";
 
@@ -61,18 +61,13 @@ function answers(question: AllowanceQuestion): readonly AllowanceSaid[] {
     ...(kOverride === undefined ? [] : [said(question, "override", "K entered by hand", bendAllowance(angle, insideRadius, kOverride, thickness))]),
     // K = 0.5 with no inside radius gives a deduction of 0.43 thickness, which is shop practice (from memory).
     ...(question.closedHem ? [said(question, "closed hem", CLOSED_HEM, bendAllowance(angle, insideRadius, 0.5, thickness))] : []),
-    ...(named === null ? [] : [byHandbook(question, named)]),
+    ...(named === null ? [] : [byHandbook(question, { rule: named })]),
     ...(shop ? [shop] : []),
-    ...(named === materialRule(material) ? [] : [byHandbook(question, materialRule(material), missing)]),
+    ...(named === material.allowance.rule ? [] : [byHandbook(question, material.allowance, missing)]),
   ];
 }
 
 const CLOSED_HEM = "closed hem, deduction 0.43 of the thickness (common practice)";
-
-/** Steel and stainless by DIN 6935, everything else by the straight-length formulas. */
-function materialRule(material: MaterialFacts): "din6935" | "machinery" {
-  return material.group === "steel" || material.group === "stainless" ? "din6935" : "machinery";
-}
 
 function said({ thickness, insideRadius, angle }: AllowanceQuestion, kind: AllowanceSaid["kind"], text: string, allowance: Mm): AllowanceSaid {
   return { kind, text, allowance, deduction: bendDeduction(angle, insideRadius, thickness, allowance), k: kFromAllowance(allowance, angle, insideRadius, thickness), shop: null };
@@ -94,10 +89,10 @@ function byShop(question: AllowanceQuestion): AllowanceSaid | undefined {
   };
 }
 
-function byHandbook(question: AllowanceQuestion, rule: "din6935" | "machinery" | "faa", why?: string): AllowanceSaid {
+function byHandbook(question: AllowanceQuestion, by: MaterialAllowance, why?: string): AllowanceSaid {
   const { material, thickness, insideRadius, angle } = question;
   const inWords = (text: string) => (why === undefined ? text : `${text} (${why})`);
-  switch (rule) {
+  switch (by.rule) {
     case "din6935": {
       const v = din6935CompensatingValue((Math.PI - angle) as Rad, insideRadius, thickness);
       return said(question, "handbook", inWords("DIN 6935"), mm(2 * outsideSetback(angle, insideRadius, thickness) - v));
@@ -106,7 +101,9 @@ function byHandbook(question: AllowanceQuestion, rule: "din6935" | "machinery" |
       return said(question, "handbook", inWords(`Machinery's Handbook, straight length, ${material.straightLengthGroup} group`), straightLength(material.straightLengthGroup, angle, insideRadius, thickness));
     case "faa":
       return said(question, "handbook", inWords("FAA-H-8083-31"), faaAllowance(angle, insideRadius, thickness));
+    case "k":
+      return said(question, "handbook", inWords(`K ${by.k} of ${material.id}`), bendAllowance(angle, insideRadius, by.k, thickness));
     default:
-      return rule satisfies never;
+      return by satisfies never;
   }
 }

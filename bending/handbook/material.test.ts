@@ -3,6 +3,7 @@ import { mm, rad } from "../core/units";
 import { completeMaterial, type RecordedMaterial } from "./completeMaterial";
 import { builtInMaterials, materialById } from "./materials";
 import { minimumRadius } from "./minimumRadius";
+import { resolveAllowance } from "./resolveAllowance";
 import { springback } from "./springback";
 import { springbackTable, type SpringbackMaterial } from "./springbackFactor";
 
@@ -37,4 +38,13 @@ it("takes springback from the row of the kR table that a material names, and fro
     expect(taken.radius).toBeCloseTo(factor * 10.5 - 0.5, 12);
     expect(springback(right, mm(0.5), mm(1), { ...steel, springbackRow: row })).toEqual(springback(right, mm(0.5), mm(1), steel));
   }
+});
+
+it("unfolds by the rule that a material names, a K of its own included", () => {
+  const steel = materialById("S235")!;
+  const question = { thickness: mm(2), insideRadius: mm(2), angle: rad(Math.PI / 2) };
+  expect(resolveAllowance({ ...question, material: steel }).source).toBe("DIN 6935");
+  expect(resolveAllowance({ ...question, material: { ...steel, allowance: { rule: "faa" } } }).source).toBe("FAA-H-8083-31");
+  expect(resolveAllowance({ ...question, material: { ...steel, allowance: { rule: "k", k: 0.41 } } })).toMatchObject({ k: expect.closeTo(0.41, 12), source: "K 0.41 of S235" });
+  expect(resolveAllowance({ ...question, material: { ...steel, allowance: { rule: "k", k: 0.41 } }, rule: "din6935" }).source).toBe("DIN 6935");
 });
