@@ -1,7 +1,8 @@
-import { toDeg } from "../core/units";
+import { toDeg, type LengthUnit } from "../core/units";
 import { advisedFlange, minimumFlange } from "../handbook/minimumFlange";
 import { minimumRadius } from "../handbook/minimumRadius";
 import { formatLength } from "../core/formatLength";
+import type { Bend } from "../part/partModel";
 import { flatPattern } from "../part/flatPattern";
 import type { Layout } from "../setup/layout";
 import type { OrderStep } from "../order/orderProblem";
@@ -16,6 +17,8 @@ const LIFT_LIMIT_KG = 23;
 const NEAR_RATING = 0.8;
 /** mm. Sheet in front of the die that whips up far enough to strike. Common practice, no source. */
 const WHIP_UP_MM = 400;
+/** Openings within this part of each other are one, as in the shop's table. */
+const SAME_OPENING = 0.01;
 
 /** What a person should know before making this plan; none of it forbids it. */
 export function cautionsOf(situation: Situation, layout: Layout, orderSteps: readonly OrderStep[], steps: readonly PlanStep[]): readonly PlanReason[] {
@@ -55,6 +58,7 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   const fit = fits[move?.bends[0] ?? -1]?.[pair?.index ?? -1];
   if (!move || !pair || !bend || !fit?.ok) return;
   const name = formatBends(step.bends);
+  for (const index of move.bends) openingCaution(part.bends[index], pair.die.vOpening, units, say);
   for (const wish of fit.wishes) say(wish.kind, step.bends, wish.tools, wish.message);
   if (step.gauge.fingers.length === 0) say("gauge", step.bends, [], `${name}: nothing behind the die is straight enough for the back gauge; mark the bend line or use a stop`);
   if (step.gauge.fingers.length === 1) say("gauge", step.bends, [], `${name}: only one gauge finger can touch; hold the sheet square by hand or use a side stop`);
@@ -67,4 +71,11 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   const flange = Math.min(reach.front, reach.back) + setback;
   const advised = Math.max(advisedFlange(pair.die.vOpening), minimumFlange(bend.angle, pair.die));
   if (flange < advised) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
+}
+
+/** The shop measured on another V than the die of this step has: the document gives the radius, and no single V makes every bend. */
+function openingCaution(bend: Bend | undefined, vOpening: number, units: LengthUnit, say: Say): void {
+  const measured = bend?.allowanceBasis?.shop?.vOpening;
+  if (!bend || measured === undefined || Math.abs(measured - vOpening) <= SAME_OPENING * vOpening) return;
+  say("tool-choice", [bend.id], [], `${bend.id}: the flat takes the shop's value for a V ${formatLength(measured, units)}, the step a V ${formatLength(vOpening, units)}; bend a trial first`);
 }

@@ -19,11 +19,11 @@ export interface SituationFacts {
 }
 
 /** Joins part, machine and tools; the clearance asks for the angle that each stroke really goes to. */
-export function createSituation({ variant: { part, vOpening }, machine, units, pairs, order }: SituationFacts): Situation {
+export function createSituation({ variant: { part, vOpening, everyBend }, machine, units, pairs, order }: SituationFacts): Situation {
   const moves = collectMoves(part);
   const runs = createRuns(machine.settings);
   const demanded = part.bends.map((bend) => springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle);
-  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, machine, runs, units, vOpening }, bend, pair)));
+  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, machine, runs, units, vOpening, everyBend }, bend, pair)));
   const useful = pairs.filter((_, index) => fits.some((ofBend) => ofBend[index]?.ok));
   const kept = new Set(useful.map(({ index }) => index));
   const next = nextMask(order);

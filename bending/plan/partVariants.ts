@@ -5,42 +5,59 @@ import { FORCE_V_RANGE } from "../handbook/airBendForce";
 import { naturalRadius } from "../handbook/naturalRadius";
 import { vOpeningRule } from "../handbook/vOpeningRule";
 import { buildPart } from "../part/buildPart";
-import type { PartModel } from "../part/partModel";
+import type { Bend, PartModel } from "../part/partModel";
 import type { PlanRequest } from "./planRequest";
 
-/** One flat pattern to plan: where the radius follows from the die, the V that it follows from. */
+/** One flat pattern to plan: where the radius or the shop's value follows from the die, the V that it follows from. */
 export interface PartVariant {
   readonly part: PartModel;
   readonly vOpening: number | null;
+  /** Every bend is made on that V, also one whose radius the document gives. */
+  readonly everyBend: boolean;
   /** The V that is looked for first. */
   readonly wantedV: number;
 }
 
 /**
  * The flat patterns worth planning. When the document gives every inside radius there is one; else one for each
- * V in service that suits the thickness, the nearest to the usual one first.
+ * V in service that suits the thickness, the nearest to the usual one first. Where the shop has measured bends of a given radius, the
+ * deduction is another on each V: then a flat for each V with every bend on it comes first, and what takes several V's last.
  */
 export function partVariants(request: PlanRequest): Result<readonly PartVariant[], readonly FieldProblem[]> {
-  const { document, materials, tools } = request;
+  const { document, materials, shopTable } = request;
   const plain = buildPart(document, { materials });
   if (!plain.ok) return plain;
   const part = plain.value;
+  const given = part.bends.every(hasOwnRadius);
   const usual = vOpeningRule(part.thickness);
-  if (part.bends.every((bend) => bend.radiusSource === "document" || bend.hem !== null)) {
-    return ok([{ part, vOpening: null, wantedV: wantedByRadius(part) ?? usual }]);
+  const wanted = (given ? wantedByRadius(part) : null) ?? usual;
+  const openings = openingsInService(request, part.thickness, wanted);
+  const flats = given && !shopTable ? [] : openings.map((v) => ({ v, built: flatForOpening(request, part, v) }));
+  const measured = flats.some(({ built }) => built.ok && built.value.bends.some((bend) => hasOwnRadius(bend) && bend.allowanceBasis?.shop));
+  const onEach = (everyBend: boolean) => flats.flatMap(({ v, built }): PartVariant[] => (built.ok ? [{ part: built.value, vOpening: v, everyBend, wantedV: v }] : []));
+  const strict = measured ? onEach(true) : [];
+  if (given) {
+    const mixed = measured ? buildPart(document, { materials, shopTable }) : plain;
+    return ok([...strict, { part: mixed.ok ? mixed.value : part, vOpening: null, everyBend: false, wantedV: wanted }]);
   }
-  const suits = (v: number) => v >= FORCE_V_RANGE[0] * part.thickness - 1e-9 && v <= FORCE_V_RANGE[1] * part.thickness + 1e-9;
-  const openings = [...new Set(tools.flatMap((tool) => (tool.kind === "die" && suits(tool.vOpening) ? [tool.vOpening] : [])))]
-    .sort((a, b) => Math.abs(Math.log(a / usual)) - Math.abs(Math.log(b / usual)));
-  const variants: PartVariant[] = [];
-  const problems: FieldProblem[] = [];
-  for (const v of openings) {
-    const built = buildPart(document, { materials, radiusOf: () => ({ radius: naturalRadius(part.material, v), source: `natural radius of a V ${v} mm die` }) });
-    if (built.ok) variants.push({ part: built.value, vOpening: v, wantedV: v });
-    else problems.push(...built.error);
-  }
+  const variants = [...strict, ...onEach(false)];
   if (variants.length > 0) return ok(variants);
-  return openings.length > 0 ? fail(problems) : ok([{ part, vOpening: null, wantedV: usual }]);
+  const problems = flats.flatMap(({ built }) => (built.ok ? [] : built.error));
+  return openings.length > 0 ? fail(problems) : ok([{ part, vOpening: null, everyBend: false, wantedV: usual }]);
+}
+
+const hasOwnRadius = (bend: Bend): boolean => bend.radiusSource === "document" || bend.hem !== null;
+
+/** V openings that suit the thickness, the nearest to the wanted one first. */
+function openingsInService({ tools }: PlanRequest, thickness: number, wanted: number): readonly number[] {
+  const suits = (v: number) => v >= FORCE_V_RANGE[0] * thickness - 1e-9 && v <= FORCE_V_RANGE[1] * thickness + 1e-9;
+  return [...new Set(tools.flatMap((tool) => (tool.kind === "die" && suits(tool.vOpening) ? [tool.vOpening] : [])))]
+    .sort((a, b) => Math.abs(Math.log(a / wanted)) - Math.abs(Math.log(b / wanted)));
+}
+
+/** Every bend on one V: the radius that it gives where the document gives none, and the shop's value for it. */
+function flatForOpening({ document, materials, shopTable }: PlanRequest, part: PartModel, v: number): Result<PartModel, readonly FieldProblem[]> {
+  return buildPart(document, { materials, shopTable, openingOf: () => mm(v), radiusOf: () => ({ radius: naturalRadius(part.material, mm(v)), source: `natural radius of a V ${v} mm die` }) });
 }
 
 /** The V whose natural radius is the middle one of those that the document asks for. */

@@ -1,4 +1,6 @@
+import type { Plain } from "../core/plain";
 import type { LengthUnit } from "../core/units";
+import type { AllowanceBasis } from "../handbook/allowanceBasis";
 
 /**
  * The plan document, format `plan/1`: what is stored, drawn and printed. Lengths in `units` (the part
@@ -45,6 +47,8 @@ export interface PlanFlat {
     readonly k: number;
     readonly insideRadius: number;
     readonly source: string;
+    /** The source as data, lengths in `units`; absent in plans of before it was kept. */
+    readonly basis?: Plain<AllowanceBasis>;
   }[];
 }
 

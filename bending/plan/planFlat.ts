@@ -1,4 +1,5 @@
 import { mmPer, type LengthUnit } from "../core/units";
+import { scaledBasis } from "../handbook/scaledBasis";
 import { flatPattern } from "../part/flatPattern";
 import type { PartModel } from "../part/partModel";
 import type { PlanFlat } from "./planDocument";
@@ -20,6 +21,7 @@ export function planFlat(part: PartModel, units: LengthUnit): PlanFlat {
       k: rounded(bend.k),
       insideRadius: rounded(bend.insideRadius / per),
       source: bend.allowanceSource,
+      ...(bend.allowanceBasis ? { basis: scaledBasis(bend.allowanceBasis, 1 / per, rounded) } : {}),
     })),
   };
 }

@@ -1,5 +1,6 @@
 import type { MaterialLookup } from "../handbook/material";
 import type { PartDocument } from "../part/partDocument";
+import type { ShopTable } from "../shopTable/shopCell";
 import type { Machine } from "../tooling/machine";
 import type { Tool } from "../tooling/tool";
 
@@ -15,6 +16,8 @@ export interface PlanProgress {
 export interface PlanRequest {
   readonly document: PartDocument;
   readonly materials: MaterialLookup;
+  /** The shop's own measured values; absent: the handbook alone speaks. */
+  readonly shopTable?: ShopTable;
   readonly tools: readonly Tool[];
   readonly machine: Machine;
   readonly batch: number;

@@ -38,9 +38,22 @@ const step = z.strictObject({
   handling: z.strictObject({ flip: z.boolean(), turn: number.min(0).max(180) }),
 });
 
+const said = {
+  kind: z.enum(["override", "closed hem", "shop", "shop interpolated", "handbook"]),
+  text,
+  allowance: number,
+  deduction: number,
+  k: number,
+  shop: z.strictObject({
+    count: z.int().min(1), spread: number.nullable(), expanded: number, lastMeasured: text, vOpening: number, openingFrom: z.enum(["die", "radius", "usual"]),
+    places: z.array(z.strictObject({ thickness: number, vOpening: number, angle: number, punchRadii: z.array(number), count: z.int().min(1), lastMeasured: text, weight: number })),
+  }).nullable(),
+};
+const basis = z.strictObject({ ...said, next: z.strictObject(said).nullable() });
+
 const flat = z.strictObject({
   width: number, depth: number, area: number, massKg: number,
-  bends: z.array(z.strictObject({ id: text, allowance: number, deduction: number, k: number, insideRadius: number, source: text })),
+  bends: z.array(z.strictObject({ id: text, allowance: number, deduction: number, k: number, insideRadius: number, source: text, basis: basis.optional() })),
 });
 
 const common = {

@@ -45,7 +45,7 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
 function solveVariants(request: PlanRequest, variants: readonly PartVariant[], budget: SearchBudget, order: readonly number[] | undefined): { readonly solved: readonly Solved[]; readonly toolReasons: readonly PlanReason[] } {
   const solved: Solved[] = [];
   const toolReasons: PlanReason[] = [];
-  const left: Situation[] = [];
+  const left: { readonly variant: PartVariant; readonly situation: Situation }[] = [];
   const solve = (variant: PartVariant, situation: Situation, allPairs: number): boolean => {
     const checks = createStepChecks(situation);
     const answer = solveVariant(situation, checks, budget);
@@ -64,12 +64,11 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
     }
     const short = withPairs(situation, shortlist(situation));
     if (solve(variant, short, situation.pairs.length)) return { solved, toolReasons };
-    if (short.pairs.length < situation.pairs.length) left.push(situation);
+    if (short.pairs.length < situation.pairs.length) left.push({ variant, situation });
   }
-  for (const situation of left) {
-    const place = solved.findIndex((one) => one.situation.part === situation.part);
-    const [one] = solved.splice(place, 1);
-    if (one && solve(one.variant, situation, situation.pairs.length)) break;
+  for (const { variant, situation } of left) {
+    solved.splice(solved.findIndex((one) => one.variant === variant), 1);
+    if (solve(variant, situation, situation.pairs.length)) break;
   }
   return { solved, toolReasons };
 }

@@ -24,6 +24,8 @@ export interface FitQuestion {
   readonly units: LengthUnit;
   /** The V whose natural radius the bend was given, when its radius follows from the die. */
   readonly vOpening: number | null;
+  /** Every bend is for that V, also where the document gives its radius: the flat stands on what was measured on it. */
+  readonly everyBend: boolean;
 }
 
 /** Whether a bend can be formed by a pair, apart from order and clearance; the first thing that is wrong, else. */
@@ -51,8 +53,11 @@ function bedProblem({ machine, units }: FitQuestion, bend: Bend): FitProblem | n
   return { kind: "bed", tools: [], off: NO_TOOL_HELPS, message: `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}` };
 }
 
-function radiusProblem({ part, units, vOpening }: FitQuestion, bend: Bend, { die }: ToolPair): FitProblem | null {
-  if (vOpening === null || bend.radiusSource === "document" || Math.abs(die.vOpening - vOpening) < 1e-6) return null;
+function radiusProblem({ part, units, vOpening, everyBend }: FitQuestion, bend: Bend, { die }: ToolPair): FitProblem | null {
+  if (vOpening === null || (bend.radiusSource === "document" && !everyBend) || Math.abs(die.vOpening - vOpening) < 1e-6) return null;
+  if (bend.radiusSource === "document") {
+    return { kind: "no-die", tools: [die.id], off: OTHER_FLAT, message: `the flat of bend ${bend.id} is for a V ${formatLength(vOpening, units)}, as the shop measured; ${die.id} has ${formatLength(die.vOpening, units)}` };
+  }
   const gives = naturalRadius(part.material, die.vOpening);
   return {
     kind: "no-die", tools: [die.id], off: OTHER_FLAT,

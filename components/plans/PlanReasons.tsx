@@ -8,6 +8,7 @@ import { buttonClasses } from "@/components/ui/buttonClasses";
 import { classes } from "@/components/ui/classes";
 import { buildPart } from "@/bending/part/buildPart";
 import type { PlanReason } from "@/bending/plan/planDocument";
+import { plannedBends } from "@/bending/plan/plannedBends";
 import { mmPer } from "@/bending/core/units";
 import { asSentence } from "@/lib/format/asSentence";
 import { createSheetFormat } from "@/lib/sheet/createSheetFormat";
@@ -19,9 +20,9 @@ export function PlanReasons({ detail, mayWrite }: { readonly detail: PlanDetail;
   const { plan, document, material } = detail;
   const [chosen, setChosen] = useState(0);
   const part = useMemo(() => {
-    const built = buildPart(document, { materials: (id) => (id === material.id ? material : undefined) });
+    const built = buildPart(document, { materials: (id) => (id === material.id ? material : undefined), ...plannedBends(plan) });
     return built.ok ? built.value : null;
-  }, [document, material]);
+  }, [document, material, plan]);
   const reason = plan.reasons[chosen];
   if (!reason) return <EmptyState title="No reason was recorded">Plan the part again.</EmptyState>;
   return (

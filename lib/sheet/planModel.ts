@@ -1,9 +1,10 @@
 import { invariant } from "@/bending/core/invariant";
-import { mmPer, toRad, type Deg, type LengthUnit, type Mm, type Rad } from "@/bending/core/units";
+import { mmPer, toRad, type Deg, type LengthUnit, type Rad } from "@/bending/core/units";
 import { completeMaterial } from "@/bending/handbook/completeMaterial";
 import type { Hit } from "@/bending/clearance/machineFrames";
 import { buildPart } from "@/bending/part/buildPart";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
+import { plannedBends } from "@/bending/plan/plannedBends";
 import type { PlanStation, PlanStep } from "@/bending/plan/planDocument";
 import type { Machine } from "@/bending/tooling/machine";
 import type { Die, Punch, Tool } from "@/bending/tooling/tool";
@@ -62,14 +63,7 @@ export function planModel(source: PlanSource): PlanModel {
 }
 
 function partOf({ plan, document, material }: PlanSource): PartModel {
-  const perUnit = mmPer(plan.units);
-  const built = buildPart(document, {
-    materials: (id) => (id === material.id ? completeMaterial(material) : undefined),
-    radiusOf: (bendId) => {
-      const bend = plan.flat.bends.find((entry) => entry.id === bendId);
-      return bend ? { radius: (bend.insideRadius * perUnit) as Mm, source: "plan" } : null;
-    },
-  });
+  const built = buildPart(document, { materials: (id) => (id === material.id ? completeMaterial(material) : undefined), ...plannedBends(plan) });
   invariant(built.ok, "a planned part document can be built");
   return built.value;
 }

@@ -1,9 +1,10 @@
 import { createClearance } from "@/bending/clearance/createClearance";
 import { machineFrames } from "@/bending/clearance/machineFrames";
-import { deg, mm, mmPer, rad, toRad } from "@/bending/core/units";
+import { deg, mmPer, rad, toRad } from "@/bending/core/units";
 import { applyFrame } from "@/bending/geometry/applyFrame";
 import { buildPart } from "@/bending/part/buildPart";
 import type { PlanDocument, PlanSection, PlanStation, PlanStep } from "@/bending/plan/planDocument";
+import { plannedBends } from "@/bending/plan/plannedBends";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import type { Die, Punch } from "@/bending/tooling/tool";
 
@@ -14,7 +15,7 @@ import type { Die, Punch } from "@/bending/tooling/tool";
 export function verifyPlan(plan: PlanDocument, request: PlanRequest): readonly string[] {
   const wrong: string[] = [];
   const per = mmPer(plan.units);
-  const built = buildPart(request.document, { materials: request.materials, radiusOf: (id) => ({ radius: mm((plan.flat.bends.find((bend) => bend.id === id)?.insideRadius ?? 0) * per), source: "plan" }) });
+  const built = buildPart(request.document, { materials: request.materials, ...plannedBends(plan) });
   if (!built.ok) return ["the part does not build"];
   const part = built.value;
   const demanded = new Map(plan.steps.flatMap((step) => step.bends.map((id) => [id, step.demandedAngle] as const)));
