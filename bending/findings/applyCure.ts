@@ -1,10 +1,9 @@
-import type { PartDocument } from "../part/partDocument";
 import type { Cure } from "./finding";
 
-/** The document with the one field changed that a cure names; everything else stays the same object. */
-export function applyCure(document: PartDocument, cure: Cure): PartDocument {
+/** The document (or a part of it that begins the cure's path) with the one field changed that a cure names; everything else stays the same object. */
+export function applyCure<T>(document: T, cure: Cure): T {
   const steps = cure.path.replaceAll("]", "").split(/[.[]/);
-  return changed(document, steps, cure.value) as PartDocument;
+  return changed(document, steps, cure.value) as T;
 }
 
 function changed(value: unknown, [step, ...rest]: readonly string[], to: unknown): unknown {

@@ -14,11 +14,12 @@ interface PartPreviewProps {
   readonly part: PartModel;
   readonly angles: FormedAngles;
   readonly theme?: StageTheme;
+  readonly marked?: MarkedSheet | undefined;
   readonly picking?: PartPicking | undefined;
 }
 
 /** The folded part in 3D, filling its parent; a drawn view takes its place where 3D is not to be had. */
-export function PartPreview({ part, angles, theme = "light", picking }: PartPreviewProps) {
+export function PartPreview({ part, angles, theme = "light", marked, picking }: PartPreviewProps) {
   const able = useHasWebGl();
   const [lost, setLost] = useState(false);
   const drawn = <PartDrawing part={part} angles={angles} className="size-full" />;
@@ -27,7 +28,7 @@ export function PartPreview({ part, angles, theme = "light", picking }: PartPrev
   return (
     <DrawnOnFailure instead={drawn}>
       <Suspense fallback={<div className="size-full" aria-busy />}>
-        <PartScene part={part} angles={angles} theme={theme} picking={picking} onLost={() => setLost(true)} />
+        <PartScene part={part} angles={angles} theme={theme} marked={marked} picking={picking} onLost={() => setLost(true)} />
       </Suspense>
     </DrawnOnFailure>
   );

@@ -22,7 +22,7 @@ export interface PartSceneProps {
 }
 
 /** The folded part on its own, base flat, its top up. */
-export default function PartScene({ part, angles, theme, onLost, picking }: PartSceneProps) {
+export default function PartScene({ part, angles, theme, marked, onLost, picking }: PartSceneProps) {
   const frames = useMemo(() => foldFrames(part, angles), [part, angles]);
   const target = useMemo(() => partTarget(part, angles), [part, angles]);
   return (
@@ -30,6 +30,7 @@ export default function PartScene({ part, angles, theme, onLost, picking }: Part
       <FitView preset="part" target={target} />
       <group rotation={[-Math.PI / 2, 0, 0]}>
         <SheetMesh part={part} frames={frames} angles={angles} theme={theme} picking={picking} />
+        {marked === undefined ? null : <SheetMarks part={part} frames={frames} marked={marked} theme={theme} />}
         {picking === undefined ? null : <PickEdges part={part} frames={frames} picking={picking} radius={target.radius * EDGE_SHARE} colour={stageColours[theme].edge} />}
       </group>
     </StageCanvas>

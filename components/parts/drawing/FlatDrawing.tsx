@@ -21,10 +21,12 @@ interface FlatDrawingProps {
   readonly stale?: boolean;
   /** What can be picked in it, where it is edited. */
   readonly picking?: { readonly faces: readonly Face[] } & PartPicking;
+  /** Marks to draw over the sheet. */
+  readonly over?: ((view: View) => ReactNode) | undefined;
 }
 
 /** The blank with its bend lines and overall size. */
-export function FlatDrawing({ flat, units, stale = false, picking }: FlatDrawingProps) {
+export function FlatDrawing({ flat, units, stale = false, picking, over }: FlatDrawingProps) {
   const { min, max } = flat.bounds;
   const view = fitView([min, max], { width: 560, maxHeight: 400, minHeight: 150, margin: [56, 34, 30, 48] });
   const corner = (x: number, y: number): Vec2 => view.at([x, y]);
@@ -37,6 +39,7 @@ export function FlatDrawing({ flat, units, stale = false, picking }: FlatDrawing
       {flat.bendLines.map((bend) => <BendLine key={bend.id} bend={bend} view={view} named={flat.bendLines.length <= 14} onPick={picking?.onBend} />)}
       <DimensionLine from={corner(min[0], min[1])} to={corner(max[0], min[1])} offset={-28} label={formatLength(flat.width, units, false)} />
       <DimensionLine from={corner(min[0], min[1])} to={corner(min[0], max[1])} offset={28} label={formatLength(flat.depth, units, false)} />
+      {over?.(view)}
       {picking?.edges.map((edge) => <EdgeButton key={`${edge.face} ${edge.edge}`} edge={edge} at={view.at} onPick={picking.onEdge} />)}
     </DrawingSheet>
   );

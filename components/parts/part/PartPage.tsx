@@ -10,6 +10,7 @@ import { usePart } from "@/lib/queries/parts";
 import { BendTable } from "../drawing/BendTable";
 import { FlatFacts } from "../drawing/FlatFacts";
 import { PartDrawings } from "../drawing/PartDrawings";
+import { PartFindings } from "../findings/PartFindings";
 import { partModelOf } from "./partModelOf";
 import { PartHead } from "./PartHead";
 import { PlansOfPart } from "./PlansOfPart";
@@ -44,7 +45,7 @@ export function PartPage({ id, mayWrite, mayPlan, maySeePlans }: PartPageProps) 
       <div className="grid grid-cols-1 gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,1fr)_minmax(0,44rem)]">
         <div className="space-y-6">
           {model.ok ? (
-            <PartDrawings part={model.value.part} flat={model.value.flat} units={data.document.units} dimension={data.document.dimension ?? "outside"} />
+            <PartFindings model={{ part: model.value.part, document: data.document }}>{(marks) => <PartDrawings {...marks} part={model.value.part} flat={model.value.flat} units={data.document.units} dimension={data.document.dimension ?? "outside"} />}</PartFindings>
           ) : (
             <Notice tone="wrong" title="This revision cannot be built any more">
               <ul>{model.error.map((problem) => <li key={problem.path + problem.message}><code className="num mr-2">{problem.path}</code>{problem.message}</li>)}</ul>
