@@ -11,6 +11,7 @@ import { insertUser } from "@/db/users/insertUser";
 import { hashPassword } from "@/lib/auth/hashPassword";
 import { readPart } from "@/lib/services/parts/readPart";
 import { mustRead } from "./mustRead";
+import { seedBendTrials } from "./seedBendTrials";
 import { demonstrationPassword } from "./shop/demonstrationPassword";
 import { machines } from "./shop/machines";
 import { materials } from "./shop/materials";
@@ -25,24 +26,25 @@ export async function seedDemonstration(knex: Knex): Promise<boolean> {
     await db.raw("lock table users in exclusive mode");
     if (await db("users").first("id")) return false;
     await insertMaterials(db, materials, "built-in values, each with its source");
-    const engineer = await seedPeople(db);
+    const { engineer, toolroom } = await seedPeople(db);
     const brakes = await seedMachines(db);
     await seedTools(db, brakes);
+    await seedBendTrials(db, { toolroom, engineer });
     await seedParts(db, engineer);
     await insertEvent(db, { actorId: null, actor: "installation", action: "put in the demonstration shop", subject: "Ravel Street Instruments" });
     return true;
   });
 }
 
-/** Answers the first engineer's id. */
-async function seedPeople(db: Knex): Promise<string> {
-  let engineer = "";
+/** Answers the ids of the first engineer and of the first toolroom keeper. */
+async function seedPeople(db: Knex): Promise<{ readonly engineer: string; readonly toolroom: string }> {
+  const first = new Map<string, string>();
   for (const person of people) {
     const passwordHash = mustRead("password", await hashPassword(demonstrationPassword));
     const { id, role } = await insertUser(db, { ...person, passwordHash });
-    if (engineer === "" && role === "engineer") engineer = id;
+    if (!first.has(role)) first.set(role, id);
   }
-  return engineer;
+  return { engineer: first.get("engineer") ?? "", toolroom: first.get("toolroom") ?? "" };
 }
 
 async function seedMachines(db: Knex): Promise<readonly string[]> {
