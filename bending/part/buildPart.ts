@@ -4,7 +4,7 @@ import { fail, ok, type Result } from "../core/result";
 import type { MaterialFacts, MaterialLookup } from "../handbook/material";
 import type { BendContext } from "./bendContext";
 import { buildFaces } from "./buildFaces";
-import { buildFlat } from "./buildFlat";
+import { buildFlat } from "./flat/buildFlat";
 import { checkPartDocument } from "./checkPartDocument";
 import { documentInUnits } from "./documentInUnits";
 import { overlapProblems } from "./overlapProblems";

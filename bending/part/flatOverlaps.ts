@@ -18,8 +18,9 @@ export interface FlatOverlap {
 
 type Piece = Bounds2 & { readonly points: readonly Vec2[]; readonly face: number };
 
-/** Every pair of faces that cannot be cut from one sheet, and where; empty when the part can be unfolded. */
-export function flatOverlaps(part: Pick<PartModel, "faces" | "bends">): readonly FlatOverlap[] {
+/** Every pair of faces that cannot be cut from one sheet, and where; empty when the part can be unfolded, as one drawn as a flat always can. */
+export function flatOverlaps(part: Pick<PartModel, "faces" | "bends" | "drawnFlat">): readonly FlatOverlap[] {
+  if (part.drawnFlat) return [];
   const pieces = part.faces.flatMap((face, index): readonly Piece[] => {
     const bend = face.bend === null ? undefined : part.bends[face.bend];
     return [...convexPieces(face.outline), ...(bend ? [bend.zone] : [])].map((points) => ({ points, face: index, ...polygonBounds(points) }));

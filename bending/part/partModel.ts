@@ -74,9 +74,9 @@ export interface Face {
   readonly id: FaceId;
   /** The plane region only, without any bend zone; counter-clockwise; arcs already as chords. */
   readonly outline: readonly FlatPoint[];
-  /** Clockwise or counter-clockwise, arcs as chords. */
+  /** Clockwise or counter-clockwise, arcs as chords; the window in which a tab of the same sheet stands is one too. */
   readonly holes: readonly (readonly FlatPoint[])[];
-  /** The holes once more, exact, in the same order. */
+  /** The drawn holes that lie in the face, exact. */
   readonly holeContours: readonly FlatContour[];
   /** Index of the bend that carries this face; null for the base. */
   readonly bend: number | null;

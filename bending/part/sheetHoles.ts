@@ -35,7 +35,7 @@ export function sheetHoles(part: Pick<PartModel, "faces" | "bends">, outline: ()
     const near = (other: Bounds2 | undefined) => other !== undefined && !apart(other, box);
     const home = hole.face !== null && holeWithin(hole.outline, part.faces[hole.face]?.outline ?? [])
       ? hole.face
-      : part.faces.findIndex((face, k) => near(faceBoxes[k]) && holeWithin(hole.outline, face.outline));
+      : part.faces.findIndex((face, k) => near(faceBoxes[k]) && holeWithin(hole.outline, face.outline) && !face.holes.some((window) => holesMeet(window, hole.outline)));
     const other = holes.findIndex((earlier, k) => k < i && near(boxes[k]) && holesMeet(earlier.outline, hole.outline));
     if (other >= 0) problems.push({ path: hole.path, message: `the hole overlaps ${holes[other]?.path ?? ""}` });
     else if (home >= 0) inFace.set(home, [...(inFace.get(home) ?? []), hole]);
@@ -48,7 +48,7 @@ export function sheetHoles(part: Pick<PartModel, "faces" | "bends">, outline: ()
   });
   const faces = part.faces.map((face, i): Face => {
     const own = inFace.get(i) ?? [];
-    return { ...face, holes: own.map((hole) => hole.outline), holeContours: own.map((hole) => hole.contour) };
+    return { ...face, holes: [...face.holes, ...own.map((hole) => hole.outline)], holeContours: own.map((hole) => hole.contour) };
   });
   return { faces, across, problems };
 }
