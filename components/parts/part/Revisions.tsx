@@ -7,7 +7,7 @@ import type { PartDetail } from "@/lib/schemas/views";
 /** Every saved state of the part, newest first. */
 export function Revisions({ part }: { readonly part: PartDetail }) {
   return (
-    <Panel title="Revisions">
+    <Panel title="Revisions" aside={part.revisions.length < 2 ? undefined : <TextLink href={`/parts/${part.id}/compare`}>Compare two</TextLink>}>
       <ol className="border-t border-rule">
         {part.revisions.map((revision) => (
           <li key={revision.id} className="flex flex-wrap items-baseline gap-x-4 border-b border-rule py-1.5">
