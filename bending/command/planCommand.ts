@@ -5,6 +5,7 @@ import { checkOrder } from "../plan/checkOrder";
 import { planPart } from "../plan/planPart";
 import type { PlanRequest } from "../plan/planRequest";
 import { readOrder } from "../plan/readOrder";
+import type { ShopTable } from "../shopTable/shopCell";
 import { readMachineDocument } from "../tooling/readMachineDocument";
 import { readToolingDocument } from "../tooling/readToolingDocument";
 import { wrongInput, type CommandOutcome, type CommandWorld } from "./outcome";
@@ -16,7 +17,7 @@ const DEFAULT_BATCH = 1;
 const DEFAULT_SECONDS = 60;
 
 /** `plan` and `check`: the plan document; exit code 3 when there is none, 4 when the time ran out before one was found. */
-export function planCommand({ verb, options }: Arguments, document: PartDocument, part: PartModel, world: CommandWorld): CommandOutcome {
+export function planCommand({ verb, options }: Arguments, document: PartDocument, { part, shopTable }: { readonly part: PartModel; readonly shopTable: ShopTable | undefined }, world: CommandWorld): CommandOutcome {
   const tooling = options.get("--tooling");
   const machineFile = options.get("--machine");
   if (tooling === undefined) return wrongInput("--tooling: name the tooling document");
@@ -33,7 +34,7 @@ export function planCommand({ verb, options }: Arguments, document: PartDocument
   if (!limit.ok) return wrongInput(limit.error);
   const end = world.now() + limit.value * 1000;
   const request: PlanRequest = {
-    document, materials: materialById, tools: tools.value, machine: machine.value, batch: batch.value, alternatives: alternatives.value,
+    document, materials: materialById, ...(shopTable ? { shopTable } : {}), tools: tools.value, machine: machine.value, batch: batch.value, alternatives: alternatives.value,
     now: world.now, shouldStop: () => world.now() > end,
   };
   if (verb === "plan") return outcomeOf(planPart(request));

@@ -1,14 +1,17 @@
+import { ok } from "../core/result";
 import { builtInMaterials, materialById } from "../handbook/materials";
 import { buildPart } from "../part/buildPart";
 import { readPartDocument } from "../part/readPartDocument";
 import { flatCommand } from "./flatCommand";
 import { wrongInput, type CommandOutcome, type CommandWorld } from "./outcome";
 import { planCommand } from "./planCommand";
-import { problemLine, readJsonFile } from "./readJsonFile";
 import { readArguments } from "./readArguments";
+import { readBendTable } from "./readBendTable";
+import { problemLine, readJsonFile } from "./readJsonFile";
 
-const PLANNING = ["--tooling", "--machine", "--batch", "--alternatives", "--time-limit"];
-const VERBS = { flat: [], plan: PLANNING, check: [...PLANNING, "--order"] } as const;
+const FLAT = ["--bend-table"];
+const PLANNING = [...FLAT, "--tooling", "--machine", "--batch", "--alternatives", "--time-limit"];
+const VERBS = { flat: FLAT, plan: PLANNING, check: [...PLANNING, "--order"] } as const;
 
 /** The command line as a function of its arguments and files: flat, plan, check. */
 export function runCommand(args: readonly string[], world: CommandWorld): CommandOutcome {
@@ -16,7 +19,10 @@ export function runCommand(args: readonly string[], world: CommandWorld): Comman
   if (!given.ok) return wrongInput(given.error);
   const document = readJsonFile(world, given.value.file, readPartDocument);
   if (!document.ok) return wrongInput(document.error);
-  const built = buildPart(document.value, { materials: materialById, knownMaterials: builtInMaterials.map(({ id }) => id) });
+  const tableFile = given.value.options.get("--bend-table");
+  const table = tableFile === undefined ? ok(undefined) : readJsonFile(world, tableFile, (json) => readBendTable(json, materialById));
+  if (!table.ok) return wrongInput(table.error);
+  const built = buildPart(document.value, { materials: materialById, knownMaterials: builtInMaterials.map(({ id }) => id), shopTable: table.value });
   if (!built.ok) return wrongInput(problemLine(given.value.file, built.error));
-  return given.value.verb === "flat" ? flatCommand(document.value, built.value) : planCommand(given.value, document.value, built.value, world);
+  return given.value.verb === "flat" ? flatCommand(document.value, built.value) : planCommand(given.value, document.value, { part: built.value, shopTable: table.value }, world);
 }

@@ -37,13 +37,21 @@ export function partVariants(request: PlanRequest): Result<readonly PartVariant[
   const onEach = (everyBend: boolean) => flats.flatMap(({ v, built }): PartVariant[] => (built.ok ? [{ part: built.value, vOpening: v, everyBend, wantedV: v }] : []));
   const strict = measured ? onEach(true) : [];
   if (given) {
-    const mixed = measured ? buildPart(document, { materials, shopTable }) : plain;
-    return ok([...strict, { part: mixed.ok ? mixed.value : part, vOpening: null, everyBend: false, wantedV: wanted }]);
+    return ok([...strict, { part: ofSeveralOpenings(request, part, measured), vOpening: null, everyBend: false, wantedV: wanted }]);
   }
   const variants = [...strict, ...onEach(false)];
   if (variants.length > 0) return ok(variants);
   const problems = flats.flatMap(({ built }) => (built.ok ? [] : built.error));
   return openings.length > 0 ? fail(problems) : ok([{ part, vOpening: null, everyBend: false, wantedV: usual }]);
+}
+
+/**
+ * The flat when each bend is made on the V that pleases: the shop's values of the V that a radius stands for, where a die in service has
+ * been measured at all; else the handbook's.
+ */
+function ofSeveralOpenings({ document, materials, shopTable }: PlanRequest, plain: PartModel, measured: boolean): PartModel {
+  const built = shopTable ? buildPart(document, { materials, shopTable }) : null;
+  return built?.ok && (measured || built.value.bends.every((bend) => !bend.allowanceBasis?.shop)) ? built.value : plain;
 }
 
 const hasOwnRadius = (bend: Bend): boolean => bend.radiusSource === "document" || bend.hem !== null;

@@ -10,7 +10,15 @@ const extra: Record<string, string> = {
   "broken.json": "{",
   "thin.json": JSON.stringify({ format: "part/1", name: "T", units: "mm", material: "S235", thickness: 0, profile: { width: 100, legs: [40, 40], bends: [{ angle: 90, direction: "up" }] } }),
   "wood.json": JSON.stringify({ format: "part/1", name: "T", units: "mm", material: "oak", thickness: 2, profile: { width: 100, legs: [40, 40], bends: [{ angle: 90, direction: "up" }] } }),
+  "bends.json": bendTable({}),
+  "wrongBends.json": bendTable({ blankLength: 200 }),
 };
+
+function bendTable(changes: object): string {
+  const trial = { material: "S235", thickness: 2.01, vOpening: 12, punchRadius: 0.8, angle: 90, blankLength: 96.3, flanges: [60.05, 40.05], measuredOn: "2026-11-30", ...changes };
+  const v20 = { ...trial, vOpening: 20, blankLength: 95.7 };
+  return JSON.stringify({ format: "bend-table/1", units: "mm", instruments: { length: { uncertainty: 0.03, resolution: 0.01 }, angle: { uncertainty: 0.1 } }, trials: [trial, v20] });
+}
 
 const world: CommandWorld = {
   now: () => 0,
@@ -32,6 +40,17 @@ describe("the command line", () => {
     expect((json as { flatLength: number }).flatLength).toBeCloseTo(172.325, 2);
   });
 
+  it("takes the shop's own bend table, and says so", () => {
+    const { json } = runCommand(["flat", "u.json", "--bend-table", "bends.json"], world);
+    const flat = json as { readonly flatLength: number; readonly bends: readonly { readonly deduction: number; readonly source: string; readonly basis: object }[] };
+    const without = runCommand(["flat", "u.json"], world).json as { readonly flatLength: number };
+    expect(flat.bends.map(({ source }) => source)).toEqual(["shop value of 1 trial", "shop value of 1 trial"]);
+    // Measured 3.8 at 2.01 mm; at 2 mm of the same K a hundredth of the thickness less.
+    expect(flat.bends[0]?.deduction).toBeCloseTo(3.8, 1);
+    expect(flat.flatLength).toBeCloseTo(180 - 2 * (flat.bends[0]?.deduction ?? NaN), 4);
+    expect(flat.bends[0]?.basis).toMatchObject({ kind: "shop", shop: { vOpening: 12, openingFrom: "radius", count: 1 }, next: { text: "DIN 6935", deduction: expect.closeTo((180 - without.flatLength) / 2, 3) } });
+  });
+
   it("plans, checks the same order, and leaves with 3 when there is none", () => {
     const plan = runCommand(["plan", "hat.json", ...SHOP, "--batch", "5"], world);
     expect(plan.exitCode).toBe(0);
@@ -51,6 +70,9 @@ describe("the command line", () => {
     [["flat", "broken.json"], "not JSON"],
     [["flat", "thin.json"], "thickness"],
     [["flat", "wood.json"], "material"],
+    [["flat", "u.json", "--bend-table", "nowhere.json"], "nowhere.json"],
+    [["flat", "u.json", "--bend-table", "u.json"], "bend-table/1"],
+    [["flat", "u.json", "--bend-table", "wrongBends.json"], "trials[0].blankLength"],
     [["plan", "u.json", "--machine", "machine.json"], "--tooling"],
     [["plan", "u.json", "--tooling", "tooling.json"], "--machine"],
     [["plan", "u.json", ...SHOP, "--batch", "0"], "--batch"],
