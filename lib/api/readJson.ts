@@ -1,25 +1,8 @@
 import { fail, ok, type Result } from "@/bending/core/result";
 import type { ProblemFacts } from "./problemResponse";
+import { readBytes } from "./readBytes";
 
 const megabytes = (bytes: number): string => `${Number((bytes / 1_000_000).toFixed(1))} MB`;
-
-async function readBytes(request: Request, limit: number): Promise<Uint8Array | null> {
-  if (Number(request.headers.get("content-length") ?? 0) > limit) return null;
-  const reader = request.body?.getReader();
-  const chunks: Uint8Array[] = [];
-  let size = 0;
-  while (reader) {
-    const { done, value } = await reader.read();
-    if (done) break;
-    size += value.byteLength;
-    if (size > limit) {
-      await reader.cancel();
-      return null;
-    }
-    chunks.push(value);
-  }
-  return Buffer.concat(chunks);
-}
 
 /** The body as JSON; never more than `limit` bytes are taken in, and nothing is parsed before the size is known. */
 export async function readJson(request: Request, limit: number): Promise<Result<unknown, ProblemFacts>> {

@@ -4,14 +4,17 @@ import { ApiProblem } from "./apiProblem";
 export interface RequestFacts {
   readonly method?: "GET" | "POST" | "PATCH" | "DELETE";
   readonly body?: unknown;
+  /** A file, sent as it is instead of a JSON body. */
+  readonly file?: Blob;
   readonly signal?: AbortSignal;
 }
 
 /** Asks the API; answers its JSON, or throws an `ApiProblem` that can be shown. */
-export async function request<T>(path: string, { method = "GET", body, signal }: RequestFacts = {}): Promise<T> {
+export async function request<T>(path: string, { method = "GET", body, file, signal }: RequestFacts = {}): Promise<T> {
   const response = await reach(path, {
     method,
     ...(signal ? { signal } : {}),
+    ...(file ? { body: file, headers: { "content-type": "application/octet-stream" } } : {}),
     ...(body === undefined ? {} : { body: JSON.stringify(body), headers: { "content-type": "application/json" } }),
   });
   if (!response.ok) throw new ApiProblem(await problemOf(response));

@@ -1,7 +1,7 @@
 import type { TopoDS_Shape } from "replicad-opencascadejs";
 import type { Kernel } from "./kernel";
 import { shapesIn } from "./shapesIn";
-import type { SolidMesh } from "./solidMesh";
+import type { SolidMesh } from "@/bending/exchange/step/solidMesh";
 
 /** For the eye only: chords stand at most this far off, in parts of the body's size, and turn this much (radians). */
 const CHORD_PART = 1e-3;

@@ -5,9 +5,9 @@ import type { Kernel } from "./kernel";
 import { meshFromShape } from "./meshFromShape";
 import { shapesIn } from "./shapesIn";
 import { solidFromShape } from "./solidFromShape";
-import type { SolidMesh } from "./solidMesh";
+import type { SolidMesh } from "@/bending/exchange/step/solidMesh";
 import { STEP_LIMITS } from "./stepLimits";
-import type { BodyFacts, StepProblem } from "./stepProblem";
+import type { BodyFacts, StepProblem } from "@/lib/schemas/stepReading";
 import { noSolidProblem, stepTextProblem } from "./stepTextProblem";
 
 export interface StepBody {

@@ -1,5 +1,5 @@
 import { STEP_LIMITS } from "./stepLimits";
-import type { StepProblem } from "./stepProblem";
+import type { StepProblem } from "@/lib/schemas/stepReading";
 
 /** How much of the end is looked through for the closing line: comments may follow it. */
 const TAIL = 4_096;
