@@ -72,7 +72,7 @@ function judge(context: FindingsContext, face: Face, { bend, reach, needs }: Hel
   const add = now - reach;
   const say = (mm: number) => formatLength(Math.ceil(mm * 100 - 1e-6) / 100, context.units);
   const vName = ({ v }: { readonly v: BendingV }) => (v.die === null ? `the usual V of ${formatLength(v.vOpening, context.units)}` : `${v.die} (V ${formatLength(v.vOpening, context.units)})`);
-  const begins = `${face.id} is ${formatLength(Math.round(now * 100) / 100, context.units)} long${length ? "" : " from the bend line, in the flat"}.`;
+  const begins = `${face.bend === null ? "The base" : `Flange ${face.id}`} is ${formatLength(Math.round(now * 100) / 100, context.units)} long${length ? "" : " from the bend line, in the flat"}.`;
   const rest = severity === "note"
     ? `It can be bent over ${good.map(vName).join(" or ")} only; ${vName(usual)}, which is nearest to the usual V, needs ${say(usual.advised + add)}.`
     : severity === "caution" && touching.length > 0

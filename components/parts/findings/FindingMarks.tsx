@@ -35,7 +35,7 @@ export function FindingMarks({ findings, selected, onSelect, view }: FindingMark
       {findings.slice(0, SIGNS_MOST).map((finding) => {
         const first = finding.marks[0];
         if (first === undefined) return null;
-        const [x, y] = view.at(middleOf(first));
+        const [x, y] = signAt(first, view.at);
         // Signs on one spot stand side by side.
         const spot = `${Math.round(x / 12)} ${Math.round(y / 12)}`;
         const beside = taken.get(spot) ?? 0;
@@ -77,14 +77,19 @@ function Sign({ finding, x, y, selected, onPick }: { readonly finding: Finding; 
   );
 }
 
-function middleOf(mark: FindingMark): Vec2 {
+/** Where its sign stands, in drawing units: beside a small thing, in a large one, off the middle where names and handles are. */
+function signAt(mark: FindingMark, at: (p: Vec2) => Vec2): Vec2 {
   switch (mark.kind) {
-    case "point": return mark.at;
-    case "line": return [(mark.from[0] + mark.to[0]) / 2, (mark.from[1] + mark.to[1]) / 2];
+    case "point": return beside(at(mark.at));
+    case "line": return at([mark.from[0] + (mark.to[0] - mark.from[0]) * 0.2, mark.from[1] + (mark.to[1] - mark.from[1]) * 0.2]);
     case "region": {
       const { min, max } = polygonBounds(mark.outline);
-      return [(min[0] + max[0]) / 2, (min[1] + max[1]) / 2];
+      const [[left, low], [right, high]] = [at(min), at(max)];
+      const small = right - left < 26 && low - high < 26;
+      return small ? beside([right, high]) : [left + (right - left) * 0.2, low + (high - low) * (low - high > right - left ? 0.2 : 0.5)];
     }
     default: return mark satisfies never;
   }
 }
+
+const beside = ([x, y]: Vec2): Vec2 => [x + 9, y - 9];

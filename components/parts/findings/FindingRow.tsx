@@ -21,7 +21,8 @@ interface FindingRowProps {
 export function FindingRow({ finding, units, selected, onSelect, cure }: FindingRowProps) {
   const look = severityLook[finding.severity];
   const about = [...new Set([...finding.faces, ...finding.bends])].slice(0, 3).join(", ");
-  const setTo = finding.cure === null || cure === undefined ? null : typeof finding.cure.value === "number" ? `Set to ${finding.cure.says}` : `Add ${finding.cure.says}`;
+  const short = cure?.field.split(", ").at(-1)?.toLowerCase() ?? "";
+  const setTo = finding.cure === null || cure === undefined ? null : typeof finding.cure.value === "number" ? `Set ${short} to ${finding.cure.says}` : `Add ${finding.cure.says}`;
   return (
     <li className={classes("border-b border-rule last:border-b-0", selected && "bg-wash")}>
       <div className="flex flex-wrap items-center gap-x-2 gap-y-1 px-2 py-1">

@@ -54,7 +54,7 @@ export function FindingsPanel({ findings, units, selected, onSelect, cureOf, sho
         )}
       </div>
       {open && list.length > 0 ? (
-        <ul id={`${id}-list`} className="max-h-52 overflow-y-auto">
+        <ul id={`${id}-list`} className="max-h-44 overflow-y-auto">
           {list.map((finding) => <FindingRow key={finding.key} finding={finding} units={units} selected={finding.key === selected} onSelect={onSelect} cure={cureFor(finding)} />)}
         </ul>
       ) : null}

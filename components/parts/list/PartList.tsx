@@ -12,6 +12,7 @@ import { PageHeader } from "@/components/ui/PageHeader";
 import { Select } from "@/components/ui/Select";
 import { useListState } from "@/components/ui/useListState";
 import { useMaterials } from "@/lib/queries/materials";
+import { useFindingCounts } from "@/lib/queries/findingCounts";
 import { usePartList } from "@/lib/queries/parts";
 import { partSorts } from "@/lib/schemas/partInputs";
 import { partColumns } from "./partColumns";
@@ -23,6 +24,7 @@ export function PartList({ mayWrite }: { readonly mayWrite: boolean }) {
   const materials = useMaterials();
   const material = param("material");
   const list = usePartList({ ...state, sort: oneOf(partSorts, state.sort, "updatedAt"), ...(material === "" ? {} : { material }) });
+  const counts = useFindingCounts((list.data?.items ?? []).map(({ id }) => id));
   const narrowed = state.q !== "" || material !== "";
   const add = mayWrite ? <Link href="/parts/new" className={buttonClasses()}><Plus aria-hidden />New part</Link> : null;
   return (
@@ -34,7 +36,7 @@ export function PartList({ mayWrite }: { readonly mayWrite: boolean }) {
           options={[{ value: every, label: "Every material" }, ...(materials.data ?? []).map(({ id, name }) => ({ value: id, label: name }))]} />
       </ListBar>
       {list.isError ? <LoadProblem what="The parts" error={list.error} onRetry={() => void list.refetch()} /> : (
-        <DataTable caption="Parts" columns={partColumns} rows={list.data?.items ?? []} rowKey={(part) => part.id} loading={list.isPending || list.isPlaceholderData}
+        <DataTable caption="Parts" columns={partColumns(counts.data)} rows={list.data?.items ?? []} rowKey={(part) => part.id} loading={list.isPending || list.isPlaceholderData}
           list={{ ...state, total: list.data?.total ?? 0, onChange: change }}
           empty={narrowed
             ? <EmptyState title="No part matches" action={<button type="button" className="font-medium text-accent-ink underline underline-offset-2" onClick={() => change({ q: "", material: undefined })}>Show every part</button>}>Search looks in numbers, names and materials.</EmptyState>

@@ -3,9 +3,12 @@ import { StateMark } from "@/components/ui/StateMark";
 import { TextLink } from "@/components/ui/TextLink";
 import { formatLength } from "@/lib/format/formatLength";
 import { formatMoment } from "@/lib/format/formatMoment";
+import type { FindingCountsView } from "@/lib/schemas/findingCounts";
 import type { PartListItem } from "@/lib/schemas/views";
+import { FindingCountsCell } from "../findings/FindingCountsCell";
 
-export const partColumns: readonly Column<PartListItem>[] = [
+/** The columns of the list; findings come after it, as they are counted. */
+export const partColumns = (findings: FindingCountsView | undefined): readonly Column<PartListItem>[] => [
   { key: "number", header: "Number", sortable: true, className: "whitespace-nowrap", cell: (part) => <span className="num">{part.number}</span> },
   { key: "name", header: "Name", sortable: true, rowHeader: true, cell: (part) => <TextLink href={`/parts/${part.id}`}>{part.name}</TextLink> },
   { key: "material", header: "Material", sortable: true, cell: (part) => part.material },
@@ -13,6 +16,7 @@ export const partColumns: readonly Column<PartListItem>[] = [
   { key: "bends", header: "Bends", sortable: true, align: "right", cell: (part) => <span className="num">{part.bends}</span> },
   { key: "flat", header: "Blank", align: "right", cell: (part) => <span className="num whitespace-nowrap">{formatLength(part.flatWidthMm, "mm", false)} × {formatLength(part.flatDepthMm, "mm")}</span> },
   { key: "revision", header: "Revision", sortable: true, align: "right", cell: (part) => <span className="num">{part.revision}</span> },
+  { key: "findings", header: "Findings", cell: (part) => <FindingCountsCell counts={findings?.[part.id]} /> },
   { key: "released", header: "Setup sheet", cell: (part) => (part.releasedSheets > 0
     ? <StateMark tone="good">{part.releasedSheets === 1 ? "released" : `${part.releasedSheets} released`}</StateMark>
     : <StateMark tone="wait">none yet</StateMark>) },

@@ -11,6 +11,7 @@ import { ApiProblem } from "@/lib/queries/apiProblem";
 import { useMachines } from "@/lib/queries/machines";
 import { useStartPlan } from "@/lib/queries/plans";
 import type { PartDetail } from "@/lib/schemas/views";
+import { StopNotice } from "../findings/StopNotice";
 import { PlanProgress } from "./PlanProgress";
 
 /** Asks for brake and batch, then follows the planner until there is a plan to look at. */
@@ -34,6 +35,7 @@ export function PlanDialog({ part, onClose }: { readonly part: PartDetail; reado
     <DialogBox open onOpenChange={onClose} title="Plan the bends" description={`Finds an order that clears the tools, from the tools in service, for ${part.name}, revision ${part.revision.revision}.`}
       actions={<><Button look="plain" onClick={onClose}>Cancel</Button><Button type="submit" form="plan-form" busy={start.isPending} disabled={machine === ""}>Find a plan</Button></>}>
       <form id="plan-form" noValidate onSubmit={submit} className="space-y-4">
+        <StopNotice document={part.document} />
         {start.error === null ? null : <Notice tone="wrong" title="Planning did not start" live>{start.error.message}</Notice>}
         {machines.isError ? <Notice tone="wrong" title="The brakes could not be listed" live>{machines.error.message}</Notice> : null}
         <Select id="plan-machine" label="Brake" value={machine} onChange={setChosen} error={refused?.messageAt("machineId")} placeholder={machines.isPending ? "Loading…" : "No brake is set up"}
