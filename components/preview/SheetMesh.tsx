@@ -68,7 +68,7 @@ function FaceMesh({ face, thickness, frame, theme, clip, picked, onPick }: FaceM
     <group matrixAutoUpdate={false} matrix={frameMatrix(frame)}>
       <mesh geometry={solid} {...(onPick === undefined ? {} : { onClick: (event: ThreeEvent<MouseEvent>) => { if (event.delta <= DRAGGED_PX) { event.stopPropagation(); onPick(); } } })}>
         <SheetMaterials theme={theme} clip={clip} /></mesh>
-      {picked ? [0, thickness].map((z) => <Line key={z} points={closed(face).map(([x, y]) => [x, y, z] as const)} color={stageColours[theme].mark} lineWidth={3} />) : null}
+      {picked ? [0, thickness].map((z) => <Line key={z} points={closed(face).map(([x, y]) => [x, y, z] as const)} color={stageColours[theme].letter} lineWidth={3.5} />) : null}
       <lineSegments geometry={edges}><lineBasicMaterial color={stageColours[theme].line} clippingPlanes={clip ? [...clip] : null} /></lineSegments>
     </group>
   );
