@@ -12,6 +12,7 @@ const places = [
   { href: "/tools", label: "Tools" },
   { href: "/machines", label: "Brakes" },
   { href: "/materials", label: "Materials" },
+  { href: "/calculator", label: "Calculator" },
   { href: "/bend-table", label: "Bend table" },
   { href: "/people", label: "People" },
   { href: "/activity", label: "Activity" },

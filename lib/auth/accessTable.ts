@@ -58,7 +58,6 @@ export const apiAccess = {
   "GET /api/machines": "machines:read",
   "GET /api/shop-limits": "parts:read",
   "GET /api/finding-counts": "parts:read",
-  "GET /api/finding-counts": "parts:read",
   "GET /api/materials": "materials:read",
   "GET /api/shop-table": "parts:read",
   "GET /api/bend-table": "bendTable:read",

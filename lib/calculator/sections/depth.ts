@@ -18,6 +18,7 @@ export const depth: Section = {
     const back = springback(q.angle, q.insideRadius, q.thickness, q.material);
     return {
       title: reading.title,
+      ...(wingIsLeft(q, reading) ? {} : { remark: { tone: "caution", text: "The radius is too large for this V: no straight sheet is left on the shoulders at this angle, so the depth does not hold. Take a wider V." } as const }),
       answers: [
         ...reading.conversion,
         travel("Depth D at the bend angle, without springback", q, reading, q.angle, q.insideRadius),
@@ -27,6 +28,9 @@ export const depth: Section = {
     };
   })),
 };
+
+/** Between the outside arc and the shoulder arc some straight sheet has to be left. */
+const wingIsLeft = (q: Question, { die, tops }: Reading): boolean => (q.insideRadius + q.thickness + die.shoulderRadius) * Math.sin(q.angle / 2) < tops / 2;
 
 function travel(label: string, q: Question, { die, tops }: Reading, angle: Rad, inside: Mm): Answer {
   const of = { V: figures.length(tops), α: figures.angle(toDeg(angle)), R: figures.length(inside), t: figures.length(q.thickness), r_d: figures.length(die.shoulderRadius) };
