@@ -24,14 +24,14 @@ const zones = [
   zone("./db", "./lib", "db/ imports lib/env only.", ["./env.ts"]),
   zone("./lib", "./app", "lib/ never imports app."),
   zone("./lib", "./components", "lib/ never imports components."),
-  ...["schemas", "format", "queries", "exchange", "csv", "sheet", "mail"].map((folder) =>
+  ...["schemas", "format", "queries", "exchange", "csv", "calculator", "sheet", "mail"].map((folder) =>
     zone(`./lib/${folder}`, "./db", "Only lib/services, lib/jobs and lib/auth touch the database.")),
-  ...["schemas", "format", "queries", "csv", "sheet"].map((folder) =>
+  ...["schemas", "format", "queries", "csv", "calculator", "sheet"].map((folder) =>
     zone(`./lib/${folder}`, "./lib/services", "lib/services is for the server only.")),
   ...["./db", "./lib/services", "./lib/jobs", "./app"].map((from) =>
     zone("./components", from, "components/ imports ui, bending and lib/{queries,schemas,format,sheet} only.")),
-  ...["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "bendTable"].flatMap((feature) =>
-    ["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "bendTable"].filter((other) => other !== feature).map((other) =>
+  ...["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable"].flatMap((feature) =>
+    ["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable"].filter((other) => other !== feature).map((other) =>
       zone(`./components/${feature}`, `./components/${other}`, "A feature does not import a sibling feature."))),
   zone("./app", "./db", "app/ goes through lib/services."),
 ];
