@@ -1,5 +1,4 @@
 import type { Knex } from "knex";
-import { materialById } from "@/bending/handbook/materials";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import { readToolingDocument } from "@/bending/tooling/readToolingDocument";
 import { insertEvent } from "@/db/audit/insertEvent";
@@ -9,6 +8,7 @@ import { insertPart } from "@/db/parts/insertPart";
 import { insertTool } from "@/db/tools/insertTool";
 import { insertUser } from "@/db/users/insertUser";
 import { hashPassword } from "@/lib/auth/hashPassword";
+import { loadShopTable } from "@/lib/services/bendTable/loadShopTable";
 import { readPart } from "@/lib/services/parts/readPart";
 import { mustRead } from "./mustRead";
 import { seedBendTrials } from "./seedBendTrials";
@@ -71,8 +71,9 @@ async function seedTools(db: Knex, brakes: readonly string[]): Promise<void> {
 }
 
 async function seedParts(db: Knex, by: string): Promise<void> {
+  const shop = await loadShopTable(db);
   for (const { number, note, document } of parts) {
-    const read = mustRead(document.name, readPart(document, materialById));
+    const read = mustRead(document.name, readPart(document, shop));
     await insertPart(db, number, { ...read, note, by });
   }
 }

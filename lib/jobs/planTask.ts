@@ -1,5 +1,6 @@
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { PartDocument } from "@/bending/part/partDocument";
+import type { ShopTable } from "@/bending/shopTable/shopCell";
 import type { Machine } from "@/bending/tooling/machine";
 import type { Tool } from "@/bending/tooling/tool";
 
@@ -7,6 +8,8 @@ import type { Tool } from "@/bending/tooling/tool";
 export interface PlanTask {
   readonly document: PartDocument;
   readonly material: MaterialFacts;
+  /** The shop's measured values of that material; absent when there are none. */
+  readonly shopTable?: ShopTable;
   readonly tools: readonly Tool[];
   readonly machine: Machine;
   readonly batch: number;

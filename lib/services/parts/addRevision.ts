@@ -1,9 +1,9 @@
 import type { z } from "zod";
 import { foundAgain } from "../foundAgain";
-import { materialLookup } from "../materialLookup";
 import { recordEvent } from "../recordEvent";
 import { partDetail } from "./partDetail";
 import { readPart } from "./readPart";
+import { shopOf } from "./shopOf";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { database } from "@/db/client";
 import { insertRevision } from "@/db/parts/insertRevision";
@@ -15,7 +15,7 @@ import type { PartDetail } from "@/lib/schemas/views";
 /** The next revision of a part; refused when somebody else saved one after `basedOn`. */
 export async function addRevision(person: SignedInPerson, partId: string, input: z.output<typeof addRevisionSchema>): Promise<Result<PartDetail, Failure>> {
   const db = database();
-  const read = readPart(input.document, await materialLookup(db));
+  const read = readPart(input.document, await shopOf(db, input.document));
   if (!read.ok) return read;
   const added = await db.transaction(async (within) => {
     const done = await insertRevision(within, partId, input.basedOn, { ...read.value, note: input.note, by: person.id });

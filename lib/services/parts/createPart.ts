@@ -1,10 +1,10 @@
 import type { z } from "zod";
 import { foundAgain } from "../foundAgain";
 import { isTaken } from "../isTaken";
-import { materialLookup } from "../materialLookup";
 import { recordEvent } from "../recordEvent";
 import { partDetail } from "./partDetail";
 import { readPart } from "./readPart";
+import { shopOf } from "./shopOf";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { database } from "@/db/client";
 import { insertPart } from "@/db/parts/insertPart";
@@ -16,7 +16,7 @@ import type { PartDetail } from "@/lib/schemas/views";
 /** A new part with its first revision. */
 export async function createPart(person: SignedInPerson, input: z.output<typeof createPartSchema>): Promise<Result<PartDetail, Failure>> {
   const db = database();
-  const read = readPart(input.document, await materialLookup(db));
+  const read = readPart(input.document, await shopOf(db, input.document));
   if (!read.ok) return read;
   try {
     const id = await db.transaction(async (within) => {

@@ -6,20 +6,21 @@ import type { MaterialLookup } from "@/bending/handbook/material";
 import { buildPart } from "@/bending/part/buildPart";
 import { flatPattern } from "@/bending/part/flatPattern";
 import { readPartDocument } from "@/bending/part/readPartDocument";
+import type { ShopTable } from "@/bending/shopTable/shopCell";
 import type { NewRevision } from "@/db/parts/newRevision";
 import type { Failure } from "@/lib/api/failure";
 
 const LONGEST_NAME = 200;
 
 /** Checks a part document through and through, and takes from it what is searched; paths begin with `document`. */
-export function readPart(json: unknown, materials: MaterialLookup): Result<Omit<NewRevision, "note" | "by">, Failure> {
+export function readPart(json: unknown, { materials, table }: { readonly materials: MaterialLookup; readonly table: ShopTable }): Result<Omit<NewRevision, "note" | "by">, Failure> {
   const problems = unstorable(json);
   if (problems.length > 0) return refuse(problems);
   const document = readPartDocument(json);
   if (!document.ok) return refuse(document.error);
   const { name, material } = document.value;
   if (name.length > LONGEST_NAME) return refuse([{ path: "name", message: `must be at most ${LONGEST_NAME} characters` }]);
-  const part = buildPart(document.value, { materials });
+  const part = buildPart(document.value, { materials, shopTable: table });
   if (!part.ok) return refuse(part.error);
   const flat = flatPattern(part.value);
   return ok({

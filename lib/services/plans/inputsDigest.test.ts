@@ -1,5 +1,7 @@
 import { expect, it } from "vitest";
-import { builtInMaterials } from "@/bending/handbook/materials";
+import { builtInMaterials, materialById } from "@/bending/handbook/materials";
+import { shopTable } from "@/bending/shopTable/shopTable";
+import { valuesOf } from "@/bending/shopTable/valuesOf";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import type { PlanTask } from "@/lib/jobs/planTask";
 import { bracketDocument } from "@/tests/integration/shop/bracketDocument";
@@ -13,6 +15,10 @@ const task: PlanTask = {
   document: bracketDocument, material: builtInMaterials[0]!, tools: [bracketPunch], machine: machine.value, batch: 10, alternatives: 3, limitMs: 1000,
 };
 const digest = (changes: Partial<PlanTask>, engine = "1") => inputsDigest(engine, { ...task, ...changes });
+const table = (blankLength: number) => valuesOf(shopTable([{
+  id: "T-1", units: "mm", material: "S235", batch: "", thickness: 2, vOpening: 12, punchRadius: 0.8, angle: 90, flanges: [60, 40], blankLength, measuredOn: "2026-11-30",
+  instruments: { length: { uncertainty: 0.03, resolution: 0.01 }, angle: { uncertainty: 0.1, resolution: 0 } },
+}], materialById), "S235");
 const pieces = (change: object) => ({ tools: [{ ...bracketPunch, pieces: bracketPunch.pieces.map((piece) => ({ ...piece, ...change })) }] });
 
 it("is the same for the same inputs, in whatever order their keys stand", () => {
@@ -24,7 +30,7 @@ it("is the same for the same inputs, in whatever order their keys stand", () => 
 it("is another one for every change that a plan follows from", () => {
   const all = [
     digest({}), digest({}, "2"), digest({ batch: 11 }), digest({ document: { ...bracketDocument, thickness: 3 } }), digest({ tools: [] }),
-    digest(pieces({ length: 150 })), digest({ machine: { ...machine.value, fingers: 1 } as PlanTask["machine"] }), digest({ material: builtInMaterials[1]! }),
+    digest(pieces({ length: 150 })), digest({ machine: { ...machine.value, fingers: 1 } as PlanTask["machine"] }), digest({ material: builtInMaterials[1]! }), digest({ shopTable: table(96.3) }), digest({ shopTable: table(96.2) }),
   ];
   expect(new Set(all).size).toBe(all.length);
 });

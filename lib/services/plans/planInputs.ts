@@ -1,4 +1,5 @@
 import type { z } from "zod";
+import { loadValues } from "../bendTable/loadValues";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import type { Connection } from "@/db/connection";
@@ -24,7 +25,7 @@ export interface PlanInputs {
   readonly task: PlanTask;
 }
 
-/** Gathers what a plan is made from, as it is now: the revision, the machine, the tools in service. */
+/** Gathers what a plan is made from, as it is now: the revision, the machine, the tools in service, the shop's measured values. */
 export async function planInputs(db: Connection, input: z.output<typeof startPlanSchema>): Promise<Result<PlanInputs, Failure>> {
   const found = await findPart(db, input.partId, input.revision);
   if (!found) return refuse(input.revision === undefined ? "partId" : "revision", "There is no such part or revision (any more).");
@@ -35,6 +36,7 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
   const { document } = found.revision;
   const material = await findMaterial(db, document.material);
   if (!material) return refuse("partId", `The material ${document.material} of the part is not known to the shop.`);
+  const table = await loadValues(db, document.material);
   const tools = await findToolsInService(db);
   if (tools.length === 0) return fail({ kind: "conflict", message: "No tool has a piece in service, so nothing can be planned. The toolroom enters tools." });
   return ok({
@@ -44,7 +46,7 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
     machineDocument: row.document,
     materialVersionId: material.version_id,
     subject: `${found.part.number} rev ${found.revision.revision} on ${row.name}`,
-    task: { document, material: material.facts, tools, machine: machine.value, batch: input.batch, alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
+    task: { document, material: material.facts, ...(table.cells.length > 0 ? { shopTable: table } : {}), tools, machine: machine.value, batch: input.batch, alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
   });
 }
 
