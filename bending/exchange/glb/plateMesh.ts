@@ -21,7 +21,7 @@ export function plateMesh(regions: readonly FlatRegion[], thickness: number, fol
     const starts = rings.slice(1).map((_, i) => rings.slice(0, i + 1).reduce((sum, one) => sum + one.length, 0));
     const triangles = earcut(points.flatMap(([x, y]) => [x, y]), starts.length > 0 ? starts : null, 2);
     for (let i = 0; i + 2 < triangles.length; i += 3) {
-      const [a, b, c] = [points[triangles[i] ?? 0] ?? [0, 0], points[triangles[i + 1] ?? 0] ?? [0, 0], points[triangles[i + 2] ?? 0] ?? [0, 0]];
+      const [a, b, c]: readonly [FlatPoint, FlatPoint, FlatPoint] = [points[triangles[i] ?? 0] ?? [0, 0], points[triangles[i + 1] ?? 0] ?? [0, 0], points[triangles[i + 2] ?? 0] ?? [0, 0]];
       const turn: readonly FlatPoint[] = signedArea([a, b, c]) >= 0 ? [a, b, c] : [a, c, b];
       for (const p of turn) push(fold(p, thickness), through(fold, p, thickness, 1));
       for (const p of [...turn].reverse()) push(fold(p, 0), through(fold, p, thickness, -1));

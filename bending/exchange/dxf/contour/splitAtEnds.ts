@@ -38,7 +38,11 @@ function nearestSplit(nodes: readonly Vec2[], edges: readonly NetworkEdge[], nod
   let best: Split | null = null;
   for (const [index, edge] of edges.entries()) {
     if (edge.from === node || edge.to === node) continue;
-    const halves = splitPiece({ ...edge.piece, from: nodes[edge.from] ?? edge.piece.from, to: nodes[edge.to] ?? edge.piece.to }, point, tolerance);
+    const [from, to] = [nodes[edge.from] ?? edge.piece.from, nodes[edge.to] ?? edge.piece.to];
+    // An arc stands off its chord by half the bulge times the chord, and past its ends by no more.
+    const room = tolerance + (edge.piece.bulge === 0 ? 0 : Math.abs(edge.piece.bulge) * (Math.abs(to[0] - from[0]) + Math.abs(to[1] - from[1])));
+    if (outside(from[0], to[0], point[0], room) || outside(from[1], to[1], point[1], room)) continue;
+    const halves = splitPiece({ ...edge.piece, from, to }, point, tolerance);
     if (!halves) continue;
     const at = halves[0].to;
     const off = Math.hypot(at[0] - point[0], at[1] - point[1]);
@@ -46,3 +50,5 @@ function nearestSplit(nodes: readonly Vec2[], edges: readonly NetworkEdge[], nod
   }
   return best;
 }
+
+const outside = (a: number, b: number, value: number, room: number): boolean => value < Math.min(a, b) - room || value > Math.max(a, b) + room;

@@ -52,7 +52,7 @@ export function flatDocument({ outline, holes, bends }: FoundFlat, facts: FlatFa
 
 function entryOf({ line, direction, data }: FoundBend, id: string, said: Partial<BendFacts>, point: (p: Vec2) => readonly [number, number]): FlatBendEntry {
   const insideRadius = said.insideRadius ?? data?.insideRadius;
-  const kFactor = said.kFactor ?? data?.k;
+  const kFactor = said.kFactor ?? data?.k ?? undefined;
   const hem = said.angle === undefined || said.angle === data?.angle ? data?.hem : null;
   return {
     id, line: [point(line[0]), point(line[1])], angle: said.angle ?? data?.angle ?? USUAL_ANGLE, direction: said.direction ?? direction,

@@ -70,7 +70,8 @@ export interface BendData {
   readonly hem: HemKind | null;
   /** In millimetres. */
   readonly insideRadius: number;
-  readonly k: number;
+  /** Null where the allowance answers to no K from 0 to 1: the rule gives it again. */
+  readonly k: number | null;
 }
 
 export type DxfEntity = EntityHead & DxfShape;

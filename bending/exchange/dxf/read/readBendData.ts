@@ -14,7 +14,7 @@ export function readBendData(raw: RawEntity): BendData | null {
   const own = end < 0 ? rest : rest.slice(0, end);
   const [id, direction, hem = ""] = own.filter((tag) => tag.code === 1000).map((tag) => readText(tag.value));
   const [angle = NaN, insideRadius = NaN, k = NaN] = own.filter((tag) => tag.code === 1040).map((tag) => Number(tag.value));
-  const whole = angle > 0 && angle <= (hem === "teardrop" ? 270 : 180) && insideRadius >= 0 && insideRadius < 1e5 && k > 0 && k <= 1;
+  const whole = angle > 0 && angle <= (hem === "teardrop" ? 270 : 180) && insideRadius >= 0 && insideRadius < 1e5 && Number.isFinite(k);
   if (!id || !whole || (direction !== "up" && direction !== "down")) return null;
-  return { id: id.slice(0, 64), angle, direction, hem: hem === "closed" || hem === "open" || hem === "teardrop" ? hem : null, insideRadius, k };
+  return { id: id.slice(0, 64), angle, direction, hem: hem === "closed" || hem === "open" || hem === "teardrop" ? hem : null, insideRadius, k: k > 0 && k <= 1 ? k : null };
 }
