@@ -15,11 +15,11 @@ interface JudgeDialogProps {
 }
 
 const words = {
-  excluded: { title: "Leave out", button: "Leave it out", done: "left out", why: "It stays on record and in sight, does not count in the value, and can be brought back." },
+  excluded: { title: "Exclude", button: "Exclude it", done: "excluded", why: "It stays on record and in sight, does not count in the value, and can be brought back." },
   withdrawn: { title: "Withdraw", button: "Withdraw it for good", done: "withdrawn", why: "For a trial that was never true: a slip of the pen, a wrong strip. It leaves the value for good and stays only in the list of trials." },
 } as const;
 
-/** Asks why, and leaves a trial out of its value or withdraws it. */
+/** Asks why, and excludes a trial from its value or withdraws it. */
 export function JudgeDialog({ trial, to, onClose }: JudgeDialogProps) {
   const toast = useToast();
   const judge = useJudgeTrial();

@@ -6,7 +6,7 @@ import { useJudgeTrial } from "@/lib/queries/bendTable";
 import type { TrialView } from "@/lib/schemas/bendTableViews";
 import { JudgeDialog } from "./JudgeDialog";
 
-/** What an engineer can do with a trial: leave it out, bring it back, withdraw it. */
+/** What an engineer can do with a trial: exclude it, bring it back, withdraw it. */
 export function TrialActions({ trial }: { readonly trial: TrialView }) {
   const toast = useToast();
   const judge = useJudgeTrial();
@@ -20,7 +20,7 @@ export function TrialActions({ trial }: { readonly trial: TrialView }) {
     <div className="flex justify-end gap-1">
       {trial.state === "excluded"
         ? <Button look="plain" size="small" busy={judge.isPending} aria-label={`Bring back ${trial.number}`} onClick={bringBack}>Bring back</Button>
-        : <Button look="plain" size="small" aria-label={`Leave out ${trial.number}`} onClick={() => setAsking("excluded")}>Leave out</Button>}
+        : <Button look="plain" size="small" aria-label={`Exclude ${trial.number}`} onClick={() => setAsking("excluded")}>Exclude</Button>}
       <Button look="quiet" size="small" aria-label={`Withdraw ${trial.number}`} onClick={() => setAsking("withdrawn")}>Withdraw</Button>
       {asking === null ? null : <JudgeDialog trial={trial} to={asking} onClose={() => setAsking(null)} />}
     </div>

@@ -7,7 +7,7 @@ import { trialColumns, trialQuery } from "./trialQuery";
 import type { TrialRow } from "./trialRow";
 
 const columns = {
-  number: "trial.created_at",
+  number: "number_order",
   material: "trial.material_id",
   batch: "trial.batch",
   thickness: "trial.nominal_thickness_mm",

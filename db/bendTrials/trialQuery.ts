@@ -23,6 +23,8 @@ export const trialColumns = (db: Connection): readonly (string | Knex.Raw)[] => 
   "trial.part_id", "part.number as part_number", "trial.sheet_id", "sheet.number as sheet_number",
   "trial.excluded_at", "trial.excluded_reason", "trial.withdrawn_at", "trial.withdrawn_reason",
   "author.name as created_by_name", "excluder.name as excluded_by_name", "withdrawer.name as withdrawn_by_name",
+  // T-9999 before T-10000.
+  db.raw("lpad(trial.number, 20, '0') as number_order"),
   db.raw("to_char(trial.measured_on, 'YYYY-MM-DD') as measured_on"),
   ...["length_instrument", "thickness_instrument", "angle_instrument", "radius_instrument"].map((name) => db.raw(instrument(name))),
 ];

@@ -20,7 +20,7 @@ const owen = "Owen Pritchard";
 
 /** What was bent in the invented shop: its main sheets over the dies that it has. Two trials lie apart, one value stands on a single strip. */
 const rows: readonly Row[] = [
-  { material: "S235", thickness: 1.5, vOpening: 10, angle: 90, count: 5, batch: "R-2207", day: "2025-03-11", by: greta },
+  { material: "S235", thickness: 1.5, vOpening: 8, angle: 90, count: 5, batch: "R-2207", day: "2025-03-11", by: greta },
   { material: "S235", thickness: 1.5, vOpening: 12, angle: 90, count: 4, batch: "R-2207", day: "2025-03-11", by: greta },
   { material: "S235", thickness: 2, vOpening: 12, angle: 90, count: 6, batch: "R-2318", day: "2025-04-02", by: greta },
   { material: "S235", thickness: 2, vOpening: 12, angle: 45, count: 3, batch: "R-2318", day: "2025-04-02", by: greta },

@@ -9,7 +9,7 @@ import type { CoverageCell, CoverageView } from "@/lib/schemas/bendTableViews";
 export function CoverageGrid({ coverage: { openings, rows, material } }: { readonly coverage: CoverageView }) {
   return (
     <div className="min-w-0">
-      <div className="overflow-x-auto border-y border-ink" tabIndex={0} role="region" aria-label={`Coverage of ${material}`}>
+      <div className="relative overflow-x-auto border-y border-ink" tabIndex={0} role="region" aria-label={`Coverage of ${material}`}>
         <table className="w-full border-collapse text-left">
           <caption className="sr-only">{`Coverage of ${material}: sheets down, V openings across`}</caption>
           <thead>

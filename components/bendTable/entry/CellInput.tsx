@@ -1,5 +1,5 @@
 import type { ClipboardEvent, KeyboardEvent } from "react";
-import { controlClasses } from "@/components/ui/controlClasses";
+import { classes } from "@/components/ui/classes";
 import { cellId } from "./cellId";
 import { fieldWords } from "./fieldWords";
 import type { LineField } from "./trialDraft";
@@ -10,6 +10,8 @@ interface CellInputProps {
   readonly field: LineField;
   readonly value: string;
   readonly wrong: boolean;
+  /** What holds while it is empty. */
+  readonly standing?: string;
   readonly onText: (text: string) => void;
   readonly onKeys: (event: KeyboardEvent<HTMLInputElement>) => void;
   readonly onPaste: (event: ClipboardEvent<HTMLInputElement>) => void;
@@ -17,14 +19,15 @@ interface CellInputProps {
 
 const words: ReadonlySet<LineField> = new Set(["material", "batch", "note"]);
 
-/** One cell of the notebook: a text box without a frame of its own to spare room. */
-export function CellInput({ line, number, field, value, wrong, onText, onKeys, onPaste }: CellInputProps) {
+/** One cell of the notebook: a narrow text box, so that a whole line is in sight. */
+export function CellInput({ line, number, field, value, wrong, standing, onText, onKeys, onPaste }: CellInputProps) {
   const id = cellId(line, field);
   const text = words.has(field);
   return (
     <input id={id} type="text" inputMode="text" autoComplete="off" spellCheck={false} aria-label={`${fieldWords[field]}, line ${number}`}
       {...(field === "material" ? { list: "trial-materials" } : {})} aria-invalid={wrong || undefined} aria-describedby={wrong ? `${id}-error` : undefined}
-      value={value} onChange={(event) => onText(event.target.value)} onKeyDown={onKeys} onPaste={onPaste} onFocus={(event) => event.target.select()}
-      className={controlClasses(wrong, text ? "min-h-8 px-1.5" : "num min-h-8 px-1.5 text-right")} />
+      value={value} placeholder={standing} onChange={(event) => onText(event.target.value)} onKeyDown={onKeys} onPaste={onPaste} onFocus={(event) => event.target.select()}
+      className={classes("min-h-8 w-full rounded border bg-sheet px-1.5 text-ink placeholder:text-ink-faint focus-visible:outline-2 focus-visible:-outline-offset-1",
+        wrong ? "border-brick outline-brick" : "border-rule-strong hover:border-ink-soft", !text && "num text-right")} />
   );
 }

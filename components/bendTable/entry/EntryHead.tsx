@@ -1,5 +1,6 @@
 "use client";
 import type { LengthUnit } from "@/bending/core/units";
+import type { MaterialFacts } from "@/bending/handbook/material";
 import { Choice } from "@/components/ui/Choice";
 import { Select } from "@/components/ui/Select";
 import { TextInput } from "@/components/ui/TextInput";
@@ -11,6 +12,7 @@ import type { AngleKind, TrialDraft } from "./trialDraft";
 interface EntryHeadProps {
   readonly draft: TrialDraft;
   readonly update: (next: (old: TrialDraft) => TrialDraft) => void;
+  readonly materials: readonly MaterialFacts[];
   readonly instruments: readonly InstrumentView[];
   readonly problems: ReturnType<typeof headProblems>;
 }
@@ -18,7 +20,7 @@ interface EntryHeadProps {
 const same = "same";
 
 /** What holds for every line of the page: when, who, in which units, with which instruments. */
-export function EntryHead({ draft, update, instruments, problems }: EntryHeadProps) {
+export function EntryHead({ draft, update, materials, instruments, problems }: EntryHeadProps) {
   const set = (change: Partial<TrialDraft>) => update((old) => ({ ...old, ...change }));
   const options = (angle: boolean) => instruments
     .filter(({ kind, withdrawn }) => withdrawn === null && (kind === "protractor") === angle)
@@ -32,8 +34,8 @@ export function EntryHead({ draft, update, instruments, problems }: EntryHeadPro
         onChange={(value) => set({ thicknessInstrument: value === same ? "" : value })} />
       <Select id="trials-angleInstrument" label="Angle with" value={draft.angleInstrument} onChange={(angleInstrument) => set({ angleInstrument })} options={options(true)} error={problems.angleInstrument} placeholder="Choose" />
       <Select id="trials-radiusInstrument" label="Inside radius with" value={draft.radiusInstrument} onChange={(radiusInstrument) => set({ radiusInstrument })} options={options(false)} error={problems.radiusInstrument} placeholder="Choose" />
-      <Choice<LengthUnit> label="Lengths in" value={draft.units} onChange={(units) => update((old) => convertTrialDraft(old, { units, angles: old.angles }))} options={[{ value: "mm", label: "mm" }, { value: "in", label: "inch" }]} />
-      <Choice<AngleKind> label="Angles" value={draft.angles} onChange={(angles) => update((old) => convertTrialDraft(old, { units: old.units, angles }))}
+      <Choice<LengthUnit> label="Lengths in" value={draft.units} onChange={(units) => update((old) => convertTrialDraft(old, { units, angles: old.angles }, materials))} options={[{ value: "mm", label: "mm" }, { value: "in", label: "inch" }]} />
+      <Choice<AngleKind> label="Angles" value={draft.angles} onChange={(angles) => update((old) => convertTrialDraft(old, { units: old.units, angles }, materials))}
         options={[{ value: "turned", label: "turned", name: "turned through, 0 is flat" }, { value: "included", label: "included", name: "included, 180 is flat" }]} />
     </div>
   );

@@ -26,7 +26,7 @@ export function TrialGrid({ lines, context, refused, tried, actions }: TrialGrid
   const unitOf = (field: LineField) => (words.has(field) ? "" : field === "angle" ? (angles === "turned" ? "° turned" : "° incl.") : units);
   const head = "px-1.5 pb-1 align-bottom text-sm leading-tight font-medium text-ink-soft";
   return (
-    <div className="max-h-[75dvh] overflow-auto border-y border-ink" tabIndex={0} role="region" aria-label="Trials">
+    <div className="relative max-h-[75dvh] overflow-auto border-y border-ink" tabIndex={0} role="region" aria-label="Trials">
       <table className="w-full min-w-300 border-collapse text-left">
         <caption className="sr-only">Trials: one line for each bend, with what comes of it</caption>
         <thead className="sticky top-0 z-10 bg-paper">

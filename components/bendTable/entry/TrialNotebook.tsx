@@ -13,6 +13,7 @@ import { useAddTrials } from "@/lib/queries/bendTable";
 import type { AddedTrials, InstrumentView } from "@/lib/schemas/bendTableViews";
 import { cellId } from "./cellId";
 import { EntryHead } from "./EntryHead";
+import { EntryNotes } from "./EntryNotes";
 import { firstDraft } from "./firstDraft";
 import { headProblems } from "./headProblems";
 import { newTrialId } from "./newTrialId";
@@ -87,12 +88,9 @@ export function TrialNotebook({ person, materials, instruments }: TrialNotebookP
         {restoredAt === null ? null : <Notice tone="note" title={`This page was begun before, last changed ${formatMoment(restoredAt)}`}>It is kept in this browser until it is saved.</Notice>}
         {add.error === null ? null : <Notice tone="wrong" title="Nothing was saved; what you entered is still here" live>{add.error.message}</Notice>}
       </div>
-      <EntryHead draft={draft} update={update} instruments={instruments} problems={tried ? headProblems(draft) : {}} />
+      <EntryHead draft={draft} update={update} materials={materials} instruments={instruments} problems={tried ? headProblems(draft) : {}} />
       <TrialGrid lines={lines} context={context} refused={refused} tried={tried} actions={actions} />
-      <p className="mt-2 max-w-prose text-sm text-ink-faint">
-        Enter: next line, with material, batch, sheet, V and punch as above. A ditto mark (&quot;) copies what is above it. Arrows up and down stay in the column. Ctrl+Enter saves, Ctrl+Delete removes the line. Cells copied from a spreadsheet can be pasted.
-        Flanges are outside lengths: up to 90° to where the outside surfaces would meet, above 90° over the bend. Nominal: what the sheet was bought as; empty for the nearest usual thickness. * not measured: the radius that the V or the punch gives.
-      </p>
+      <EntryNotes />
     </>
   );
 }

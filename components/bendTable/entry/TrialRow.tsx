@@ -7,6 +7,7 @@ import { CellInput } from "./CellInput";
 import { LineNumbers } from "./LineNumbers";
 import { readRow, type RowContext } from "./readRow";
 import type { LineProblems } from "./readTrialLine";
+import { standingNominal } from "./standingNominal";
 import { lineFields, type LineField, type TrialLine } from "./trialDraft";
 
 export interface RowActions {
@@ -31,6 +32,7 @@ interface TrialRowProps {
 /** One line of the notebook with what comes of it, and under it what is wrong with it. */
 export const TrialRow = memo(function TrialRow({ line, number, context, refused, tried, only, actions }: TrialRowProps) {
   const read = useMemo(() => readRow(line, context), [line, context]);
+  const standing = standingNominal(line, context.head.units, context.materials);
   const problems: LineProblems = { ...read.problems, ...refused };
   const wrong = lineFields.filter((field) => problems[field] !== undefined && (tried || line[field].trim() !== ""));
   return (
@@ -39,7 +41,7 @@ export const TrialRow = memo(function TrialRow({ line, number, context, refused,
         <th scope="row" className="num px-2 text-right font-normal text-ink-faint">{number}</th>
         {lineFields.map((field) => (
           <td key={field} className="p-0.5">
-            <CellInput line={line.id} number={number} field={field} value={line[field]} wrong={wrong.includes(field)}
+            <CellInput line={line.id} number={number} field={field} value={line[field]} wrong={wrong.includes(field)} {...(field === "nominal" && standing !== null ? { standing } : {})}
               onText={(text) => actions.text(line.id, field, text)} onKeys={(event) => actions.keys(line.id, field, event)} onPaste={(event) => actions.paste(line.id, field, event)} />
           </td>
         ))}

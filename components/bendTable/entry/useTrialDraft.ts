@@ -1,5 +1,6 @@
 "use client";
 import { useEffect, useState } from "react";
+import { isBlankLine } from "./isBlankLine";
 import type { TrialDraft } from "./trialDraft";
 
 interface Stored { readonly savedAt: string; readonly draft: TrialDraft }
@@ -22,7 +23,7 @@ export function useTrialDraft(person: string, start: () => TrialDraft) {
   const key = `foldwright.bend-trials.${version}.${person}`;
   const [begun] = useState(() => ({ stored: read(key), start: start() }));
   const [draft, setDraft] = useState(begun.stored?.draft ?? begun.start);
-  const [restoredAt, setRestoredAt] = useState(begun.stored?.savedAt ?? null);
+  const [restoredAt, setRestoredAt] = useState(begun.stored !== null && begun.stored.draft.lines.some((line) => !isBlankLine(line)) ? begun.stored.savedAt : null);
   const changed = draft !== begun.start;
   useEffect(() => {
     if (!changed) return undefined;

@@ -9,7 +9,7 @@ const SIDE = 28;
 const DOT = 5;
 const ROW = 13;
 
-/** Every trial on a line of deductions: full dots count, a diamond lies apart, a cross is left out; the mean with its uncertainty, and the handbook's value. */
+/** Every trial on a line of deductions: full dots count, a diamond lies apart, a cross is excluded; the mean with its uncertainty, and the handbook's value. */
 export function DotPlot({ value }: { readonly value: ValueDetail }) {
   const { trials, deductionMm, expandedMm, handbook } = value;
   const scale = plotScale([...trials.map(({ deductionHereMm }) => deductionHereMm), handbook.deductionMm, ...(deductionMm === null ? [] : [deductionMm])]);
@@ -65,6 +65,6 @@ function described({ trials, deductionMm, handbook }: ValueDetail): string {
     deductionMm === null ? "none counts" : `mean ${formatFixed(deductionMm, 2)} mm`,
     `handbook ${formatFixed(handbook.deductionMm, 2)} mm`,
     ...(apart.length === 0 ? [] : [`lying apart: ${apart.join(", ")}`]),
-    ...(out.length === 0 ? [] : [`left out: ${out.join(", ")}`]),
+    ...(out.length === 0 ? [] : [`excluded: ${out.join(", ")}`]),
   ].join(", ");
 }

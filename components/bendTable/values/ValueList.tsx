@@ -32,7 +32,7 @@ export function ValueList({ mayWrite }: { readonly mayWrite: boolean }) {
   const enter = mayWrite ? <Link href="/bend-table/new" className={buttonClasses()}><NotebookPen aria-hidden />Enter trials</Link> : null;
   return (
     <>
-      <PageHeader kicker="Register" title="Bend table" summary="The shop's own measured bends. Where a part says that the shop's values go first, its flat length comes from here."
+      <PageHeader kicker="Register" title="Bend table" summary="The shop's own measured bends. Unless a part names a handbook rule or a K, its flat length comes from here."
         actions={<><a href="/api/bend-table/export/values" download className={buttonClasses("plain")}><Download aria-hidden />Values as CSV</a>{enter}</>} />
       <BendTableTabs />
       <ListBar>

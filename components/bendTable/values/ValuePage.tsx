@@ -43,15 +43,15 @@ export function ValuePage({ valueKey, mayJudge }: { readonly valueKey: string; r
       </div>
       <Panel title="Trials" aside={<>lengths in mm; the deduction is at <span className="num">{formatNumber(data.thicknessMm, 2)} mm</span> and <span className="num">{formatNumber(data.angleDeg, 1)}°</span></>}>
         <ValueTrials trials={data.trials} mayJudge={mayJudge} />
-        <p className="mt-2 max-w-prose text-sm text-ink-faint">Score: how far a trial lies from the median, in standard deviations estimated from the median deviation. Over 3.5 it is marked as an outlier; it counts until an engineer leaves it out.</p>
+        <p className="mt-2 max-w-prose text-sm text-ink-faint">Score: how far a trial lies from the median, in standard deviations estimated from the median deviation. Over 3.5 it is marked as an outlier; it counts until an engineer excludes it.</p>
       </Panel>
     </>
   );
 }
 
 function Standing({ value }: { readonly value: ValueDetail }) {
-  if (value.state === "none") return <div className="mb-6"><Notice tone="caution" title="No trial counts">Every trial of this value is left out, so the handbook holds. Bring one back, or bend new ones.</Notice></div>;
-  if (value.state === "outlier") return <div className="mb-6"><Notice tone="caution" title={value.outliers === 1 ? "One trial lies apart from the others" : `${value.outliers} trials lie apart from the others`}>It counts as long as nobody leaves it out. Look for a reason first: a slip in measuring is one, being far off alone is none.</Notice></div>;
+  if (value.state === "none") return <div className="mb-6"><Notice tone="caution" title="No trial counts">Every trial of this value is excluded, so the handbook holds. Bring one back, or bend new ones.</Notice></div>;
+  if (value.state === "outlier") return <div className="mb-6"><Notice tone="caution" title={value.outliers === 1 ? "One trial lies apart from the others" : `${value.outliers} trials lie apart from the others`}>It counts as long as nobody excludes it. Look for a reason first: a slip in measuring is one, being far off alone is none.</Notice></div>;
   if (value.state === "few") return <div className="mb-6"><Notice tone="note" title={value.counted === 1 ? "Only one trial" : "Only two trials"}>From three on it can be told whether one lies apart.</Notice></div>;
   return null;
 }

@@ -19,7 +19,7 @@ const columns: readonly Column<ValueTrial>[] = [
   { key: "flangeA", header: "Flange 1", align: "right", cell: fixed(2, ({ flangesMm }) => flangesMm[0]) },
   { key: "flangeB", header: "Flange 2", align: "right", cell: fixed(2, ({ flangesMm }) => flangesMm[1]) },
   { key: "radius", header: "Inside r", align: "right", cell: fixed(2, ({ insideRadiusMm }) => insideRadiusMm) },
-  { key: "deduction", header: "Deduction", align: "right", cell: (trial) => <><Fixed value={trial.deductionHereMm} digits={2} />{trial.result === null ? null : <span className="num whitespace-nowrap text-ink-faint"> ± {trial.result.deduction.expanded.toFixed(2)}</span>}</> },
+  { key: "deduction", header: "Deduction", align: "right", cell: (trial) => <><Fixed value={trial.deductionHereMm} digits={2} />{trial.result === null ? null : <span className="num ml-1.5 whitespace-nowrap text-ink-faint">± {trial.result.deduction.expanded.toFixed(2)}</span>}</> },
   { key: "k", header: "K", align: "right", cell: fixed(3, ({ kHere }) => kHere) },
   { key: "score", header: "Score", align: "right", cell: fixed(1, ({ score }) => score) },
   { key: "who", header: "Measured", cell: ({ measuredOn, measuredBy }) => <span className="text-sm"><span className="num whitespace-nowrap">{measuredOn}</span> {measuredBy}</span> },

@@ -17,7 +17,7 @@ export const valueColumns: readonly Column<ValueItem>[] = [
   { key: "vOpening", header: "V, mm", sortable: true, align: "right", cell: ({ vOpeningMm }) => size(vOpeningMm) },
   { key: "punchRadius", header: "Punch r", sortable: true, align: "right", cell: ({ punchRadiusMm }) => size(punchRadiusMm) },
   { key: "angle", header: "Angle", sortable: true, align: "right", cell: ({ angleDeg }) => <span className="num">{formatNumber(angleDeg, 1)}°</span> },
-  { key: "deduction", header: "Deduction, mm", sortable: true, align: "right", cell: (value) => <><Fixed value={value.deductionMm} digits={2} />{value.expandedMm === null ? null : <span className="num whitespace-nowrap text-ink-faint"> ± {value.expandedMm.toFixed(2)}</span>}</> },
+  { key: "deduction", header: "Deduction, mm", sortable: true, align: "right", cell: (value) => <><Fixed value={value.deductionMm} digits={2} />{value.expandedMm === null ? null : <span className="num ml-1.5 whitespace-nowrap text-ink-faint">± {value.expandedMm.toFixed(2)}</span>}</> },
   { key: "handbook", header: "To handbook", align: "right", cell: (value) => <Difference value={value} /> },
   { key: "k", header: "K", sortable: true, align: "right", cell: ({ k }) => <Fixed value={k} digits={3} /> },
   { key: "insideRadius", header: "Inside r, mm", sortable: true, align: "right", cell: (value) => <><Fixed value={value.radiusMm} digits={2} />{value.radiusSource === "measured" ? null : <span className="text-ink-faint" title={`not measured: ${value.radiusSource}`}>*</span>}</> },
