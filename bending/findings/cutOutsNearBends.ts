@@ -2,10 +2,10 @@ import { mm } from "../core/units";
 import type { Vec2 } from "../geometry/vec2";
 import { holeToBend } from "../handbook/holeToBend";
 import { bendDirections } from "../part/bendDirections";
-import { formatLength } from "../core/formatLength";
 import type { Bend, Face } from "../part/partModel";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
+import { shownLength } from "./shownLength";
 
 /** mm. Corners this near to the bend's own ends belong to it. */
 const AT_THE_END_MM = 0.05;
@@ -43,7 +43,7 @@ function judge(context: FindingsContext, face: Face, bend: Bend, dip: Dip, i: nu
     rule: "cut-out",
     severity: "caution",
     title: "Cut-out too near the bend",
-    message: `The outline of ${face.id} comes within ${formatLength(Math.round(dip.depth * 100) / 100, units)} of where bend ${bend.id} begins, and bulges there as it forms; ${formatLength(Math.ceil(wanted * 100 - 1e-6) / 100, units)} is the least, or cut it through the bend on purpose.`,
+    message: `The outline of ${face.id} comes within ${shownLength(dip.depth, units)} of where bend ${bend.id} begins, and bulges there as it forms; ${shownLength(wanted, units, "up")} is the least, or cut it through the bend on purpose.`,
     source: `${source}, carried over from holes to cut-outs: common practice, no source`,
     faces: [face.id],
     bends: [bend.id],

@@ -1,8 +1,8 @@
-import { formatLength } from "../core/formatLength";
 import type { Bend, PartModel } from "../part/partModel";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
+import { shownLength } from "./shownLength";
 
 /**
  * Bends that have more sheet on both sides than any throat takes, and are too wide to go between the frames. While other bends are
@@ -23,7 +23,7 @@ export function deepSheets(context: FindingsContext): readonly Finding[] {
     const alone = Math.min(ways.parentAlone, ways.childAlone);
     const never = !shop.machines.some(({ throatDepth, betweenFrames }) => alone <= throatDepth || ways.along <= betweenFrames);
     const least = Math.min(ways.parentSide, ways.childSide);
-    const length = (value: number) => formatLength(Math.round(value * 10) / 10, units);
+    const length = (value: number) => shownLength(value, units);
     return [{
       key: `throat ${bend.id}`,
       rule: "throat",

@@ -2,7 +2,7 @@ import type { Vec2 } from "../geometry/vec2";
 import { bendDirections } from "../part/bendDirections";
 import { holeAsChords } from "../part/holeAsChords";
 import type { DocumentHole } from "../part/partDocument";
-import type { PartModel } from "../part/partModel";
+import type { FlatContour, PartModel } from "../part/partModel";
 import type { DocumentFields, HoleFields } from "./documentFields";
 import { zoneGap } from "./zoneGap";
 
@@ -14,6 +14,8 @@ export interface DrawnHole {
   readonly bends: readonly number[];
   /** Arcs as chords. */
   readonly outline: readonly Vec2[];
+  /** A round hole exactly. */
+  readonly circle: { readonly centre: Vec2; readonly radius: number } | null;
   /** The entry of the document, in mm, and its path; null for a hole that the document does not name. */
   readonly entry: HoleEntry | null;
 }
@@ -43,15 +45,18 @@ export function drawnHoles(part: PartModel, fields: DocumentFields, bendsOn: rea
       face: index,
       bends: bendsOn[index] ?? [],
       outline,
+      circle: circleOf(face.holeContours[i]),
       entry: onSheet.find((entry) => sameOutline(sheetOutlines.get(entry) ?? [], outline)) ?? (left.length === face.holes.length ? (left[i] ?? null) : null),
     }));
   });
-  return [...within, ...part.holesAcross.map(({ path, outline, bends }): DrawnHole => {
+  return [...within, ...part.holesAcross.map(({ path, outline, contour, bends }): DrawnHole => {
     const bend = part.bends[bends[0] ?? -1];
     const onChild = bend && toChild(bend, outline);
-    return { face: bend ? (onChild ? bend.child : bend.parent) : 0, bends, outline, entry: byPath.get(path) ?? null };
+    return { face: bend ? (onChild ? bend.child : bend.parent) : 0, bends, outline, circle: circleOf(contour), entry: byPath.get(path) ?? null };
   })];
 }
+
+const circleOf = (contour: FlatContour | undefined): DrawnHole["circle"] => (contour?.kind === "circle" ? contour : null);
 
 const entriesOf = ({ path, holes }: HoleFields, axes: HoleEntry["axes"]): readonly HoleEntry[] => holes.map((hole, i) => ({ path: `${path}[${i}]`, hole, axes }));
 

@@ -12,7 +12,7 @@ export function flatsOverlapping({ part, fields }: FindingsContext): readonly Fi
       rule: "flats-overlap",
       severity: "stop",
       title: "Flats overlap",
-      message: `${ids[0] ?? ""} and ${ids[1] ?? ""} lie over one another in the unfolded sheet, so they cannot be cut from one piece; shorten one, inset it or taper its sides.`,
+      message: `Faces ${ids[0] ?? ""} and ${ids[1] ?? ""} lie over one another in the unfolded sheet, so they cannot be cut from one piece; shorten one, inset it or taper its sides.`,
       source: "one sheet can be cut once",
       faces: ids,
       bends: [],

@@ -1,11 +1,11 @@
 import type { Bend } from "../part/partModel";
 import { airBendForce } from "../handbook/airBendForce";
-import { formatLength } from "../core/formatLength";
 import { bendLength } from "./bendLength";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { named } from "./named";
+import { shownLength } from "./shownLength";
 
 const SOURCE = "air-bending force after Oehler, with the highest strength of the material";
 
@@ -36,7 +36,7 @@ export function forces(context: FindingsContext): readonly Finding[] {
       rule: "machine-force",
       severity: "stop",
       title: "More force than any brake has",
-      message: `Bend ${bend.id} is ${formatLength(bendLength(bend), context.units)} long and needs ${need.toFixed(0)} kN over the widest V that suits it; the strongest brake it fits has ${have.toFixed(0)} kN.`,
+      message: `Bend ${bend.id} is ${shownLength(bendLength(bend), context.units)} long and needs ${need.toFixed(0)} kN over the widest V that suits it; the strongest brake it fits has ${have.toFixed(0)} kN.`,
       source: SOURCE,
       faces: [],
       bends: [bend.id],

@@ -1,11 +1,11 @@
 import { hemSteps } from "../handbook/hemSteps";
-import { formatLength } from "../core/formatLength";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import { faceReach } from "./faceReach";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import { named } from "./named";
+import { shownLength } from "./shownLength";
 
 const SOURCE = "hems by stamping and press-brake guides";
 const RETURN_SOURCE = "return of a hem at least four thicknesses (from memory)";
@@ -45,7 +45,7 @@ export function hems(context: FindingsContext): readonly Finding[] {
       rule: "hem-return",
       severity: "caution",
       title: "Hem too narrow",
-      message: `The return of hem ${bend.id} is ${formatLength(Math.round(now * 100) / 100, context.units)} wide; ${formatLength(returnLength, context.units)}, four thicknesses, is the least that flattens well.`,
+      message: `The return of hem ${bend.id} is ${shownLength(now, context.units)} wide; ${shownLength(returnLength, context.units)}, four thicknesses, is the least that flattens well.`,
       source: RETURN_SOURCE,
       faces: [face.id],
       bends: [bend.id],

@@ -1,13 +1,13 @@
 import { mm } from "../core/units";
 import { holeOverDie } from "../handbook/holeOverDie";
-import { formatLength } from "../core/formatLength";
 import type { Bend } from "../part/partModel";
 import type { FindingsContext } from "./context";
 import { drawnHoles, type DrawnHole } from "./drawnHoles";
 import type { Finding } from "./finding";
 import { holeNeeds } from "./holeNeeds";
 import { movedHole } from "./movedHole";
-import { zoneGap } from "./zoneGap";
+import { holeGap } from "./holeGap";
+import { shownLength } from "./shownLength";
 
 const GUIDE = "distance from the hole's edge to the inside of the bend; the guides say it at 90 degrees, other angles are measured from where the bend begins all the same";
 const OVER_DIE = "a hole over the V's opening pulls out of shape (from memory)";
@@ -29,7 +29,7 @@ export function holesNearBends(context: FindingsContext): readonly Finding[] {
 
 function judge(context: FindingsContext, holes: readonly DrawnHole[], hole: DrawnHole, i: number, bend: Bend): Finding | null {
   const { part, units } = context;
-  const { gap, into, away, from, to } = zoneGap(hole.outline, bend);
+  const { gap, into, away, from, to } = holeGap(hole, bend);
   const needs = holeNeeds(context, hole, bend);
   // A hole past the bend's end is moved as if it stood beside it.
   const across = (to[0] - from[0]) * away[0] + (to[1] - from[1]) * away[1];
@@ -38,13 +38,13 @@ function judge(context: FindingsContext, holes: readonly DrawnHole[], hole: Draw
   if (!tooNear && !overDie) return null;
   const wanted = Math.max(needs.guide, tooNear && bend.hem !== null ? 0 : needs.opening);
   const face = part.faces[hole.face]?.id ?? "";
-  const length = (value: number) => formatLength(Math.round(value * 100) / 100, units);
-  const ceil = (value: number) => formatLength(Math.ceil(value * 100 - 1e-6) / 100, units);
+  const length = (value: number) => shownLength(value, units);
+  const ceil = (value: number) => shownLength(value, units, "up");
   const message = into > 0
     ? `The hole reaches ${length(into)} into bend ${bend.id}, so it opens into an oval as the bend forms; cut it after bending, or keep it ${ceil(wanted)} from where the bend begins.`
     : tooNear
-      ? `The hole is ${length(gap)} from where bend ${bend.id} begins and pulls out of shape; ${ceil(needs.guide)} is the least${wanted > needs.guide ? `, ${ceil(wanted)} keeps it off the opening of a V ${formatLength(needs.vOpening, units)} too` : ""}.`
-      : `The hole is ${length(gap)} from where bend ${bend.id} begins, over the opening of a V ${formatLength(needs.vOpening, units)}, and may pull out of shape; from ${ceil(wanted)} on it lies on the die.`;
+      ? `The hole is ${length(gap)} from where bend ${bend.id} begins and pulls out of shape; ${ceil(needs.guide)} is the least${wanted > needs.guide ? `, ${ceil(wanted)} keeps it off the opening of a V ${shownLength(needs.vOpening, units)} too` : ""}.`
+      : `The hole is ${length(gap)} from where bend ${bend.id} begins, over the opening of a V ${shownLength(needs.vOpening, units)}, and may pull out of shape; from ${ceil(wanted)} on it lies on the die.`;
   return {
     key: `hole ${hole.entry?.path ?? `${face} ${i}`} ${bend.id}`,
     rule: "hole",

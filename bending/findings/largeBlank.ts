@@ -1,8 +1,8 @@
-import { formatLength } from "../core/formatLength";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import type { StockSheet } from "./shopLimits";
+import { shownLength } from "./shownLength";
 
 /** A blank that no stock sheet holds, turned by 90 degrees or not. With a grain along x or y the grain must lie along the sheet's length (common practice, no source). */
 export function largeBlank({ shop, flat, units, fields }: FindingsContext): readonly Finding[] {
@@ -12,7 +12,7 @@ export function largeBlank({ shop, flat, units, fields }: FindingsContext): read
   const fits = ({ length, width }: StockSheet) => ways.some(([long = 0, across = 0]) => long <= length + 1e-6 && across <= width + 1e-6);
   if (shop.stock.some(fits)) return [];
   const largest = shop.stock.reduce((best, one) => (one.length * one.width > best.length * best.width ? one : best));
-  const size = (a: number, b: number) => `${formatLength(Math.round(a * 10) / 10, units).replace(/ .*/, "")} × ${formatLength(Math.round(b * 10) / 10, units)}`;
+  const size = (a: number, b: number) => `${shownLength(a, units).replace(/ .*/, "")} × ${shownLength(b, units)}`;
   // A profile's width runs along its bends: what is left for it beside the developed length.
   const room = fields.inMm.profile
     ? Math.max(...shop.stock.map(({ length, width }) => Math.max(grain !== "y" && flat.width <= length + 1e-6 ? width : 0, grain !== "x" && flat.width <= width + 1e-6 ? length : 0)))

@@ -1,10 +1,10 @@
-import { formatLength } from "../core/formatLength";
 import { bendLength } from "./bendLength";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import { named } from "./named";
+import { shownLength } from "./shownLength";
 
 /** Bends that are longer than every bed of the shop, the ends that may stand over counted in. */
 export function longBends({ part, shop, units, fields }: FindingsContext): readonly Finding[] {
@@ -21,7 +21,7 @@ export function longBends({ part, shop, units, fields }: FindingsContext): reado
     rule: "bed",
     severity: "stop",
     title: "Longer than every bed",
-    message: `${named("Bend", ids)} ${ids.length > 1 ? "are up to" : "is"} ${formatLength(longest, units)} long; the longest bed is ${formatLength(bed, units)}, and with its ends standing over it makes ${formatLength(most, units)}.`,
+    message: `${named("Bend", ids)} ${ids.length > 1 ? "are up to" : "is"} ${shownLength(longest, units)} long; the longest bed is ${shownLength(bed, units)}, and with its ends standing over it makes ${shownLength(most, units)}.`,
     source: "the shop’s beds",
     faces: [],
     bends: ids,

@@ -1,8 +1,8 @@
-import { formatLength } from "../core/formatLength";
 import type { FindingsContext } from "./context";
 import type { Finding, FindingMark } from "./finding";
 import type { FoldedBody } from "./foldedBodies";
 import { selfMeetings } from "./selfMeetings";
+import { shownLength } from "./shownLength";
 
 /** Told one by one up to so many; a part with more is told what they have in common. */
 const TOLD_MOST = 24;
@@ -27,7 +27,7 @@ export function meetsItself(context: FindingsContext): readonly Finding[] {
       rule: "meets-itself",
       severity: "stop",
       title: "Meets itself when folded",
-      message: `${ids.length > 1 ? `${ids[0] ?? ""} and ${ids[1] ?? ""} stand in one another` : `${ids[0] ?? ""} stands in itself`} in the finished part, and would have to be ${formatLength(Math.ceil(depth * 100) / 100, units)} farther apart; shorten one, inset it, or turn it the other way.`,
+      message: `${ids.length > 1 ? `Faces ${ids[0] ?? ""} and ${ids[1] ?? ""} stand in one another` : `Face ${ids[0] ?? ""} stands in itself`} in the finished part, and would have to be ${shownLength(depth, units, "up")} farther apart; shorten one, inset it, or turn it the other way.`,
       source: "the part folded to its angles as plates of its thickness",
       faces: ids,
       bends: bodies.filter(({ of }) => of === "bend").map(({ index }) => part.bends[index]?.id ?? "").filter((id, i, all) => all.indexOf(id) === i),

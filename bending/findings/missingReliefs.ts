@@ -3,11 +3,11 @@ import { polygonBounds } from "../geometry/polygonBounds";
 import { polygonContains } from "../geometry/polygonContains";
 import { reliefSize } from "../handbook/reliefSize";
 import { bendDirections } from "../part/bendDirections";
-import { formatLength } from "../core/formatLength";
 import type { Bend } from "../part/partModel";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
+import { shownLength } from "./shownLength";
 
 /** mm past the end of a bend where it is asked whether sheet lies there: over rounding, far under any relief. */
 const BESIDE_MM = 0.02;
@@ -29,7 +29,7 @@ export function missingReliefs(context: FindingsContext): readonly Finding[] {
       rule: "relief",
       severity: "caution",
       title: "No relief",
-      message: `Bend ${bend.id} ends next to sheet that stays flat, ${held.length === 2 ? "on both sides" : "on one side"}; it tears there as it forms. A relief ${formatLength(least, context.units)} wide or more frees it, or choose to let it tear.`,
+      message: `Bend ${bend.id} ends next to sheet that stays flat, ${held.length === 2 ? "on both sides" : "on one side"}; it tears there as it forms. A relief ${shownLength(least, context.units)} wide or more frees it, or choose to let it tear.`,
       source: SOURCE,
       faces: [part.faces[bend.parent]?.id ?? "", part.faces[bend.child]?.id ?? ""],
       bends: [bend.id],
@@ -48,7 +48,7 @@ function narrow(context: FindingsContext, bend: Bend, path: string, width: numbe
     rule: "relief-width",
     severity: "caution",
     title: "Relief too narrow",
-    message: `The relief of bend ${bend.id} is ${formatLength(width, context.units)} wide; ${formatLength(least, context.units)}, the thickness, is the least that cuts and bends clean.`,
+    message: `The relief of bend ${bend.id} is ${shownLength(width, context.units)} wide; ${shownLength(least, context.units)}, the thickness, is the least that cuts and bends clean.`,
     source: SOURCE,
     faces: [],
     bends: [bend.id],

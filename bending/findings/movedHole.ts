@@ -6,7 +6,7 @@ import type { DrawnHole } from "./drawnHoles";
 import type { Cure } from "./finding";
 import { holeNeeds } from "./holeNeeds";
 import { lengthCure } from "./lengthCure";
-import { zoneGap } from "./zoneGap";
+import { holeGap } from "./holeGap";
 
 /** Under this much of the way an axis does not lead away from the bend. */
 const LEAST_PART = 0.3;
@@ -28,13 +28,14 @@ export function movedHole(context: FindingsContext, holes: readonly DrawnHole[],
   const shift = typeof cure.value === "number" ? cure.value * mmPer(context.units) - now : 0;
   const [dx, dy] = [shift * entry.axes[axis][0], shift * entry.axes[axis][1]];
   const outline = hole.outline.map(([x, y]): Vec2 => [x + dx, y + dy]);
+  const circle = hole.circle && { ...hole.circle, centre: [hole.circle.centre[0] + dx, hole.circle.centre[1] + dy] as const };
   const others = holes.filter((other) => other !== hole && other.face === hole.face);
   const clear = holeWithin(outline, face.outline) && !others.some((other) => holesMeet(other.outline, outline))
     && (context.bendsOn[hole.face] ?? []).every((index) => {
       const bend = context.part.bends[index];
       if (!bend) return true;
-      const { gap, into } = zoneGap(outline, bend);
-      const before = zoneGap(hole.outline, bend);
+      const { gap, into } = holeGap({ outline, circle }, bend);
+      const before = holeGap(hole, bend);
       const needs = holeNeeds(context, hole, bend);
       return into === 0 && (gap >= Math.max(needs.guide, bend.hem === null ? needs.opening : 0) - 1e-6 || gap >= before.gap);
     });

@@ -1,11 +1,11 @@
 import { deg, rad, toDeg, toRad } from "../core/units";
 import { springback } from "../handbook/springback";
-import { formatLength } from "../core/formatLength";
 import type { Bend } from "../part/partModel";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
+import { shownLength } from "./shownLength";
 
 const SOURCE = "the tools’ own angles; springback after Gardiner (1957)";
 
@@ -45,7 +45,7 @@ export function sharpAngles(context: FindingsContext): readonly Finding[] {
       rule: "tip-radius",
       severity: "stop",
       title: "Tighter than every punch tip",
-      message: `Bend ${bend.id} has an inside radius of ${formatLength(bend.insideRadius, units)}; the finest punch tip of the shop has ${formatLength(finest, units)}.`,
+      message: `Bend ${bend.id} has an inside radius of ${shownLength(bend.insideRadius, units)}; the finest punch tip of the shop has ${shownLength(finest, units)}.`,
       source: "the punches’ own tips",
       faces: [],
       bends: [bend.id],

@@ -1,4 +1,3 @@
-import { formatLength } from "../core/formatLength";
 import { flangeWithMargin } from "../handbook/flangeWithMargin";
 import type { Bend, Face } from "../part/partModel";
 import type { BendingV } from "./bendTools";
@@ -6,6 +5,7 @@ import type { FindingsContext } from "./context";
 import { faceReach } from "./faceReach";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
+import { shownLength } from "./shownLength";
 
 const SOURCE = "minimum flange derived from the die's two tangencies; margin by the trade chart of 0.70 V to 0.77 V";
 /** mm. A hundredth of what a gauge repeats. */
@@ -70,14 +70,14 @@ function judge(context: FindingsContext, face: Face, { bend, reach, needs }: Hel
   const length = lengthOf(context, face, bend);
   const now = length?.mm ?? reach;
   const add = now - reach;
-  const say = (mm: number) => formatLength(Math.ceil(mm * 100 - 1e-6) / 100, context.units);
-  const vName = ({ v }: { readonly v: BendingV }) => (v.die === null ? `the usual V of ${formatLength(v.vOpening, context.units)}` : `${v.die} (V ${formatLength(v.vOpening, context.units)})`);
-  const begins = `${face.bend === null ? "The base" : `Flange ${face.id}`} is ${formatLength(Math.round(now * 100) / 100, context.units)} long${length ? "" : " from the bend line, in the flat"}.`;
+  const say = (mm: number) => shownLength(mm, context.units, "up");
+  const vName = ({ v }: { readonly v: BendingV }) => (v.die === null ? `the usual V of ${shownLength(v.vOpening, context.units)}` : `${v.die} (V ${shownLength(v.vOpening, context.units)})`);
+  const begins = `${face.bend === null ? "The base" : `Flange ${face.id}`} is ${shownLength(now, context.units)} long${length ? "" : " from the bend line, in the flat"}.`;
   const rest = severity === "note"
     ? `It can be bent over ${good.map(vName).join(" or ")} only; ${vName(usual)}, which is nearest to the usual V, needs ${say(usual.advised + add)}.`
     : severity === "caution" && touching.length > 0
       ? `It touches the shoulder of ${touching.map(vName).join(" or ")} with too little to spare; ${say(least.advised + add)} is usual for ${vName(least)}.`
-      : `${upper(vName(least))} touches it from ${say(least.contact + add)} on, and ${say(least.advised + add)} is usual${context.shop === null ? "" : "; no die of the shop that fits this bend needs less"}.`;
+      : `${upper(vName(least))} holds it from ${say(least.contact + add)} on, and ${say(least.advised + add)} is usual${context.shop === null ? "" : "; no die of the shop that fits this bend needs less"}.`;
   return {
     key: `${severity === "note" ? "narrow-v" : "flange"} ${face.id}`,
     rule: severity === "note" ? "narrow-v" : "flange",

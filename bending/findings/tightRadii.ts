@@ -1,11 +1,11 @@
 import { minimumRadius } from "../handbook/minimumRadius";
-import { formatLength } from "../core/formatLength";
 import type { Bend } from "../part/partModel";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import { named } from "./named";
+import { shownLength } from "./shownLength";
 
 /**
  * Bends tighter than the material bears with its grain as drawn: along the grain when the bend line lies nearer to it than
@@ -32,13 +32,13 @@ export function tightRadii(context: FindingsContext): readonly Finding[] {
     const ids = bends.map(({ id }) => id);
     const grain = fields.inMm.grain === undefined ? " The grain is not given; along it the radius must be larger still." : along ? " The bend line lies along the grain." : "";
     const from = bends[0]?.radiusSource === "document" ? "" : ` (${bends[0]?.radiusSource ?? ""})`;
-    const floor = formatLength(least, context.units);
+    const floor = shownLength(least, context.units);
     return {
       key: `radius ${path} ${source} ${ids[0] ?? ""}`,
       rule: "radius",
       severity: "caution",
       title: "Radius under the material’s minimum",
-      message: `${named("Bend", ids)} ${ids.length > 1 ? "have" : "has"} an inside radius of ${formatLength(radius, context.units)}${from}; ${part.material.id} may crack under ${floor}.${fields.inMm.grain === undefined && part.material.group !== "steel" ? "" : grain}`,
+      message: `${named("Bend", ids)} ${ids.length > 1 ? "have" : "has"} an inside radius of ${shownLength(radius, context.units)}${from}; ${part.material.id} may crack under ${floor}.${fields.inMm.grain === undefined && part.material.group !== "steel" ? "" : grain}`,
       source,
       faces: [],
       bends: ids,
