@@ -6,7 +6,7 @@ import { CopyButton } from "./CopyButton";
 import { FormulaView } from "./FormulaView";
 
 /** One answer: what it is, the number in both systems of units, the formula with the numbers in it, its source. */
-export function AnswerRow({ answer, units }: { readonly answer: Answer; readonly units: LengthUnit }) {
+export function AnswerRow({ answer, group, units }: { readonly answer: Answer; readonly group: string | undefined; readonly units: LengthUnit }) {
   const { label, formula, source, note } = answer;
   const main = said(answer, units);
   const other = said(answer, units === "mm" ? "in" : "mm");
@@ -14,11 +14,11 @@ export function AnswerRow({ answer, units }: { readonly answer: Answer; readonly
     <li className="grid grid-cols-1 gap-x-8 gap-y-1 border-b border-rule py-2.5 lg:grid-cols-[minmax(0,1fr)_minmax(0,1.1fr)]">
       <div className="min-w-0">
         <h4 className="font-medium">{label}</h4>
-        <div className="flex flex-wrap items-baseline gap-x-3 gap-y-1">
+        <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
           <output className="num text-xl font-semibold whitespace-nowrap">{main}</output>
           {other === main ? null : <span className="num whitespace-nowrap text-ink-soft">{other}</span>}
           {fraction(answer)}
-          <span className="ml-auto"><CopyButton name={label} text={main} /></span>
+          <span className="ml-auto"><CopyButton name={group === undefined ? label : `${label}, ${group}`} text={main} /></span>
         </div>
       </div>
       <div className="min-w-0">

@@ -19,12 +19,8 @@ export function FormulaView({ formula, units, result }: FormulaViewProps) {
   return (
     <div className="text-ink-soft">
       <p className="sr-only">{spoken}</p>
-      <p aria-hidden className="flex flex-wrap items-center gap-x-1 leading-tight">
-        {set(parts, (name) => <Named name={name} />)}
-      </p>
-      <p aria-hidden className="num flex flex-wrap items-center gap-x-1 leading-tight">
-        <span>=</span>{set(right, (name) => <span className="whitespace-nowrap text-ink">{formatFigure(formula.of[name], units)}</span>)}<span className="whitespace-nowrap">= <span className="font-medium text-ink">{result}</span></span>
-      </p>
+      <p aria-hidden>{set(parts, (name) => <Lowered text={name} italic />)}</p>
+      <p aria-hidden>= {set(right, (name) => <span className="num whitespace-nowrap text-ink">{formatFigure(formula.of[name], units)}</span>)}<span className="whitespace-nowrap"> = <span className="num font-medium text-ink">{result}</span></span></p>
     </div>
   );
 }
@@ -41,20 +37,17 @@ function set(parts: readonly FormulaPart[], named: (name: string) => ReactNode):
   return parts.map((part, i) => (
     <Fragment key={i}>
       {part.kind === "name" ? named(part.name) : part.kind === "text" ? <Lowered text={part.text} /> : (
-        <span className="inline-flex flex-col items-center text-[0.92em]">
-          <span className="flex items-center gap-x-1 px-1">{set(part.above, named)}</span>
-          <span className="flex items-center gap-x-1 self-stretch justify-center border-t border-ink-soft px-1">{set(part.below, named)}</span>
+        <span className="mx-0.5 inline-flex flex-col items-stretch text-center align-middle text-[0.92em] leading-tight">
+          <span className="px-1 pb-px">{set(part.above, named)}</span>
+          <span className="border-t border-ink-soft px-1 pt-px">{set(part.below, named)}</span>
         </span>
       )}
     </Fragment>
   ));
 }
 
-const Named = ({ name }: { readonly name: string }) => <Lowered text={name} italic />;
-
 /** `R_i` with its i lowered. */
 function Lowered({ text, italic = false }: { readonly text: string; readonly italic?: boolean }) {
-  const pieces = text.trim().split(/(_[A-Za-z0-9]+)/);
-  if (text.trim() === "") return null;
+  const pieces = text.split(/(_[A-Za-z0-9]+)/);
   return <span className={italic ? "italic text-ink" : undefined}>{pieces.map((piece, i) => (piece.startsWith("_") ? <sub key={i}>{piece.slice(1)}</sub> : piece))}</span>;
 }

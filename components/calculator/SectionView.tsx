@@ -48,7 +48,7 @@ function Answers({ section, question, chart }: { readonly section: Section; read
       {section.answer(question).map((group, i) => (
         <div key={i}>
           {group.title === undefined ? null : <SectionLine>{group.title}</SectionLine>}
-          <ul>{group.answers.filter(({ value }) => Number.isFinite(value)).map((answer) => <AnswerRow key={answer.label} answer={answer} units={units} />)}</ul>
+          <ul>{group.answers.filter(({ value }) => Number.isFinite(value)).map((answer) => <AnswerRow key={answer.label} answer={answer} group={group.title} units={units} />)}</ul>
           {group.remark === undefined ? null : <div className="mt-2"><Notice tone={group.remark.tone} title={group.remark.text} /></div>}
         </div>
       ))}

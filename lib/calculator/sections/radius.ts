@@ -4,6 +4,7 @@ import { radiusRules } from "@/bending/handbook/radiusRules";
 import { sharpBendLimit } from "@/bending/handbook/sharpBendLimit";
 import { tensileScaledRadius } from "@/bending/handbook/tensileScaledRadius";
 import { MILD_STEEL_US } from "@/bending/handbook/forceForms";
+import { formatNumber } from "@/lib/format/formatNumber";
 import { bendFigures } from "../bendFigures";
 import { figures } from "../figures";
 import type { Section } from "../section";
@@ -27,9 +28,12 @@ export const radius: Section = {
         title: "Rules in print",
         answers: radiusRules.map((rule) => {
           const [low, high] = radiusByRule(rule, q.vOpening);
-          return { label: rule.material, kind: "length", value: low, ...(high > low ? { upTo: high } : {}), formula: { text: "R = c · V", of: { c: figures.ratio(rule.ratio[0]), V } }, source: rule.source };
+          return { label: `${rule.material}, ${ratioText(rule.ratio)} V`, kind: "length", value: low, ...(high > low ? { upTo: high } : {}), formula: { text: "R = c · V", of: { c: figures.ratio(rule.ratio[0]), V } }, source: rule.source };
         }),
       },
     ];
   },
 };
+
+/** 0.167, or 0.2 to 0.22. */
+const ratioText = (ratio: readonly [number, number]): string => [...new Set(ratio)].map((part) => formatNumber(part, 4)).join(" to ");
