@@ -11,7 +11,7 @@ import { problemLine, readJsonFile } from "./readJsonFile";
 
 const FLAT = ["--bend-table"];
 const PLANNING = [...FLAT, "--tooling", "--machine", "--batch", "--alternatives", "--time-limit"];
-const VERBS = { flat: FLAT, plan: PLANNING, check: [...PLANNING, "--order"] } as const;
+const VERBS = { flat: [...FLAT, "--tooling", "--machine"], plan: PLANNING, check: [...PLANNING, "--order"] } as const;
 
 /** The command line as a function of its arguments and files: flat, plan, check. */
 export function runCommand(args: readonly string[], world: CommandWorld): CommandOutcome {
@@ -24,5 +24,5 @@ export function runCommand(args: readonly string[], world: CommandWorld): Comman
   if (!table.ok) return wrongInput(table.error);
   const built = buildPart(document.value, { materials: materialById, knownMaterials: builtInMaterials.map(({ id }) => id), shopTable: table.value });
   if (!built.ok) return wrongInput(problemLine(given.value.file, built.error));
-  return given.value.verb === "flat" ? flatCommand(document.value, built.value) : planCommand(given.value, document.value, { part: built.value, shopTable: table.value }, world);
+  return given.value.verb === "flat" ? flatCommand(given.value, document.value, built.value, world) : planCommand(given.value, document.value, { part: built.value, shopTable: table.value }, world);
 }

@@ -10,6 +10,7 @@ const extra: Record<string, string> = {
   "broken.json": "{",
   "thin.json": JSON.stringify({ format: "part/1", name: "T", units: "mm", material: "S235", thickness: 0, profile: { width: 100, legs: [40, 40], bends: [{ angle: 90, direction: "up" }] } }),
   "wood.json": JSON.stringify({ format: "part/1", name: "T", units: "mm", material: "oak", thickness: 2, profile: { width: 100, legs: [40, 40], bends: [{ angle: 90, direction: "up" }] } }),
+  "shortLeg.json": JSON.stringify({ format: "part/1", name: "T", units: "mm", material: "S235", thickness: 2, insideRadius: 2, profile: { width: 100, legs: [40, 5], bends: [{ angle: 90, direction: "up" }] } }),
   "bends.json": bendTable({}),
   "wrongBends.json": bendTable({ blankLength: 200 }),
 };
@@ -22,6 +23,7 @@ function bendTable(changes: object): string {
 
 const world: CommandWorld = {
   now: () => 0,
+  readBytes: () => ({ ok: false, error: "there is no such file" }),
   readText: (path) => {
     if (extra[path] !== undefined) return { ok: true, value: extra[path] };
     try {
@@ -31,6 +33,11 @@ const world: CommandWorld = {
     }
   },
 };
+
+interface Judged {
+  readonly findings: readonly { readonly rule: string; readonly severity: string; readonly cure?: object }[];
+  readonly findingsLeftOut: readonly string[];
+}
 const SHOP = ["--tooling", "tooling.json", "--machine", "machine.json"];
 
 describe("the command line", () => {
@@ -49,6 +56,16 @@ describe("the command line", () => {
     expect(flat.bends[0]?.deduction).toBeCloseTo(3.8, 1);
     expect(flat.flatLength).toBeCloseTo(180 - 2 * (flat.bends[0]?.deduction ?? NaN), 4);
     expect(flat.bends[0]?.basis).toMatchObject({ kind: "shop", shop: { vOpening: 12, openingFrom: "radius", count: 1 }, next: { text: "DIN 6935", deduction: expect.closeTo((180 - without.flatLength) / 2, 3) } });
+  });
+
+  it("says with the flat what is wrong with the part, and with tools and a machine what the shop cannot do", () => {
+    const blind = runCommand(["flat", "shortLeg.json"], world).json as Judged;
+    expect(blind.findings.map(({ rule, severity, cure }) => [rule, severity, cure])).toEqual([["flange", "caution", { path: "profile.legs[1]", value: 8.5 }], ["radius", "caution", { path: "insideRadius", value: 2.5 }]]);
+    expect(blind.findingsLeftOut).toHaveLength(1);
+    const seeing = runCommand(["flat", "shortLeg.json", ...SHOP], world).json as Judged;
+    expect(seeing.findings[0]).toMatchObject({ rule: "flange", severity: "stop", unit: "mm", value: 5 });
+    expect(seeing.findingsLeftOut).toEqual([]);
+    expect(runCommand(["flat", "shortLeg.json", "--tooling", "nowhere.json"], world).exitCode).toBe(2);
   });
 
   it("plans, checks the same order, and leaves with 3 when there is none", () => {

@@ -30,6 +30,8 @@ function build(draft: PartDraft, materials: readonly MaterialFacts[]): Preview {
   const read = readPartDocument(typed.document);
   if (!read.ok) return { model: null, problems: read.error };
   const built = buildPart(read.value, { materials: byId });
-  if (!built.ok) return { model: null, problems: built.error };
-  return { model: { document: read.value, part: built.value, flat: flatPattern(built.value) }, problems: [] };
+  // A flat that overlaps is drawn all the same, so that it is seen where; it is not saved.
+  const drawn = built.ok ? built : buildPart(read.value, { materials: byId, keepOverlaps: true });
+  if (!drawn.ok) return { model: null, problems: drawn.error };
+  return { model: { document: read.value, part: drawn.value, flat: flatPattern(drawn.value) }, problems: built.ok ? [] : built.error };
 }
