@@ -1,4 +1,5 @@
 import type { FieldProblem } from "../core/problem";
+import { SAME_POINT_MM } from "../core/tolerance";
 import type { LengthUnit, Mm } from "../core/units";
 import type { FlangeWork } from "./faceWork";
 import { formatLength } from "../core/formatLength";
@@ -21,25 +22,35 @@ export function checkFaceLengths(
     const parts = bends.map((flange) => `bend "${flange.entry.id}" takes ${formatLength(takes(kind, flange), units)}`).join(" and ");
     problems.push({ path, message: `${formatLength(length, units)} is too short: ${parts || "nothing is left"}; it must be more than ${formatLength(taken, units)}` });
   };
+  const farOn = new Map<string, FlangeWork[]>();
+  for (const flange of flanges) if (flange.entry.edge === 2) farOn.set(flange.entry.on, [...(farOn.get(flange.entry.on) ?? []), flange]);
   for (const flange of flanges) {
     const { entry } = flange;
     if (entry.length === undefined) continue;
-    const far = flanges.filter((other) => other.entry.on === entry.id && other.entry.edge === 2);
-    check(flange.lengthPath, entry.length, entry.dimension ?? dimension, [flange, ...far]);
+    const kind = entry.dimension ?? dimension;
+    check(flange.lengthPath, entry.length, kind, [flange, ...deepest(farOn.get(entry.id) ?? [], (one) => takes(kind, one))]);
+    if (entry.hem !== "teardrop" || entry.angle > 180) continue;
+    const [least, leg] = [flange.bend.insideRadius, entry.length - takes(kind, flange)];
+    if (leg < least - SAME_POINT_MM) problems.push({ path: flange.lengthPath, message: `${formatLength(entry.length, units)} is too short: the leg has to close the loop, so it must be at least ${formatLength(least + takes(kind, flange), units)}` });
   }
   const first = flanges.find(({ entry }) => entry.on === "base");
   if (source.basePath === "profile.legs[0]") {
     check(source.basePath, source.base.outline[1]?.[0] ?? 0, dimension, first ? [first] : []);
     return problems;
   }
-  for (const [i, a] of flanges.entries()) {
-    for (const b of flanges.slice(i + 1)) {
-      if (a.entry.on !== "base" || b.entry.on !== "base") continue;
+  const onBase = flanges.filter(({ entry }) => entry.on === "base");
+  for (const [i, a] of onBase.entries()) {
+    for (const b of onBase.slice(i + 1)) {
       const apart = opposite(source, a, b);
       if (apart !== null) check(source.basePath, apart, dimension, [a, b]);
     }
   }
   return problems;
+}
+
+/** Of several bends on one edge, the one that takes most. */
+function deepest(bends: readonly FlangeWork[], takes: (bend: FlangeWork) => number): readonly FlangeWork[] {
+  return bends.length < 2 ? bends : [bends.reduce((most, bend) => (takes(bend) > takes(most) ? bend : most))];
 }
 
 /** How far apart two base edges are that face each other squarely, else null. */

@@ -46,6 +46,12 @@ function checkFaces(base: BaseShape, flanges: readonly FlangeEntry[], units: Len
 function checkFlange(flange: FlangeEntry, path: string, units: LengthUnit): readonly FieldProblem[] {
   const problems = [...checkBendEntry(flange, path), ...checkHoles(flange.holes, path, units)];
   const say = (field: string, message: string) => problems.push({ path: `${path}.${field}`, message });
+  if (flange.offset) {
+    if (flange.hem) say("hem", "must be left out when the flange is offset");
+    if (flange.outline) say("outline", "must be left out when the flange is offset; give its length");
+    if (flange.strokeWith !== undefined) say("strokeWith", "must be left out when the flange is offset: its two bends are formed together");
+    if (flange.angle > 90) say("angle", `is ${flange.angle}, but the two bends of an offset turn at most 90 degrees each`);
+  }
   if (flange.outline) {
     if (flange.length !== undefined) say("length", "must be left out when the flange has an outline of its own");
     for (const field of ["startAngle", "endAngle"] as const) {

@@ -13,6 +13,8 @@ export interface DrawnFace {
   readonly edges: readonly DrawnEdge[];
   /** How the face's lengths are measured to its bends. */
   readonly dimension: DimensionKind;
+  /** The edge whose flanges carry a chain on: the far edge of a flange given by its length. */
+  readonly chainEdge: number | null;
   /** Of the arcs that the chords stand for, in local coordinates. */
   readonly circles: readonly FlatCircle[];
 }

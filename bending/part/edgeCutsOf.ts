@@ -7,13 +7,15 @@ import { setback } from "./setback";
 import { outsideSetback } from "../handbook/outsideSetback";
 import { mm, type Mm } from "../core/units";
 import type { Interval } from "../geometry/interval";
+import { reliefSize } from "../handbook/reliefSize";
+import type { ReliefEntry } from "./partDocument";
 import { planeOutline } from "./planeOutline";
 
 /** Relief that is left open by the document: one thickness wide and half a millimetre deeper than the bend; common practice, no source. */
 const RELIEF_BEYOND_BEND_MM = 0.5;
 
-/** What the flanges on a face take off it. */
-export function edgeCutsOf(face: DrawnFace, children: readonly FlangeWork[], thickness: Mm): readonly EdgeCut[] {
+/** What the flanges on a face take off it; `relief` is the part's own, for flanges that say nothing. */
+export function edgeCutsOf(face: DrawnFace, children: readonly FlangeWork[], thickness: Mm, relief: ReliefEntry | undefined): readonly EdgeCut[] {
   return children.flatMap(({ entry, bend }): readonly EdgeCut[] => {
     const edge = face.edges[entry.edge];
     if (!edge) return [];
@@ -22,11 +24,16 @@ export function edgeCutsOf(face: DrawnFace, children: readonly FlangeWork[], thi
     const own = entry.outline ? ownRange(entry.outline, bend, thickness) : null;
     const start = (entry.start ?? 0) + (own ? own[0] : 0);
     const end = own ? length - (entry.start ?? 0) - own[1] : entry.end ?? 0;
-    const relief = entry.relief && entry.relief.kind !== "none"
-      ? { kind: entry.relief.kind, width: entry.relief.width ?? thickness, depth: entry.relief.depth ?? depth + RELIEF_BEYOND_BEND_MM }
-      : null;
-    return [{ edge, depth, start, end, relief }];
+    const usual = reliefSize(thickness, bend.insideRadius);
+    return [{
+      edge, depth, start, end,
+      relief: sized(entry.relief, thickness, depth + RELIEF_BEYOND_BEND_MM) ?? (entry.relief ? null : sized(relief, usual.width[0], Math.max(usual.depth[1], depth))),
+    }];
   });
+}
+
+function sized(relief: ReliefEntry | undefined, width: number, depth: number): EdgeCut["relief"] {
+  return relief && relief.kind !== "none" ? { kind: relief.kind, width: relief.width ?? width, depth: relief.depth ?? depth } : null;
 }
 
 /** Along the bend, what an outline of its own leaves of itself where the bend ends. */

@@ -1,6 +1,7 @@
 import type { Vec2 } from "../geometry/vec2";
 import type { DrawnFace } from "./drawnFace";
 import type { SourceFlange } from "./partSource";
+import type { FlatCircle } from "./partModel";
 import type { ResolvedBend } from "./resolveBend";
 import type { SheetPlacement } from "./sheetPlacement";
 
@@ -13,6 +14,10 @@ export interface FaceWork {
   readonly placement: SheetPlacement;
   /** The plane part, in local coordinates. */
   readonly plane: readonly Vec2[];
+  /** Of round reliefs in the plane part, in local coordinates. */
+  readonly reliefs: readonly FlatCircle[];
+  /** Where local x = 0 lies along the edge that this chain of flanges on far edges stands on. */
+  readonly alongChain: number;
 }
 
 /** A flange with its bend decided. */

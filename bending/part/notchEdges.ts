@@ -1,21 +1,21 @@
 import { SAME_POINT_MM } from "../core/tolerance";
 import { selfCrossing } from "../geometry/selfCrossing";
 import type { Vec2 } from "../geometry/vec2";
-import { edgeAxes, fromEdge, onEdge, type EdgeCut } from "./edgeCut";
+import type { CutWithEnds } from "./cutEnds";
+import { fromEdge, onEdge } from "./edgeCut";
 
 /**
  * Cuts the strips of flanges that stand clear of both ends of their edges, without a general polygon clip:
  * each notch replaces a stretch of its edge. Null when that is not the whole story (a notch that meets a corner, another
  * notch or a round relief).
  */
-export function notchEdges(plane: readonly Vec2[], cuts: readonly EdgeCut[]): readonly Vec2[] | null {
+export function notchEdges(plane: readonly Vec2[], cuts: readonly CutWithEnds[]): readonly Vec2[] | null {
   let points = plane;
-  for (const cut of cuts) {
-    if (cut.relief?.kind === "round") return null;
-    const axes = edgeAxes(cut.edge);
-    const [from, to] = [cut.start, axes.length - cut.end];
-    const relief = cut.relief?.kind === "rectangular" ? cut.relief : null;
-    const [width, deep] = relief ? [relief.width, Math.max(relief.depth, cut.depth)] : [0, cut.depth];
+  for (const { cut, axes, start, end } of cuts) {
+    if (cut.relief?.kind === "round" || start.relief !== end.relief) return null;
+    const [from, to] = [start.at, end.at];
+    const relief = cut.relief?.kind === "rectangular" && start.relief > 0 ? cut.relief : null;
+    const [width, deep] = relief ? [start.relief, Math.max(relief.depth, cut.depth)] : [0, cut.depth];
     if (to - from <= SAME_POINT_MM || cut.depth <= 0) return null;
     const local = points.map((p) => onEdge(axes, p));
     const at = local.findIndex(([a, h], i) => {

@@ -9,7 +9,7 @@ const square: readonly Vec2[] = [[0, 0], [100, 0], [100, 100], [0, 100]];
 const dented: readonly Vec2[] = [[0, 0], [100, 0], [100, 49], [99.99, 50], [100, 51], [100, 100], [0, 100]];
 const bottom = { from: [0, 0], to: [100, 0] } as const;
 const top = { from: [100, 100], to: [0, 100] } as const;
-const face = (points: readonly Vec2[]) => ({ points, edges: [], circles: [], dimension: "outside" as const });
+const face = (points: readonly Vec2[]) => ({ points, edges: [], circles: [], chainEdge: null, dimension: "outside" as const });
 
 const cut = fc.record({
   depth: fc.integer({ min: 1, max: 8 }),

@@ -4,10 +4,11 @@ import { cleanPolygon } from "../geometry/cleanPolygon";
 import { clipByHalfPlane } from "../geometry/clipByHalfPlane";
 import { signedArea } from "../geometry/signedArea";
 import type { Vec2 } from "../geometry/vec2";
-import { cornerReach } from "./cornerReach";
+import { cutEnds, type CutWithEnds } from "./cutEnds";
 import type { DrawnFace } from "./drawnFace";
-import { edgeAxes, fromEdge, type EdgeAxes, type EdgeCut } from "./edgeCut";
+import { fromEdge, type EdgeCut } from "./edgeCut";
 import { notchEdges } from "./notchEdges";
+import { roundNotch } from "./roundNotch";
 
 /** Strips begin this much outside the edge, so that rounding leaves no sliver there (mm). */
 const OUTSIDE_MM = 0.01;
@@ -20,14 +21,14 @@ const OUTSIDE_MM = 0.01;
  * run on, so the two plane edges meet in one point and the flanges keep clear of one another.
  */
 export function planeOutline(face: DrawnFace, cuts: readonly EdgeCut[]): readonly Vec2[] | null {
-  const ends = cuts.map((cut) => ({ cut, axes: edgeAxes(cut.edge), ...reaches(cut, cuts) }));
-  if (ends.every(({ start, end }) => start === end) && isConvex(face.points)) {
-    const clipped = ends.filter(({ start }) => start)
+  const ends = cutEnds(face, cuts);
+  if (ends.every(({ start, end }) => start.reaches === end.reaches) && isConvex(face.points)) {
+    const clipped = ends.filter(({ start }) => start.reaches)
       .reduce<readonly Vec2[]>((rest, { cut, axes }) => clipByHalfPlane(rest, fromEdge(axes, [0, cut.depth]), axes.inward), face.points);
-    const notched = notchEdges(cleanPolygon(clipped), ends.filter(({ start }) => !start).map(({ cut }) => cut));
+    const notched = notchEdges(cleanPolygon(clipped), ends.filter(({ start }) => !start.reaches));
     if (notched) return withArea(notched);
   }
-  const strips = ends.flatMap(({ cut, axes, start, end }) => stripsOf(face, cut, axes, start, end));
+  const strips = ends.flatMap(stripsOf);
   const pieces = polyclip.difference([ring(face.points)], ...strips.map((strip) => [ring(strip)]))
     .map((polygon) => cleanPolygon((polygon[0] ?? []).slice(0, -1).map(([x, y]): Vec2 => [x, y])))
     .filter((piece) => Math.abs(signedArea(piece)) > EMPTY_AREA_MM2);
@@ -39,49 +40,17 @@ const ring = (points: readonly Vec2[]): [number, number][] => points.map(([x, y]
 
 const withArea = (polygon: readonly Vec2[]) => (signedArea(polygon) > EMPTY_AREA_MM2 ? polygon : null);
 
-/** Whether the strip runs on past the flange's start and end: no inset, or less than the bent neighbour takes. */
-function reaches(cut: EdgeCut, cuts: readonly EdgeCut[]): { readonly start: boolean; readonly end: boolean } {
-  const neighbourTakes = (corner: Vec2, atStart: boolean) => {
-    const neighbour = cuts.find((other) => same(atStart ? other.edge.to : other.edge.from, corner));
-    if (!neighbour) return 0;
-    const itsInset = atStart ? neighbour.end : neighbour.start;
-    return itsInset <= cut.depth + SAME_POINT_MM ? neighbour.depth : 0;
-  };
-  return {
-    start: cut.start <= neighbourTakes(cut.edge.from, true) + SAME_POINT_MM,
-    end: cut.end <= neighbourTakes(cut.edge.to, false) + SAME_POINT_MM,
-  };
-}
-
-const same = (a: Vec2, b: Vec2) => Math.hypot(a[0] - b[0], a[1] - b[1]) <= SAME_POINT_MM;
-
-function stripsOf(face: DrawnFace, cut: EdgeCut, axes: EdgeAxes, start: boolean, end: boolean): readonly (readonly Vec2[])[] {
-  const from = start ? -cornerReach(face.points, axes, cut.depth, "start") : cut.start;
-  const to = end ? axes.length + cornerReach(face.points, axes, cut.depth, "end") : axes.length - cut.end;
+function stripsOf({ cut, axes, start, end }: CutWithEnds): readonly (readonly Vec2[])[] {
+  const [from, to] = [start.at, end.at];
   if (to - from <= SAME_POINT_MM) return [];
   const box = (a: number, b: number, depth: number): readonly Vec2[] => [[a, -OUTSIDE_MM], [b, -OUTSIDE_MM], [b, depth], [a, depth]];
-  const relief = cut.relief && cut.relief.kind !== "tear" ? cut.relief : null;
   // The strip laps into the notches, so that no wall without thickness is left between them.
-  const lap = relief ? relief.width / 2 : 0;
-  const strips: (readonly Vec2[])[] = cut.depth > 0 ? [box(start ? from : from - lap, end ? to : to + lap, cut.depth)] : [];
-  if (relief) {
-    const depth = Math.max(relief.depth, cut.depth);
-    const notch = (a: number, b: number) => (relief.kind === "round" ? roundNotch(a, b, depth) : box(a, b, depth));
-    if (!start) strips.push(notch(from - relief.width, from));
-    if (!end) strips.push(notch(to, to + relief.width));
-  }
+  const strips: (readonly Vec2[])[] = cut.depth > 0 ? [box(from - start.relief / 2, to + end.relief / 2, cut.depth)] : [];
+  const depth = Math.max(cut.relief?.depth ?? 0, cut.depth);
+  const notch = (a: number, b: number) => (cut.relief?.kind === "round" ? roundNotch(a, b, depth, OUTSIDE_MM) : box(a, b, depth));
+  if (start.relief > 0) strips.push(notch(from - start.relief, from));
+  if (end.relief > 0) strips.push(notch(to, to + end.relief));
   return strips.map((strip) => strip.map((p) => fromEdge(axes, p)));
-}
-
-/** A notch with a half-round end; when it is wider than deep, the half round begins at the edge. */
-function roundNotch(a: number, b: number, depth: number): readonly Vec2[] {
-  const radius = (b - a) / 2;
-  const straight = Math.max(0, depth - radius);
-  const arc = Array.from({ length: 17 }, (_, i): Vec2 => {
-    const angle = (Math.PI * i) / 16;
-    return [(a + b) / 2 + radius * Math.cos(angle), straight + Math.min(radius, depth) * Math.sin(angle)];
-  });
-  return [[a, -OUTSIDE_MM], [b, -OUTSIDE_MM], ...arc];
 }
 
 function isConvex(points: readonly Vec2[]): boolean {

@@ -59,7 +59,7 @@ describe("what is wrong is said at its field, in the document's units", () => {
     ["edge that is not there", withFlange({ edge: 4 }), 'flanges[0].edge: "base" has no edge 4; its edges are 0 to 3'],
     ["half an edge", withFlange({ edge: 0.5 }), "flanges[0].edge: must be a whole number: edge k runs from vertex k to vertex k + 1"],
     ["own bend as edge", withFlange({}, { ...front, id: "b", on: "front" }), 'flanges[1].edge: edge 0 of "front" is its own bend; use edge 1 (end side), 2 (far edge) or 3 (start side)'],
-    ["edge bent twice", withFlange({}, { ...front, id: "b" }), 'flanges[1].edge: edge 0 of "base" is already bent by "front"'],
+    ["edge bent twice", withFlange({}, { ...front, id: "b" }), 'flanges[1].edge: edge 0 of "base" is already bent by "front" there; give both insets (start, end) that keep them apart'],
     ["curved edge", { ...tray, base: { outline: [[0, 0, 0.2], [200, 0], [200, 120], [0, 120]] } }, 'flanges[0].edge: edge 0 of "base" is curved; a bend needs a straight edge'],
     ["circle of parents", withFlange({ on: "b", edge: 2 }, { ...front, id: "b", on: "front", edge: 2 }), 'flanges[0].on: "front" hangs on itself through "b"; every chain of flanges must begin on the base'],
     ["crossing outline", withOutline([[0, 0], [100, 100], [100, 0], [0, 50]]), "base.outline: edges 0 and 2 cross or touch at 33.333 mm, 33.333 mm; the outline must not cross itself"],

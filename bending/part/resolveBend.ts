@@ -1,4 +1,4 @@
-import { deg, mm, toRad, type Mm, type Rad } from "../core/units";
+import { deg, mm, rad, toRad, type Mm, type Rad } from "../core/units";
 import type { MaterialFacts } from "../handbook/material";
 import type { AllowanceBasis } from "../handbook/allowanceBasis";
 import { bendDeduction } from "../handbook/bendDeduction";
@@ -6,7 +6,8 @@ import { kFromAllowance } from "../handbook/kFromAllowance";
 import { resolveAllowance, type AllowanceQuestion, type ResolvedAllowance } from "../handbook/resolveAllowance";
 import { vOpeningRule } from "../handbook/vOpeningRule";
 import type { BendContext, DecidedAllowance } from "./bendContext";
-import type { BendDirection, HemKind, PartDocument } from "./partDocument";
+import type { BendDirection, DimensionKind, DocumentVertex, HemKind, PartDocument } from "./partDocument";
+import { setback } from "./setback";
 
 export interface BendEntry {
   readonly id: string;
@@ -17,6 +18,10 @@ export interface BendEntry {
   readonly insideRadius?: number;
   readonly kFactor?: number;
   readonly toleranceAngle?: number;
+  /** Of the flange that the bend carries, where it has them. */
+  readonly length?: number;
+  readonly outline?: readonly DocumentVertex[];
+  readonly dimension?: DimensionKind;
 }
 
 export interface ResolvedBend extends Omit<ResolvedAllowance, "basis"> {
@@ -33,8 +38,8 @@ export interface ResolvedBend extends Omit<ResolvedAllowance, "basis"> {
 
 /** Radius, allowance and setback of one bend; the document and the entry are in mm. */
 export function resolveBend(entry: BendEntry, document: PartDocument, material: MaterialFacts, context: BendContext): ResolvedBend {
-  const angle = toRad(deg(entry.angle));
   const { radius, source } = insideRadius(entry, document, material, context);
+  const angle = entry.hem === "teardrop" && entry.angle <= 180 ? closingAngle(entry, document, radius) : toRad(deg(entry.angle));
   const tolerance = entry.toleranceAngle ?? document.toleranceAngle;
   const thickness = mm(document.thickness);
   const decided = context.decidedOf?.(entry.id);
@@ -57,6 +62,18 @@ export function resolveBend(entry: BendEntry, document: PartDocument, material: 
     radiusSource: source,
     toleranceAngle: tolerance === undefined ? null : toRad(deg(tolerance)),
   };
+}
+
+/**
+ * How far the loop of a teardrop hem turns: on past half a turn until the end of its leg rests on the sheet. Both tangents
+ * from there to the loop are as long as the leg, so the rest is 2 atan(r / leg); three quarters of a turn at most.
+ */
+function closingAngle(entry: BendEntry, document: PartDocument, radius: Mm): Rad {
+  const kind = entry.dimension ?? document.dimension ?? "outside";
+  const drawn = entry.outline ? Math.max(...entry.outline.map(([, y]) => y)) : entry.length;
+  if (drawn === undefined || radius === 0) return rad(Math.PI);
+  const leg = drawn - setback(entry.outline ? "outside" : kind, rad(Math.PI), radius, mm(document.thickness));
+  return rad(Math.PI + 2 * Math.atan(radius / Math.max(leg, radius)));
 }
 
 function takenOver({ allowance, source, basis }: DecidedAllowance, angle: Rad, radius: Mm, thickness: Mm): Omit<ResolvedAllowance, "basis"> & { readonly basis: AllowanceBasis | null } {
