@@ -23,3 +23,5 @@ export type MethodFactors = Readonly<Record<BendMethod, number>>;
 
 /** The upper end of the most quoted ranges, so as to err on the side of the machine's rating; a shop puts its own in their place. */
 export const defaultMethodFactors: MethodFactors = { air: 1, bottoming: 5, coining: 10 };
+
+export const DEFAULT_FACTORS_SOURCE = "Upper ends of the ranges quoted most: bottoming 3 to 5, coining 5 to 10 times air bending (trade pages); air bending as the formula gives it";

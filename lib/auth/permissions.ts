@@ -16,6 +16,9 @@ export const permissions = {
   "tools:write": ["toolroom"],
   "machines:read": ["engineer", "toolroom", "manager"],
   "materials:read": ["engineer", "toolroom", "manager"],
+  "materials:write": ["engineer"],
+  "settings:read": ["engineer", "toolroom", "manager"],
+  "settings:write": ["engineer"],
   "bendTable:read": ["engineer", "operator", "toolroom", "manager"],
   /** Entering trials and looking after the instruments. */
   "bendTable:write": ["engineer", "toolroom"],

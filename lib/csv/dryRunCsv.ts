@@ -23,6 +23,8 @@ export interface CsvImportRules<Columns extends CsvColumns> {
   readonly labelOf: (values: Partial<CsvRow<Columns>>) => string;
   /** What a new entry has in the columns that the file does not have. A column named in neither is refused as missing. */
   readonly blank: Partial<CsvRow<Columns>>;
+  /** What follows from what the file says, to be shown and written like it (before what is compared). */
+  readonly adjust?: (given: Partial<CsvRow<Columns>>, before: CsvRow<Columns> | undefined) => Partial<CsvRow<Columns>>;
   /** What is wrong with the whole entry: field by field, in the words of the column's unit. */
   readonly check: (row: CsvRow<Columns>, before: CsvRow<Columns> | undefined) => readonly { readonly field: keyof Columns; readonly message: string }[];
 }
@@ -69,7 +71,8 @@ function decide<Columns extends CsvColumns>(
   const label = rules.labelOf(values);
   const refused = (problems: readonly CellProblem[]) => ({ fate: { line, label, fate: "refused", changes: [], problems } satisfies CsvLineFate });
   if (found.length > 0) return refused(found);
-  const given = before === undefined ? { ...rules.blank, ...values } : values;
+  const told = before === undefined ? { ...rules.blank, ...values } : values;
+  const given = rules.adjust?.(told, before) ?? told;
   const changes = fieldChanges(columns, given, before);
   const after = { ...(before ?? rules.blank), ...Object.fromEntries(changes.map(({ key }) => [key, given[key]])) } as CsvRow<Columns>;
   const missing = Object.keys(columns).filter((key) => after[key] === undefined);

@@ -1,11 +1,13 @@
 import type { z } from "zod";
 import { foundAgain } from "../foundAgain";
+import { withdrawnProblem } from "../materials/withdrawnProblem";
 import { recordEvent } from "../recordEvent";
 import { partDetail } from "./partDetail";
 import { readPart } from "./readPart";
 import { shopOf } from "./shopOf";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { database } from "@/db/client";
+import { findPart } from "@/db/parts/findPart";
 import { insertRevision } from "@/db/parts/insertRevision";
 import type { Failure } from "@/lib/api/failure";
 import type { SignedInPerson } from "@/lib/auth/signedInPerson";
@@ -17,6 +19,9 @@ export async function addRevision(person: SignedInPerson, partId: string, input:
   const db = database();
   const read = readPart(input.document, await shopOf(db, input.document));
   if (!read.ok) return read;
+  const before = await findPart(db, partId, input.basedOn);
+  const withdrawn = before?.revision.document.material === read.value.materialId ? null : await withdrawnProblem(db, read.value.materialId);
+  if (withdrawn) return fail(withdrawn);
   const added = await db.transaction(async (within) => {
     const done = await insertRevision(within, partId, input.basedOn, { ...read.value, note: input.note, by: person.id });
     if (done.kind === "inserted") await recordEvent(within, person, "revised a part", `${done.number} rev ${done.revision} ${read.value.name}`, input.note);

@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import { foundAgain } from "../foundAgain";
 import { isTaken } from "../isTaken";
+import { withdrawnProblem } from "../materials/withdrawnProblem";
 import { recordEvent } from "../recordEvent";
 import { partDetail } from "./partDetail";
 import { readPart } from "./readPart";
@@ -18,6 +19,8 @@ export async function createPart(person: SignedInPerson, input: z.output<typeof 
   const db = database();
   const read = readPart(input.document, await shopOf(db, input.document));
   if (!read.ok) return read;
+  const withdrawn = await withdrawnProblem(db, read.value.materialId);
+  if (withdrawn) return fail(withdrawn);
   try {
     const id = await db.transaction(async (within) => {
       const part = await insertPart(within, input.number, { ...read.value, note: input.note, by: person.id });

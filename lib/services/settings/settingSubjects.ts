@@ -1,0 +1,2 @@
+/** Rows of `shop_settings`. */
+export const FORCE_FACTORS = "force factors";
