@@ -2,7 +2,7 @@ import type { LengthUnit } from "@/bending/core/units";
 import { mmPer } from "@/bending/core/units";
 import type { DocumentHole, DocumentVertex, FlatShape } from "@/bending/part/partDocument";
 import { convertLengthText } from "@/lib/format/convertLengthText";
-import type { HoleDraft, PartDraft } from "./partDraft";
+import type { CornerDraft, HoleDraft, PartDraft, ReliefDraft } from "./partDraft";
 
 /** The same part said in the other unit; texts that cannot be read stay as typed. */
 export function convertDraft(draft: PartDraft, units: LengthUnit): PartDraft {
@@ -11,9 +11,14 @@ export function convertDraft(draft: PartDraft, units: LengthUnit): PartDraft {
   const scale = mmPer(draft.units) / mmPer(units);
   const hole = (one: HoleDraft): HoleDraft => one.kind === "kept"
     ? { ...one, hole: scaledHole(one.hole, scale) }
-    : { ...one, x: text(one.x), y: text(one.y), diameter: text(one.diameter) };
+    : one.kind === "circle" ? { ...one, x: text(one.x), y: text(one.y), diameter: text(one.diameter) }
+    : one.kind === "slot" ? { ...one, x: text(one.x), y: text(one.y), toX: text(one.toX), toY: text(one.toY), width: text(one.width) }
+    : { ...one, x: text(one.x), y: text(one.y), width: text(one.width), height: text(one.height) };
+  const cuts = <T extends { readonly relief: ReliefDraft; readonly corner: CornerDraft }>(of: T) => ({
+    relief: { ...of.relief, width: text(of.relief.width), depth: text(of.relief.depth) }, corner: { ...of.corner, gap: text(of.corner.gap) },
+  });
   return {
-    ...draft, units, thickness: text(draft.thickness), insideRadius: text(draft.insideRadius), toleranceLength: text(draft.toleranceLength), width: text(draft.width),
+    ...draft, ...cuts(draft), units, thickness: text(draft.thickness), insideRadius: text(draft.insideRadius), toleranceLength: text(draft.toleranceLength), width: text(draft.width),
     legs: draft.legs.map((leg) => ({ ...leg, length: text(leg.length), bend: { ...leg.bend, insideRadius: text(leg.bend.insideRadius), gap: text(leg.bend.gap) } })),
     base: {
       ...draft.base, width: text(draft.base.width), depth: text(draft.base.depth),
@@ -21,8 +26,8 @@ export function convertDraft(draft: PartDraft, units: LengthUnit): PartDraft {
       holes: draft.base.holes.map(hole),
     },
     flanges: draft.flanges.map((flange) => ({
-      ...flange, length: text(flange.length), start: text(flange.start), end: text(flange.end), insideRadius: text(flange.insideRadius), gap: text(flange.gap),
-      reliefWidth: text(flange.reliefWidth), reliefDepth: text(flange.reliefDepth), toleranceLength: text(flange.toleranceLength),
+      ...flange, ...cuts(flange), offsetHeight: text(flange.offsetHeight), length: text(flange.length), start: text(flange.start), end: text(flange.end), insideRadius: text(flange.insideRadius), gap: text(flange.gap),
+      toleranceLength: text(flange.toleranceLength),
       holes: flange.holes.map(hole), outline: flange.outline?.map((vertex) => scaledVertex(vertex, scale)) ?? null,
     })),
     flat: draft.flat === null ? null : scaledFlat(draft.flat, scale),

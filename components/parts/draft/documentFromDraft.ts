@@ -2,6 +2,7 @@ import type { FieldProblem } from "@/bending/core/problem";
 import type { MaterialGroup } from "@/bending/handbook/material";
 import type { DraftReader } from "./draftReader";
 import { createDraftReader } from "./draftReader";
+import { rectangleOf } from "./rectangleOf";
 import type { BendDraft, FlangeDraft, HoleDraft, PartDraft } from "./partDraft";
 
 export interface TypedDocument {
@@ -22,6 +23,8 @@ export function documentFromDraft(draft: PartDraft, materialGroup: MaterialGroup
     ...(draft.dimension === "outside" ? {} : { dimension: draft.dimension }),
     ...read.optionalAngle("toleranceAngle", draft.toleranceAngle),
     ...read.optionalLength("toleranceLength", draft.toleranceLength),
+    ...(draft.grain === "absent" ? {} : { grain: draft.grain === "angle" ? read.angle("grain", draft.grainAngle) : draft.grain }),
+    ...cutsOf(draft, "", read),
     ...shapeOf(draft, read),
   };
   return { document, problems: read.problems };
@@ -59,11 +62,35 @@ function outlineOf({ base }: PartDraft, read: DraftReader): readonly (readonly n
 }
 
 function holesOf(holes: readonly HoleDraft[], at: string, read: DraftReader) {
-  if (holes.length === 0) return {};
-  return { holes: holes.map((hole, i) => hole.kind === "kept" ? hole.hole : {
-    circle: [read.length(`${at}[${i}].circle[0]`, hole.x), read.length(`${at}[${i}].circle[1]`, hole.y)],
-    diameter: read.length(`${at}[${i}].diameter`, hole.diameter),
-  }) };
+  return holes.length === 0 ? {} : { holes: holes.map((hole, i) => holeOf(hole, `${at}[${i}]`, read)) };
+}
+
+function holeOf(hole: HoleDraft, at: string, read: DraftReader) {
+  const length = (field: string, text: string) => read.length(`${at}.${field}`, text);
+  switch (hole.kind) {
+    case "kept": return hole.hole;
+    case "circle": return { circle: [length("circle[0]", hole.x), length("circle[1]", hole.y)], diameter: length("diameter", hole.diameter) };
+    case "slot": return { slot: [[length("slot[0][0]", hole.x), length("slot[0][1]", hole.y)], [length("slot[1][0]", hole.toX), length("slot[1][1]", hole.toY)]], width: length("width", hole.width) };
+    case "rectangle": {
+      const [width, height] = [length("polygon.width", hole.width), length("polygon.height", hole.height)];
+      if (width <= 0) read.report(`${at}.polygon.width`, "A rectangle must be wider than 0.");
+      if (height <= 0) read.report(`${at}.polygon.height`, "A rectangle must be higher than 0.");
+      return { polygon: rectangleOf(length("polygon[0][0]", hole.x), length("polygon[0][1]", hole.y), width, height) };
+    }
+    default: return hole satisfies never;
+  }
+}
+
+/** Relief and corner of the part (`at` empty) or of a flange. */
+function cutsOf({ relief, corner }: Pick<PartDraft, "relief" | "corner">, at: string, read: DraftReader) {
+  const path = at === "" ? "" : `${at}.`;
+  return {
+    ...(relief.kind === "absent" ? {} : { relief: {
+      kind: relief.kind,
+      ...(relief.kind === "none" ? {} : { ...read.optionalLength(`${path}relief.width`, relief.width), ...read.optionalLength(`${path}relief.depth`, relief.depth) }),
+    } }),
+    ...(corner.kind === "absent" ? {} : { corner: corner.kind === "open" ? { kind: "open" } : { kind: "mitre", gap: read.length(`${path}corner.gap`, corner.gap) } }),
+  };
 }
 
 function bendOf(bend: BendDraft, at: string, toleranceLength: string, read: DraftReader) {
@@ -75,15 +102,11 @@ function bendOf(bend: BendDraft, at: string, toleranceLength: string, read: Draf
     ...read.optionalLength(`${at}.gap`, bend.hem === "none" ? "" : bend.gap),
     ...read.optionalAngle(`${at}.toleranceAngle`, bend.toleranceAngle),
     ...read.optionalLength(`${at}.toleranceLength`, toleranceLength),
+    ...(bend.strokeWith.trim() === "" ? {} : { strokeWith: bend.strokeWith.trim() }),
   };
 }
 
 function flangeOf(flange: FlangeDraft, at: string, read: DraftReader) {
-  const relief = flange.relief === "none" ? {} : { relief: {
-    kind: flange.relief,
-    ...read.optionalLength(`${at}.relief.width`, flange.reliefWidth),
-    ...read.optionalLength(`${at}.relief.depth`, flange.reliefDepth),
-  } };
   return {
     id: flange.id.trim(), on: flange.on, edge: flange.edge,
     ...(flange.outline === null ? { length: read.length(`${at}.length`, flange.length) } : { outline: flange.outline }),
@@ -93,7 +116,8 @@ function flangeOf(flange: FlangeDraft, at: string, read: DraftReader) {
     ...read.optionalAngle(`${at}.startAngle`, flange.startAngle),
     ...read.optionalAngle(`${at}.endAngle`, flange.endAngle),
     ...(flange.dimension === "part" ? {} : { dimension: flange.dimension }),
-    ...relief,
+    ...cutsOf(flange, at, read),
+    ...(flange.offsetHeight.trim() === "" ? {} : { offset: { height: read.length(`${at}.offset.height`, flange.offsetHeight) } }),
     ...holesOf(flange.holes, `${at}.holes`, read),
   };
 }

@@ -15,6 +15,12 @@ const documents: readonly PartDocument[] = [
       { id: "front", on: "base", edge: 0, length: 30, angle: 90, direction: "up", start: 2, end: 3, startAngle: 80, endAngle: 70, relief: { kind: "round", width: 2, depth: 4 }, toleranceLength: 0.3 },
       { id: "return", on: "front", edge: 2, length: 12, angle: 45, direction: "down", dimension: "tangent", holes: [{ polygon: [[1, 1], [3, 1], [2, 3]] }] },
       { id: "ear", on: "base", edge: 1, outline: [[0, 0], [50, 0], [40, 20], [10, 20]], angle: 90, direction: "up" }] },
+  { ...common, grain: "x", relief: { kind: "round" }, corner: { kind: "mitre", gap: 0.5 },
+    base: { outline: [[0, 0], [200, 0], [200, 120], [0, 120]], holes: [{ polygon: [[10, 20], [40.5, 20], [40.5, 35.25], [10, 35.25]] }] },
+    flanges: [
+      { id: "front", on: "base", edge: 0, length: 30, angle: 90, direction: "up", relief: { kind: "none" }, corner: { kind: "open" }, strokeWith: "step" },
+      { id: "step", on: "front", edge: 2, length: 20, angle: 60, direction: "down", offset: { height: 3 } }] },
+  { ...common, grain: 30, profile: { width: 50, legs: [10, 20, 30], bends: [{ angle: 45, direction: "up", strokeWith: "b2" }, { angle: 45, direction: "down" }] } },
   { ...common, base: { outline: [[0, 0], [100, 0, 0.2], [100, 80], [20, 90]] }, flanges: [] },
   { ...common, flat: { outline: [[0, 0], [120, 0], [120, 80], [0, 80]], bends: [{ id: "b1", line: [[20, 0], [20, 80]], angle: 90, direction: "up", insideRadius: 1 }] } },
 ];

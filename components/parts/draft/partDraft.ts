@@ -1,5 +1,5 @@
 import type { LengthUnit } from "@/bending/core/units";
-import type { AllowanceRule, BendDirection, DimensionKind, DocumentHole, DocumentVertex, FlatShape, HemKind } from "@/bending/part/partDocument";
+import type { AllowanceRule, BendDirection, CornerEntry, DimensionKind, DocumentHole, DocumentVertex, FlatShape, HemKind, ReliefEntry } from "@/bending/part/partDocument";
 
 /**
  * A part as it is being typed: numbers are still the text that was typed, so that nothing entered is lost while
@@ -19,6 +19,10 @@ export interface PartDraft {
   readonly dimension: DimensionKind;
   readonly toleranceAngle: string;
   readonly toleranceLength: string;
+  readonly grain: "absent" | "x" | "y" | "angle";
+  readonly grainAngle: string;
+  readonly relief: ReliefDraft;
+  readonly corner: CornerDraft;
   readonly shape: "profile" | "base" | "flat";
   readonly width: string;
   readonly legs: readonly LegDraft[];
@@ -27,6 +31,11 @@ export interface PartDraft {
   /** A flat with bend lines that came in as a document; it is kept as it is. */
   readonly flat: FlatShape | null;
 }
+
+/** `absent`: not said here, so the part's (or nothing) holds. */
+export interface ReliefDraft { readonly kind: ReliefEntry["kind"] | "absent"; readonly width: string; readonly depth: string }
+
+export interface CornerDraft { readonly kind: CornerEntry["kind"] | "absent"; readonly gap: string }
 
 /** A leg, and the bend that ends it (the last leg has none that counts). */
 export interface LegDraft {
@@ -43,6 +52,8 @@ export interface BendDraft {
   readonly hem: HemKind | "none";
   readonly gap: string;
   readonly toleranceAngle: string;
+  /** The bend that is formed by the same stroke; empty: none. */
+  readonly strokeWith: string;
 }
 
 export interface BaseDraft {
@@ -55,9 +66,13 @@ export interface BaseDraft {
 
 export interface VertexDraft { readonly key: string; readonly x: string; readonly y: string; readonly bulge: string }
 
-/** A round hole is edited here; any other is kept as the document gave it. */
+/** Round holes, slots and upright rectangles are edited here; any other polygon is kept as the document gave it. */
 export type HoleDraft =
   | { readonly key: string; readonly kind: "circle"; readonly x: string; readonly y: string; readonly diameter: string }
+  /** From the middle of one round end to the middle of the other. */
+  | { readonly key: string; readonly kind: "slot"; readonly x: string; readonly y: string; readonly toX: string; readonly toY: string; readonly width: string }
+  /** By its lower left corner. */
+  | { readonly key: string; readonly kind: "rectangle"; readonly x: string; readonly y: string; readonly width: string; readonly height: string }
   | { readonly key: string; readonly kind: "kept"; readonly hole: DocumentHole };
 
 export interface FlangeDraft extends BendDraft {
@@ -71,9 +86,10 @@ export interface FlangeDraft extends BendDraft {
   readonly startAngle: string;
   readonly endAngle: string;
   readonly dimension: DimensionKind | "part";
-  readonly relief: "none" | "rectangular" | "round" | "tear";
-  readonly reliefWidth: string;
-  readonly reliefDepth: string;
+  readonly relief: ReliefDraft;
+  readonly corner: CornerDraft;
+  /** Height of an offset; empty: a plain bend. */
+  readonly offsetHeight: string;
   readonly toleranceLength: string;
   readonly holes: readonly HoleDraft[];
   /** An outline of its own, kept as the document gave it; it then takes the place of the length. */

@@ -1,6 +1,6 @@
 import { mmPer, type LengthUnit } from "@/bending/core/units";
 import { formatNumber } from "@/lib/format/formatNumber";
-import { newBend, newFlange, newLeg, rowKey } from "./newRows";
+import { newBend, newFlange, newLeg, noCorner, noRelief, rowKey } from "./newRows";
 import type { LegDraft, PartDraft } from "./partDraft";
 
 export type QuickStart = "L" | "U" | "Z" | "hat" | "tray";
@@ -40,7 +40,7 @@ export function withQuickStart(draft: PartDraft, start: QuickStart): PartDraft {
 export function startDraft(material: string): PartDraft {
   const blank: PartDraft = {
     number: "", name: "", note: "", units: "mm", material, thickness: "2", radiusFrom: "die", insideRadius: "", kFactor: "", rule: "default", dimension: "outside",
-    toleranceAngle: "", toleranceLength: "", shape: "profile", width: "300", legs: [], flanges: [], flat: null,
+    toleranceAngle: "", toleranceLength: "", grain: "absent", grainAngle: "", relief: noRelief, corner: noCorner, shape: "profile", width: "300", legs: [], flanges: [], flat: null,
     base: {
       kind: "rectangle", width: "200", depth: "120", holes: [],
       vertices: [[0, 0], [200, 0], [200, 120], [0, 120]].map(([x, y]) => ({ key: rowKey(), x: String(x), y: String(y), bulge: "" })),

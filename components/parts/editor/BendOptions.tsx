@@ -1,5 +1,6 @@
 "use client";
 import { Select } from "@/components/ui/Select";
+import { TextInput } from "@/components/ui/TextInput";
 import type { BendDraft } from "../draft/partDraft";
 import { useEditor } from "./editorContext";
 import { fieldId } from "./fieldId";
@@ -28,6 +29,7 @@ export function BendOptions({ at, bend, onChange }: BendOptionsProps) {
       <PathField path={`${at}.insideRadius`} label="Inside radius" value={bend.insideRadius} onChange={(insideRadius) => onChange({ insideRadius })} placeholder="as the part" />
       <PathField path={`${at}.kFactor`} label="K-factor" kind="number" value={bend.kFactor} onChange={(kFactor) => onChange({ kFactor })} placeholder="as the part" />
       <PathField path={`${at}.toleranceAngle`} label="Angle tolerance ±" kind="angle" value={bend.toleranceAngle} onChange={(toleranceAngle) => onChange({ toleranceAngle })} placeholder="as the part" />
+      <TextInput id={fieldId(`${at}.strokeWith`)} label="Formed in one stroke with" value={bend.strokeWith} onChange={(event) => onChange({ strokeWith: event.target.value })} error={problemAt(`${at}.strokeWith`)} placeholder="no other bend" />
       <Select id={fieldId(`${at}.hem`)} label="Hem" value={bend.hem} options={hems} onChange={setHem} error={problemAt(`${at}.hem`)} />
       {bend.hem === "none" || bend.hem === "closed" ? null : <PathField path={`${at}.gap`} label="Gap inside the hem" value={bend.gap} onChange={(gap) => onChange({ gap })} />}
     </div>

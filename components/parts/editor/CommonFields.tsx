@@ -6,6 +6,7 @@ import { Choice } from "@/components/ui/Choice";
 import { Select } from "@/components/ui/Select";
 import { convertDraft } from "../draft/convertDraft";
 import type { PartDraft } from "../draft/partDraft";
+import { CutFields } from "./CutFields";
 import { useEditor } from "./editorContext";
 import { fieldId } from "./fieldId";
 import { PathField } from "./PathField";
@@ -17,6 +18,10 @@ const rules: readonly { readonly value: PartDraft["rule"]; readonly label: strin
   { value: "machinery", label: "Straight length by material group" },
   { value: "faa", label: "Aircraft repair handbook formula" },
   { value: "k", label: "The K-factor given here" },
+];
+
+const grains: readonly { readonly value: PartDraft["grain"]; readonly label: string }[] = [
+  { value: "absent", label: "not known" }, { value: "x", label: "along x of the flat" }, { value: "y", label: "along y of the flat" }, { value: "angle", label: "at an angle" },
 ];
 
 /** Material, thickness, radius, and how lengths are measured and unfolded. */
@@ -42,6 +47,10 @@ export function CommonFields({ materials }: { readonly materials: readonly Mater
       <PathField path="kFactor" label="K-factor (only to override)" kind="number" value={draft.kFactor} onChange={(kFactor) => set({ kFactor })} placeholder="from the rule" />
       <Select id={fieldId("rule")} label="Bend allowance by" value={draft.rule} options={rules} error={problemAt("rule")} className="col-span-2"
         onChange={(value) => { const rule = rules.find((one) => one.value === value); if (rule !== undefined) set({ rule: rule.value }); }} />
+      {draft.shape === "profile" ? null : <CutFields at="" relief={draft.relief} corner={draft.corner} otherwise={{ relief: "none", corner: "open" }} onChange={set} />}
+      <Select id={fieldId("grain")} label="Rolling direction (grain)" value={draft.grain} options={grains} error={problemAt("grain")}
+        onChange={(value) => set({ grain: grains.find((one) => one.value === value)?.value ?? "absent" })} />
+      {draft.grain === "angle" ? <PathField path="grain" label="From x, counter-clockwise" kind="angle" value={draft.grainAngle} onChange={(grainAngle) => set({ grainAngle })} /> : <span />}
       <PathField path="toleranceAngle" label="Angle tolerance ±" kind="angle" value={draft.toleranceAngle} onChange={(toleranceAngle) => set({ toleranceAngle })} placeholder="general" />
       <PathField path="toleranceLength" label="Length tolerance ±" value={draft.toleranceLength} onChange={(toleranceLength) => set({ toleranceLength })} placeholder="general" />
     </div>

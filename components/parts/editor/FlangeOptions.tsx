@@ -3,14 +3,12 @@ import { Select } from "@/components/ui/Select";
 import type { FlangeDraft } from "../draft/partDraft";
 import { keysOfBranch } from "../draft/flangeTree";
 import { BendOptions } from "./BendOptions";
+import { CutFields } from "./CutFields";
 import { useEditor } from "./editorContext";
 import { fieldId } from "./fieldId";
 import { HoleRows } from "./HoleRows";
 import { PathField } from "./PathField";
 
-const reliefs: readonly { readonly value: FlangeDraft["relief"]; readonly label: string }[] = [
-  { value: "none", label: "no relief" }, { value: "rectangular", label: "rectangular" }, { value: "round", label: "round" }, { value: "tear", label: "torn" },
-];
 const dimensions: readonly { readonly value: FlangeDraft["dimension"]; readonly label: string }[] = [
   { value: "part", label: "as the part" }, { value: "outside", label: "outside" }, { value: "inside", label: "inside" }, { value: "tangent", label: "tangent" },
 ];
@@ -36,9 +34,8 @@ export function FlangeOptions({ at, flange, onChange }: FlangeOptionsProps) {
         <PathField path={`${at}.end`} label="Inset at end" value={flange.end} onChange={(end) => onChange({ end })} {...inset} />
         <PathField path={`${at}.startAngle`} label="Side at start" kind="angle" value={flange.startAngle} onChange={(startAngle) => onChange({ startAngle })} placeholder="90" />
         <PathField path={`${at}.endAngle`} label="Side at end" kind="angle" value={flange.endAngle} onChange={(endAngle) => onChange({ endAngle })} placeholder="90" />
-        <Select id={fieldId(`${at}.relief`)} label="Relief" value={flange.relief} options={reliefs} onChange={(value) => onChange({ relief: reliefs.find((one) => one.value === value)?.value ?? "none" })} error={problemAt(`${at}.relief`)} />
-        {flange.relief === "none" || flange.relief === "tear" ? null : <PathField path={`${at}.relief.width`} label="Relief width" value={flange.reliefWidth} onChange={(reliefWidth) => onChange({ reliefWidth })} placeholder="thickness" />}
-        {flange.relief === "none" ? null : <PathField path={`${at}.relief.depth`} label="Relief depth" value={flange.reliefDepth} onChange={(reliefDepth) => onChange({ reliefDepth })} placeholder="to the bend" />}
+        <CutFields at={at} relief={flange.relief} corner={flange.corner} otherwise={{ relief: "as the part", corner: "as the part" }} onChange={onChange} />
+        <PathField path={`${at}.offset.height`} label="Offset height" value={flange.offsetHeight} onChange={(offsetHeight) => onChange({ offsetHeight })} placeholder="no offset" />
         <PathField path={`${at}.toleranceLength`} label="Length tolerance ±" value={flange.toleranceLength} onChange={(toleranceLength) => onChange({ toleranceLength })} placeholder="as the part" />
       </div>
       <BendOptions at={at} bend={flange} onChange={onChange} />

@@ -3,15 +3,19 @@ import type { PartDraft } from "../draft/partDraft";
 const names: Readonly<Record<string, string>> = {
   name: "Name", number: "Number", note: "Note", material: "Material", thickness: "Thickness", insideRadius: "Inside radius", kFactor: "K-factor", rule: "Bend allowance",
   toleranceAngle: "Angle tolerance", toleranceLength: "Length tolerance", length: "length", angle: "angle", edge: "edge", on: "stands on", start: "inset at start", end: "inset at end",
-  startAngle: "side at start", endAngle: "side at end", gap: "gap", hem: "hem", id: "name", relief: "relief", outline: "outline", width: "width", depth: "depth", diameter: "diameter",
+  startAngle: "side at start", endAngle: "side at end", gap: "gap", hem: "hem", id: "name", relief: "relief", "relief.kind": "relief", "relief.width": "relief width", "relief.depth": "relief depth", corner: "corners", "corner.kind": "corners", "corner.gap": "gap in the corner", grain: "rolling direction", "offset.height": "offset height", strokeWith: "formed in one stroke with", direction: "direction", dimension: "measured", outline: "outline", width: "width", depth: "depth", diameter: "diameter",
+};
+
+const inHole: Readonly<Record<string, string>> = {
+  circle: "middle", "circle[0]": "x", "circle[1]": "y", "slot[0]": "first end", "slot[1]": "other end", "slot[0][0]": "from x", "slot[0][1]": "from y", "slot[1][0]": "to x", "slot[1][1]": "to y",
+  polygon: "corners", "polygon[0][0]": "x", "polygon[0][1]": "y", "polygon.width": "width", "polygon.height": "height",
 };
 
 /** `holes[0].circle[1]` is "hole 1, y". */
 function ownName(path: string): string {
   const hole = /^holes\[(\d+)\](?:\.(.+))?/.exec(path);
   if (hole === null) return names[path] ?? path;
-  const at = hole[2] === "circle[0]" ? "x" : hole[2] === "circle[1]" ? "y" : hole[2];
-  return `hole ${Number(hole[1]) + 1}${at === undefined ? "" : `, ${names[at] ?? at}`}`;
+  return `hole ${Number(hole[1]) + 1}${hole[2] === undefined ? "" : `, ${inHole[hole[2]] ?? names[hole[2]] ?? hole[2]}`}`;
 }
 
 /** A path of the document in the words of the form: `flanges[1].length` is "Flange left, length". */
@@ -24,5 +28,6 @@ export function pathName(path: string, draft: PartDraft): string {
   if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${ownName(flange[2])}`}`;
   if (path === "profile.width") return "Width";
   if (path.startsWith("base.")) return `Base, ${ownName(path.slice(5))}`;
-  return names[path] ?? path;
+  const name = names[path];
+  return name === undefined ? path : `${name[0]?.toUpperCase() ?? ""}${name.slice(1)}`;
 }

@@ -25,7 +25,7 @@ function flatCured(draft: PartDraft, cure: Cure): PartDraft | null {
 
 function reliefAdded(draft: PartDraft, path: string): PartDraft | null {
   const at = Number(/^flanges\[(\d+)\]\.relief$/.exec(path)?.[1] ?? -1);
-  return draft.flanges[at] === undefined ? null : { ...draft, flanges: replaced(draft.flanges, at, (flange) => ({ ...flange, relief: "rectangular", reliefWidth: "", reliefDepth: "" })) };
+  return draft.flanges[at] === undefined ? null : { ...draft, flanges: replaced(draft.flanges, at, (flange) => ({ ...flange, relief: { kind: "rectangular", width: "", depth: "" } })) };
 }
 
 function bendCured(bend: BendDraft, field: string | undefined, text: string): BendDraft | null {
@@ -34,7 +34,7 @@ function bendCured(bend: BendDraft, field: string | undefined, text: string): Be
 
 function flangeCured(flange: FlangeDraft, field: string | undefined, text: string): FlangeDraft | null {
   if (field === "length" || field === "angle" || field === "insideRadius") return { ...flange, [field]: text };
-  if (field === "relief.width") return { ...flange, reliefWidth: text };
+  if (field === "relief.width") return { ...flange, relief: { ...flange.relief, width: text } };
   const [, index, rest] = /^holes\[(\d+)\]\.(.+)$/.exec(field ?? "") ?? [];
   return changedOrNull(flange.holes[Number(index)], (hole) => holeCured(hole, rest, text), (_, hole) => ({ ...flange, holes: replaced(flange.holes, Number(index), () => hole) }));
 }
