@@ -1,4 +1,6 @@
+import { ok } from "@/bending/core/result";
 import { MM_PER_INCH } from "@/bending/core/units";
+import type { CsvColumn } from "@/lib/csv/csvColumn";
 import { dateColumn } from "@/lib/csv/dateColumn";
 import { numberColumn } from "@/lib/csv/numberColumn";
 import { optionalColumn } from "@/lib/csv/optionalColumn";
@@ -14,12 +16,21 @@ const length = (header: string, field: TrialLengthField, example: string) => {
   });
 };
 
+/** As trials are filed: a thickness that was written in inches is no other one in its last digits. */
+const toHundredth = (column: CsvColumn<number>): CsvColumn<number> => ({
+  ...column,
+  read: (cell, how) => {
+    const found = column.read(cell, how);
+    return found.ok ? ok(Math.round(found.value * 100 + 1e-7) / 100) : found;
+  },
+});
+
 /** The columns of a file of trials; lengths in millimetres, the angle in degrees turned through, instruments by their names. */
 export const bendTrialCsv = {
   number: optionalColumn(textColumn("trial", 30, { expects: "the number of a trial that is there; empty for a new one", example: "" })),
   material: textColumn("material", 60, { expects: "the material's short name", example: "S235" }),
   batch: optionalColumn(textColumn("batch", 60, { example: "C-4471" })),
-  nominal: optionalColumn(length("nominal thickness", "nominal", "2")),
+  nominal: optionalColumn(toHundredth(length("nominal thickness", "nominal", "2"))),
   thickness: length("thickness", "thickness", "1.98"),
   vOpening: length("v opening", "vOpening", "16"),
   punchRadius: length("punch radius", "punchRadius", "0.8"),
