@@ -7,11 +7,14 @@ export interface CommandOutcome {
   readonly json: unknown;
   /** One line for standard error. */
   readonly error: string | null;
+  /** A file to write; when that fails the run fails. */
+  readonly file?: { readonly path: string; readonly content: string | Uint8Array };
 }
 
 /** The only things of the outside world that the command line touches. */
 export interface CommandWorld {
   readonly readText: (path: string) => Result<string, string>;
+  readonly readBytes: (path: string) => Result<Uint8Array, string>;
   /** Milliseconds of a clock. */
   readonly now: () => number;
 }

@@ -18,15 +18,16 @@ export function readArguments(args: readonly string[], known: Readonly<Record<st
   for (let i = 0; i < rest.length; i += 1) {
     const word = rest[i] ?? "";
     if (!word.startsWith("--")) { files.push(word); continue; }
-    const [name, inline] = word.split("=", 2);
-    if (name === undefined || !allowed.includes(name)) return fail(`${word}: not an option of ${verb}; it takes ${allowed.length > 0 ? allowed.join(", ") : "none"}`);
+    const at = word.indexOf("=");
+    const [name, inline] = at < 0 ? [word, undefined] : [word.slice(0, at), word.slice(at + 1)];
+    if (!allowed.includes(name)) return fail(`${word}: not an option of ${verb}; it takes ${allowed.length > 0 ? allowed.join(", ") : "none"}`);
     const value = inline ?? rest[(i += 1)];
     if (value === undefined || value === "") return fail(`${name}: a value is missing after it`);
     if (options.has(name)) return fail(`${name}: given twice`);
     options.set(name, value);
   }
   const file = files[0];
-  if (file === undefined) return fail("PART.json: name the part document");
-  if (files.length > 1) return fail(`${files[1]}: one part document at a time`);
+  if (file === undefined) return fail(verb === "import" ? "FILE: name the drawing" : "PART.json: name the part document");
+  if (files.length > 1) return fail(`${files[1]}: one file at a time`);
   return ok({ verb, file, options });
 }

@@ -89,8 +89,8 @@ describe("two other readers see the same drawing", () => {
       const lines = new Map<string, number>();
       for (const { type, layer } of parsed.entities) if (type === "LINE") lines.set(layer, (lines.get(layer) ?? 0) + 1);
       return {
-        polylines: parsed.entities.flatMap((entity: { type: string; closed?: boolean; vertices?: never }) => (entity.type === "LWPOLYLINE" ? [[entity.closed === true, areaOf(entity.vertices ?? [])] as const] : [])),
-        circles: parsed.entities.flatMap((entity: { type: string; r?: number }) => (entity.type === "CIRCLE" ? [entity.r ?? NaN] : [])), lines, units: parsed.header.insUnits,
+        polylines: parsed.entities.flatMap((entity) => (entity.type === "LWPOLYLINE" ? [[entity.closed === true, areaOf(entity.vertices ?? [])] as const] : [])),
+        circles: parsed.entities.flatMap((entity) => (entity.type === "CIRCLE" ? [entity.r ?? NaN] : [])), lines, units: parsed.header.insUnits,
       };
     }],
   ];

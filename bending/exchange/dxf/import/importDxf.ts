@@ -20,6 +20,8 @@ export interface ImportDxfOptions extends Omit<FlatFacts, "units"> {
 export interface ImportedDxf {
   readonly opened: OpenedDrawing;
   readonly unit: DrawingUnit;
+  /** What each line group was taken for. */
+  readonly roles: ReadonlyMap<string, LineRole>;
   readonly found: FoundFlat;
   /** Not yet checked. */
   readonly document: PartDocument;
@@ -38,5 +40,5 @@ export function importDxf(text: string, options: ImportDxfOptions): Result<Impor
   const found = findFlat(shapes, groups, { unit, roles: chosen, gap: options.gap ?? DRAWN_GAP_MM, singleLines: options.singleLines ?? null, contour: 0 });
   const document = flatDocument(found, { ...options, units: unit === "in" || unit === "ft" ? "in" : "mm" });
   if (!document) return fail(`no closed contour was found${found.leftovers[0] ? `: ${found.leftovers[0].what}` : ""}${found.leftovers.length > 1 ? ` (and ${found.leftovers.length - 1} more)` : ""}`);
-  return ok({ opened: opened.value, unit, found, document });
+  return ok({ opened: opened.value, unit, roles: chosen, found, document });
 }
