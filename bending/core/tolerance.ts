@@ -31,3 +31,6 @@ export const DRAWN_GAP_MM = 0.1;
 
 /** mm. Farthest that the arcs put in place of a drawn ellipse or spline stand off it. */
 export const CURVE_FIT_MM = 0.01;
+
+/** mm. A flat that comes out as near as this to what it was is the same flat: half of the last digit that is printed. */
+export const FLAT_CHANGE_MM = 0.005;

@@ -1,3 +1,4 @@
+import type { LengthUnit } from "@/bending/core/units";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PlanDocument } from "@/bending/plan/planDocument";
 import type { MaterialFacts } from "@/bending/handbook/material";
@@ -24,6 +25,16 @@ export interface ListQuery {
   readonly pageSize?: number | undefined;
 }
 
+/** A flat that would come out differently now than when it was stored: the shop has measured more, or the material has a new version. */
+export interface FlatChange {
+  /** Of the part's document, to show it in; the sizes are in mm. */
+  readonly units: LengthUnit;
+  readonly thenMm: readonly [width: number, depth: number];
+  readonly nowMm: readonly [width: number, depth: number];
+  /** What changed, such as "S235 2 mm, V 12 mm, 90°: 3 new trials on 2026-11-30". */
+  readonly why: readonly string[];
+}
+
 export interface PartListItem {
   readonly id: string;
   readonly number: string;
@@ -35,6 +46,8 @@ export interface PartListItem {
   readonly flatDepthMm: number;
   readonly revision: number;
   readonly releasedSheets: number;
+  /** Null: the stored flat is what it would be now. */
+  readonly flatChange: FlatChange | null;
   readonly updatedAt: string;
   readonly updatedBy: string;
 }
@@ -56,6 +69,8 @@ export interface PartDetail {
   /** The revision asked for, or the newest. */
   readonly revision: RevisionInfo;
   readonly document: PartDocument;
+  /** Of the revision shown. */
+  readonly flatChange: FlatChange | null;
   readonly plans: readonly PlanListItem[];
 }
 
@@ -164,6 +179,8 @@ export interface SheetListItem {
   readonly planId: string;
   readonly releasedAt: string | null;
   readonly releasedBy: string | null;
+  /** Null: nothing has changed that its flat follows from, or it is not on the floor. */
+  readonly flatChange: FlatChange | null;
   readonly createdAt: string;
 }
 

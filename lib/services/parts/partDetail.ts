@@ -1,3 +1,4 @@
+import { partFlatChanges } from "../flatChange/partFlatChanges";
 import { planListItem } from "../plans/planListItem";
 import type { Connection } from "@/db/connection";
 import { findPart, type RevisionRow } from "@/db/parts/findPart";
@@ -22,6 +23,7 @@ export async function partDetail(db: Connection, role: Role, id: string, revisio
     revisions: found.revisions.map(revisionInfo),
     revision: revisionInfo(found.revision),
     document: found.revision.document,
+    flatChange: (await partFlatChanges(db, { revisionId: found.revision.id })).get(found.part.id) ?? null,
     plans: plans.rows.map(planListItem),
   };
 }

@@ -1,3 +1,4 @@
+import { sheetFlatChanges } from "../flatChange/sheetFlatChanges";
 import { sheetListItem } from "../sheets/sheetListItem";
 import { visibleSheetStates } from "../sheets/visibleSheetStates";
 import { machineOf } from "./machineOf";
@@ -15,6 +16,7 @@ export async function planDetail(db: Connection, role: Role, id: string): Promis
   const row = await findPlan(db, id);
   if (!row) return undefined;
   const sheets = await findSheets(db, visibleSheetStates(role), { planId: id, sort: "createdAt", dir: "desc", page: 1, pageSize: SHEETS_SHOWN });
+  const changes = await sheetFlatChanges(db, sheets.rows.map((sheet) => sheet.id));
   return {
     ...planListItem(row),
     plan: row.plan,
@@ -25,6 +27,6 @@ export async function planDetail(db: Connection, role: Role, id: string): Promis
     machineModel: machineOf(row.machine_document),
     tooling: { format: "tooling/1", units: "mm", tools: row.tools.map(toolToDocument) },
     tools: row.tools,
-    sheets: sheets.rows.map(sheetListItem),
+    sheets: sheets.rows.map((sheet) => sheetListItem(sheet, changes.get(sheet.id))),
   };
 }

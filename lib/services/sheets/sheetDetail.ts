@@ -1,3 +1,4 @@
+import { sheetFlatChanges } from "../flatChange/sheetFlatChanges";
 import { foundAgain } from "../foundAgain";
 import { currentPieces } from "./currentPieces";
 import { sheetListItem } from "./sheetListItem";
@@ -15,7 +16,7 @@ export async function sheetDetail(db: Connection, role: Role, id: string): Promi
   const row = await findSheet(db, visibleSheetStates(role), id);
   if (!row) return undefined;
   return {
-    ...sheetListItem(row),
+    ...sheetListItem(row, (await sheetFlatChanges(db, [id])).get(id)),
     partId: row.part_id,
     machineId: row.machine_id,
     view: row.snapshot === null ? await draftView(db, row) : (row.snapshot as SheetView),

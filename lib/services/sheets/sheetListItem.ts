@@ -1,7 +1,8 @@
 import type { SheetListRow } from "@/db/sheets/sheetRow";
-import type { SheetListItem } from "@/lib/schemas/views";
+import type { FlatChange, SheetListItem } from "@/lib/schemas/views";
 
-export const sheetListItem = (row: SheetListRow): SheetListItem => ({
+/** `change` is that of its flat, when it would come out differently now. */
+export const sheetListItem = (row: SheetListRow, change: FlatChange | undefined): SheetListItem => ({
   id: row.id,
   number: row.number,
   state: row.state,
@@ -14,5 +15,6 @@ export const sheetListItem = (row: SheetListRow): SheetListItem => ({
   planId: row.plan_id,
   releasedAt: row.released_at?.toISOString() ?? null,
   releasedBy: row.released_by,
+  flatChange: change ?? null,
   createdAt: row.created_at.toISOString(),
 });
