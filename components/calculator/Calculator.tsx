@@ -1,7 +1,7 @@
 "use client";
 import { useQuery } from "@tanstack/react-query";
 import { RotateCcw } from "lucide-react";
-import { useEffect, useMemo } from "react";
+import { useEffect } from "react";
 import { defaultMethodFactors } from "@/bending/handbook/forceMethods";
 import { builtInMaterials } from "@/bending/handbook/materials";
 import type { MaterialFacts } from "@/bending/handbook/material";
@@ -18,6 +18,7 @@ import { sections } from "@/lib/calculator/sections";
 import { takenWhenEmpty } from "@/lib/calculator/takenWhenEmpty";
 import { parseQuantity } from "@/lib/format/parseQuantity";
 import { materialsOptions } from "@/lib/queries/materials";
+import { useShopSettings } from "@/lib/queries/shopSettings";
 import { gaugeSystemOf } from "@/bending/handbook/gaugeSystemOf";
 import { ChoiceInput } from "./ChoiceInput";
 import { DepthChart } from "./DepthChart";
@@ -33,15 +34,16 @@ export function Calculator({ reads }: { readonly reads: ShopReads }) {
   const { state, setText, setMaterial, choose, clear } = useCalculatorState();
   const shop = useQuery({ ...materialsOptions(), enabled: reads.materials });
   const limits = useShopLimits(reads);
-  const materials: readonly MaterialFacts[] = shop.data ?? builtInMaterials;
+  const settings = useShopSettings();
+  const materials: readonly MaterialFacts[] = shop.data?.filter(({ id, withdrawn }) => withdrawn === null || id === state.material) ?? builtInMaterials;
   const material = materials.find(({ id }) => id === state.material) ?? materials.find(({ id }) => id === "S235") ?? materials[0];
   const { texts, choices } = state;
-  const read = useMemo(() => (material === undefined ? null : readFields(texts, parseQuantity, choices.u, material.group)), [texts, choices.u, material]);
+  const read = material === undefined ? null : readFields(texts, parseQuantity, choices.u, material.group);
   useEffect(() => {
     if (window.location.hash !== "") document.getElementById(window.location.hash.slice(1))?.scrollIntoView();
   }, []);
   if (material === undefined || read === null) return <LoadProblem what="The calculator" error={new Error("The shop has no material yet. Add one first.")} onRetry={() => void shop.refetch()} />;
-  const question = askQuestion(read, choices, material, defaultMethodFactors);
+  const question = askQuestion(read, choices, material, settings.data?.forceFactors ?? defaultMethodFactors);
   const gauge = gaugeSystemOf(material.group) ?? undefined;
   const field = (place: string, key: FieldKey) => (
     <FieldInput place={place} name={key} text={texts[key] ?? fieldOf(key).start} units={choices.u} value={read.values[key]} problem={read.problems[key]}

@@ -23,17 +23,21 @@ export function DepthChart({ question }: { readonly question: Question }) {
   const drawn = ([angle, travel]: readonly [number, number]) => [angle, travel * per] as const;
   const said = ([angle, travel]: readonly [number, number]) => `${formatQuantity(angle, "angle", units)}, ${formatQuantity(travel, "length", units)}`;
   const [, floor] = frame.at([0, 0]);
-  const [x, y] = frame.at(drawn(demanded));
+  const side = aimed[0] > frame.x[1] * 0.42 ? "left" : "right";
+  const drop = (point: readonly [number, number], ink: string) => {
+    const [x, y] = frame.at(drawn(point));
+    return <line x1={x} x2={x} y1={floor} y2={y} stroke={ink} strokeWidth="2" strokeDasharray="4 4" />;
+  };
   return (
     <div>
       <ChartSheet title="Punch depth against bend angle" note={`${question.material.id}, V ${formatQuantity(question.vOpening, "length", units)}, radius ${formatQuantity(question.insideRadius, "length", units)}`} frame={frame}
         xLabel="Bend angle, turned through, °" yLabel={`Depth from contact, ${quantityUnit("length", units)}`}
         description={`Depth grows with the angle: ${said(aimed)} without springback; the stroke has to reach ${said(demanded)}. The table below has the numbers.`}>
-        <line x1={x} x2={x} y1={floor} y2={y} stroke="var(--amber-ink)" strokeWidth="2" strokeDasharray="4 4" />
+        {drop(aimed, "var(--ink)")}{drop(demanded, "var(--amber-ink)")}
         {curves.map(({ name, points }, i) => <ChartLine key={name} frame={frame} points={points.filter(([, travel]) => travel >= 0).map(drawn)} dash={dashes[i] ?? ""} stroke={strokes[i] ?? ""} />)}
-        <ChartMark frame={frame} at={drawn(aimed)} label={`left over: ${said(aimed)}`} shape="ring" side="left" />
-        <ChartMark frame={frame} at={drawn(demanded)} label={`demanded: ${said(demanded)}`} shape="square" ink="var(--amber-ink)" side={demanded[0] > frame.x[1] * 0.6 ? "left" : "right"} />
-        <ChartKey frame={frame} side="left" lines={curves.map(({ name }, i) => ({ name, dash: dashes[i] ?? "", stroke: strokes[i] ?? "" }))} />
+        <ChartMark frame={frame} at={drawn(aimed)} label={`without springback: ${said(aimed)}`} shape="ring" side={side} labelY={floor - 42} />
+        <ChartMark frame={frame} at={drawn(demanded)} label={`demanded: ${said(demanded)}`} shape="square" ink="var(--amber-ink)" side={side} labelY={floor - 16} />
+        <ChartKey frame={frame} lines={curves.map(({ name }, i) => ({ name, dash: dashes[i] ?? "", stroke: strokes[i] ?? "" }))} />
       </ChartSheet>
       <ChartTable name="Punch depth against bend angle" heads={["Bend angle", ...curves.map(({ name }) => name)]}
         rows={(curves[0]?.points ?? []).flatMap(([angle], i) => (i > 0 && i % 10 === 0 ? [[formatQuantity(angle, "angle", units), ...curves.map(({ points }) => formatQuantity(points[i]?.[1] ?? NaN, "length", units))]] : []))} />

@@ -46,7 +46,7 @@ export function ForceChart({ question, limits }: { readonly question: Question; 
         {curves.map(({ name, points }, i) => <ChartLine key={name} frame={frame} points={points.map(([v, force]) => drawn(v, force))} dash={dashes[i] ?? ""} stroke={strokes[i] ?? ""} />)}
         {dies.filter(({ bears }) => bears <= highest * ROOM).map((die) => <ChartMark key={die.name} frame={frame} at={drawn(die.vOpening, die.bears)} label={die.name} shape={die.bears < die.needs ? "cross" : "square"} ink={die.bears < die.needs ? "var(--brick-ink)" : "var(--ink)"} side={die.vOpening > (span[0] + span[1]) / 2 ? "left" : "right"} />)}
         <ChartMark frame={frame} at={drawn(vOpening, here)} label={`V ${formatQuantity(vOpening, "length", units)}: ${said(here)}`} shape="ring" side={vOpening > (span[0] + span[1]) / 2 ? "left" : "right"} />
-        <ChartKey frame={frame} side="right" lines={curves.map(({ name }, i) => ({ name, dash: dashes[i] ?? "", stroke: strokes[i] ?? "" }))} />
+        <ChartKey frame={frame} lines={curves.map(({ name }, i) => ({ name, dash: dashes[i] ?? "", stroke: strokes[i] ?? "" }))} />
       </ChartSheet>
       <LimitNotes brakes={brakes} punches={punches} dies={dies} needed={here} units={units} more={limits.more} />
       <ChartTable name="Force against V opening" heads={["V opening", ...curves.map(({ name }) => name)]} rows={tableRows(curves, units)} />

@@ -1,7 +1,7 @@
 import { Fragment, type ReactNode } from "react";
 import type { LengthUnit } from "@/bending/core/units";
 import type { Formula } from "@/lib/calculator/answer";
-import { formatFigure, formulaText } from "@/lib/calculator/formulaText";
+import { bracketed, formatFigure, formulaText } from "@/lib/calculator/formulaText";
 import { splitFormula, type FormulaPart } from "@/lib/calculator/splitFormula";
 
 interface FormulaViewProps {
@@ -20,7 +20,7 @@ export function FormulaView({ formula, units, result }: FormulaViewProps) {
     <div className="text-ink-soft">
       <p className="sr-only">{spoken}</p>
       <p aria-hidden>{set(parts, (name) => <Lowered text={name} italic />)}</p>
-      <p aria-hidden>= {set(right, (name) => <span className="num whitespace-nowrap text-ink">{formatFigure(formula.of[name], units)}</span>)}<span className="whitespace-nowrap"> = <span className="num font-medium text-ink">{result}</span></span></p>
+      <p aria-hidden>= {set(right, (name, next) => <span className="num whitespace-nowrap text-ink">{bracketed(formatFigure(formula.of[name], units), next)}</span>)}<span className="whitespace-nowrap"> = <span className="num font-medium text-ink">{result}</span></span></p>
     </div>
   );
 }
@@ -33,10 +33,10 @@ function rightSide(parts: readonly FormulaPart[]): readonly FormulaPart[] {
   return [{ kind: "text", text: sign.text.slice(sign.text.indexOf(" = ") + 3) }, ...parts.slice(at + 1)];
 }
 
-function set(parts: readonly FormulaPart[], named: (name: string) => ReactNode): ReactNode {
+function set(parts: readonly FormulaPart[], named: (name: string, next: FormulaPart | undefined) => ReactNode): ReactNode {
   return parts.map((part, i) => (
     <Fragment key={i}>
-      {part.kind === "name" ? named(part.name) : part.kind === "text" ? <Lowered text={part.text} /> : (
+      {part.kind === "name" ? named(part.name, parts[i + 1]) : part.kind === "text" ? <Lowered text={part.text} /> : (
         <span className="mx-0.5 inline-flex flex-col items-stretch text-center align-middle text-[0.92em] leading-tight">
           <span className="px-1 pb-px">{set(part.above, named)}</span>
           <span className="border-t border-ink-soft px-1 pt-px">{set(part.below, named)}</span>

@@ -21,14 +21,17 @@ const rules: readonly CalculatorRule[] = ["din6935", "machinery", "faa", "k"];
 const titles: Readonly<Record<CalculatorRule, string>> = { din6935: "DIN 6935", machinery: "Straight length", faa: "FAA", k: "K by hand" };
 
 /** The rule that the material goes by when a part names none. */
-export const materialRule = ({ material }: Question): CalculatorRule => (material.group === "steel" || material.group === "stainless" ? "din6935" : "machinery");
+export const materialRule = ({ material }: Question): CalculatorRule => material.allowance.rule;
+
+/** The K that the rule of that name goes by: the material's own where it is its rule and none was chosen. */
+const kOf = ({ material: { allowance }, choices, number }: Question): number => (allowance.rule === "k" && choices.rule === "material" ? allowance.k : number("k"));
 
 /** The bend by each rule, the chosen one first. */
 export function allowanceRules(q: Question): readonly RuleAnswer[] {
   const chosen = q.choices.rule === "material" ? materialRule(q) : q.choices.rule;
   return [chosen, ...rules.filter((rule) => rule !== chosen)].map((rule) => {
     const { material, thickness, insideRadius, angle } = q;
-    const resolved = resolveAllowance({ rule, material, thickness, insideRadius, angle, ...(rule === "k" ? { kOverride: q.number("k") } : {}) });
+    const resolved = resolveAllowance({ rule, material, thickness, insideRadius, angle, ...(rule === "k" ? { kOverride: kOf(q) } : {}) });
     return { ...resolved, rule, title: titles[rule], formula: formulaOf(rule, q) };
   });
 }
@@ -45,7 +48,7 @@ function formulaOf(rule: CalculatorRule, q: Question): Formula {
     case "faa":
       return { text: "BA = (0.01743 · R + 0.0078 · t) · [α | 1°]", of: { α, R, t } };
     case "k":
-      return { text: "BA = [π | 180°] · α · (R + K · t)", of: { α, R, t, K: figures.ratio(q.number("k")) } };
+      return { text: "BA = [π | 180°] · α · (R + K · t)", of: { α, R, t, K: figures.ratio(kOf(q)) } };
     default:
       return rule satisfies never;
   }

@@ -28,7 +28,7 @@ export function depthCurves(q: Question): DepthCurves | null {
   const angles = Array.from({ length: end + 1 }, (_, degrees) => degrees);
   const travel = (degrees: number, reading = q.die) => punchTravel(toRad(deg(degrees)), q.insideRadius, q.thickness, reading);
   return {
-    curves: bothReadings(q).map(({ die }) => ({ name: die.measured === "between-tops" ? "V between the arc tops" : "V between sharp corners", points: angles.map((at) => [at, travel(at, die)] as const) })),
+    curves: bothReadings(q).map(({ die }) => ({ name: die.measured === "between-tops" ? "V by arc tops" : "V by sharp corners", points: angles.map((at) => [at, travel(at, die)] as const) })),
     aimed: [q.degrees, travel(q.degrees)],
     demanded: [target, punchTravel(back.angle, back.radius, q.thickness, q.die)],
   };

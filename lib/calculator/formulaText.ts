@@ -13,10 +13,13 @@ export function formatFigure(figure: Figure | undefined, units: LengthUnit): str
   return figure === undefined ? "" : formatQuantity(figure.value, figure.kind, units);
 }
 
+/** A number with its unit under a power: (2 mm)². */
+export const bracketed = (figure: string, next: FormulaPart | undefined): string => (next?.kind === "text" && /^[²³]/.test(next.text) && figure.includes(" ") ? `(${figure})` : figure);
+
 function say(parts: readonly FormulaPart[], named: (name: string) => string): string {
-  return parts.map((part) => {
+  return parts.map((part, i) => {
     if (part.kind === "text") return part.text;
-    if (part.kind === "name") return named(part.name);
+    if (part.kind === "name") return bracketed(named(part.name), parts[i + 1]);
     const [above, below] = [say(part.above, named), say(part.below, named)].map((side) => (/ [·+−/] /.test(side) || side.includes(" ") ? `(${side})` : side));
     return `${above} / ${below}`;
   }).join("");

@@ -96,4 +96,5 @@ it("writes a formula on one line, with names and with numbers", () => {
   expect(formulaText(formula, null)).toBe("K = (BA · 180° / (π · α) − R) / t");
   expect(formulaText(formula, "mm")).toBe("K = (3.122 mm · 180° / (π · 90°) − 1.5 mm) / (1.5 mm)");
   expect(formulaText(formula, "in")).toContain("0.0591 in");
+  expect(formulaText({ text: "A = t² · n", of: { t: { value: 2, kind: "length" }, n: { value: 3, kind: "count" } } }, "mm")).toBe("A = (2 mm)² · 3");
 });

@@ -16,6 +16,7 @@ import type { Section } from "../section";
 /** The three that `airBendForces` puts side by side. */
 const three = ["groover", "trade-1.42", "oehler"];
 const forms = forceForms.filter(({ operation }) => operation === "v-die");
+const labels: Readonly<Record<string, string>> = { "kalpakjian-low": "Kalpakjian, lower end", groover: "Groover", "trade-1.42": "Trade formula, 1.42", "trade-650": "Trade formula, 650", "trade-575": "Trade rule, 575", oehler: "Oehler" };
 const percent = (part: number): string => `${Math.round(part * 100)} %`;
 
 /** Force of one stroke by the published forms, and by method. */
@@ -47,7 +48,7 @@ export const force: Section = {
 const metres = (q: Question): number => q.number("l") / 1000;
 
 function answerOf(form: ForceForm, q: Question): Answer {
-  return { label: form.source.split(/[;,(]/)[0]?.trim() ?? form.id, kind: "force", value: publishedForce(form, q.tensile, q.thickness, q.vOpening) * metres(q), formula: formulaOf(form, q), source: `${form.source}; printed as ${form.formula}` };
+  return { label: labels[form.id] ?? form.source, kind: "force", value: publishedForce(form, q.tensile, q.thickness, q.vOpening) * metres(q), formula: formulaOf(form, q), source: `${form.source}; printed as ${form.formula}` };
 }
 
 function formulaOf(form: ForceForm, q: Question): Formula {
