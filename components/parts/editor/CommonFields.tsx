@@ -50,7 +50,7 @@ export function CommonFields({ materials }: { readonly materials: readonly Mater
       {draft.shape === "profile" ? null : <CutFields at="" relief={draft.relief} corner={draft.corner} otherwise={{ relief: "none", corner: "open" }} onChange={set} />}
       <Select id={fieldId("grain")} label="Rolling direction (grain)" value={draft.grain} options={grains} error={problemAt("grain")}
         onChange={(value) => set({ grain: grains.find((one) => one.value === value)?.value ?? "absent" })} />
-      {draft.grain === "angle" ? <PathField path="grain" label="From x, counter-clockwise" kind="angle" value={draft.grainAngle} onChange={(grainAngle) => set({ grainAngle })} /> : <span />}
+      {draft.grain === "angle" ? <PathField path="grain" label="From x, counter-clockwise" kind="angle" value={draft.grainAngle} onChange={(grainAngle) => set({ grainAngle })} /> : null}
       <PathField path="toleranceAngle" label="Angle tolerance ±" kind="angle" value={draft.toleranceAngle} onChange={(toleranceAngle) => set({ toleranceAngle })} placeholder="general" />
       <PathField path="toleranceLength" label="Length tolerance ±" value={draft.toleranceLength} onChange={(toleranceLength) => set({ toleranceLength })} placeholder="general" />
     </div>
