@@ -19,8 +19,8 @@ test.beforeAll(async ({ baseURL }) => {
 
 const pagesOf = (): Readonly<Record<Role, readonly string[]>> => ({
   engineer: ["/parts", "/parts/new", `/parts/${shop.part}`, `/parts/${shop.part}/edit`, "/plans", `/plans/${shop.plan}`, "/sheets", `/sheets/${shop.sheet}`, `/print/${shop.sheet}`],
-  operator: ["/floor", `/floor/${shop.sheet}`, "/forbidden"],
-  toolroom: ["/tools", "/tools/new", `/tools/${shop.tool}`, "/machines", "/materials"],
+  operator: ["/floor", `/floor/${shop.sheet}`, "/bend-table", "/forbidden"],
+  toolroom: ["/tools", "/tools/new", `/tools/${shop.tool}`, "/machines", "/materials", "/bend-table/trials", "/bend-table/instruments"],
   manager: ["/people", "/activity"],
 });
 
@@ -131,7 +131,7 @@ test("by keyboard alone: sign in, a new part typed and saved", async ({ page }) 
 test.describe("enlarged to 200 %", () => {
   test.use({ viewport: { width: 720, height: 450 } });
 
-  for (const [role, paths] of [["engineer", () => ["/parts", "/parts/new", `/plans/${shop.plan}`, `/sheets/${shop.sheet}`]], ["toolroom", () => ["/tools", `/tools/${shop.tool}`]], ["operator", () => ["/floor", `/floor/${shop.sheet}`]]] as const) {
+  for (const [role, paths] of [["engineer", () => ["/parts", "/parts/new", `/plans/${shop.plan}`, `/sheets/${shop.sheet}`]], ["toolroom", () => ["/tools", `/tools/${shop.tool}`, "/bend-table/new", "/bend-table/coverage"]], ["operator", () => ["/floor", `/floor/${shop.sheet}`]]] as const) {
     test(`the ${role}'s pages do not scroll sideways`, async ({ page }) => {
       await enterAs(page, role);
       for (const path of paths()) {

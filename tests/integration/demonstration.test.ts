@@ -4,6 +4,7 @@ import { afterAll, beforeAll, expect, it } from "vitest";
 import { connect } from "@/db/connect";
 import { seedDemonstration } from "@/seeds/demonstration";
 import { demonstrationPassword } from "@/seeds/shop/demonstrationPassword";
+import { bendTrials, excludedTrial } from "@/seeds/shop/bendTrials";
 import { people } from "@/seeds/shop/people";
 import { tooling } from "@/seeds/shop/tools";
 import { pieceStates } from "@/seeds/shop/tools/pieceStates";
@@ -30,6 +31,8 @@ it("holds the whole shop", async () => {
   expect(await countOf("tools")).toBe(60);
   expect(await countOf("tool_pieces")).toBe(tooling.tools.flatMap((tool) => tool.sections).length);
   expect(await countOf("parts")).toBe(7);
+  expect(await countOf("bend_trials")).toBe(bendTrials.length);
+  expect(await knex("bend_trials").whereNotNull("excluded_at").pluck("number")).toEqual([`T-${1001 + excludedTrial.index}`]);
   expect(await knex("part_revisions").whereNull("created_by")).toEqual([]);
 });
 
