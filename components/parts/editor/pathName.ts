@@ -11,8 +11,10 @@ const inHole: Readonly<Record<string, string>> = {
   polygon: "corners", "polygon[0][0]": "x", "polygon[0][1]": "y", "polygon.width": "width", "polygon.height": "height",
 };
 
-/** `holes[0].circle[1]` is "hole 1, y". */
+/** `holes[0].circle[1]` is "hole 1, y"; `outline[2]` is "corner 3". */
 function ownName(path: string): string {
+  const corner = /^outline\[(\d+)\]/.exec(path);
+  if (corner !== null) return `corner ${Number(corner[1]) + 1}`;
   const hole = /^holes\[(\d+)\](?:\.(.+))?/.exec(path);
   if (hole === null) return names[path] ?? path;
   return `hole ${Number(hole[1]) + 1}${hole[2] === undefined ? "" : `, ${inHole[hole[2]] ?? names[hole[2]] ?? hole[2]}`}`;
