@@ -31,6 +31,7 @@ export function convertDraft(draft: PartDraft, units: LengthUnit): PartDraft {
       holes: flange.holes.map(hole), outline: flange.outline?.map((vertex) => scaledVertex(vertex, scale)) ?? null,
     })),
     flat: draft.flat === null ? null : scaledFlat(draft.flat, scale),
+    flatBends: draft.flatBends.map((bend) => ({ ...bend, insideRadius: text(bend.insideRadius), gap: text(bend.gap) })),
   };
 }
 
@@ -52,6 +53,7 @@ function scaledFlat(flat: FlatShape, scale: number): FlatShape {
     bends: flat.bends.map((bend) => ({
       ...bend, line: [[bend.line[0][0] * scale, bend.line[0][1] * scale], [bend.line[1][0] * scale, bend.line[1][1] * scale]],
       ...(bend.insideRadius === undefined ? {} : { insideRadius: bend.insideRadius * scale }),
+      ...(bend.gap === undefined ? {} : { gap: bend.gap * scale }),
     })),
   };
 }

@@ -32,7 +32,10 @@ export function documentFromDraft(draft: PartDraft, materialGroup: MaterialGroup
 
 function shapeOf(draft: PartDraft, read: DraftReader): Readonly<Record<string, unknown>> {
   switch (draft.shape) {
-    case "flat": return { flat: draft.flat };
+    case "flat": return { flat: draft.flat === null ? null : {
+      ...draft.flat,
+      bends: draft.flat.bends.map(({ id, line, ...kept }, i) => { const bend = draft.flatBends[i]; return { id, line, ...(bend === undefined ? kept : bendOf(bend, `flat.bends[${i}]`, "", read)) }; }),
+    } };
     case "profile": return { profile: {
       width: read.length("profile.width", draft.width),
       legs: draft.legs.map((leg, i) => read.length(`profile.legs[${i}]`, leg.length)),

@@ -1,4 +1,4 @@
-import type { BaseShape, DocumentHole, FlangeEntry, PartDocument, ProfileBend, ProfileShape } from "@/bending/part/partDocument";
+import type { BaseShape, DocumentHole, FlangeEntry, FlatBendEntry, PartDocument, ProfileBend, ProfileShape } from "@/bending/part/partDocument";
 import { newBend, newFlange, newLeg, rowKey } from "./newRows";
 import { rectangleOf } from "./rectangleOf";
 import type { BaseDraft, BendDraft, CornerDraft, FlangeDraft, HoleDraft, LegDraft, PartDraft, ReliefDraft } from "./partDraft";
@@ -19,7 +19,7 @@ export function draftFromDocument(document: PartDocument, number = ""): PartDraf
   };
   if (document.profile !== undefined) return { ...common, shape: "profile", width: say(document.profile.width), legs: legsOf(document.profile) };
   if (document.base !== undefined) return { ...common, shape: "base", base: baseOf(document.base), flanges: (document.flanges ?? []).map(flangeOf) };
-  return { ...common, shape: "flat", flat: document.flat ?? null };
+  return { ...common, shape: "flat", flat: document.flat ?? null, flatBends: (document.flat?.bends ?? []).map(bendOf) };
 }
 
 function cutsOf({ relief, corner }: Pick<FlangeEntry, "relief" | "corner">) {
@@ -36,7 +36,7 @@ function legsOf(profile: ProfileShape): readonly LegDraft[] {
   });
 }
 
-function bendOf(bend: ProfileBend | FlangeEntry): BendDraft {
+function bendOf(bend: ProfileBend | FlangeEntry | FlatBendEntry): BendDraft {
   return {
     angle: say(bend.angle), direction: bend.direction, insideRadius: say(bend.insideRadius), kFactor: say(bend.kFactor),
     hem: bend.hem ?? "none", gap: say(bend.gap), toleranceAngle: say(bend.toleranceAngle), strokeWith: bend.strokeWith ?? "",

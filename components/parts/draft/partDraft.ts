@@ -28,8 +28,10 @@ export interface PartDraft {
   readonly legs: readonly LegDraft[];
   readonly base: BaseDraft;
   readonly flanges: readonly FlangeDraft[];
-  /** A flat with bend lines that came in as a document; it is kept as it is. */
+  /** A flat with bend lines that came in as a drawing or document: contours and lines are kept as they are. */
   readonly flat: FlatShape | null;
+  /** What is typed for the flat's bend lines, in their order. */
+  readonly flatBends: readonly BendDraft[];
 }
 
 /** `absent`: not said here, so the part's (or nothing) holds. */

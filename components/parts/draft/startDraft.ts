@@ -40,7 +40,7 @@ export function withQuickStart(draft: PartDraft, start: QuickStart): PartDraft {
 export function startDraft(material: string): PartDraft {
   const blank: PartDraft = {
     number: "", name: "", note: "", units: "mm", material, thickness: "2", radiusFrom: "die", insideRadius: "", kFactor: "", rule: "default", dimension: "outside",
-    toleranceAngle: "", toleranceLength: "", grain: "absent", grainAngle: "", relief: noRelief, corner: noCorner, shape: "profile", width: "300", legs: [], flanges: [], flat: null,
+    toleranceAngle: "", toleranceLength: "", grain: "absent", grainAngle: "", relief: noRelief, corner: noCorner, shape: "profile", width: "300", legs: [], flanges: [], flat: null, flatBends: [],
     base: {
       kind: "rectangle", width: "200", depth: "120", holes: [],
       vertices: [[0, 0], [200, 0], [200, 120], [0, 120]].map(([x, y]) => ({ key: rowKey(), x: String(x), y: String(y), bulge: "" })),

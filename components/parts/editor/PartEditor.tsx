@@ -13,6 +13,7 @@ import { PartDrawings } from "../drawing/PartDrawings";
 import { draftFromDocument } from "../draft/draftFromDocument";
 import type { PartDraft } from "../draft/partDraft";
 import { PartFindings } from "../findings/PartFindings";
+import { FlatBends } from "../import/FlatBends";
 import { BaseFields } from "./BaseFields";
 import { CommonFields } from "./CommonFields";
 import { computePreview } from "./computePreview";
@@ -80,7 +81,7 @@ export function PartEditor({ title, materials, store, isNew, saving, refused, me
           <div className="space-y-8">
             <NameFields isNew={isNew} />
             <Panel title="Shape" aside={draft.shape === "flat" ? null : <ShapeChoice draft={draft} update={update} />}>
-              {draft.shape === "flat" ? <p className="text-ink-soft">A flat with {draft.flat?.bends.length ?? 0} bend lines, as the document gave it. Import another document to change it.</p> : (
+              {draft.shape === "flat" ? <FlatBends /> : (
                 <div className="space-y-4">
                   <QuickStarts />
                   {draft.shape === "profile" ? <ProfileFields /> : <BaseFields />}

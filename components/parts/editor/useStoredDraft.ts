@@ -6,7 +6,7 @@ import { beginHistory, changeHistory, redoHistory, undoHistory } from "./draftHi
 interface Stored { readonly savedAt: string; readonly basedOn: number; readonly draft: PartDraft }
 
 /** Grows when the shape of a draft changes, so that an old one is not read as a new one. */
-const version = 2;
+const version = 3;
 
 function read(key: string): Stored | null {
   try {
