@@ -107,8 +107,11 @@ function grow(solid: Solid, topology: SolidTopology, parent: GrownPlate, place: 
     }
   }
   if (!best) return null;
-  const { mine, its, common } = best;
-  const first = Math.max(mine[0], its[0]);
+  const { mine, its } = best;
+  // Ends that are one by the solid's own exactness are one here, so that no step of a hair is left beside the bend.
+  const one = (a: number, b: number) => Math.abs(a - b) <= SOLID_MATCH_MM;
+  const first = one(mine[0], its[0]) ? mine[0] : Math.max(mine[0], its[0]);
+  const common = (one(mine[1], its[1]) ? mine[1] : Math.min(mine[1], its[1])) - first;
   const onEdge = solid.vertices[solid.edges[best.childEdge]?.from ?? -1] ?? [0, 0, 0];
   const axes = planeAxes(surface.normal, onEdge, along);
   // At the bend's start, on the underside, and back from a sharp outside corner to where a round one would begin.

@@ -1,2 +1,2 @@
-/** Rounded to a millionth (mm or degrees): far under what a solid is exact to, and short to read. */
-export const tidy = (value: number): number => Math.round(value * 1e6) / 1e6 + 0;
+/** Rounded to nine decimals (mm or degrees): the noise of the last digits goes, corners that are one stay one. */
+export const tidy = (value: number): number => Math.round(value * 1e9) / 1e9 + 0;

@@ -1,3 +1,4 @@
+import { SOLID_MATCH_MM } from "../../core/tolerance";
 import { outsideSetback } from "../../handbook/outsideSetback";
 import { deg, mm, toDeg, toRad, rad } from "../../core/units";
 import type { FlangeEntry, PartDocument } from "../../part/partDocument";
@@ -26,7 +27,7 @@ export function toPartDocument(part: RecognisedPart, choices: ImportChoices): Pa
     const parentEdge = drawn[bend.parent]?.edges.find(({ edge }) => edge === bend.parentEdge);
     const flange = drawFlange(plate, bend, setback);
     drawn.push(flange.plate);
-    const start = tidy(bend.start + (parentEdge?.extended ?? 0));
+    const start = (Math.abs(bend.start) <= SOLID_MATCH_MM ? 0 : tidy(bend.start)) + (parentEdge?.extended ?? 0);
     flanges.push({
       id: names[bend.child] ?? "", on: names[bend.parent] ?? "base", edge: parentEdge?.number ?? 0,
       outline: flange.outline, angle, direction: bend.direction,
