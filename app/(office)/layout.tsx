@@ -14,6 +14,7 @@ const places = [
   { href: "/materials", label: "Materials" },
   { href: "/calculator", label: "Calculator" },
   { href: "/bend-table", label: "Bend table" },
+  { href: "/settings", label: "Settings" },
   { href: "/people", label: "People" },
   { href: "/activity", label: "Activity" },
 ] as const;

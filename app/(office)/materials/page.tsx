@@ -1,10 +1,10 @@
-import { Suspense } from "react";
-import { MaterialList } from "@/components/tooling/materials/MaterialList";
+import { MaterialList } from "@/components/materials/MaterialList";
+import { can } from "@/lib/auth/permissions";
 import { requirePage } from "@/lib/auth/requirePage";
 
 export const metadata = { title: "Materials" };
 
 export default async function MaterialsPage() {
-  await requirePage("/materials");
-  return <Suspense><MaterialList /></Suspense>;
+  const { role } = await requirePage("/materials");
+  return <MaterialList mayWrite={can(role, "materials:write")} />;
 }
