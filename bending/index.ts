@@ -123,6 +123,12 @@ export { flatPattern, type FlatPattern, type FlatBendLine } from "./part/flatPat
 export { flatContours, type FlatContours } from "./part/flatContours";
 export { flatOverlaps, type FlatOverlap } from "./part/flatOverlaps";
 export { contourArea } from "./part/contourArea";
+export { contourAsChords } from "./part/contourAsChords";
+export { flatDocument } from "./part/flatDocument";
+export { reroot } from "./part/reroot";
+export { foldZonePoint } from "./part/foldZonePoint";
+export { unfoldZonePoint } from "./part/unfoldZonePoint";
+export { holeContour } from "./part/holeContour";
 
 export type * from "./tooling/tool";
 export type * from "./tooling/machine";
