@@ -1,5 +1,6 @@
 import { toDeg, type LengthUnit } from "../core/units";
 import { springback } from "../handbook/springback";
+import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import { flatPattern, type FlatPattern } from "../part/flatPattern";
 import type { PartDocument } from "../part/partDocument";
 import type { Bend, PartModel } from "../part/partModel";
@@ -15,6 +16,8 @@ export interface FindingsContext {
   readonly fields: DocumentFields;
   /** Null: what depends on the shop is left out. */
   readonly shop: ShopLimits | null;
+  /** For each bend the rectangle round its zone. */
+  readonly zoneBoxes: readonly Bounds2[];
   /** For each face the bends on its edges, as indices. */
   readonly bendsOn: readonly (readonly number[])[];
   /** Which of the shop's dies and punches could make this bend; the usual V stands in when there is no shop. */
@@ -23,7 +26,7 @@ export interface FindingsContext {
   readonly demandedOf: (bend: Bend) => number;
 }
 
-export function createContext(part: PartModel, document: PartDocument, shop: ShopLimits | null): FindingsContext {
+export function createContext(part: PartModel, document: PartDocument, shop: ShopLimits | null, flat: FlatPattern = flatPattern(part)): FindingsContext {
   const bendsOn: number[][] = part.faces.map(() => []);
   part.bends.forEach(({ parent, child }, i) => {
     bendsOn[parent]?.push(i);
@@ -32,7 +35,7 @@ export function createContext(part: PartModel, document: PartDocument, shop: Sho
   // Bends of one part are mostly alike, so what is worked out for one serves many.
   const demandedOf = remembered((bend) => toDeg(springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle));
   const toolsOf = remembered((bend) => bendTools(part, demandedOf(bend), shop));
-  return { part, units: document.units, flat: flatPattern(part), fields: documentFields(document), shop, bendsOn, toolsOf, demandedOf };
+  return { part, units: document.units, flat, fields: documentFields(document), shop, zoneBoxes: part.bends.map(({ zone }) => polygonBounds(zone)), bendsOn, toolsOf, demandedOf };
 }
 
 function remembered<T>(ask: (bend: Bend) => T): (bend: Bend) => T {

@@ -1,3 +1,6 @@
+import { convexHull } from "../geometry/convexHull";
+import type { Vec2 } from "../geometry/vec2";
+import { bendDirections } from "../part/bendDirections";
 import type { Bend, PartModel } from "../part/partModel";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
@@ -14,9 +17,12 @@ export function deepSheets(context: FindingsContext): readonly Finding[] {
   if (!shop || shop.machines.length === 0) return [];
   const throat = Math.max(...shop.machines.map(({ throatDepth }) => throatDepth as number));
   const across = Math.hypot(...[0, 1].map((axis) => (context.flat.bounds.max[axis] ?? 0) - (context.flat.bounds.min[axis] ?? 0)));
-  // Nothing can be deeper than the whole blank.
+  // Nothing can be deeper than the whole blank, and what goes between the frames may be as deep as it will.
   if (across <= throat) return [];
+  const hull = convexHull(context.flat.outline);
+  const between = Math.max(...shop.machines.map(({ betweenFrames }) => betweenFrames as number));
   return part.bends.flatMap((bend, index): readonly Finding[] => {
+    if (extentAlong(hull, bend) <= between) return [];
     const ways = reaches(part, bend, index);
     const passes = shop.machines.some(({ throatDepth, betweenFrames }) => Math.min(ways.parentSide, ways.childSide) <= throatDepth || ways.along <= betweenFrames);
     if (passes) return [];
@@ -39,6 +45,12 @@ export function deepSheets(context: FindingsContext): readonly Finding[] {
       cure: null,
     }];
   });
+}
+
+function extentAlong(points: readonly Vec2[], bend: Bend): number {
+  const { along } = bendDirections(bend);
+  const values = points.map(([x, y]) => x * along[0] + y * along[1]);
+  return Math.max(...values) - Math.min(...values);
 }
 
 interface Reaches {

@@ -1,3 +1,4 @@
+import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import type { Vec2 } from "../geometry/vec2";
 import { bendDirections } from "../part/bendDirections";
 import { holeAsChords } from "../part/holeAsChords";
@@ -14,6 +15,7 @@ export interface DrawnHole {
   readonly bends: readonly number[];
   /** Arcs as chords. */
   readonly outline: readonly Vec2[];
+  readonly box: Bounds2;
   /** A round hole exactly. */
   readonly circle: { readonly centre: Vec2; readonly radius: number } | null;
   /** The entry of the document, in mm, and its path; null for a hole that the document does not name. */
@@ -33,7 +35,7 @@ const SHEET: readonly [Vec2, Vec2] = [[1, 0], [0, 1]];
 export function drawnHoles(part: PartModel, fields: DocumentFields, bendsOn: readonly (readonly number[])[]): readonly DrawnHole[] {
   const across = new Set(part.holesAcross.map(({ path }) => path));
   const onSheet = entriesOf(fields.sheetHoles, SHEET);
-  const sheetOutlines = new Map(onSheet.map((entry) => [entry, holeAsChords(entry.hole)]));
+  const byPlace = new Map(onSheet.map((entry) => [placeOf(polygonBounds(holeAsChords(entry.hole))), entry]));
   const byPath = new Map(onSheet.map((entry) => [entry.path, entry]));
   const within = part.faces.flatMap((face, index) => {
     const bend = face.bend === null ? undefined : part.bends[face.bend];
@@ -41,18 +43,22 @@ export function drawnHoles(part: PartModel, fields: DocumentFields, bendsOn: rea
     const entries = bend && own ? entriesOf(own, axesOf(bend)) : [];
     for (const entry of entries) byPath.set(entry.path, entry);
     const left = entries.filter(({ path }) => !across.has(path));
-    return face.holes.map((outline, i): DrawnHole => ({
-      face: index,
-      bends: bendsOn[index] ?? [],
-      outline,
-      circle: circleOf(face.holeContours[i]),
-      entry: onSheet.find((entry) => sameOutline(sheetOutlines.get(entry) ?? [], outline)) ?? (left.length === face.holes.length ? (left[i] ?? null) : null),
-    }));
+    return face.holes.map((outline, i): DrawnHole => {
+      const box = polygonBounds(outline);
+      return {
+        face: index,
+        bends: bendsOn[index] ?? [],
+        outline,
+        box,
+        circle: circleOf(face.holeContours[i]),
+        entry: byPlace.get(placeOf(box)) ?? (left.length === face.holes.length ? (left[i] ?? null) : null),
+      };
+    });
   });
   return [...within, ...part.holesAcross.map(({ path, outline, contour, bends }): DrawnHole => {
     const bend = part.bends[bends[0] ?? -1];
     const onChild = bend && toChild(bend, outline);
-    return { face: bend ? (onChild ? bend.child : bend.parent) : 0, bends, outline, circle: circleOf(contour), entry: byPath.get(path) ?? null };
+    return { face: bend ? (onChild ? bend.child : bend.parent) : 0, bends, outline, box: polygonBounds(outline), circle: circleOf(contour), entry: byPath.get(path) ?? null };
   })];
 }
 
@@ -71,6 +77,5 @@ function toChild(bend: PartModel["bends"][number], outline: readonly Vec2[]): bo
   return away[0] * outward[0] + away[1] * outward[1] > 0;
 }
 
-/** The same corners, whichever comes first. */
-const sameOutline = (a: readonly Vec2[], b: readonly Vec2[]) =>
-  a.length === b.length && a.every(([x, y]) => b.some(([u, v]) => Math.abs(x - u) < 1e-6 && Math.abs(y - v) < 1e-6));
+/** Holes do not overlap, so the rectangle round one tells it from every other. */
+const placeOf = ({ min, max }: Bounds2): string => [min[0] + max[0], min[1] + max[1]].map((value) => Math.round(value * 1e4)).join(" ");

@@ -1,3 +1,4 @@
+import type { FlatPattern } from "../part/flatPattern";
 import type { PartDocument } from "../part/partDocument";
 import type { PartModel } from "../part/partModel";
 import { createContext, type FindingsContext } from "./context";
@@ -25,6 +26,8 @@ export interface FindingsQuestion {
   readonly document: PartDocument;
   /** What the shop has; null when it is not known. */
   readonly shop: ShopLimits | null;
+  /** The part's flat, where the caller has it already. */
+  readonly flat?: FlatPattern | undefined;
 }
 
 export interface Findings {
@@ -42,8 +45,8 @@ const RULES: readonly ((context: FindingsContext) => readonly Finding[])[] = [
 const WEIGHT = { stop: 0, caution: 1, note: 2 } as const;
 
 /** Everything that the handbook and the shop have to say against a part as it is drawn. The same part gives the same findings in the same order. */
-export function findingsOf({ part, document, shop }: FindingsQuestion): Findings {
-  const context = createContext(part, document, shop);
+export function findingsOf({ part, document, shop, flat }: FindingsQuestion): Findings {
+  const context = createContext(part, document, shop, flat);
   const list = RULES.flatMap((rule) => rule(context)).map((finding, i) => ({ finding, i }))
     .sort((a, b) => WEIGHT[a.finding.severity] - WEIGHT[b.finding.severity] || a.i - b.i).map(({ finding }) => finding);
   return { list, leftOut: leftOut(shop) };

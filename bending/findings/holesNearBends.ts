@@ -1,10 +1,11 @@
 import { mm } from "../core/units";
 import { holeOverDie } from "../handbook/holeOverDie";
 import type { Bend } from "../part/partModel";
+import { boxesNear } from "./boxesNear";
 import type { FindingsContext } from "./context";
 import { drawnHoles, type DrawnHole } from "./drawnHoles";
 import type { Finding } from "./finding";
-import { holeNeeds } from "./holeNeeds";
+import { farthestNeed, holeNeeds } from "./holeNeeds";
 import { movedHole } from "./movedHole";
 import { holeGap } from "./holeGap";
 import { shownLength } from "./shownLength";
@@ -21,8 +22,8 @@ export function holesNearBends(context: FindingsContext): readonly Finding[] {
   const { part } = context;
   const holes = drawnHoles(part, context.fields, context.bendsOn);
   return holes.flatMap((hole, i) => hole.bends.flatMap((index): readonly Finding[] => {
-    const bend = part.bends[index];
-    const found = bend ? judge(context, holes, hole, i, bend) : null;
+    const [bend, box] = [part.bends[index], context.zoneBoxes[index]];
+    const found = bend && box && boxesNear(hole.box, box, farthestNeed(context, bend)) ? judge(context, holes, hole, i, bend) : null;
     return found ? [found] : [];
   }));
 }

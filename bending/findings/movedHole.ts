@@ -1,10 +1,14 @@
+import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import type { Vec2 } from "../geometry/vec2";
-import { holesMeet, holeWithin } from "../part/holeWithin";
+import { polygonContains } from "../geometry/polygonContains";
+import { segmentsCross } from "../geometry/segmentsCross";
+import { holesMeet } from "../part/holeWithin";
 import { mmPer } from "../core/units";
+import { boxesNear } from "./boxesNear";
 import type { FindingsContext } from "./context";
 import type { DrawnHole } from "./drawnHoles";
 import type { Cure } from "./finding";
-import { holeNeeds } from "./holeNeeds";
+import { farthestNeed, holeNeeds } from "./holeNeeds";
 import { lengthCure } from "./lengthCure";
 import { holeGap } from "./holeGap";
 
@@ -28,16 +32,28 @@ export function movedHole(context: FindingsContext, holes: readonly DrawnHole[],
   const shift = typeof cure.value === "number" ? cure.value * mmPer(context.units) - now : 0;
   const [dx, dy] = [shift * entry.axes[axis][0], shift * entry.axes[axis][1]];
   const outline = hole.outline.map(([x, y]): Vec2 => [x + dx, y + dy]);
+  const box = polygonBounds(outline);
   const circle = hole.circle && { ...hole.circle, centre: [hole.circle.centre[0] + dx, hole.circle.centre[1] + dy] as const };
-  const others = holes.filter((other) => other !== hole && other.face === hole.face);
-  const clear = holeWithin(outline, face.outline) && !others.some((other) => holesMeet(other.outline, outline))
+  const others = holes.filter((other) => other !== hole && other.face === hole.face && boxesNear(other.box, box, 0));
+  const clear = staysWithin(outline, box, face.outline) && !others.some((other) => holesMeet(other.outline, outline))
     && (context.bendsOn[hole.face] ?? []).every((index) => {
       const bend = context.part.bends[index];
-      if (!bend) return true;
+      const zone = context.zoneBoxes[index];
+      if (!bend || !zone || !boxesNear(box, zone, farthestNeed(context, bend))) return true;
       const { gap, into } = holeGap({ outline, circle }, bend);
       const before = holeGap(hole, bend);
       const needs = holeNeeds(context, hole, bend);
       return into === 0 && (gap >= Math.max(needs.guide, bend.hem === null ? needs.opening : 0) - 1e-6 || gap >= before.gap);
     });
   return clear ? cure : null;
+}
+
+/** Inside with one corner and crossing nothing is wholly inside; only the edges near the hole are looked at. */
+function staysWithin(hole: readonly Vec2[], box: Bounds2, face: readonly Vec2[]): boolean {
+  if (!hole[0] || !polygonContains(face, hole[0])) return false;
+  return !face.some((p, i) => {
+    const q = face[(i + 1) % face.length] ?? p;
+    if (!boxesNear(polygonBounds([p, q]), box, 0)) return false;
+    return hole.some((a, k) => segmentsCross(p, q, a, hole[(k + 1) % hole.length] ?? a) !== null);
+  });
 }

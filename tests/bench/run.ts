@@ -4,6 +4,7 @@ import { searchOrder } from "@/bending/order/searchOrder";
 import { planPart } from "@/bending/plan/planPart";
 import { planCorpus } from "../corpus/planCorpus";
 import { clearanceQuestions } from "./clearanceQuestions";
+import { findingParts, judged, partOf } from "./findingParts";
 import { randomProblem } from "./randomProblem";
 
 interface Row {
@@ -67,6 +68,17 @@ async function clearances(): Promise<readonly Row[]> {
   }];
 }
 
+/** Everything that is wrong with a part, with a small shop: a corrugated sheet, and a plate with a tab out of every tooth and a hole beside it. */
+function findings(): readonly Row[] {
+  const asked = [["corrugated", 10], ["corrugated", 100], ["corrugated", 500], ["comb", 10], ["comb", 100]] as const;
+  return asked.map(([kind, size]): Row => {
+    const document = findingParts[kind](size);
+    const part = partOf(document);
+    const { medianMs, answer } = timed(() => judged(document, part));
+    return { name: `find what is wrong, ${kind}`, size, medianMs, runs: RUNS, checksum: digest(answer), peakMB: peakMB() };
+  });
+}
+
 function withGrowth(rows: readonly Row[]): readonly Row[] {
   return rows.map((row, i) => {
     const before = rows[i - 1];
@@ -75,12 +87,12 @@ function withGrowth(rows: readonly Row[]): readonly Row[] {
   });
 }
 
-const rows = [...withGrowth([...searches(), ...plans()]), ...await clearances()];
+const rows = [...withGrowth([...searches(), ...plans()]), ...findings(), ...await clearances()];
 if (process.argv.includes("--json")) process.stdout.write(`${JSON.stringify(rows, null, 2)}\n`);
 else {
   for (const row of rows) {
     const growth = row.growth === undefined ? "" : `  x ${row.growth} a bend`;
     const ratio = row.ratio === undefined ? "" : `  ${row.ratio} times as fast as ${row.reference ?? ""}`;
-    process.stdout.write(`${row.name.padEnd(26)} ${String(row.size).padStart(4)} ${row.name.startsWith("clip") ? "faces" : "bends"} ${row.medianMs.toFixed(2).padStart(10)} ms  ${row.peakMB} MB  ${row.checksum}${growth}${ratio}\n`);
+    process.stdout.write(`${row.name.padEnd(30)} ${String(row.size).padStart(4)} ${row.name.startsWith("clip") ? "faces" : "bends"} ${row.medianMs.toFixed(2).padStart(10)} ms  ${row.peakMB} MB  ${row.checksum}${growth}${ratio}\n`);
   }
 }
