@@ -8,10 +8,16 @@ import { readState, writeState, type CalculatorState } from "@/lib/calculator/st
 const PATH = "/calculator";
 const KEPT = "calculator";
 
-/** What was entered: out of the address, else as it was left in this window. */
+/** What was entered: out of the address, else as it was left in this window; reloaded, as it was left, which the address may lag behind. */
 function start(): CalculatorState {
-  const asked = window.location.search.slice(1);
-  return readState(asked === "" ? (window.sessionStorage.getItem(KEPT) ?? "") : asked);
+  const [kept, asked] = [window.sessionStorage.getItem(KEPT), window.location.search.slice(1)];
+  return readState(asked === "" || (reloaded() && kept !== null) ? (kept ?? "") : asked);
+}
+
+/** Only the page's first loading counts: later visits in the same window come by a link. */
+function reloaded(): boolean {
+  const [entry] = performance.getEntriesByType("navigation");
+  return entry instanceof PerformanceNavigationTiming && entry.type === "reload" && new URL(entry.name).search === window.location.search;
 }
 
 /** Puts the state into the address, so that reload, back and a copied link bring it again; not once the page has been left. */
