@@ -34,17 +34,17 @@ export function Coverage({ mayWrite }: { readonly mayWrite: boolean }) {
           options={(materials.data ?? []).map(({ id, name }) => ({ value: id, label: name }))} />
       </ListBar>
       {coverage.isError ? <LoadProblem what="The coverage" error={coverage.error} onRetry={() => void coverage.refetch()} />
-        : coverage.data === undefined ? <Loading what="the coverage" /> : <Shown coverage={coverage.data} />}
+        : coverage.data === undefined ? <Loading what="the coverage" /> : <Shown coverage={coverage.data} mayWrite={mayWrite} />}
     </>
   );
 }
 
-function Shown({ coverage }: { readonly coverage: CoverageView }) {
+function Shown({ coverage, mayWrite }: { readonly coverage: CoverageView; readonly mayWrite: boolean }) {
   if (coverage.rows.length === 0) return <EmptyState title={`Nothing of ${coverage.material} yet`}>Neither a trial nor a part is of this material.</EmptyState>;
   return (
     <div className="grid grid-cols-1 gap-x-10 gap-y-8 2xl:grid-cols-[minmax(0,1fr)_minmax(0,30rem)]">
       <CoverageGrid coverage={coverage} />
-      <Panel title="Worth bending next"><Suggestions coverage={coverage} /></Panel>
+      <Panel title="Worth bending next"><Suggestions coverage={coverage} mayWrite={mayWrite} /></Panel>
     </div>
   );
 }

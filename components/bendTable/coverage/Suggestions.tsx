@@ -1,9 +1,10 @@
+import { TextLink } from "@/components/ui/TextLink";
 import { formatFixed } from "@/lib/format/formatFixed";
 import { formatNumber } from "@/lib/format/formatNumber";
 import type { CoverageView } from "@/lib/schemas/bendTableViews";
 
 /** Strips to cut for the trials that would tell most. */
-export function Suggestions({ coverage: { suggestions, material } }: { readonly coverage: CoverageView }) {
+export function Suggestions({ coverage: { suggestions, material }, mayWrite }: { readonly coverage: CoverageView; readonly mayWrite: boolean }) {
   if (suggestions.length === 0) return <p className="text-ink-soft">Every sheet has at least three trials over the V that the rule names for it.</p>;
   return (
     <ol className="space-y-4">
@@ -15,6 +16,7 @@ export function Suggestions({ coverage: { suggestions, material } }: { readonly 
             Cut {trial.pieces} {trial.pieces === 1 ? "strip" : "strips"} of <span className="num whitespace-nowrap">{formatNumber(trial.blankMm, 1)} × {formatNumber(trial.widthMm, 1)} mm</span> and measure each blank. Bent in the middle, each flange comes to about <span className="num whitespace-nowrap">{formatFixed(trial.flangeMm, 1)} mm</span> outside
             (this V takes flanges from <span className="num whitespace-nowrap">{formatFixed(trial.leastFlangeMm, 1)} mm</span> on).
           </p>
+          {mayWrite ? <p className="mt-1"><TextLink href={`/bend-table/new?${new URLSearchParams({ material, nominal: formatNumber(trial.thicknessMm, 2), vOpening: formatNumber(trial.vOpeningMm, 2) }).toString()}`}>Type in what was measured</TextLink></p> : null}
         </li>
       ))}
     </ol>

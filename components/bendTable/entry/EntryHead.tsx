@@ -31,7 +31,7 @@ export function EntryHead({ draft, update, materials, instruments, problems }: E
       <TextInput id="trials-measuredBy" label="By" value={draft.measuredBy} onChange={(event) => set({ measuredBy: event.target.value })} error={problems.measuredBy} />
       <Select id="trials-lengthInstrument" label="Blank and flanges with" value={draft.lengthInstrument} onChange={(lengthInstrument) => set({ lengthInstrument })} options={options(false)} error={problems.lengthInstrument} placeholder="Choose" />
       <Select id="trials-thicknessInstrument" label="Thickness with" value={draft.thicknessInstrument === "" ? same : draft.thicknessInstrument} options={[{ value: same, label: "the same" }, ...options(false)]}
-        onChange={(value) => set({ thicknessInstrument: value === same ? "" : value })} />
+        onChange={(value) => set({ thicknessInstrument: value === same ? "" : value })} error={problems.thicknessInstrument} />
       <Select id="trials-angleInstrument" label="Angle with" value={draft.angleInstrument} onChange={(angleInstrument) => set({ angleInstrument })} options={options(true)} error={problems.angleInstrument} placeholder="Choose" />
       <Select id="trials-radiusInstrument" label="Inside radius with" value={draft.radiusInstrument} onChange={(radiusInstrument) => set({ radiusInstrument })} options={options(false)} error={problems.radiusInstrument} placeholder="Choose" />
       <Choice<LengthUnit> label="Lengths in" value={draft.units} onChange={(units) => update((old) => convertTrialDraft(old, { units, angles: old.angles }, materials))} options={[{ value: "mm", label: "mm" }, { value: "in", label: "inch" }]} />

@@ -15,8 +15,8 @@ interface TrialGridProps {
 }
 
 const widths: Readonly<Record<LineField, string>> = {
-  material: "w-28", batch: "w-24", nominal: "w-18", thickness: "w-20", vOpening: "w-18", punchRadius: "w-18", angle: "w-18", blank: "w-22", flangeA: "w-22", flangeB: "w-22",
-  insideRadius: "w-18", note: "w-28",
+  material: "w-28", batch: "w-24", nominal: "w-20", thickness: "w-20", vOpening: "w-20", punchRadius: "w-18", angle: "w-18", blank: "w-22", flangeA: "w-22", flangeB: "w-22",
+  insideRadius: "w-20", note: "w-28",
 };
 const words = new Set<LineField>(["material", "batch", "note"]);
 
@@ -27,7 +27,7 @@ export function TrialGrid({ lines, context, refused, tried, actions }: TrialGrid
   const head = "px-1.5 pb-1 align-bottom text-sm leading-tight font-medium text-ink-soft";
   return (
     <div className="relative max-h-[75dvh] overflow-auto border-y border-ink" tabIndex={0} role="region" aria-label="Trials">
-      <table className="w-full min-w-300 border-collapse text-left">
+      <table className="w-full min-w-330 border-collapse text-left">
         <caption className="sr-only">Trials: one line for each bend, with what comes of it</caption>
         <thead className="sticky top-0 z-10 bg-paper">
           <tr>

@@ -78,8 +78,10 @@ describe("the notebook", () => {
   });
 
   it("asks for a radius instrument only when a radius is there", () => {
-    expect(headProblems(draft)).toEqual({});
-    expect(Object.keys(headProblems({ ...draft, measuredBy: " ", measuredOn: "", angleInstrument: "", lines: [{ ...full, insideRadius: "2" }] })).sort()).toEqual(["angleInstrument", "measuredBy", "measuredOn", "radiusInstrument"]);
+    const known = { today: "2025-03-01", inUse: (id: string) => instruments(id) !== undefined };
+    expect(headProblems(draft, known)).toEqual({});
+    expect(Object.keys(headProblems({ ...draft, measuredOn: "2025-03-02", thicknessInstrument: "gone" }, known)).sort()).toEqual(["measuredOn", "thicknessInstrument"]);
+    expect(Object.keys(headProblems({ ...draft, measuredBy: " ", measuredOn: "", angleInstrument: "", lines: [{ ...full, insideRadius: "2" }] }, known)).sort()).toEqual(["angleInstrument", "measuredBy", "measuredOn", "radiusInstrument"]);
   });
 
   it("puts what the server says at its line and field", () => {

@@ -18,13 +18,21 @@ function read(key: string): Stored | null {
   }
 }
 
-/** The trials being typed, kept in this browser for this person until they are saved or thrown away. */
-export function useTrialDraft(person: string, start: () => TrialDraft) {
+const hasWork = (draft: TrialDraft): boolean => draft.lines.some((line) => !isBlankLine(line));
+
+/**
+ * The trials being typed, kept in this browser for this person until they are saved or thrown away. `start` begins a page, out of the
+ * last one when there was one with nothing left to save.
+ */
+export function useTrialDraft(person: string, start: (last: TrialDraft | null) => TrialDraft) {
   const key = `foldwright.bend-trials.${version}.${person}`;
-  const [begun] = useState(() => ({ stored: read(key), start: start() }));
-  const [draft, setDraft] = useState(begun.stored?.draft ?? begun.start);
-  const [restoredAt, setRestoredAt] = useState(begun.stored !== null && begun.stored.draft.lines.some((line) => !isBlankLine(line)) ? begun.stored.savedAt : null);
-  const changed = draft !== begun.start;
+  const [begun] = useState(() => {
+    const stored = read(key);
+    return stored !== null && hasWork(stored.draft) ? { draft: stored.draft, at: stored.savedAt } : { draft: start(stored?.draft ?? null), at: null };
+  });
+  const [draft, setDraft] = useState(begun.draft);
+  const [restoredAt, setRestoredAt] = useState(begun.at);
+  const changed = draft !== begun.draft;
   useEffect(() => {
     if (!changed) return undefined;
     const timer = setTimeout(() => {

@@ -17,9 +17,9 @@ const focusCell = (line: string, field: LineField) => requestAnimationFrame(() =
  * What keys and pasting do in the grid: Enter goes to the next line, from the last one with work in it to a new one; arrows up and down
  * move in the column; a ditto mark copies what is above; Ctrl+Delete removes the line; Ctrl+Enter saves.
  */
-export function useTrialRows(draft: TrialDraft, setDraft: Dispatch<SetStateAction<TrialDraft>>, onSave: () => void): RowActions {
-  const now = useRef({ lines: draft.lines, onSave });
-  useEffect(() => { now.current = { lines: draft.lines, onSave }; });
+export function useTrialRows(draft: TrialDraft, setDraft: Dispatch<SetStateAction<TrialDraft>>, { onSave, onRemoved }: { readonly onSave: () => void; readonly onRemoved: (what: string, before: TrialDraft) => void }): RowActions {
+  const now = useRef({ draft, lines: draft.lines, onSave, onRemoved });
+  useEffect(() => { now.current = { draft, lines: draft.lines, onSave, onRemoved }; });
   return useMemo(() => {
     const setLines = (next: (lines: readonly TrialLine[]) => readonly TrialLine[]) => setDraft((old) => ({ ...old, lines: next(old.lines) }));
     const at = (line: string) => now.current.lines.findIndex(({ id }) => id === line);
@@ -28,6 +28,8 @@ export function useTrialRows(draft: TrialDraft, setDraft: Dispatch<SetStateActio
       if (lines.length === 1) return;
       const index = at(line);
       const beside = lines[index + 1] ?? lines[index - 1];
+      const removed = lines[index];
+      if (removed !== undefined && !isBlankLine(removed)) now.current.onRemoved(`Line ${index + 1} was removed.`, now.current.draft);
       setLines((old) => old.filter(({ id }) => id !== line));
       if (beside !== undefined) focusCell(beside.id, "angle");
     };

@@ -12,7 +12,7 @@ const ROW = 13;
 /** Every trial on a line of deductions: full dots count, a diamond lies apart, a cross is excluded; the mean with its uncertainty, and the handbook's value. */
 export function DotPlot({ value }: { readonly value: ValueDetail }) {
   const { trials, deductionMm, expandedMm, handbook } = value;
-  const scale = plotScale([...trials.map(({ deductionHereMm }) => deductionHereMm), handbook.deductionMm, ...(deductionMm === null ? [] : [deductionMm])]);
+  const scale = plotScale([...trials.map(({ deductionHereMm }) => deductionHereMm), handbook.deductionMm, ...(deductionMm === null || expandedMm === null ? [] : [deductionMm - expandedMm, deductionMm + expandedMm])]);
   const at = (deduction: number) => SIDE + ((deduction - scale.from) / (scale.to - scale.from)) * (WIDTH - 2 * SIDE);
   const dots = plotDots(trials.map(({ id, deductionHereMm }) => ({ id, x: at(deductionHereMm) })), 2 * DOT + 3);
   const byId = new Map(trials.map((trial) => [trial.id, trial]));

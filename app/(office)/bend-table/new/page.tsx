@@ -1,3 +1,4 @@
+import { Suspense } from "react";
 import { TrialEntry } from "@/components/bendTable/entry/TrialEntry";
 import { requirePage } from "@/lib/auth/requirePage";
 
@@ -5,5 +6,5 @@ export const metadata = { title: "Enter trials" };
 
 export default async function EnterTrialsPage() {
   const { id, name } = await requirePage("/bend-table/new");
-  return <TrialEntry person={{ id, name }} />;
+  return <Suspense><TrialEntry person={{ id, name }} /></Suspense>;
 }
