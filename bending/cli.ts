@@ -1,4 +1,5 @@
 import { readFileSync, writeFileSync } from "node:fs";
+import { isSolidFile } from "./command/isSolidFile";
 import { runCommand } from "./command/runCommand";
 
 const reason = (error: unknown, what: string): string => {
@@ -14,9 +15,22 @@ function attempt<T>(read: () => T) {
   }
 }
 
-const outcome = runCommand(process.argv.slice(2), {
+/** The solid that an import names, read before the command runs; the kernel is loaded for nothing else. */
+async function solidNamed(args: readonly string[]) {
+  const path = args[0] === "import" ? args.find((word) => !word.startsWith("--") && isSolidFile(word)) : undefined;
+  if (path === undefined) return null;
+  const bytes = attempt(() => readFileSync(path));
+  if (!bytes.ok) return bytes;
+  const body = /^--body[= ]([1-9]\d{0,4})$/.exec(args.flatMap((word, i) => (word === "--body" ? [`--body ${args[i + 1]}`] : word.startsWith("--body=") ? [word] : []))[0] ?? "")?.[1];
+  return (await import("../lib/step/readSolidFile")).readSolidFile(bytes.value, body === undefined ? undefined : Number(body));
+}
+
+const args = process.argv.slice(2);
+const solid = await solidNamed(args);
+const outcome = runCommand(args, {
   readText: (path) => attempt(() => readFileSync(path, "utf8")),
   readBytes: (path) => attempt(() => readFileSync(path)),
+  ...(solid ? { readSolid: () => solid } : {}),
   now: () => performance.now(),
 });
 let { exitCode, error }: { exitCode: number; error: string | null } = outcome;

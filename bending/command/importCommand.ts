@@ -19,7 +19,8 @@ const USUAL_MATERIAL = "S235";
 
 /** `import FILE.dxf --thickness T [...] [--out PART.json]`: the part document, and what was decided, mended and left out, as JSON. */
 export function importCommand({ file, options }: Arguments, world: CommandWorld): CommandOutcome {
-  if (!/\.dxf$/i.test(file)) return wrongInput(`${file}: a drawing ending in .dxf was expected`);
+  if (!/\.dxf$/i.test(file)) return wrongInput(`${file}: a drawing ending in .dxf or a solid ending in .stp or .step was expected`);
+  if (options.has("--body")) return wrongInput("--body: belongs to a solid (.stp, .step)");
   const thickness = readLength(options, "--thickness");
   if (!thickness.ok) return wrongInput(thickness.error);
   if (thickness.value === undefined) return wrongInput("--thickness: give the sheet's thickness, e.g. 1.5 or 0.06in; a drawing does not say it");

@@ -1,4 +1,5 @@
 import type { Result } from "../core/result";
+import type { RecognisedPart } from "../exchange/step/recognisedPart";
 
 /** What a run of the command line prints and returns: 0 done, 2 wrong input, 3 no plan, 4 gave up within the time limit. */
 export interface CommandOutcome {
@@ -15,6 +16,8 @@ export interface CommandOutcome {
 export interface CommandWorld {
   readonly readText: (path: string) => Result<string, string>;
   readonly readBytes: (path: string) => Result<Uint8Array, string>;
+  /** The part recognised in a solid's file, read beforehand: reading takes a geometry kernel, which is loaded only when one is named. */
+  readonly readSolid?: (path: string) => Result<RecognisedPart, string>;
   /** Milliseconds of a clock. */
   readonly now: () => number;
 }

@@ -5,6 +5,8 @@ import { readPartDocument } from "../part/readPartDocument";
 import { drawCommand } from "./drawCommand";
 import { flatCommand } from "./flatCommand";
 import { importCommand } from "./importCommand";
+import { importStepCommand } from "./importStepCommand";
+import { isSolidFile } from "./isSolidFile";
 import { wrongInput, type CommandOutcome, type CommandWorld } from "./outcome";
 import { planCommand } from "./planCommand";
 import { readArguments } from "./readArguments";
@@ -18,14 +20,14 @@ const VERBS = {
   plan: PLANNING,
   check: [...PLANNING, "--order"],
   draw: [...FLAT, "--out", "--ticks", "--text"],
-  import: ["--thickness", "--material", "--radius", "--units", "--bend-layers", "--single-lines", "--gap", "--name", "--out"],
+  import: ["--thickness", "--material", "--radius", "--units", "--bend-layers", "--single-lines", "--gap", "--body", "--name", "--out"],
 } as const;
 
 /** The command line as a function of its arguments and files: flat, plan, check, draw, import. */
 export function runCommand(args: readonly string[], world: CommandWorld): CommandOutcome {
   const given = readArguments(args, VERBS);
   if (!given.ok) return wrongInput(given.error);
-  if (given.value.verb === "import") return importCommand(given.value, world);
+  if (given.value.verb === "import") return isSolidFile(given.value.file) ? importStepCommand(given.value, world) : importCommand(given.value, world);
   const document = readJsonFile(world, given.value.file, readPartDocument);
   if (!document.ok) return wrongInput(document.error);
   const tableFile = given.value.options.get("--bend-table");
