@@ -40,8 +40,9 @@ export function materialImportRules(fileName: string): CsvImportRules<typeof mat
     check: (row) => {
       const facts = materialOfCsv(row, unsaid);
       const shape = materialFactsSchema.safeParse(facts);
-      const problems = shape.success ? materialProblems(facts) : shape.error.issues.map(({ path, message }) => ({ path: path.join("."), message }));
-      return problems.map(({ path, message }) => ({ field: columnOf(path), message }));
+      const values = materialProblems(facts).map(({ path, message }) => ({ field: columnOf(path), message }));
+      const texts = (shape.error?.issues ?? []).map(({ path, message }) => ({ field: columnOf(path.join(".")), message }));
+      return [...values, ...texts.filter(({ field }) => !values.some((named) => named.field === field))];
     },
   };
 }
