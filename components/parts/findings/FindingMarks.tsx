@@ -25,7 +25,7 @@ export function FindingMarks({ findings, selected, onSelect, view }: FindingMark
   return (
     <g>
       {chosen === undefined ? null : (
-        <g>
+        <g data-marks-of={chosen.key}>
           <pattern id={pattern} width="7" height="7" patternUnits="userSpaceOnUse" patternTransform="rotate(-45)">
             <path d="M0 0v7" stroke={severityLook[chosen.severity].colour} strokeWidth="2.6" strokeOpacity="0.7" />
           </pattern>
