@@ -1,6 +1,8 @@
 "use client";
+import { TriangleAlert } from "lucide-react";
 import Link from "next/link";
 import { useState } from "react";
+import { flatChangeText } from "@/lib/format/flatChangeText";
 import { useSheetList } from "@/lib/queries/sheets";
 import type { SheetListItem } from "@/lib/schemas/views";
 import { FloorFrame } from "./FloorFrame";
@@ -32,6 +34,7 @@ function Entry({ sheet }: { readonly sheet: SheetListItem }) {
         <span className="min-w-0 grow">
           <span className="block truncate text-2xl font-medium">{sheet.partName}</span>
           <span className="block text-lg text-ink-soft"><span className="num">{sheet.partNumber}</span> rev {sheet.revision} · {sheet.machine}</span>
+          {sheet.flatChange === null ? null : <span className="mt-1 flex items-center gap-2 text-lg font-medium text-amber-ink"><TriangleAlert aria-hidden className="size-6 shrink-0" />The flat would now be <span className="num">{flatChangeText(sheet.flatChange).now}</span></span>}
         </span>
         <span className="text-right text-lg whitespace-nowrap text-ink-soft"><span className="num text-2xl text-ink">{sheet.bends}</span><br />bends</span>
       </Link>

@@ -1,9 +1,11 @@
 "use client";
 import { ChevronLeft, ChevronRight } from "lucide-react";
 import { useState, type ReactNode } from "react";
+import type { FlatChange } from "@/lib/schemas/views";
 import type { SheetView } from "@/lib/sheet/sheetView";
 import { BedScreen } from "./BedScreen";
 import { BendScreen } from "./BendScreen";
+import { FlatChanged } from "./FlatChanged";
 import { FloorFrame } from "./FloorFrame";
 import { MeasureScreen } from "./MeasureScreen";
 import { PickScreen } from "./PickScreen";
@@ -12,7 +14,7 @@ import { useStepKeys } from "./useStepKeys";
 import { useWakeLock } from "./useWakeLock";
 
 /** Screen after screen: cautions, tools, bed, every bend, first part. By tap, by key or by a foot switch. */
-export function FloorRun({ view, superseded }: { readonly view: SheetView; readonly superseded: boolean }) {
+export function FloorRun({ view, superseded, flatChange }: { readonly view: SheetView; readonly superseded: boolean; readonly flatChange: FlatChange | null }) {
   const [at, setAt] = useState(0);
   const [placed, setPlaced] = useState<ReadonlySet<string>>(new Set());
   const bends = view.steps.length;
@@ -26,6 +28,7 @@ export function FloorRun({ view, superseded }: { readonly view: SheetView; reado
     <FloorFrame title={<><span className="num">{view.header.number}</span> {view.header.partName} <span className="text-ink-soft">rev {view.header.revision}</span></>} back={{ href: "/floor", label: "Sheets" }}
       aside={<p className="text-xl whitespace-nowrap text-ink-soft" aria-live="polite">{placeText(at, bends)}</p>}>
       {superseded ? <p role="alert" className="border-y-2 border-brick bg-brick-wash px-5 py-3 text-2xl font-semibold text-brick-ink">Superseded while it was open: stop, and take the new sheet from the list.</p> : null}
+      {flatChange !== null && (at === 0 || at === last) ? <FlatChanged change={flatChange} /> : null}
       <main id="content" className="flex min-h-0 grow flex-col overflow-y-auto">
         {screen(at, { view, placed, toggle, go, bend })}
       </main>

@@ -17,7 +17,7 @@ export function FloorSheet({ id }: { readonly id: string }) {
   if (!data) return error ? <Refusal title="Setup sheet" text={error.message} /> : <FloorFrame title="Setup sheet" back={back}><p className="p-6 text-2xl text-ink-soft">Loading…</p></FloorFrame>;
   if (data.state === "draft") return <Refusal title={data.number} text="This sheet is a draft. It is not for the floor." />;
   if (data.state === "superseded" && !opened) return <Refusal title={data.number} text="This sheet is superseded. Look in the list for the one that took its place." />;
-  return <FloorRun view={data.view} superseded={data.state === "superseded"} />;
+  return <FloorRun view={data.view} superseded={data.state === "superseded"} flatChange={data.flatChange} />;
 }
 
 function Refusal({ title, text }: { readonly title: string; readonly text: string }) {

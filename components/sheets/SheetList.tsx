@@ -8,6 +8,7 @@ import { Notice } from "@/components/ui/Notice";
 import { PageHeader } from "@/components/ui/PageHeader";
 import { StateMark } from "@/components/ui/StateMark";
 import { useListState } from "@/components/ui/useListState";
+import { flatChangeText } from "@/lib/format/flatChangeText";
 import { formatMoment } from "@/lib/format/formatMoment";
 import { useSheetList } from "@/lib/queries/sheets";
 import { sheetSorts } from "@/lib/schemas/sheetInputs";
@@ -22,9 +23,17 @@ const columns: readonly Column<SheetListItem>[] = [
   { key: "revision", header: "Rev.", align: "right", cell: (row) => <span className="num">{row.revision}</span> },
   { key: "machine", header: "Brake", sortable: true, cell: (row) => row.machine },
   { key: "bends", header: "Bends", sortable: true, align: "right", cell: (row) => <span className="num">{row.bends}</span> },
+  { key: "flat", header: "Flat", cell: (row) => <FlatNow sheet={row} /> },
   { key: "releasedAt", header: "Released", sortable: true, cell: (row) => <span className="whitespace-nowrap">{row.releasedAt ? `${formatMoment(row.releasedAt)}, ${row.releasedBy ?? ""}` : "–"}</span> },
   { key: "createdAt", header: "Made", sortable: true, cell: (row) => <span className="whitespace-nowrap">{formatMoment(row.createdAt)}</span> },
 ];
+
+/** Whether a released sheet's flat still is what the shop would make of it now. */
+function FlatNow({ sheet: { state, flatChange } }: { readonly sheet: SheetListItem }) {
+  if (flatChange === null) return <span className="text-ink-faint">{state === "released" ? "as released" : "–"}</span>;
+  const { then, now } = flatChangeText(flatChange);
+  return <><StateMark tone="caution">changed</StateMark><span className="mt-0.5 block text-sm whitespace-nowrap">now <span className="num">{now}</span>, sheet <span className="num">{then}</span></span></>;
+}
 
 const states = ["all", "draft", "released", "superseded"] as const;
 

@@ -1,4 +1,5 @@
 import { BedMapDrawing } from "@/components/preview/BedMapDrawing";
+import { allowanceLine } from "@/lib/sheet/allowanceLine";
 import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
 import type { SheetView } from "@/lib/sheet/sheetView";
 import { PaperSteps } from "./PaperSteps";
@@ -28,7 +29,7 @@ export function SheetPaper({ view, code }: { readonly view: SheetView; readonly 
       </section>
       <PaperSteps view={view} />
       <footer className="flex flex-wrap justify-between gap-x-8 gap-y-1 border-t border-ink pt-2 text-xs text-ink-soft">
-        <p>Blank <span className="num">{view.flat.width} × {view.flat.depth}</span>, <span className="num">{view.flat.mass}</span>. Allowances: {view.flat.bends.map((bend) => `${bend.id} ${bend.allowance} (${bend.source})`).join("; ")}.</p>
+        <p>Blank <span className="num">{view.flat.width} × {view.flat.depth}</span>, <span className="num">{view.flat.mass}</span>. Allowances: {allowanceLine(view.flat)}.</p>
         <p>{view.header.conventions.join(" ")}</p>
       </footer>
     </article>

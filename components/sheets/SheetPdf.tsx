@@ -1,5 +1,6 @@
 import { Document, Page, Path, Svg, Text, View } from "@react-pdf/renderer";
 import type { SheetState } from "@/lib/schemas/views";
+import { allowanceLine } from "@/lib/sheet/allowanceLine";
 import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
 import { qrPath } from "@/lib/sheet/qrPath";
 import { paperColours } from "@/lib/sheet/shapeLook";
@@ -55,7 +56,7 @@ export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
         <Text style={{ ...styles.heading, marginTop: 8, borderBottom: `1pt solid ${paperColours.ink}`, paddingBottom: 2 }} minPresenceAhead={90}>Bends in order</Text>
         {view.steps.map((step) => <PdfStep key={step.number} step={step} />)}
         <View style={{ marginTop: 6, fontSize: 7, color: paperColours["ink-soft"] }} wrap={false}>
-          <Text>Blank {view.flat.width} × {view.flat.depth}, {view.flat.mass}. Allowances: {view.flat.bends.map((bend) => `${bend.id} ${bend.allowance} (${bend.source})`).join("; ")}.</Text>
+          <Text>Blank {view.flat.width} × {view.flat.depth}, {view.flat.mass}. Allowances: {allowanceLine(view.flat)}.</Text>
           <Text>{view.header.conventions.join(" ")}</Text>
         </View>
       </Page>

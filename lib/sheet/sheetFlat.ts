@@ -1,5 +1,7 @@
 import { mmPer } from "@/bending/core/units";
+import { scaledBasis } from "@/bending/handbook/scaledBasis";
 import type { PlanDocument } from "@/bending/plan/planDocument";
+import { allowanceText } from "@/lib/format/allowanceText";
 import { createSheetFormat } from "./createSheetFormat";
 import type { SheetFlat } from "./sheetView";
 
@@ -18,7 +20,7 @@ export function sheetFlat({ flat, units }: Pick<PlanDocument, "flat" | "units">)
       deduction: format.fine(bend.deduction * per),
       k: format.ratio(bend.k),
       insideRadius: format.fine(bend.insideRadius * per),
-      source: bend.source,
+      source: bend.basis ? allowanceText(scaledBasis(bend.basis, per), units) : bend.source,
     })),
   };
 }

@@ -2,6 +2,7 @@ import type { LengthUnit } from "@/bending/core/units";
 import { unitName } from "@/lib/format/unitName";
 import type { Bend, PartModel } from "@/bending/part/partModel";
 import { mmPer } from "@/bending/core/units";
+import { AllowanceSource } from "@/components/ui/AllowanceSource";
 import { DataTable, type Column } from "@/components/ui/DataTable";
 import { formatAngle } from "@/lib/format/formatAngle";
 import { formatFixed } from "@/lib/format/formatFixed";
@@ -18,7 +19,7 @@ export function BendTable({ part, units }: { readonly part: PartModel; readonly 
     { key: "allowance", header: "Allowance", align: "right", cell: (bend) => length(bend.allowance) },
     { key: "deduction", header: "Deduction", align: "right", cell: (bend) => length(bend.deduction) },
     { key: "k", header: "K", align: "right", cell: (bend) => <span className="num">{formatFixed(bend.k, 3)}</span> },
-    { key: "source", header: "Where from", className: "min-w-44 text-sm text-ink-soft", cell: (bend) => <>Allowance: {bend.allowanceSource}. Radius: {bend.radiusSource}.</> },
+    { key: "source", header: "Where from", className: "min-w-44 text-sm text-ink-soft", cell: (bend) => <>{bend.allowanceBasis ? <AllowanceSource bend={bend.id} basis={bend.allowanceBasis} units={units} /> : bend.allowanceSource}. Radius: {bend.radiusSource}.</> },
   ];
   return <DataTable caption={`Bends, lengths in ${unitName(units)}`} columns={columns} rows={part.bends} rowKey={(bend) => bend.id} dense
     empty={<p className="text-ink-soft">The part has no bend yet.</p>} />;
