@@ -7,6 +7,7 @@ export function cureOnDraft(draft: PartDraft, { path, value, says }: Cure): Part
   const text = typeof value === "number" ? String(value) : null;
   if (text === null) return reliefAdded(draft, path);
   if (path === "insideRadius") return { ...draft, radiusFrom: "typed", insideRadius: text };
+  if (path === "relief.width") return { ...draft, relief: { ...draft.relief, width: text } };
   if (path === "profile.width") return { ...draft, width: text };
   if (path.startsWith("flat.")) return flatCured(draft, { path, value, says });
   const [, list, index, rest] = /^(profile\.legs|profile\.bends|flanges|base\.holes)\[(\d+)\](?:\.(.+))?$/.exec(path) ?? [];
@@ -20,6 +21,8 @@ export function cureOnDraft(draft: PartDraft, { path, value, says }: Cure): Part
 
 function flatCured(draft: PartDraft, cure: Cure): PartDraft | null {
   if (draft.flat === null) return null;
+  const [, index, field] = /^flat\.bends\[(\d+)\]\.(.+)$/.exec(cure.path) ?? [];
+  if (index !== undefined) return changedOrNull(draft.flatBends[Number(index)], (bend) => bendCured(bend, field, String(cure.value)), (_, bend) => ({ ...draft, flatBends: replaced(draft.flatBends, Number(index), () => bend) }));
   return { ...draft, flat: applyCure({ flat: draft.flat }, cure).flat };
 }
 
