@@ -19,6 +19,7 @@ import { takenWhenEmpty } from "@/lib/calculator/takenWhenEmpty";
 import { parseQuantity } from "@/lib/format/parseQuantity";
 import { materialsOptions } from "@/lib/queries/materials";
 import { useShopSettings } from "@/lib/queries/shopSettings";
+import { shopTableOptions } from "@/lib/queries/shopTable";
 import { gaugeSystemOf } from "@/bending/handbook/gaugeSystemOf";
 import { ChoiceInput } from "./ChoiceInput";
 import { DepthChart } from "./DepthChart";
@@ -38,12 +39,13 @@ export function Calculator({ reads }: { readonly reads: ShopReads }) {
   const materials: readonly MaterialFacts[] = shop.data?.filter(({ id, withdrawn }) => withdrawn === null || id === state.material) ?? builtInMaterials;
   const material = materials.find(({ id }) => id === state.material) ?? materials.find(({ id }) => id === "S235") ?? materials[0];
   const { texts, choices } = state;
+  const table = useQuery({ ...shopTableOptions(material?.id ?? ""), enabled: reads.shopTable && material !== undefined });
   const read = material === undefined ? null : readFields(texts, parseQuantity, choices.u, material.group);
   useEffect(() => {
     if (window.location.hash !== "") document.getElementById(window.location.hash.slice(1))?.scrollIntoView();
   }, []);
   if (material === undefined || read === null) return <LoadProblem what="The calculator" error={new Error("The shop has no material yet. Add one first.")} onRetry={() => void shop.refetch()} />;
-  const question = askQuestion(read, choices, material, settings.data?.forceFactors ?? defaultMethodFactors);
+  const question = askQuestion(read, choices, material, settings.data?.forceFactors ?? defaultMethodFactors, table.data ?? null);
   const gauge = gaugeSystemOf(material.group) ?? undefined;
   const field = (place: string, key: FieldKey) => (
     <FieldInput place={place} name={key} text={texts[key] ?? fieldOf(key).start} units={choices.u} value={read.values[key]} problem={read.problems[key]}

@@ -10,6 +10,7 @@ export interface ShopReads {
   readonly materials: boolean;
   readonly machines: boolean;
   readonly tools: boolean;
+  readonly shopTable: boolean;
 }
 
 export interface ShopLimits {

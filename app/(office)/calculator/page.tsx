@@ -6,5 +6,5 @@ export const metadata = { title: "Calculator" };
 
 export default async function CalculatorPage() {
   const { role } = await requirePage("/calculator");
-  return <CalculatorLoader reads={{ materials: can(role, "materials:read"), machines: can(role, "machines:read"), tools: can(role, "tools:read") }} />;
+  return <CalculatorLoader reads={{ materials: can(role, "materials:read"), machines: can(role, "machines:read"), tools: can(role, "tools:read"), shopTable: can(role, "parts:read") }} />;
 }
