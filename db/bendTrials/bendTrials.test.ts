@@ -4,12 +4,16 @@ import { openDatabase } from "@/tests/integration/openDatabase";
 import { bendTrialFromRow } from "./bendTrialFromRow";
 import { findAllTrials } from "./findAllTrials";
 import { findInstruments } from "./findInstruments";
+import { findTrialsById } from "./findTrialsById";
 import { findTrials, type TrialSort } from "./findTrials";
 import { insertInstrument } from "./insertInstrument";
 import { insertTrials } from "./insertTrials";
 import { judgeTrial } from "./judgeTrial";
 import type { NewTrial } from "./newTrial";
 import { withdrawInstrument } from "./withdrawInstrument";
+import { bracketRevision } from "@/tests/integration/shop/bracketRevision";
+import { deletePart } from "../parts/deletePart";
+import { insertPart } from "../parts/insertPart";
 import { insertUser } from "../users/insertUser";
 
 const database = openDatabase();
@@ -61,6 +65,15 @@ describe("a trial is a record", () => {
     expect(await one().update({ note: "seen again" })).toBe(1);
   });
 
+  it("that stays when the part that it came from is deleted", async () => {
+    const { partId } = await insertPart(database(), "B-1", bracketRevision());
+    await insertTrials(database(), [trial(5, { partId })], person);
+    expect((await findTrialsById(database(), [id(5)]))[0]).toMatchObject({ part_id: partId, part_number: "B-1" });
+    await deletePart(database(), partId);
+    expect((await findTrialsById(database(), [id(5)]))[0]).toMatchObject({ number: expect.stringMatching(/^T-/) as unknown, part_id: null, part_number: null });
+    await judgeTrial(database(), id(5), { state: "withdrawn", reason: "only for this test" }, person);
+  });
+
   it("that needs a material, an instrument and sizes that can be", async () => {
     for (const [change, rule] of [
       [{ material: "cheese" }, "23503 bend_trials_material_id_fkey"], [{ lengthInstrumentId: id(9) }, "23503 bend_trials_length_instrument_id_fkey"],
@@ -88,14 +101,14 @@ describe("whether a trial counts", () => {
     expect(await judgeTrial(database(), id(4), { state: "counted" }, person)).toBe(false);
     expect(await refused(database()("bend_trials").where({ id: id(4) }).update({ withdrawn_at: null, withdrawn_by: null, withdrawn_reason: null }))).toMatch(/^23001 .*stays so/);
     expect((await findAllTrials(database())).map(({ number }) => number)).not.toContain("T-1005");
-    expect(await findAllTrials(database(), { withdrawn: true })).toHaveLength(4);
+    expect(await findAllTrials(database(), { withdrawn: true })).toHaveLength(5);
   });
 });
 
 describe("lists of trials", () => {
   it("sort by every column that they name and search in words", async () => {
     const columns: readonly TrialSort[] = ["number", "material", "batch", "thickness", "vOpening", "punchRadius", "angle", "measuredOn", "measuredBy"];
-    for (const sort of columns) expect((await findTrials(database(), { sort, dir: "desc", page: 1, pageSize: 25 })).rows).toHaveLength(4);
+    for (const sort of columns) expect((await findTrials(database(), { sort, dir: "desc", page: 1, pageSize: 25 })).rows).toHaveLength(5);
     expect((await findTrials(database(), { sort: "number", dir: "asc", page: 1, pageSize: 25, q: "100 %" })).rows.map(({ number }) => number)).toEqual(["T-1002"]);
     expect((await findTrials(database(), { sort: "number", dir: "asc", page: 1, pageSize: 25, material: "1.4301", state: "counted" })).total).toBe(1);
   });

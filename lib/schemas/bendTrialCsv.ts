@@ -27,7 +27,7 @@ const toHundredth = (column: CsvColumn<number>): CsvColumn<number> => ({
 
 /** The columns of a file of trials; lengths in millimetres, the angle in degrees turned through, instruments by their names. */
 export const bendTrialCsv = {
-  number: optionalColumn(textColumn("trial", 30, { expects: "the number of a trial that is there; empty for a new one", example: "" })),
+  number: optionalColumn(textColumn("trial", 30, { expects: "the number of a trial that is there", example: "" })),
   material: textColumn("material", 60, { expects: "the material's short name", example: "S235" }),
   batch: optionalColumn(textColumn("batch", 60, { example: "C-4471" })),
   nominal: optionalColumn(toHundredth(length("nominal thickness", "nominal", "2"))),

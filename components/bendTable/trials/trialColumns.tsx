@@ -10,7 +10,7 @@ const size = (value: number) => <span className="num">{formatNumber(value, 2)}</
 
 export const trialColumns: readonly Column<TrialView>[] = [
   {
-    key: "number", header: "Trial", sortable: true, rowHeader: true,
+    key: "number", header: "Trial", sortable: true, rowHeader: true, className: "whitespace-nowrap",
     cell: ({ number, valueKey }) => (valueKey === null ? <span className="num">{number}</span> : <TextLink href={`/bend-table/values/${encodeURIComponent(valueKey)}`}><span className="num">{number}</span></TextLink>),
   },
   { key: "material", header: "Material", sortable: true, className: "whitespace-nowrap", cell: ({ material }) => material },

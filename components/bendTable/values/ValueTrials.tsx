@@ -11,8 +11,8 @@ import { trialStateWords } from "../valueStates";
 const fixed = (digits: number, of: (trial: ValueTrial) => number | null) => function FixedCell(trial: ValueTrial) { return <Fixed value={of(trial)} digits={digits} />; };
 
 const columns: readonly Column<ValueTrial>[] = [
-  { key: "number", header: "Trial", rowHeader: true, cell: ({ number }) => <span className="num font-medium">{number}</span> },
-  { key: "batch", header: "Batch", cell: ({ batch }) => batch || <span className="text-ink-faint">–</span> },
+  { key: "number", header: "Trial", rowHeader: true, cell: ({ number }) => <span className="num font-medium whitespace-nowrap">{number}</span> },
+  { key: "batch", header: "Batch", className: "whitespace-nowrap", cell: ({ batch }) => batch || <span className="text-ink-faint">–</span> },
   { key: "thickness", header: "Measured t", align: "right", cell: fixed(2, ({ thicknessMm }) => thicknessMm) },
   { key: "angle", header: "Angle", align: "right", cell: ({ angleDeg }) => <span className="num">{formatNumber(angleDeg, 2)}°</span> },
   { key: "blank", header: "Blank", align: "right", cell: fixed(2, ({ blankMm }) => blankMm) },
