@@ -1,5 +1,5 @@
 import { expect, it } from "vitest";
-import { mm, rad } from "../core/units";
+import { mm, mpa, rad } from "../core/units";
 import { completeMaterial, type RecordedMaterial } from "./completeMaterial";
 import { builtInMaterials, materialById } from "./materials";
 import { minimumRadius } from "./minimumRadius";
@@ -23,7 +23,8 @@ it("gives an old record the numbers of its days", () => {
     const whole = completeMaterial(old(id));
     expect([whole.allowance, whole.springbackRow]).toEqual([allowance, springbackRow]);
     expect(whole.minimumRadii).toEqual(group === "steel" ? minimumRadii : null);
-    expect(whole.origins.tensile).toEqual({ kind: "memory", text: "a table" });
+    expect(whole.origins.tensile).toEqual(materialById(id)?.origins.tensile);
+    expect(completeMaterial({ ...old(id), yield: mpa(77) }).origins.yield).toEqual({ kind: "memory", text: "a table" });
   }
   expect(minimumRadius(completeMaterial(old("S235")), mm(1.5), rad(Math.PI / 2))).toEqual({ radius: 1.6, source: "DIN 6935 (1975-10), across the rolling direction" });
 });

@@ -23,7 +23,7 @@ function strengthProblems({ tensile: [low, high], yield: strength }: MaterialFac
   return [
     ...[low, high].flatMap((value, end) => (inside(value, TENSILE_MPA) ? [] : [{ path: `tensile[${end}]`, message: range }])),
     ...(low > high ? [{ path: "tensile[1]", message: `must be at least the lowest, ${low} MPa` }] : []),
-    ...(strength <= 0 ? [{ path: "yield", message: "must be over 0 MPa" }] : strength > high ? [{ path: "yield", message: `must be at most the highest tensile strength, ${high} MPa` }] : []),
+    ...(!(strength > 0) ? [{ path: "yield", message: "must be over 0 MPa" }] : strength > high ? [{ path: "yield", message: `must be at most the highest tensile strength, ${high} MPa` }] : []),
   ];
 }
 

@@ -23,7 +23,7 @@ const columns: readonly Column<MaterialView>[] = [
   { key: "id", header: "Short name", rowHeader: true, sortable: true, className: "whitespace-nowrap", cell: ({ id, withdrawn }) => <span className="inline-flex items-center gap-2"><TextLink href={`/materials/${encodeURIComponent(id)}`}>{id}</TextLink>{withdrawn === null ? null : <StateMark tone="off">withdrawn</StateMark>}</span> },
   { key: "name", header: "Name", sortable: true, cell: ({ name }) => name },
   { key: "group", header: "Group", sortable: true, cell: ({ group }) => group },
-  { key: "standard", header: "Standard", sortable: true, cell: ({ designation, standard }) => <>{designation}, {standard}</> },
+  { key: "standard", header: "Standard", sortable: true, className: "whitespace-nowrap", cell: ({ standard }) => standard },
   { key: "tensile", header: "Tensile, MPa", align: "right", sortable: true, cell: ({ tensile }) => <span className="num whitespace-nowrap">{tensile[0]} to {tensile[1]}</span> },
   { key: "yield", header: "Yield, MPa", align: "right", sortable: true, cell: (material) => number(material.yield) },
   { key: "modulus", header: "Modulus, GPa", align: "right", sortable: true, cell: ({ modulus }) => number(modulus / 1000, 1) },

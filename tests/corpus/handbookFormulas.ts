@@ -15,6 +15,7 @@ import { penetrationDepth } from "@/bending/handbook/penetrationDepth";
 import { springbackRatio } from "@/bending/handbook/springbackRatio";
 import { straightLength } from "@/bending/handbook/straightLength";
 import { vOpeningRule } from "@/bending/handbook/vOpeningRule";
+import { materialToCsv } from "@/lib/schemas/materialToCsv";
 import type { CaseInput, CorpusFormulas } from "./handbookCase";
 import { handbookDieFormulas } from "./handbookDieFormulas";
 import { handbookForceFormulas } from "./handbookForceFormulas";
@@ -52,6 +53,7 @@ export const handbookFormulas: CorpusFormulas = {
     const steel = { ...material("S235"), minimumRadii: steelRadiusTable(mpa(Number(i.tensile))) };
     return minimumRadius(steel, length(i.thickness), angle(i.angle), i.alongGrain === true)?.radius ?? NaN;
   },
+  materialValue: (i) => materialToCsv(material(String(i.material)))[i.value as "tensileLow" | "tensileHigh" | "yield" | "modulus" | "density"],
   gaugeThickness: (i) => (gaugeThickness(Number(i.gauge), i.system as GaugeSystem) ?? NaN) / 25.4,
 };
 

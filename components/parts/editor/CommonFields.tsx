@@ -4,6 +4,7 @@ import type { LengthUnit } from "@/bending/core/units";
 import type { DimensionKind } from "@/bending/part/partDocument";
 import { Choice } from "@/components/ui/Choice";
 import { Select } from "@/components/ui/Select";
+import type { MaterialView } from "@/lib/schemas/materialViews";
 import { convertDraft } from "../draft/convertDraft";
 import type { PartDraft } from "../draft/partDraft";
 import { CutFields } from "./CutFields";
@@ -24,14 +25,17 @@ const grains: readonly { readonly value: PartDraft["grain"]; readonly label: str
   { value: "absent", label: "not known" }, { value: "x", label: "along x of the flat" }, { value: "y", label: "along y of the flat" }, { value: "angle", label: "at an angle" },
 ];
 
+/** A withdrawn material is offered no more, but stays with a part that is of it. */
+type Offered = MaterialFacts & Partial<Pick<MaterialView, "withdrawn">>;
+
 /** Material, thickness, radius, and how lengths are measured and unfolded. */
-export function CommonFields({ materials }: { readonly materials: readonly MaterialFacts[] }) {
+export function CommonFields({ materials }: { readonly materials: readonly Offered[] }) {
   const { draft, update, problemAt } = useEditor();
   const set = (change: Partial<PartDraft>) => update((old) => ({ ...old, ...change }));
   return (
     <div className="grid grid-cols-2 gap-x-4 gap-y-3">
       <Select id={fieldId("material")} label="Material" value={draft.material} onChange={(material) => set({ material })} error={problemAt("material")} className="col-span-2"
-        placeholder="Choose a material" options={materials.map(({ id, name }) => ({ value: id, label: name, note: name.includes(id) ? undefined : id }))} />
+        placeholder="Choose a material" options={materials.filter(({ id, withdrawn }) => (withdrawn ?? null) === null || id === draft.material).map(({ id, name }) => ({ value: id, label: name, note: name.includes(id) ? undefined : id }))} />
       <PathField path="thickness" label="Thickness" value={draft.thickness} onChange={(thickness) => set({ thickness })} hint="Also 16 ga, 1/8 in" />
       <div className="flex flex-col items-start gap-3">
         <Choice<LengthUnit> label="Lengths in" value={draft.units} onChange={(units) => update((old) => convertDraft(old, units))}

@@ -23,7 +23,8 @@ export function NewPart({ copyOf }: { readonly copyOf: PartToCopy | null }) {
   if (materials.isPending) return <Loading what="the materials" />;
   if (materials.isError) return <LoadProblem what="The materials" error={materials.error} onRetry={() => void materials.refetch()} />;
   if (copyOf !== null) return <CopiedPart {...copyOf} materials={materials.data} />;
-  const usual = materials.data.find(({ id }) => id === "S235") ?? materials.data[0];
+  const offered = materials.data.filter(({ withdrawn }) => withdrawn === null);
+  const usual = offered.find(({ id }) => id === "S235") ?? offered[0];
   return <NewPartForm name="new" start={() => startDraft(usual?.id ?? "")} materials={materials.data} />;
 }
 

@@ -61,7 +61,7 @@ export function ImportFates({ what, dryRun, note, busy, stale, onBack, onAgain, 
 }
 
 function summary({ add, change, same, refused }: CsvDryRun["counts"]): string {
-  const parts = [[add, "new"], [change, add > 0 ? "changed" : "to be changed"], [same, "as they are already"], [refused, "refused"]] as const;
+  const parts = [[add, "to be added"], [change, "to be changed"], [same, "as the shop has it"], [refused, "refused"]] as const;
   const said = parts.filter(([count]) => count > 0).map(([count, word]) => `${count} ${word}`).join(", ");
   return `Dry run, nothing written yet: ${said}`;
 }

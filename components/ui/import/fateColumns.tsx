@@ -1,3 +1,4 @@
+import { classes } from "../classes";
 import type { Column } from "../DataTable";
 import { StateMark, type StateTone } from "../StateMark";
 import type { CsvLineFate, LineFate } from "@/lib/schemas/csvImport";
@@ -16,12 +17,15 @@ export const fateColumns: readonly Column<CsvLineFate>[] = [
   { key: "what", header: "What it would do, or what would be right", className: "w-full min-w-72", cell: (line) => <What line={line} /> },
 ];
 
+/** Numbers stand in the face of numbers, texts in that of texts. */
+const figures = (text: string): string => (/^[-+\d.,\s]+$/.test(text) ? "num" : "");
+
 function What({ line: { fate, changes, problems } }: { readonly line: CsvLineFate }) {
   if (fate === "refused") {
     return (
       <ul>
         {problems.map(({ field, given, message }) => (
-          <li key={`${field} ${message}`}>{field === "" ? null : <span className="num">{field} </span>}{given === "" ? null : <span className="num text-brick-ink">“{given}” </span>}{message}</li>
+          <li key={`${field} ${message}`}>{field === "" ? null : <span className="font-medium">{field} </span>}{given === "" ? null : <span className={classes("text-brick-ink", figures(given))}>“{given}” </span>}{message}</li>
         ))}
       </ul>
     );
@@ -30,7 +34,7 @@ function What({ line: { fate, changes, problems } }: { readonly line: CsvLineFat
   return (
     <ul className="flex flex-wrap gap-x-5">
       {changes.map(({ field, from, to }) => (
-        <li key={field}><span className="text-ink-soft">{field}</span> {fate === "add" ? null : <><span className="num line-through decoration-ink-faint">{from === "" ? "empty" : from}</span> <span aria-hidden>→</span><span className="sr-only">becomes</span> </>}<span className="num font-medium">{to === "" ? "empty" : to}</span></li>
+        <li key={field}><span className="text-ink-soft">{field}</span> {fate === "add" ? null : <><span className={classes("line-through decoration-ink-faint", figures(from))}>{from === "" ? "empty" : from}</span> <span aria-hidden>→</span><span className="sr-only">becomes</span> </>}<span className={classes("font-medium", figures(to))}>{to === "" ? "empty" : to}</span></li>
       ))}
     </ul>
   );
