@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { DRAWING_FORMATS } from "@/bending/exchange/drawPart";
 import { listQuerySchema } from "./listQuery";
 import { filledText, plainText } from "./plainText";
 import type { ListQuery } from "./views";
@@ -43,3 +44,14 @@ export interface AddRevisionInput {
 export const revisionQuerySchema = z.object({
   revision: z.coerce.number({ error: "must be a whole number from 1" }).int("must be a whole number from 1").min(1, "must be 1 or more").max(2_147_483_647).optional(),
 });
+
+const yesOrNo = z.enum(["yes", "no"], "must be yes or no").default("no");
+
+export const drawingQuerySchema = revisionQuerySchema.extend({
+  format: z.enum(DRAWING_FORMATS, "must be dxf, svg or glb"),
+  /** Marks to be etched, in DXF only: ticks on the bend lines, the part's number. */
+  ticks: yesOrNo,
+  number: yesOrNo,
+});
+
+export type DrawingQuery = z.output<typeof drawingQuerySchema>;

@@ -28,6 +28,8 @@ export function pathName(path: string, draft: PartDraft): string {
   if (bend !== null) return `Bend ${Number(bend[1]) + 1}${bend[2] === undefined ? "" : `, ${names[bend[2]] ?? bend[2]}`}`;
   const flange = /^flanges\[(\d+)\](?:\.(.+))?/.exec(path);
   if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${ownName(flange[2])}`}`;
+  const line = /^flat\.bends\[(\d+)\](?:\.(\w+))?/.exec(path);
+  if (line !== null) return `Bend ${draft.flat?.bends[Number(line[1])]?.id ?? line[1] ?? ""}${line[2] === undefined ? "" : `, ${names[line[2]] ?? line[2]}`}`;
   if (path === "profile.width") return "Width";
   if (path.startsWith("base.")) return `Base, ${ownName(path.slice(5))}`;
   const name = names[path];

@@ -1,5 +1,5 @@
 "use client";
-import { Plus } from "lucide-react";
+import { FileUp, Plus } from "lucide-react";
 import Link from "next/link";
 import { buttonClasses } from "@/components/ui/buttonClasses";
 import { DataTable } from "@/components/ui/DataTable";
@@ -26,7 +26,12 @@ export function PartList({ mayWrite }: { readonly mayWrite: boolean }) {
   const list = usePartList({ ...state, sort: oneOf(partSorts, state.sort, "updatedAt"), ...(material === "" ? {} : { material }) });
   const counts = useFindingCounts((list.data?.items ?? []).map(({ id }) => id));
   const narrowed = state.q !== "" || material !== "";
-  const add = mayWrite ? <Link href="/parts/new" className={buttonClasses()}><Plus aria-hidden />New part</Link> : null;
+  const add = mayWrite ? (
+    <>
+      <Link href="/parts/import" className={buttonClasses("plain")}><FileUp aria-hidden />Import drawings</Link>
+      <Link href="/parts/new" className={buttonClasses()}><Plus aria-hidden />New part</Link>
+    </>
+  ) : null;
   return (
     <>
       <PageHeader kicker="Register" title="Parts" summary="Every part that the shop bends, with its newest revision." actions={add} />

@@ -1,5 +1,5 @@
 "use client";
-import { Copy, FileDown, PencilRuler, Route, Trash2 } from "lucide-react";
+import { Copy, PencilRuler, Route, Trash2 } from "lucide-react";
 import Link from "next/link";
 import { useState } from "react";
 import { mmPer } from "@/bending/core/units";
@@ -10,8 +10,8 @@ import { PageHeader } from "@/components/ui/PageHeader";
 import { formatLength } from "@/lib/format/formatLength";
 import { formatMoment } from "@/lib/format/formatMoment";
 import type { PartDetail } from "@/lib/schemas/views";
-import { saveAsFile } from "../editor/saveAsFile";
 import { DeletePart } from "./DeletePart";
+import { DownloadMenu } from "./DownloadMenu";
 import { PlanDialog } from "./PlanDialog";
 
 interface PartHeadProps {
@@ -26,7 +26,6 @@ export function PartHead({ part, newest, mayWrite, mayPlan }: PartHeadProps) {
   const [deleting, setDeleting] = useState(false);
   const { document } = part;
   const current = part.revision.revision === newest;
-  const download = () => saveAsFile(`${part.number} r${part.revision.revision}.json`, JSON.stringify(document, null, 2));
   return (
     <>
       <PageHeader kicker="Part" title={part.name} facts={[
@@ -40,7 +39,7 @@ export function PartHead({ part, newest, mayWrite, mayPlan }: PartHeadProps) {
       ]} actions={(
         <>
           {mayWrite ? <IconButton label="Delete this part" danger onClick={() => setDeleting(true)}><Trash2 aria-hidden /></IconButton> : null}
-          <Button look="plain" icon={<FileDown aria-hidden />} onClick={download}>Download JSON</Button>
+          <DownloadMenu part={part} />
           {mayWrite ? <Link href={`/parts/new?copy=${part.id}&revision=${part.revision.revision}`} className={buttonClasses("plain")}><Copy aria-hidden />Copy</Link> : null}
           {mayWrite && current ? <Link href={`/parts/${part.id}/edit`} className={buttonClasses("plain")}><PencilRuler aria-hidden />Edit</Link> : null}
           {mayPlan ? <Button icon={<Route aria-hidden />} onClick={() => setPlanning(true)}>Plan the bends</Button> : null}

@@ -1,4 +1,5 @@
 import { route } from "@/lib/api/route";
+import { partFileName } from "@/lib/format/partFileName";
 import { idParams } from "@/lib/schemas/idParams";
 import { revisionQuerySchema } from "@/lib/schemas/partInputs";
 import { getPart } from "@/lib/services/parts/getPart";
@@ -11,7 +12,6 @@ export const GET = route("GET /api/parts/[id]/document", {
     const part = await getPart(person, params.id, query.revision);
     if (!part.ok) return part;
     const { number, revision, document } = part.value;
-    const file = `${number.replace(/[^A-Za-z0-9._-]/g, "_")}-rev${revision.revision}.json`;
-    return Response.json(document, { headers: { "cache-control": "no-store", "content-disposition": `attachment; filename="${file}"` } });
+    return Response.json(document, { headers: { "cache-control": "no-store", "content-disposition": `attachment; filename="${partFileName(number, revision.revision, "json")}"` } });
   },
 });
