@@ -4,6 +4,7 @@ import type { PartDocument } from "@/bending/part/partDocument";
 import { Notice } from "@/components/ui/Notice";
 import { useMaterials } from "@/lib/queries/materials";
 import { useShopLimits } from "@/lib/queries/shopLimits";
+import { useShopTable } from "@/lib/queries/shopTable";
 import { partModelOf } from "../part/partModelOf";
 import { useFindings } from "./useFindings";
 
@@ -14,7 +15,8 @@ const TOLD_MOST = 5;
 export function StopNotice({ document }: { readonly document: PartDocument }) {
   const materials = useMaterials();
   const shop = useShopLimits();
-  const built = useMemo(() => (materials.data === undefined ? null : partModelOf(document, materials.data)), [document, materials.data]);
+  const table = useShopTable(document.material);
+  const built = useMemo(() => (materials.data === undefined ? null : partModelOf(document, materials.data, table.data)), [document, materials.data, table.data]);
   const model = useMemo(() => (built?.ok === true ? { part: built.value.part, document } : null), [built, document]);
   const findings = useFindings(model, shop.data ?? null);
   const stops = (findings?.list ?? []).filter(({ severity }) => severity === "stop");
