@@ -36,8 +36,10 @@ function nearestCorner(outline: readonly Vec2[], point: Vec2, next: Vec2 | null)
   let best = 0;
   let least = Infinity;
   outline.forEach((p, i) => {
+    const near = Math.abs(p[0] - point[0]) + Math.abs(p[1] - point[1]);
+    if (near >= least) return;
     const q = outline[(i + 1) % outline.length] ?? p;
-    const off = Math.hypot(p[0] - point[0], p[1] - point[1]) + (next ? Math.hypot(q[0] - next[0], q[1] - next[1]) : 0);
+    const off = near + (next ? Math.abs(q[0] - next[0]) + Math.abs(q[1] - next[1]) : 0);
     if (off < least) [best, least] = [i, off];
   });
   return best;

@@ -5,7 +5,8 @@ import type { Vec2 } from "../geometry/vec2";
 
 /** Whether a hole lies wholly inside a face, without touching its outline. */
 export function holeWithin(hole: readonly Vec2[], face: readonly Vec2[]): boolean {
-  return hole.every((p) => polygonContains(face, p)) && !edgesCross(hole, face);
+  const [point] = hole;
+  return point !== undefined && polygonContains(face, point) && !edgesCross(hole, face);
 }
 
 /** Whether two holes touch, cross or hold one another. */

@@ -12,7 +12,7 @@ export function withZoneCorners(faces: readonly Face[], bends: readonly Bend[]):
     wanted[child]?.push(childStart, childEnd);
   }
   return faces.map((face, i) => {
-    const missing = (wanted[i] ?? []).filter((p) => !face.outline.some((q) => Math.hypot(p[0] - q[0], p[1] - q[1]) <= ON_EDGE_MM));
+    const missing = (wanted[i] ?? []).filter((p) => !face.outline.some((q) => Math.abs(p[0] - q[0]) <= ON_EDGE_MM && Math.abs(p[1] - q[1]) <= ON_EDGE_MM));
     return missing.length === 0 ? face : { ...face, outline: missing.reduce(withCorner, face.outline) };
   });
 }

@@ -6,6 +6,7 @@ import { planCorpus } from "../corpus/planCorpus";
 import { clearanceQuestions } from "./clearanceQuestions";
 import { findingParts, judged, partOf } from "./findingParts";
 import { randomProblem } from "./randomProblem";
+import { asFlat, comb, corrugated, unfold } from "./unfoldQuestions";
 
 interface Row {
   readonly name: string;
@@ -79,6 +80,16 @@ function findings(): readonly Row[] {
   });
 }
 
+/** Parts from their documents to the flat, as the editor asks at each key. */
+function unfolds(): readonly Row[] {
+  const kinds = [["unfold a chain", corrugated], ["unfold a comb", comb], ["fold a drawn comb", (bends: number) => asFlat(comb(bends))]] as const;
+  return kinds.flatMap(([name, make]) => [10, 30, 100, 500].map((size): Row => {
+    const document = make(size);
+    const { medianMs, answer } = timed(() => unfold(document));
+    return { name, size, medianMs, runs: RUNS, checksum: digest(answer), peakMB: peakMB() };
+  }));
+}
+
 function withGrowth(rows: readonly Row[]): readonly Row[] {
   return rows.map((row, i) => {
     const before = rows[i - 1];
@@ -87,7 +98,7 @@ function withGrowth(rows: readonly Row[]): readonly Row[] {
   });
 }
 
-const rows = [...withGrowth([...searches(), ...plans()]), ...findings(), ...await clearances()];
+const rows = [...withGrowth([...searches(), ...unfolds(), ...plans()]), ...findings(), ...await clearances()];
 if (process.argv.includes("--json")) process.stdout.write(`${JSON.stringify(rows, null, 2)}\n`);
 else {
   for (const row of rows) {

@@ -1,3 +1,4 @@
+import type { Vec2 } from "../../geometry/vec2";
 import { fromEdge, onEdge, type EdgeAxes } from "../edgeCut";
 import type { RingPlace, Rings } from "./ringPlace";
 
@@ -12,14 +13,22 @@ export interface MaterialChord {
 /** Where a line, drawn out both ways, runs over the sheet, from its start on. */
 export function materialChords(rings: Rings, axes: EdgeAxes): readonly MaterialChord[] {
   const crossings: { readonly along: number; readonly place: RingPlace }[] = [];
-  rings.forEach((points, ring) => points.forEach((p, edge) => {
-    const [a, h] = onEdge(axes, p);
-    const [b, g] = onEdge(axes, points[(edge + 1) % points.length] ?? p);
-    if (h > 0 === g > 0) return;
-    const share = h / (h - g);
-    const along = a + (b - a) * share;
-    crossings.push({ along, place: { ring, edge, share, point: fromEdge(axes, [along, 0]) } });
-  }));
+  const { origin, along: [ux, uy] } = axes;
+  const height = (p: Vec2) => (p[1] - origin[1]) * ux - (p[0] - origin[0]) * uy;
+  rings.forEach((points, ring) => {
+    let [p, h] = [points[0] ?? origin, height(points[0] ?? origin)];
+    for (let edge = 0; edge < points.length; edge++) {
+      const q = points[(edge + 1) % points.length] ?? p;
+      const g = height(q);
+      if (h > 0 !== g > 0) {
+        const share = h / (h - g);
+        const [a, b] = [onEdge(axes, p)[0], onEdge(axes, q)[0]];
+        const along = a + (b - a) * share;
+        crossings.push({ along, place: { ring, edge, share, point: fromEdge(axes, [along, 0]) } });
+      }
+      [p, h] = [q, g];
+    }
+  });
   crossings.sort((p, q) => p.along - q.along);
   const chords: MaterialChord[] = [];
   for (let i = 0; i + 1 < crossings.length; i += 2) {

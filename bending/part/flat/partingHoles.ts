@@ -1,4 +1,5 @@
 import { SAME_POINT_MM } from "../../core/tolerance";
+import { polygonBounds } from "../../geometry/polygonBounds";
 import type { Vec2 } from "../../geometry/vec2";
 import { onEdge, type EdgeAxes } from "../edgeCut";
 import { materialChords } from "./materialChords";
@@ -9,8 +10,12 @@ import { materialChords } from "./materialChords";
  */
 export function partingHoles(outline: readonly Vec2[], holes: readonly (readonly Vec2[])[], lines: readonly EdgeAxes[]): readonly number[] {
   const found = new Set<number>();
+  const rounds = holes.map((hole) => {
+    const { min, max } = polygonBounds(hole);
+    return { middle: [(min[0] + max[0]) / 2, (min[1] + max[1]) / 2] as const, radius: Math.hypot(max[0] - min[0], max[1] - min[1]) / 2 };
+  });
   for (const axes of lines) {
-    const met = holes.flatMap((hole, i) => (straddles(hole, axes) ? [i] : []));
+    const met = rounds.flatMap(({ middle, radius }, i) => (Math.abs(onEdge(axes, middle)[1]) < radius && straddles(holes[i] ?? [], axes) ? [i] : []));
     if (met.length === 0) continue;
     const rings = [outline, ...met.map((i) => [...(holes[i] ?? [])].reverse())];
     const chords = materialChords(rings, axes).filter(({ from, to }) => Math.min(to, axes.length) - Math.max(from, 0) > (to - from) / 2);

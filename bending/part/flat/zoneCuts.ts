@@ -1,3 +1,4 @@
+import type { Vec2 } from "../../geometry/vec2";
 import { fromEdge, onEdge } from "../edgeCut";
 import type { CutEnd, SheetCut } from "./cutSheet";
 import { cornerPoint, type FlatZone } from "./flatZone";
@@ -35,14 +36,21 @@ function breaks(rings: Rings, { axes, half }: FlatZone, from: ZoneCorner, to: Zo
   const [a, b] = [onEdge(axes, cornerPoint(from))[0], onEdge(axes, cornerPoint(to))[0]];
   const [least, most] = [Math.min(a, b) + ON_BORDER_MM, Math.max(a, b) - ON_BORDER_MM];
   const found: { readonly along: number; readonly end: CutEnd }[] = [];
-  rings.forEach((points, ring) => points.forEach((p, edge) => {
-    const [pa, ph] = onEdge(axes, p);
-    const [qa, qh] = onEdge(axes, points[(edge + 1) % points.length] ?? p);
-    const [pd, qd] = [ph * side - half, qh * side - half];
-    if (pd < -ON_BORDER_MM === qd < -ON_BORDER_MM) return;
-    const share = pd / (pd - qd);
-    const along = pa + (qa - pa) * share;
-    if (along > least && along < most) found.push({ along, end: { ring, edge, share: Math.min(Math.max(share, 0), 1), point: fromEdge(axes, [along, half * side]) } });
-  }));
+  const { origin, along: [ux, uy] } = axes;
+  const past = (p: Vec2) => ((p[1] - origin[1]) * ux - (p[0] - origin[0]) * uy) * side - half;
+  rings.forEach((points, ring) => {
+    let [p, pd] = [points[0] ?? origin, past(points[0] ?? origin)];
+    for (let edge = 0; edge < points.length; edge++) {
+      const q = points[(edge + 1) % points.length] ?? p;
+      const qd = past(q);
+      if (pd < -ON_BORDER_MM !== qd < -ON_BORDER_MM) {
+        const share = pd / (pd - qd);
+        const [pa, qa] = [onEdge(axes, p)[0], onEdge(axes, q)[0]];
+        const along = pa + (qa - pa) * share;
+        if (along > least && along < most) found.push({ along, end: { ring, edge, share: Math.min(Math.max(share, 0), 1), point: fromEdge(axes, [along, half * side]) } });
+      }
+      [p, pd] = [q, qd];
+    }
+  });
   return found.sort((p, q) => (p.along - q.along) * (b > a ? 1 : -1)).map(({ end }) => end);
 }
