@@ -35,7 +35,7 @@ test("the engineer types a U with returns; section, flat and 3D follow; it is sa
   await typeChannel(page, name);
 
   await expect(page.getByLabel(/^Leg \d length$/)).toHaveCount(channelLegs.length);
-  await expect(page.getByRole("img", { name: "Flat pattern, 184.65 mm by 240 mm, 4 bend lines" })).toBeVisible();
+  await expect(page.getByRole("group", { name: "Flat pattern, 184.95 mm by 240 mm, 4 bend lines" })).toBeVisible();
   const folded = page.getByRole("figure").filter({ hasText: "Folded" }).locator("canvas");
   await expect.poll(async () => (await pictureOf(folded)).colours, { timeout: 60_000 }).toBeGreaterThan(20);
   const before = await pictureOf(folded);
