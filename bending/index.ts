@@ -143,6 +143,13 @@ export type { Hit } from "./clearance/hit";
 export { createClearance } from "./clearance/createClearance";
 export { machineFrames } from "./clearance/machineFrames";
 
+export type { Cure, Finding, FindingMark, FindingMeasure, FindingRule, Severity } from "./findings/finding";
+export type { DieLimit, MachineLimit, PunchLimit, ShopLimits, StockSheet } from "./findings/shopLimits";
+export { findingsOf, type Findings, type FindingsQuestion } from "./findings/findingsOf";
+export { applyCure } from "./findings/applyCure";
+export { shopLimitsOf } from "./findings/shopLimitsOf";
+export { stockSheets } from "./findings/stockSheets";
+
 export type * from "./plan/planDocument";
 export type { CheckRequest, PlanProgress, PlanRequest } from "./plan/planRequest";
 export { checkOrder } from "./plan/checkOrder";

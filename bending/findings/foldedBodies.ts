@@ -1,11 +1,10 @@
-import { facetCount } from "../clearance/facetCount";
 import { applyFrame } from "../geometry/applyFrame";
 import { convexPieces } from "../geometry/convexPieces";
 import type { Frame } from "../geometry/frame";
 import type { Vec3 } from "../geometry/vec3";
-import { bendFacets } from "../part/bendFacets";
 import { foldFrames } from "../part/foldFrames";
 import type { PartModel } from "../part/partModel";
+import { zonePlates } from "./zonePlates";
 
 /** A face or a bend of the finished part as convex plates in the part's frame. */
 export interface FoldedBody {
@@ -36,7 +35,7 @@ export function foldedBodies(part: PartModel): readonly FoldedBody[] {
   const bends = part.bends.map((bend, index): FoldedBody => ({
     of: "bend",
     index,
-    plates: bendFacets(part, index, bend.angle, facetCount(part, bend, bend.angle)).map(({ inside, outside }) => plate(frames[bend.parent], outside, inside)),
+    plates: zonePlates(part, index).map(({ inside, outside }) => plate(frames[bend.parent], outside, inside)),
   }));
   return [...faces, ...bends];
 }
