@@ -63,6 +63,6 @@ test("faces of a folded part meet where a solid modeller says so, but for the to
     for (const pair of said) expect(atAll, `said ${pair}`).toContain(pair);
     if (said.size > 0) met += 1;
     else clear += 1;
-  }), { numRuns: 150, seed: 7 });
-  expect(Math.min(met, clear)).toBeGreaterThan(20);
+  }), { numRuns: 70, seed: 7 });
+  expect(Math.min(met, clear)).toBeGreaterThanOrEqual(10);
 });
