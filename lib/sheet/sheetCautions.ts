@@ -15,14 +15,15 @@ export function sheetCautions({ plan, machine, tools }: PlanSource, model: PlanM
   );
   const always = (level: SheetCaution["level"], text: string): SheetCaution => ({ level, text, steps: [] });
   const lift = plan.flat.massKg > TWO_PEOPLE_KG
-    ? [always("caution", `The blank weighs ${format.mass(plan.flat.massKg)}: two people, or a lifting aid.`)]
+    ? [always("caution", `The blank weighs ${format.mass(plan.flat.massKg)}: two people, one named to work the pedal and the other clear of the stroke, or a lifting aid.`)]
     : [];
   return [
     always("stop", "Guarding of the bending point in place, and tested before the first stroke."),
-    always("stop", "Tools secured top and bottom before the ram moves."),
+    always("stop", "Tools undamaged, clean and secured top and bottom before the ram moves."),
     always("stop", "Hands clear of the punch, the die and the back gauge; never between part and gauge."),
     always("caution", "The sheet whips up in front as it bends: stand clear, support it from below with open hands."),
-    always("caution", `Highest force ${format.force(force)} of the machine's ${format.force(machine.maxForce)}. Tool ratings: ${[...new Set(ratings)].join("; ") || `${tools.length} tools`}.`),
+    always("caution", "Edges cut: gloves for handling, safety shoes, eyes protected."),
+    always("caution", `Highest force ${format.force(force)} of the machine's ${format.force(machine.maxForce)}: set force and mode of control for this job. Tool ratings: ${[...new Set(ratings)].join("; ") || `${tools.length} tools`}.`),
     ...lift,
     ...plan.cautions.map((caution): SheetCaution => ({
       level: "caution",
