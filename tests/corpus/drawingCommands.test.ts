@@ -67,7 +67,7 @@ describe("drawings on the command line", () => {
     [["import", "plate.dxf", "--thickness", "2", "--bend-layers", "up=NONE"], 'no lines on a layer "NONE"'],
     [["import", "plate.dxf", "--thickness", "2", "--single-lines", "left"], "--single-lines"],
     [["import", "plate.dxf", "--thickness", "2", "--material", "oak"], "material"],
-    [["import", "open.dxf", "--thickness", "2"], "no closed contour was found: LINE of line"],
+    [["import", "open.dxf", "--thickness", "2"], "no closed contour was found: LINE on line"],
     [["import", "cut.dxf", "--thickness", "2"], "cut.dxf: "],
     [["import", "narrow.dxf", "--thickness", "2"], "flat.bends[0].line"],
     [["draw", "hat.json"], "--out: name the file"],

@@ -54,7 +54,7 @@ describe("the folded part as GLB", () => {
     const report = await validator.validateBytes(file);
     expect([report.issues.numErrors, report.issues.numWarnings]).toEqual([0, 0]);
     const root = (await new WebIO().readBinary(file)).getRoot();
-    expect(root.listNodes().map((node) => node.getName()).sort()).toEqual([name, ...part.faces.map(({ id }) => id), ...part.bends.map(({ id }) => id)].sort());
+    expect(root.listNodes().map((node) => node.getName()).sort()).toEqual([name, ...part.faces.map(({ id }) => id), ...part.bends.map(({ id }) => `${id}, bend`)].sort());
     expect(root.listMaterials().map((material) => material.getName())).toEqual(["S235", "S235, bend"]);
     let volume = 0;
     for (const mesh of root.listMeshes()) {

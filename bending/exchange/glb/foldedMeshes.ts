@@ -47,7 +47,7 @@ function bendMesh(part: PartModel, index: number, frames: ReturnType<typeof fold
   const cuts = Array.from({ length: count - 1 }, (_, i) => (bend.allowance * (i + 1)) / count);
   const slices = count === 1 ? regions : sliced(regions, [-1, ...cuts, bend.allowance + 1], origin, along, outward);
   const onCut = (a: FlatPoint, b: FlatPoint) => cuts.some((cut) => Math.abs(across(a) - cut) < ON_CUT_MM && Math.abs(across(b) - cut) < ON_CUT_MM);
-  return { name: bend.id, kind: "bend", ...plateMesh(slices, part.thickness, fold, onCut) };
+  return { name: `${bend.id}, bend`, kind: "bend", ...plateMesh(slices, part.thickness, fold, onCut) };
 }
 
 /** The regions cut across into bands between neighbouring values of `at`. */

@@ -30,6 +30,7 @@ export function pathName(path: string, draft: PartDraft): string {
   if (flange !== null) return `Flange ${draft.flanges[Number(flange[1])]?.id ?? flange[1] ?? ""}${flange[2] === undefined ? "" : `, ${ownName(flange[2])}`}`;
   const line = /^flat\.bends\[(\d+)\](?:\.(\w+))?/.exec(path);
   if (line !== null) return `Bend ${draft.flat?.bends[Number(line[1])]?.id ?? line[1] ?? ""}${line[2] === undefined ? "" : `, ${names[line[2]] ?? line[2]}`}`;
+  if (path.startsWith("flat.")) { const own = ownName(path.slice(5)); return `${own[0]?.toUpperCase() ?? ""}${own.slice(1)}`; }
   if (path === "profile.width") return "Width";
   if (path.startsWith("base.")) return `Base, ${ownName(path.slice(5))}`;
   const name = names[path];

@@ -94,12 +94,12 @@ export function ReadDrawing({ file, materials, kicker, list, facts, found, form,
           <ImportProblems draft={draft} found={found} problems={problems} materials={materials} unitOpen={tried && !form.unitSaid} update={update} />
         </div>
         <div className="grid grid-cols-1 gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,1fr)_minmax(0,38rem)]">
-          <ReadSheet draft={draft} facts={facts} found={found} form={form} preview={preview} selected={selected} onSelect={setSelected} place={place} onPlace={setPlace} update={update} />
+          <ReadSheet draft={draft} facts={facts} found={found} form={form} preview={preview} selected={selected} onSelect={setSelected} place={place} onPlace={setPlace} />
           <div className="space-y-8">
             <DrawingSettings facts={facts} found={found} form={form} onForm={onForm} />
             <Panel title="Bend lines" aside="the selected one stands out in the drawing"><BendLineTable selected={selected} onSelect={setSelected} /></Panel>
-            <Panel title="Name"><NameFields isNew /></Panel>
             <Panel title="Material and measures" aside={form.thicknessFrom === null ? undefined : `thickness ${form.thicknessFrom}; check it`}><CommonFields materials={materials} /></Panel>
+            <Panel title="Name"><NameFields isNew /></Panel>
           </div>
         </div>
       </form>

@@ -23,11 +23,10 @@ interface ReadSheetProps {
   readonly onSelect: (index: number) => void;
   readonly place: Vec2 | null;
   readonly onPlace: (place: Vec2) => void;
-  readonly update: (change: (old: PartDraft) => PartDraft) => void;
 }
 
 /** The drawing, what was mended in it, and the part that comes of it. */
-export function ReadSheet({ draft, facts, found, form, preview, selected, onSelect, place, onPlace, update }: ReadSheetProps) {
+export function ReadSheet({ draft, facts, found, form, preview, selected, onSelect, place, onPlace }: ReadSheetProps) {
   const [view, setView] = useState<"part" | "whole">("part");
   const { shown, model } = preview;
   const bends = (draft.flat?.bends ?? []).flatMap((entry, i) => { const row = draft.flatBends[i]; return row === undefined ? [] : [{ entry, row }]; });
@@ -41,7 +40,7 @@ export function ReadSheet({ draft, facts, found, form, preview, selected, onSele
       {shown === null || draft.flat === null ? null : (
         <>
           <FlatFacts part={shown.part} flat={shown.flat} units={shown.document.units} stale={model === null} />
-          <PartFindings model={shown} editing={{ draft, update }}>{(marks) => <PartDrawings {...marks} part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={model === null} />}</PartFindings>
+          <PartFindings model={shown}>{(marks) => <PartDrawings {...marks} part={shown.part} flat={shown.flat} units={shown.document.units} dimension={shown.document.dimension ?? "outside"} stale={model === null} />}</PartFindings>
         </>
       )}
     </div>

@@ -70,7 +70,7 @@ const pointOf = (loop: Loop): Vec2 => { const [x, y] = loop.vertices[0] ?? [0, 0
 function leftover(piece: Piece, shapes: readonly PlacedShape[], why: string): Leftover {
   const shape = shapes[piece.shape];
   const middle = pieceMiddle(piece);
-  return { what: `${shape?.source ?? "a line"} of line ${shape?.line ?? 0} of the file at ${placeText(middle)} ${why}`, at: middle, path: [piece.from, ...arcToChords(piece.from, piece.to, piece.bulge, 0.05)] };
+  return { what: `${shape?.source ?? "a line"} on line ${shape?.line ?? 0} of the file, at ${placeText(middle)}, ${why}`, at: middle, path: [piece.from, ...arcToChords(piece.from, piece.to, piece.bulge, 0.05)] };
 }
 
 const loopLeftover = (loop: Loop, what: string): Leftover => ({ what: `${what} at ${placeText(pointOf(loop))}`, at: pointOf(loop), path: [...chordsOf(loop), pointOf(loop)] });
