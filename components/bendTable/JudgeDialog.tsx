@@ -11,6 +11,7 @@ import type { TrialView } from "@/lib/schemas/bendTableViews";
 interface JudgeDialogProps {
   readonly trial: TrialView;
   readonly to: "excluded" | "withdrawn";
+  readonly onDone: () => void;
   readonly onClose: () => void;
 }
 
@@ -20,7 +21,7 @@ const words = {
 } as const;
 
 /** Asks why, and excludes a trial from its value or withdraws it. */
-export function JudgeDialog({ trial, to, onClose }: JudgeDialogProps) {
+export function JudgeDialog({ trial, to, onDone, onClose }: JudgeDialogProps) {
   const toast = useToast();
   const judge = useJudgeTrial();
   const [reason, setReason] = useState("");
@@ -31,7 +32,7 @@ export function JudgeDialog({ trial, to, onClose }: JudgeDialogProps) {
     event.preventDefault();
     setTried(true);
     if (reason.trim() === "" || reason.trim().length > 500) { document.getElementById("judge-reason")?.focus(); return; }
-    judge.mutate({ id: trial.id, state: to, reason: reason.trim() }, { onSuccess: () => { toast("good", `${trial.number} ${say.done}`, reason.trim()); onClose(); } });
+    judge.mutate({ id: trial.id, state: to, reason: reason.trim() }, { onSuccess: () => { toast("good", `${trial.number} ${say.done}`, reason.trim()); onDone(); onClose(); } });
   };
   return (
     <DialogBox open onOpenChange={onClose} title={`${say.title} ${trial.number}`} description={say.why}

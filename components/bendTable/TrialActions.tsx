@@ -1,5 +1,5 @@
 "use client";
-import { useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { Button } from "@/components/ui/Button";
 import { useToast } from "@/components/ui/ToastProvider";
 import { useJudgeTrial } from "@/lib/queries/bendTable";
@@ -11,18 +11,26 @@ export function TrialActions({ trial }: { readonly trial: TrialView }) {
   const toast = useToast();
   const judge = useJudgeTrial();
   const [asking, setAsking] = useState<"excluded" | "withdrawn" | null>(null);
+  const box = useRef<HTMLDivElement>(null);
+  const acted = useRef(false);
+  // The button that was pressed is gone with the old state: the focus goes to the one in its place.
+  useEffect(() => {
+    if (!acted.current) return;
+    acted.current = false;
+    box.current?.querySelector("button")?.focus();
+  }, [trial.state]);
   if (trial.state === "withdrawn") return null;
   const bringBack = () => judge.mutate({ id: trial.id, state: "counted" }, {
-    onSuccess: () => toast("good", `${trial.number} counts again`),
+    onSuccess: () => { acted.current = true; toast("good", `${trial.number} counts again`); },
     onError: (error) => toast("wrong", `${trial.number} was not brought back`, error.message),
   });
   return (
-    <div className="flex justify-end gap-1">
+    <div ref={box} className="flex justify-end gap-1">
       {trial.state === "excluded"
         ? <Button look="plain" size="small" busy={judge.isPending} aria-label={`Bring back ${trial.number}`} onClick={bringBack}>Bring back</Button>
         : <Button look="plain" size="small" aria-label={`Exclude ${trial.number}`} onClick={() => setAsking("excluded")}>Exclude</Button>}
       <Button look="quiet" size="small" aria-label={`Withdraw ${trial.number}`} onClick={() => setAsking("withdrawn")}>Withdraw</Button>
-      {asking === null ? null : <JudgeDialog trial={trial} to={asking} onClose={() => setAsking(null)} />}
+      {asking === null ? null : <JudgeDialog trial={trial} to={asking} onDone={() => { acted.current = true; }} onClose={() => setAsking(null)} />}
     </div>
   );
 }

@@ -39,7 +39,7 @@ export function bendTrialOf(entry: TrialEntry, units: LengthUnit, instruments: I
     ...(entry.nominal === null ? {} : { nominalThickness: entry.nominal }),
     thickness: entry.thickness, vOpening: entry.vOpening, punchRadius: entry.punchRadius, angle: entry.angle,
     blankLength: entry.blank, flanges: [entry.flangeA, entry.flangeB], insideRadius: entry.insideRadius,
-    instruments: { length: { ...length }, thickness, angle: { uncertainty: angle.uncertainty, resolution: angle.resolution }, radius },
+    instruments: { length, thickness, angle: { uncertainty: angle.uncertainty, resolution: angle.resolution }, radius },
     measuredOn: entry.measuredOn,
   };
 }

@@ -30,7 +30,7 @@ async function graveFaults(page: Page): Promise<readonly string[]> {
 test("the toolroom types three trials by keyboard alone; a mistake is named, a reload loses nothing, and all are saved at once", async ({ page }) => {
   await enterAs(page, "toolroom");
   await page.goto("/bend-table/new");
-  await page.getByLabel("Material, line 1").focus();
+  await expect(page.getByLabel("Material, line 1")).toBeFocused();
   // Material, batch, nominal, thickness, V, punch radius, angle, blank, flanges.
   await typed(page, ["DC04", "E-77", "", "1.48", "10", "0.8", "90", "100", "51.44", "51.44"]);
   await page.keyboard.press("Enter");
@@ -87,6 +87,7 @@ test("the engineer finds the trial that lies apart, excludes it with a reason an
   await dialog.getByRole("button", { name: "Exclude it" }).click();
   const excluded = page.getByRole("row").filter({ hasText: number });
   await expect(excluded).toContainText("stood askew at the gauge");
+  await expect(page.getByRole("button", { name: `Bring back ${number}` })).toBeFocused();
   await expect(page.getByText("One trial lies apart from the others")).toHaveCount(0);
   await expect(deduction).not.toHaveText(before);
 

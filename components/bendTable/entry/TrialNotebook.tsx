@@ -1,5 +1,5 @@
 "use client";
-import { useMemo, useState } from "react";
+import { useEffect, useEffectEvent, useMemo, useState } from "react";
 import type { MaterialFacts } from "@/bending/handbook/material";
 import { Button } from "@/components/ui/Button";
 import { Notice } from "@/components/ui/Notice";
@@ -85,6 +85,12 @@ export function TrialNotebook({ person, wanted, materials, instruments }: TrialN
     setUndone({ what: "The page was thrown away.", before: draft });
     startAgain({ ...draft, lines: [nextLine(newTrialId())] });
   };
+  const begin = useEffectEvent(() => {
+    const line = lines.at(-1);
+    const field = lineFields.find((one) => line?.[one] === "" && one !== "batch" && one !== "nominal") ?? "material";
+    document.getElementById(cellId(line?.id ?? "", field))?.focus();
+  });
+  useEffect(() => begin(), []);
   const count = lines.filter((line) => !readRow(line, context).blank).length;
   return (
     <>
