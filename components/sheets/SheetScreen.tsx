@@ -31,7 +31,7 @@ export function SheetScreen({ id, ...may }: SheetScreenProps) {
         <div className="mb-6"><Notice tone="caution" title={`The part has changed: revision ${data.latestRevision} is newer than this sheet’s revision ${data.revision}`}>Plan the new revision and release its sheet.</Notice></div>
       ) : null}
       {data.flatChange === null ? null : (
-        <div className="mb-6"><FlatChangeNotice change={data.flatChange} of="this sheet">The sheet stays as it was released. Plan the part again and release the new sheet; it takes the place of this one.</FlatChangeNotice></div>
+        <div className="mb-6"><FlatChangeNotice change={data.flatChange} of="this sheet">The sheet stays as it was released. <Link href={`/parts/${data.partId}`} className="text-accent-ink underline underline-offset-2">Plan {data.partNumber} again</Link> and release the new sheet; it takes the place of this one.</FlatChangeNotice></div>
       )}
       <div className="border border-rule-strong bg-white p-6 shadow-[0_2px_0_var(--rule)]"><SheetPaper view={data.view} /></div>
     </>
