@@ -23,15 +23,22 @@ export function planeByClipping(face: DrawnFace, ends: readonly CutWithEnds[]): 
 
 const ring = (points: readonly Vec2[]): [number, number][] => points.map(([x, y]) => [x, y]);
 
-function stripsOf({ cut, axes, start, end }: CutWithEnds): readonly (readonly Vec2[])[] {
-  const [from, to] = [start.at, end.at];
+function stripsOf({ cut, axes, start, end: last }: CutWithEnds): readonly (readonly Vec2[])[] {
+  const [from, to] = [start.at, last.at];
   if (to - from <= SAME_POINT_MM) return [];
-  const box = (a: number, b: number, depth: number): readonly Vec2[] => [[a, -OUTSIDE_MM], [b, -OUTSIDE_MM], [b, depth], [a, depth]];
-  // The strip laps into the notches, so that no wall without thickness is left between them.
-  const strips: (readonly Vec2[])[] = cut.depth > 0 ? [box(from - start.relief / 2, to + end.relief / 2, cut.depth)] : [];
+  const box = (a: number, b: number, depth: number, from = -OUTSIDE_MM): readonly Vec2[] => [[a, from], [b, from], [b, depth], [a, depth]];
+  const strips: (readonly Vec2[])[] = cut.depth > 0 ? [box(from, to, cut.depth)] : [];
   const depth = Math.max(cut.relief?.depth ?? 0, cut.depth);
-  const notch = (a: number, b: number) => (cut.relief?.kind === "round" ? roundNotch(a, b, depth, OUTSIDE_MM) : box(a, b, depth));
-  if (start.relief > 0) strips.push(notch(from - start.relief, from));
-  if (end.relief > 0) strips.push(notch(to, to + end.relief));
+  // Beyond a re-entrant corner the sheet goes on outside the edge's line.
+  const notch = (a: number, b: number, beyond: number) => (cut.relief?.kind === "round" ? roundNotch(a, b, depth, -beyond) : box(a, b, depth, beyond));
+  for (const [end, side] of [[start, -1], [last, 1]] as const) {
+    if (end.relief === 0) continue;
+    const beyond = end.reaches ? 0 : -OUTSIDE_MM;
+    const [a, b] = side < 0 ? [end.at - end.relief, end.at] : [end.at, end.at + end.relief];
+    strips.push(notch(a, b, beyond));
+    // Laps over strip and notch, so that no wall without thickness is left between them.
+    const lap = side < 0 ? [end.at - end.relief / 2, (from + to) / 2] as const : [(from + to) / 2, end.at + end.relief / 2] as const;
+    if (cut.depth > 0) strips.push(box(lap[0], lap[1], cut.depth, beyond));
+  }
   return strips.map((strip) => strip.map((p) => fromEdge(axes, p)));
 }
