@@ -107,7 +107,7 @@ test("a file of trials shows what each line would do, and writes what was confir
   const ends = "Calliper 0.01;Protractor 5 minutes;2025-11-03;Greta Sommer";
   await page.getByLabel("Lines of trials, the headings first").fill([heads, `;DC04;F-9;0,99;8;0,8;90;100;50,98;50,97;${ends}`, `;DC04;F-9;0,99;8;0,8;90;100;70;50,97;${ends}`, `${known?.number};1.4301;X;1;6;0,8;90;100;51;51;${ends}`].join("\n"));
   await page.getByRole("button", { name: "See what it would do" }).click();
-  await expect(page.getByText("Dry run, nothing written yet: 1 new, 2 refused")).toBeVisible();
+  await expect(page.getByText("Dry run, nothing written yet: 1 to be added, 2 refused")).toBeVisible();
   await expect(page.getByText("what was measured does not change")).toBeVisible();
   expect(await graveFaults(page)).toEqual([]);
   expect(await trials(page, "&q=F-9")).toEqual([]);
