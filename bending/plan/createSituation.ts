@@ -14,16 +14,18 @@ export interface SituationFacts {
   readonly machine: Machine;
   readonly units: LengthUnit;
   readonly pairs: readonly ToolPair[];
+  /** What the formula's air-bend force is multiplied by; 1 unless said. */
+  readonly airForceFactor?: number | undefined;
   /** Bends of each stroke in the order that a person asks for; absent when the planner is free. */
   readonly order?: readonly number[];
 }
 
 /** Joins part, machine and tools; the clearance asks for the angle that each stroke really goes to. */
-export function createSituation({ variant: { part, vOpening, everyBend }, machine, units, pairs, order }: SituationFacts): Situation {
+export function createSituation({ variant: { part, vOpening, everyBend }, machine, units, pairs, airForceFactor = 1, order }: SituationFacts): Situation {
   const moves = collectMoves(part);
   const runs = createRuns(machine.settings);
   const demanded = part.bends.map((bend) => springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle);
-  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, machine, runs, units, vOpening, everyBend }, bend, pair)));
+  const fits = part.bends.map((bend) => pairs.map((pair) => toolFit({ part, machine, runs, units, vOpening, everyBend, airForceFactor }, bend, pair)));
   const useful = pairs.filter((_, index) => fits.some((ofBend) => ofBend[index]?.ok));
   const kept = new Set(useful.map(({ index }) => index));
   const next = nextMask(order);

@@ -21,6 +21,8 @@ export interface PlanRequest {
   readonly tools: readonly Tool[];
   readonly machine: Machine;
   readonly batch: number;
+  /** What the formula's air-bend force is multiplied by, from the shop's own experience; 1 unless said. */
+  readonly airForceFactor?: number;
   /** How many other plans to give beside the best. */
   readonly alternatives?: number;
   readonly shouldStop?: () => boolean;

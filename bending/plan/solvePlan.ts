@@ -56,7 +56,7 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
     const found = candidatePairs(request.tools, request.machine, variant.part.thickness, variant.wantedV, request.document.units);
     toolReasons.push(...(found.pairs.length === 0 ? found.reasons : []));
     if (found.pairs.length === 0) continue;
-    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, ...(order ? { order } : {}) });
+    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, airForceFactor: request.airForceFactor, ...(order ? { order } : {}) });
     if (situation.pairs.length === 0) {
       const reasons = explain(situation, createStepChecks(situation), []);
       toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));

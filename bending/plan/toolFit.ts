@@ -1,5 +1,5 @@
 import { MEANT_CONTACT_MM } from "../core/tolerance";
-import { mm, toDeg, type LengthUnit } from "../core/units";
+import { kiloNewtonPerMetre, mm, toDeg, type LengthUnit } from "../core/units";
 import { airBendForce } from "../handbook/airBendForce";
 import { minimumFlange } from "../handbook/minimumFlange";
 import { naturalRadius } from "../handbook/naturalRadius";
@@ -18,6 +18,8 @@ const WISHED_RATIO = 1.5;
 const SAME_ANGLE_DEG = 0.05;
 
 export interface FitQuestion {
+  /** What the formula's air-bend force is multiplied by. */
+  readonly airForceFactor: number;
   readonly part: PartModel;
   readonly machine: Machine;
   readonly runs: RunsOf;
@@ -32,7 +34,7 @@ export interface FitQuestion {
 export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): ToolFit {
   const { part } = question;
   const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
-  const force = airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening);
+  const force = kiloNewtonPerMetre(airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening) * question.airForceFactor);
   const problem = bedProblem(question, bend) ?? radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
     ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
   if (problem) return { ok: false, problem };

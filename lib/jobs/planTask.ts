@@ -13,6 +13,8 @@ export interface PlanTask {
   readonly tools: readonly Tool[];
   readonly machine: Machine;
   readonly batch: number;
+  /** The shop's own; absent: the formula's force as it is. */
+  readonly airForceFactor?: number;
   readonly alternatives: number;
   /** When the search stops with the best so far. */
   readonly limitMs: number;

@@ -1,5 +1,6 @@
 import type { z } from "zod";
 import { loadValues } from "../bendTable/loadValues";
+import { getShopSettings } from "../settings/getShopSettings";
 import { fail, ok, type Result } from "@/bending/core/result";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import type { Connection } from "@/db/connection";
@@ -38,6 +39,7 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
   if (!material) return refuse("partId", `The material ${document.material} of the part is not known to the shop.`);
   const table = await loadValues(db, document.material);
   const tools = await findToolsInService(db);
+  const { forceFactors } = await getShopSettings();
   if (tools.length === 0) return fail({ kind: "conflict", message: "No tool has a piece in service, so nothing can be planned. The toolroom enters tools." });
   return ok({
     partId: found.part.id,
@@ -46,7 +48,7 @@ export async function planInputs(db: Connection, input: z.output<typeof startPla
     machineDocument: row.document,
     materialVersionId: material.version_id,
     subject: `${found.part.number} rev ${found.revision.revision} on ${row.name}`,
-    task: { document, material: material.facts, ...(table.cells.length > 0 ? { shopTable: table } : {}), tools, machine: machine.value, batch: input.batch, alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
+    task: { document, material: material.facts, ...(table.cells.length > 0 ? { shopTable: table } : {}), tools, machine: machine.value, batch: input.batch, ...(forceFactors.air === 1 ? {} : { airForceFactor: forceFactors.air }), alternatives: ALTERNATIVES, limitMs: SEARCH_LIMIT_MS },
   });
 }
 
