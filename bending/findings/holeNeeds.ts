@@ -1,4 +1,5 @@
 import { mm, type Mm } from "../core/units";
+import { SAME_POINT_MM } from "../core/tolerance";
 import type { Vec2 } from "../geometry/vec2";
 import { holeToBend, type PiercedFeature } from "../handbook/holeToBend";
 import { bendDirections } from "../part/bendDirections";
@@ -30,5 +31,5 @@ function featureOf({ outline, entry }: DrawnHole, bend: Bend): PiercedFeature {
     return Math.max(...values) - Math.min(...values);
   };
   const length = extent(along);
-  return length > extent(outward) ? { kind: "slot", length: mm(length) } : { kind: "round" };
+  return length > extent(outward) + SAME_POINT_MM ? { kind: "slot", length: mm(length) } : { kind: "round" };
 }
