@@ -36,6 +36,7 @@ const cases: readonly (readonly [string, FindingRule, PartDocument, PartDocument
   ["a slot of 40 along the bend: 2.5 t", "hole", tray([front()], [moved({ slot: [[80, 20], [117, 20]], width: 3 }, BEGINS + 1.5 + 4.9)]), tray([front()], [moved({ slot: [[80, 20], [117, 20]], width: 3 }, BEGINS + 1.5 + 5.01)]), shop({ dies: [] })],
   ["a hole across the bend line", "hole", tray([front()], [{ circle: [100, 3], diameter: 6 }]), tray([front()], [{ circle: [100, 40], diameter: 6 }]), v12],
   ["a notch that comes down to the bend", "cut-out", notched(BEGINS + 2.9), notched(BEGINS + 6.01), v12],
+  ["a notch in a flange, down to its own bend", "cut-out", tray([front({ outline: flangeNotch(BEGINS + 2.9) })].map(withoutLength)), tray([front({ outline: flangeNotch(BEGINS + 6.01) })].map(withoutLength)), v12],
   ["S235 of 2 mm bent to 2 across the grain: DIN 6935 has 2.5", "radius", profile([40, 40], [90], { insideRadius: 2 }), profile([40, 40], [90], { insideRadius: 2.5 }), null],
   ["the same along the grain: the next row, 3", "radius", profile([40, 40], [90], { insideRadius: 2.9, grain: "y" }), profile([40, 40], [90], { insideRadius: 3, grain: "y" }), null],
   ["grain that runs across the bend", "radius", profile([40, 40], [90], { insideRadius: 2.9, grain: 80 }), profile([40, 40], [90], { insideRadius: 2.9, grain: "x" }), null],
@@ -139,6 +140,16 @@ function hemmed(length: number): PartDocument {
 /** A base with a notch, 40 wide, from its back edge down to `y`. */
 function notched(y: number): PartDocument {
   return { ...common, base: { outline: [[0, 0], [200, 0], [200, 120], [120, 120], [120, y], [80, y], [80, 120], [0, 120]] }, flanges: [front()] } as PartDocument;
+}
+
+/** A flange 100 wide and 40 long in its own plane, with a notch 20 wide from its far edge down to `y`. */
+function flangeNotch(y: number): NonNullable<FlangeEntry["outline"]> {
+  return [[0, 0], [100, 0], [100, 40], [60, 40], [60, y], [40, y], [40, 40], [0, 40]];
+}
+
+function withoutLength(entry: FlangeEntry): FlangeEntry {
+  const { length, ...rest } = entry;
+  return length === undefined ? entry : rest;
 }
 
 function moved(hole: { readonly slot: readonly [readonly [number, number], readonly [number, number]]; readonly width: number }, y: number): DocumentHole {

@@ -64,3 +64,14 @@ test("applying a cure clears the finding, in whatever unit the part is drawn", {
   expect([...cured.keys()].sort()).toEqual(expect.arrayContaining(["angle", "flange", "hem-return", "hole", "narrow-v", "radius", "relief", "relief-width"]));
   expect(refused / (refused + built)).toBeLessThan(0.1);
 });
+
+test("a part is judged alike in millimetres and in inches", { timeout: 120_000 }, () => {
+  fc.assert(fc.property(arbitraryTroubled, ({ document, shop }) => {
+    const judged = (["mm", "in"] as const).map((units) => {
+      const said = documentInUnits(document, units);
+      const part = build(said);
+      return part && findingsOf({ part, document: said, shop }).list.map(({ key, severity, bends, faces }) => ({ key, severity, bends, faces }));
+    });
+    expect(judged[1]).toEqual(judged[0]);
+  }), { numRuns: 25, seed: 3 });
+});

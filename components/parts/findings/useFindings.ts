@@ -2,10 +2,11 @@
 import { startTransition, useEffect, useState } from "react";
 import { findingsOf, type Findings } from "@/bending/findings/findingsOf";
 import type { ShopLimits } from "@/bending/findings/shopLimits";
+import type { FlatPattern } from "@/bending/part/flatPattern";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PartModel } from "@/bending/part/partModel";
 
-export interface FindingsModel { readonly part: PartModel; readonly document: PartDocument }
+export interface FindingsModel { readonly part: PartModel; readonly document: PartDocument; readonly flat?: FlatPattern }
 
 export interface FindingsState extends Findings {
   /** The findings are those of the part as it was a moment ago. */
@@ -24,7 +25,7 @@ export function useFindings(model: FindingsModel | null, shop: ShopLimits | null
   useEffect(() => {
     if (model === null) return undefined;
     const timer = setTimeout(() => {
-      const findings = findingsOf({ part: model.part, document: model.document, shop });
+      const findings = findingsOf({ part: model.part, document: model.document, shop, flat: model.flat });
       startTransition(() => setJudged({ model, shop, findings }));
     }, model.part.bends.length > LARGE_BENDS ? REST_MS : 0);
     return () => clearTimeout(timer);
