@@ -102,6 +102,8 @@ export interface ValueDetail extends ValueItem {
   readonly outliersTold: boolean;
   readonly handbook: { readonly radiusMm: number; readonly deductionMm: number; readonly k: number; readonly source: string };
   readonly trials: readonly ValueTrial[];
+  /** The newest plan whose flat stands on this value. */
+  readonly lastUsed: { readonly at: string; readonly partId: string; readonly partNumber: string } | null;
   /** Parts of this material and thickness. */
   readonly parts: readonly { readonly id: string; readonly number: string; readonly name: string; readonly bends: number }[];
 }

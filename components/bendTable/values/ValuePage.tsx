@@ -9,6 +9,7 @@ import { StateMark } from "@/components/ui/StateMark";
 import { TextLink } from "@/components/ui/TextLink";
 import { formatFixed } from "@/lib/format/formatFixed";
 import { formatLength } from "@/lib/format/formatLength";
+import { formatMoment } from "@/lib/format/formatMoment";
 import { formatNumber } from "@/lib/format/formatNumber";
 import { useBendValue } from "@/lib/queries/bendTable";
 import type { ValueDetail } from "@/lib/schemas/bendTableViews";
@@ -65,6 +66,7 @@ function headFacts(value: ValueDetail) {
     { label: "Punch radius", value: num(formatLength(value.punchRadiusMm, "mm")) },
     { label: "Angles", value: num(`${formatNumber(value.anglesDeg[0], 1)}° to ${formatNumber(value.anglesDeg[1], 1)}°`) },
     { label: "Trials", value: num(value.excluded === 0 ? `${value.counted}` : `${value.counted} of ${value.counted + value.excluded}`) },
+    { label: "Last used", value: value.lastUsed === null ? "in no plan yet" : <>{formatMoment(value.lastUsed.at)}, <TextLink href={`/parts/${value.lastUsed.partId}`}>{value.lastUsed.partNumber}</TextLink></> },
     { label: "State", value: <StateMark tone={valueStateWords[value.state].tone}>{valueStateWords[value.state].label}</StateMark> },
   ];
 }
