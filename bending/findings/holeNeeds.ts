@@ -7,12 +7,6 @@ import type { Bend } from "../part/partModel";
 import type { FindingsContext } from "./context";
 import type { DrawnHole } from "./drawnHoles";
 
-/** No hole needs more than this to a bend's zone: the guides' longest slot, or half the V. */
-export function farthestNeed({ part, toolsOf }: FindingsContext, bend: Bend): number {
-  const { nearest, usual } = toolsOf(bend);
-  return Math.max(4 * part.thickness, (nearest?.vOpening ?? usual) / 2);
-}
-
 /** What a hole needs to the zone of a bend: by the guides, and to stay off the V's opening. */
 export function holeNeeds({ part, toolsOf }: FindingsContext, hole: DrawnHole, bend: Bend): { readonly guide: Mm; readonly opening: Mm; readonly vOpening: Mm; readonly source: string } {
   const feature = featureOf(hole, bend);

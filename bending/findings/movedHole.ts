@@ -8,7 +8,8 @@ import { boxesNear } from "./boxesNear";
 import type { FindingsContext } from "./context";
 import type { DrawnHole } from "./drawnHoles";
 import type { Cure } from "./finding";
-import { farthestNeed, holeNeeds } from "./holeNeeds";
+import { farthestNeed } from "./farthestNeed";
+import { holeNeeds } from "./holeNeeds";
 import { lengthCure } from "./lengthCure";
 import { holeGap } from "./holeGap";
 
