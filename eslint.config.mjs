@@ -30,8 +30,8 @@ const zones = [
     zone(`./lib/${folder}`, "./lib/services", "lib/services is for the server only.")),
   ...["./db", "./lib/services", "./lib/jobs", "./app"].map((from) =>
     zone("./components", from, "components/ imports ui, bending and lib/{queries,schemas,format,sheet} only.")),
-  ...["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable"].flatMap((feature) =>
-    ["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable"].filter((other) => other !== feature).map((other) =>
+  ...["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable", "materials", "settings"].flatMap((feature) =>
+    ["parts", "tooling", "plans", "sheets", "floor", "queue", "account", "calculator", "bendTable", "materials", "settings"].filter((other) => other !== feature).map((other) =>
       zone(`./components/${feature}`, `./components/${other}`, "A feature does not import a sibling feature."))),
   zone("./app", "./db", "app/ goes through lib/services."),
 ];
