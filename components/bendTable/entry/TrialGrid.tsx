@@ -9,6 +9,8 @@ import { TrialRow, type RowActions } from "./TrialRow";
 interface TrialGridProps {
   readonly lines: readonly TrialLine[];
   readonly context: RowContext;
+  /** Those that are offered while a material is typed. */
+  readonly offered: readonly Pick<MaterialFacts, "id" | "name">[];
   readonly refused: ReadonlyMap<string, LineProblems>;
   readonly tried: boolean;
   readonly actions: RowActions;
@@ -21,7 +23,7 @@ const widths: Readonly<Record<LineField, string>> = {
 const words = new Set<LineField>(["material", "batch", "note"]);
 
 /** The notebook: a line for each trial, what comes of it at the right. */
-export function TrialGrid({ lines, context, refused, tried, actions }: TrialGridProps) {
+export function TrialGrid({ lines, context, offered, refused, tried, actions }: TrialGridProps) {
   const { units, angles } = context.head;
   const unitOf = (field: LineField) => (words.has(field) ? "" : field === "angle" ? (angles === "turned" ? "° turned" : "° incl.") : units);
   const head = "px-1.5 pb-1 align-bottom text-sm leading-tight font-medium text-ink-soft";
@@ -45,12 +47,7 @@ export function TrialGrid({ lines, context, refused, tried, actions }: TrialGrid
           ))}
         </tbody>
       </table>
-      <Materials materials={context.materials} />
+      <datalist id="trial-materials">{offered.map(({ id, name }) => <option key={id} value={id}>{name}</option>)}</datalist>
     </div>
   );
 }
-
-/** Offered while a material is typed. */
-const Materials = ({ materials }: { readonly materials: readonly MaterialFacts[] }) => (
-  <datalist id="trial-materials">{materials.map(({ id, name }) => <option key={id} value={id}>{name}</option>)}</datalist>
-);

@@ -1,12 +1,12 @@
 "use client";
 import { useEffect, useEffectEvent, useMemo, useState } from "react";
-import type { MaterialFacts } from "@/bending/handbook/material";
 import { Button } from "@/components/ui/Button";
 import { Notice } from "@/components/ui/Notice";
 import { formatMoment } from "@/lib/format/formatMoment";
 import { ApiProblem } from "@/lib/queries/apiProblem";
 import { useAddTrials } from "@/lib/queries/bendTable";
 import type { AddedTrials, InstrumentView } from "@/lib/schemas/bendTableViews";
+import type { MaterialView } from "@/lib/schemas/materialViews";
 import { cellId } from "./cellId";
 import { EntryHead } from "./EntryHead";
 import { EntryNotes } from "./EntryNotes";
@@ -28,7 +28,7 @@ interface TrialNotebookProps {
   readonly person: Keeper;
   /** What the first line begins with, from a suggestion. */
   readonly wanted: Partial<TrialLine>;
-  readonly materials: readonly MaterialFacts[];
+  readonly materials: readonly MaterialView[];
   readonly instruments: readonly InstrumentView[];
 }
 
@@ -101,7 +101,7 @@ export function TrialNotebook({ person, wanted, materials, instruments }: TrialN
         {add.error === null ? null : <Notice tone="wrong" title="Nothing was saved; what you entered is still here" live>{add.error.message}</Notice>}
       </div>
       <EntryHead draft={draft} update={update} materials={materials} instruments={instruments} problems={tried ? wrongHead : {}} />
-      <TrialGrid lines={lines} context={context} refused={refused} tried={tried} actions={actions} />
+      <TrialGrid lines={lines} context={context} offered={materials.filter(({ withdrawn }) => withdrawn === null)} refused={refused} tried={tried} actions={actions} />
       {undone === null ? null : (
         <p role="status" className="mt-2 flex flex-wrap items-center gap-3">{undone.what}
           <Button look="plain" size="small" onClick={() => { update(() => undone.before); setUndone(null); }}>Bring it back</Button>
