@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { deg, mm, rad, toRad, MM_PER_INCH } from "../core/units";
+import { deg, mm, rad, toRad } from "../core/units";
 import { hemDeduction } from "./hemDeduction";
 import { hemSteps } from "./hemSteps";
 import { holeOverDie } from "./holeOverDie";
@@ -103,21 +103,5 @@ describe("holes and reliefs", () => {
   test("a relief clears the whole bend", () => {
     const relief = reliefSize(mm(2), mm(3));
     expect(relief).toEqual({ width: [2, 3], depth: [5, 5.5] });
-  });
-});
-
-describe("units", () => {
-  test("what is a length over lengths alone is the same in inches", () => {
-    const inch = (value: number) => mm(value / MM_PER_INCH);
-    fc.assert(fc.property(between(0.5, 6), between(0, 30), between(0, 3), between(0.1, 3), (t, r, gap, angle) => {
-      const pairs: readonly (readonly [number, number])[] = [
-        [hemDeduction(mm(t), mm(gap)), hemDeduction(inch(t), inch(gap))],
-        [holeToBend({ kind: "round" }, mm(t), mm(r)).least, holeToBend({ kind: "round" }, inch(t), inch(r)).least],
-        [sharpBendLimit(mm(t)), sharpBendLimit(inch(t))],
-        [radiusBySteps(rad(angle), mm(r), mm(t), 0.44).pitch, radiusBySteps(rad(angle), inch(r), inch(t), 0.44).pitch],
-        [reliefSize(mm(t), mm(r)).depth[0], reliefSize(inch(t), inch(r)).depth[0]],
-      ];
-      for (const [inMm, inInch] of pairs) expect(inInch * MM_PER_INCH).toBeCloseTo(inMm, 9);
-    }));
   });
 });

@@ -78,7 +78,7 @@ describe("what a V needs beside the bend line", () => {
       const edge = opening / 2 + off;
       fc.pre(Math.abs(off) > 1e-3 * opening);
       expect(holeOverDie(mm(edge), mm(opening))).toBe(edge < top);
-    }));
+    }), { numRuns: 25 });
   });
 
   test("a square hole is too near exactly when, folded to 90 degrees, its edge is nearer than 1.5 T + R to the inside of the other leg", () => {

@@ -71,6 +71,7 @@ describe("force with t² L / V", () => {
       law(force(rm, t, scale * v), 1 / scale, plus(t, scale * v), base);
       law(force(rm, scale * t, scale * v), scale, 1, base);
       law(force(mpa(scale * rm), t, v), scale, 1, base);
+      expect(airBendForces(rm, t, mm(v)).spread).toBeLessThan(0.36);
     }));
   });
 
