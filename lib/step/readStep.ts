@@ -9,7 +9,7 @@ export function readStep({ kernel, ranOut }: LoadedKernel, bytes: Uint8Array, bo
   const read = readBody(kernel, bytes, body);
   if (!read.ok) {
     const { kind, message, bodies } = read.error;
-    if (kind === "unreadable" && ranOut()) return fail(TOO_MUCH);
+    if (ranOut()) return fail(TOO_MUCH);
     return kind === "several-bodies" && bodies ? ok({ kind: "choose", message, bodies }) : read;
   }
   const part = recogniseSheet(read.value.solid);
