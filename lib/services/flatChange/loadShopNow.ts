@@ -25,7 +25,9 @@ export async function loadShopNow(db: Connection, materialIds: readonly string[]
   const lookup: MaterialLookup = (id) => materials.get(id)?.facts;
   const own = trials.filter((trial) => materials.has(trial.material_id));
   const filed = (some: readonly TrialRow[]) => shopTable(some.map(bendTrialFromRow), lookup);
+  const everyTrial = filed(own);
+  const standing = own.filter((trial) => trial.withdrawn_at === null);
   const byId = new Map(own.map((trial) => [trial.id, trial]));
-  const trialsOf = new Map(filed(own).cells.map((cell) => [cell.key, cell.trials.flatMap(({ id }) => byId.get(id) ?? [])]));
-  return { materials, lookup, table: filed(own.filter((trial) => trial.withdrawn_at === null)), trialsOf };
+  const trialsOf = new Map(everyTrial.cells.map((cell) => [cell.key, cell.trials.flatMap(({ id }) => byId.get(id) ?? [])]));
+  return { materials, lookup, table: standing.length === own.length ? everyTrial : filed(standing), trialsOf };
 }
