@@ -1,6 +1,6 @@
 import { materialFields, type MaterialFacts, type MaterialField, type Origin } from "./material";
 import { materialRule } from "./materialRule";
-import { materialById } from "./materials";
+import { DIN_6935_RADII, materialById } from "./materials";
 import { steelRadiusTable } from "./steelRadiusTable";
 
 type Later = "designation" | "allowance" | "minimumRadii" | "springbackRow" | "origins";
@@ -22,7 +22,8 @@ export function completeMaterial(recorded: RecordedMaterial): MaterialFacts {
     minimumRadii: facts.minimumRadii === undefined ? (group === "steel" ? steelRadiusTable(facts.tensile[0]) : null) : facts.minimumRadii,
     springbackRow: facts.springbackRow ?? null,
   };
-  return { ...whole, origins: facts.origins ?? originsOf(whole, { kind: "memory", text: source ?? "not recorded" }) };
+  const filledIn = facts.minimumRadii === undefined && whole.minimumRadii !== null ? { minimumRadii: DIN_6935_RADII } : {};
+  return { ...whole, origins: facts.origins ?? { ...originsOf(whole, { kind: "memory", text: source ?? "not recorded" }), ...filledIn } };
 }
 
 function originsOf(facts: Omit<MaterialFacts, "origins">, other: Origin): MaterialFacts["origins"] {

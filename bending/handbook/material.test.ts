@@ -5,6 +5,7 @@ import { builtInMaterials, materialById } from "./materials";
 import { minimumRadius } from "./minimumRadius";
 import { resolveAllowance } from "./resolveAllowance";
 import { springback } from "./springback";
+import { steelRadiusTable } from "./steelRadiusTable";
 import { springbackTable, type SpringbackMaterial } from "./springbackFactor";
 
 /** As a material was recorded before it had a rule, radii and origins of its own. */
@@ -22,10 +23,12 @@ it("gives an old record the numbers of its days", () => {
   for (const { id, group, minimumRadii, allowance, springbackRow } of builtInMaterials) {
     const whole = completeMaterial(old(id));
     expect([whole.allowance, whole.springbackRow]).toEqual([allowance, springbackRow]);
-    expect(whole.minimumRadii).toEqual(group === "steel" ? minimumRadii : null);
+    // In those days S355 went by its 470 MPa.
+    expect(whole.minimumRadii).toEqual(group !== "steel" ? null : id === "S355" ? steelRadiusTable(mpa(470)) : minimumRadii);
     expect(whole.origins.tensile).toEqual(materialById(id)?.origins.tensile);
     expect(completeMaterial({ ...old(id), yield: mpa(77) }).origins.yield).toEqual({ kind: "memory", text: "a table" });
   }
+  expect(minimumRadius(completeMaterial(old("S355")), mm(2), rad(Math.PI / 2))).toEqual({ radius: 3, source: "DIN 6935 (1975-10), across the rolling direction" });
   expect(minimumRadius(completeMaterial(old("S235")), mm(1.5), rad(Math.PI / 2))).toEqual({ radius: 1.6, source: "DIN 6935 (1975-10), across the rolling direction" });
 });
 

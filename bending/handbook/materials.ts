@@ -14,7 +14,7 @@ interface Row {
   readonly straight: MaterialFacts["straightLengthGroup"];
   readonly radiusPerV?: number;
   readonly radiusPerThickness?: number;
-  readonly minimumRadii?: MinimumRadiusTable;
+  readonly minimumRadii?: MinimumRadiusTable | undefined;
   /** Of both strengths. */
   readonly strengths: Origin;
   readonly origins?: Partial<Record<MaterialField, Origin>>;
@@ -46,6 +46,9 @@ const EN_485_5052: MinimumRadiusTable = {
   rows: ([[0.5, 0.5], [1.5, 1], [6, 1.5], [12.5, 2.5]] as const).map(([upTo, across]) => ({ upTo: mm(upTo), across, along: null })),
 };
 
+/** Sheet under 3 mm has at least 510 MPa (EN 10025-2 table 7), which is DIN 6935's strongest column; thicker sheet is kept in it too, the cautious way. */
+const S355_RADII = steelRadiusTable(mpa(510)) ?? undefined;
+
 const table7 = published("EN 10025-2 table 7, up to 16 mm");
 
 const ROWS: readonly (readonly [MaterialGroup, readonly Row[]])[] = [
@@ -54,7 +57,8 @@ const ROWS: readonly (readonly [MaterialGroup, readonly Row[]])[] = [
     { id: "DC04", name: "Cold-rolled drawing steel DC04", standard: "EN 10130", tensile: [270, 370], yield: 240, straight: "medium", strengths: published("EN 10139; yield is the standard's maximum") },
     { id: "S235", name: "Structural steel S235", designation: "S235JR", standard: "EN 10025-2", tensile: [360, 510], yield: 235, straight: "medium", strengths: table7 },
     { id: "S275", name: "Structural steel S275", designation: "S275JR", standard: "EN 10025-2", tensile: [410, 560], yield: 275, straight: "medium", strengths: table7 },
-    { id: "S355", name: "Structural steel S355", designation: "S355JR", standard: "EN 10025-2", tensile: [470, 630], yield: 355, straight: "hard", radiusPerV: 0.17, strengths: table7, origins: { naturalRadiusRatio: memory("upper end of 15 to 17 % of the V (trade magazine), from memory") } },
+    { id: "S355", name: "Structural steel S355", designation: "S355JR", standard: "EN 10025-2", tensile: [470, 630], yield: 355, straight: "hard", radiusPerV: 0.17, minimumRadii: S355_RADII, strengths: table7,
+      origins: { naturalRadiusRatio: memory("upper end of 15 to 17 % of the V (trade magazine), from memory"), minimumRadii: published("DIN 6935 (1975-10) for 510 MPa") } },
   ]],
   ["stainless", [
     { id: "1.4301", name: "Stainless steel 1.4301 (304)", designation: "X5CrNi18-10", standard: "EN 10088-2", tensile: [540, 750], yield: 230, straight: "hard", strengths: memory("EN 10088-2 cold strip, from memory") },
@@ -77,7 +81,8 @@ const ROWS: readonly (readonly [MaterialGroup, readonly Row[]])[] = [
   ]],
 ];
 
-const DIN_6935_RADII = published("DIN 6935 (1975-10)");
+/** Of radii that are DIN 6935's for a steel's lowest tensile strength. */
+export const DIN_6935_RADII = published("DIN 6935 (1975-10)");
 
 /** Values of the standards named; each says whether it was seen in print or is from memory. */
 export const builtInMaterials: readonly MaterialFacts[] = ROWS.flatMap(([group, rows]) => rows.map((row) => builtIn(group, row)));

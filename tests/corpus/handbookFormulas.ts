@@ -53,6 +53,7 @@ export const handbookFormulas: CorpusFormulas = {
     const steel = { ...material("S235"), minimumRadii: steelRadiusTable(mpa(Number(i.tensile))) };
     return minimumRadius(steel, length(i.thickness), angle(i.angle), i.alongGrain === true)?.radius ?? NaN;
   },
+  materialMinimumRadius: (i) => minimumRadius(material(String(i.material)), length(i.thickness), angle(90))?.radius ?? NaN,
   materialValue: (i) => materialToCsv(material(String(i.material)))[i.value as "tensileLow" | "tensileHigh" | "yield" | "modulus" | "density"],
   gaugeThickness: (i) => (gaugeThickness(Number(i.gauge), i.system as GaugeSystem) ?? NaN) / 25.4,
 };
