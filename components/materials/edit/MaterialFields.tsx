@@ -17,17 +17,18 @@ import { RadiiEditor } from "./RadiiEditor";
 
 interface MaterialFieldsProps {
   readonly draft: MaterialDraft;
-  /** The version that is changed; null: a new material. */
-  readonly base: MaterialDraft | null;
+  /** What the typing began with: a value that is another now is no longer from where it was. */
+  readonly compared: MaterialDraft;
+  readonly isNew: boolean;
   readonly onChange: (draft: MaterialDraft) => void;
   readonly problems: readonly FieldProblem[];
 }
 
 /** Every value of a material beside where it is from. */
-export function MaterialFields({ draft, base, onChange, problems }: MaterialFieldsProps) {
+export function MaterialFields({ draft, compared, isNew, onChange, problems }: MaterialFieldsProps) {
   const at = (path: string) => { const found = problems.find((problem) => problem.path === path); return found === undefined ? undefined : asSentence(found.message); };
   const tell = (change: Partial<MaterialDraft>) => onChange({ ...draft, ...change });
-  const value = (field: MaterialField, change: Partial<MaterialDraft>) => onChange(changeDraft(draft, field, change, base));
+  const value = (field: MaterialField, change: Partial<MaterialDraft>) => onChange(changeDraft(draft, field, change, compared));
   const number = (field: MaterialField, key: "tensileLow" | "tensileHigh" | "yield" | "modulus" | "density" | "naturalRadiusRatio" | "defaultRadiusPerThickness" | "k", label: string, unit?: string, path: string = field) => (
     <NumberInput id={`material-${path}`} label={label} labelHidden={label === fieldWords[field]} value={draft[key]} error={at(path)} onChange={(event) => value(field, { [key]: event.target.value })} {...(unit === undefined ? {} : { unit })} />
   );
@@ -42,7 +43,7 @@ export function MaterialFields({ draft, base, onChange, problems }: MaterialFiel
     <div className="space-y-8">
       <Panel title="Name">
         <div className="grid grid-cols-1 gap-4 sm:grid-cols-2 lg:grid-cols-4">
-          <TextInput id="material-id" label="Short name" value={draft.id} disabled={base !== null} maxLength={60} error={at("id")} hint={base === null ? "As parts are made of it, e.g. S235" : "Stays: parts are made of it"} onChange={(event) => tell({ id: event.target.value })} />
+          <TextInput id="material-id" label="Short name" value={draft.id} disabled={!isNew} maxLength={60} error={at("id")} hint={isNew ? "As parts are made of it, e.g. S235" : "Stays: parts are made of it"} onChange={(event) => tell({ id: event.target.value })} />
           <TextInput id="material-name" label="Name" value={draft.name} maxLength={120} error={at("name")} onChange={(event) => tell({ name: event.target.value })} />
           <TextInput id="material-designation" label="Designation in full" value={draft.designation} maxLength={120} error={at("designation")} hint="As the standard writes it, e.g. S235JR" onChange={(event) => tell({ designation: event.target.value })} />
           <TextInput id="material-standard" label="Standard" value={draft.standard} maxLength={120} error={at("standard")} hint="E.g. EN 10025-2" onChange={(event) => tell({ standard: event.target.value })} />

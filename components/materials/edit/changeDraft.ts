@@ -8,16 +8,15 @@ export const draftKeys: Readonly<Record<MaterialField, readonly (keyof MaterialD
 };
 
 /**
- * Changes one value of a draft. A changed value is no longer from where the old one was: its source becomes the shop, to be
- * said; put back as it was, its source comes back too. Without a `base` (a new material) sources stay as typed.
+ * Changes one value of a draft. A value that is another than the draft `began` with is no longer from where that was: its source becomes
+ * the shop, to be said; put back as it was, its source comes back too. A source that was never said stays to be said.
  */
-export function changeDraft(draft: MaterialDraft, field: MaterialField, change: Partial<MaterialDraft>, base: MaterialDraft | null): MaterialDraft {
+export function changeDraft(draft: MaterialDraft, field: MaterialField, change: Partial<MaterialDraft>, began: MaterialDraft): MaterialDraft {
   const next = { ...draft, ...change };
-  if (base === null) return next;
-  const [origin, first] = [draft.origins[field], base.origins[field]];
-  const isBase = draftKeys[field].every((key) => JSON.stringify(next[key]) === JSON.stringify(base[key]));
+  const [origin, first] = [draft.origins[field], began.origins[field]];
+  if (first.text === "") return next;
+  const asItWas = draftKeys[field].every((key) => JSON.stringify(next[key]) === JSON.stringify(began[key]));
+  if (asItWas) return origin.text === "" ? { ...next, origins: { ...draft.origins, [field]: first } } : next;
   const untouched = origin.kind === first.kind && origin.text === first.text;
-  const blank = origin.text === "";
-  if (isBase) return blank ? { ...next, origins: { ...draft.origins, [field]: first } } : next;
   return untouched ? { ...next, origins: { ...draft.origins, [field]: { kind: "shop", text: "" } } } : next;
 }

@@ -21,6 +21,13 @@ it("a changed value is the shop's until its source is said; put back, it has its
   expect(changeDraft(said, "yield", { yield: "241" }, base).origins.yield.text).toBe("corrected table");
 });
 
+it("in a new material the sources of typed values stay to be said, those of standing choices go with the choice", () => {
+  const typed = changeDraft(emptyMaterialDraft, "yield", { yield: "240" }, emptyMaterialDraft);
+  expect(typed.origins.yield).toEqual(emptyMaterialDraft.origins.yield);
+  const chosen = changeDraft(typed, "allowance", { rule: "faa" }, emptyMaterialDraft);
+  expect([emptyMaterialDraft.origins.allowance.text, chosen.origins.allowance.text]).toEqual(["DIN 6935", ""]);
+});
+
 it("names every field that is empty or no number, with rows of radii", () => {
   const read = readMaterialDraft({ ...emptyMaterialDraft, radiiAs: "mm", radii: [{ upTo: "1", across: "wide", along: "" }] }, null);
   const paths = read.ok ? [] : read.error.map(({ path }) => path);

@@ -47,9 +47,18 @@ export function materialDraft(facts: MaterialFacts): MaterialDraft {
 
 const unsaid: Origin = { kind: "published", text: "" };
 
+/** Where the choices are from that stand in an empty form; what is typed has yet to say so. */
+const chosen: Partial<Record<MaterialField, Origin>> = {
+  straightLengthGroup: { kind: "memory", text: "Machinery's Handbook, straight lengths, from memory" },
+  defaultRadiusPerThickness: { kind: "memory", text: "one thickness, common practice, no source" },
+  allowance: { kind: "published", text: "DIN 6935" },
+  minimumRadii: { kind: "memory", text: "not looked up yet" },
+  springbackRow: { kind: "published", text: "elastic recovery (Gardiner 1957)" },
+};
+
 /** Nothing typed yet. */
 export const emptyMaterialDraft: MaterialDraft = {
   id: "", name: "", designation: "", standard: "", group: "steel", tensileLow: "", tensileHigh: "", yield: "", modulus: "", density: "", straightLengthGroup: "medium",
   naturalRadiusRatio: "", defaultRadiusPerThickness: "1", rule: "din6935", k: "", radiiAs: "none", radii: [], springbackRow: "none",
-  origins: Object.fromEntries(materialFields.map((field) => [field, unsaid])) as Record<MaterialField, Origin>,
+  origins: Object.fromEntries(materialFields.map((field) => [field, chosen[field] ?? unsaid])) as Record<MaterialField, Origin>,
 };
