@@ -66,8 +66,8 @@ export function useWithdrawInstrument() {
 
 export const importTrials = (input: CsvImportInput): Promise<CsvImportAnswer> => request<CsvImportAnswer>(`${root}/import`, { method: "POST", body: input });
 
-/** For whatever changes what the bend table says. */
+/** For whatever changes what the bend table says; parts, plans and sheets say when their flats would come out differently. */
 export function useRefreshBendTable() {
   const client = useQueryClient();
-  return () => client.invalidateQueries({ queryKey: ["bend table"] });
+  return () => Promise.all(["bend table", "parts", "plans", "sheets"].map((key) => client.invalidateQueries({ queryKey: [key] })));
 }

@@ -8,6 +8,7 @@ import { Select } from "@/components/ui/Select";
 import { TextLink } from "@/components/ui/TextLink";
 import { useMaterials } from "@/lib/queries/materials";
 import { usePart } from "@/lib/queries/parts";
+import { useShopTable } from "@/lib/queries/shopTable";
 import type { PartDetail } from "@/lib/schemas/views";
 import { partModelOf } from "../part/partModelOf";
 import { ChangeTable } from "./ChangeTable";
@@ -47,11 +48,12 @@ function Compare({ id, newest }: { readonly id: string; readonly newest: PartDet
 function Both({ id, from, to }: { readonly id: string; readonly from: number; readonly to: number }) {
   const [older, newer] = [usePart(id, from), usePart(id, to)];
   const materials = useMaterials();
+  const shops = [useShopTable(older.data?.document.material ?? ""), useShopTable(newer.data?.document.material ?? "")] as const;
   if (older.isPending || newer.isPending || materials.isPending) return <Loading what="both revisions" />;
   if (older.isError) return <LoadProblem what={`Revision ${from}`} error={older.error} onRetry={() => void older.refetch()} />;
   if (newer.isError) return <LoadProblem what={`Revision ${to}`} error={newer.error} onRetry={() => void newer.refetch()} />;
   const names = [`Revision ${from}`, `Revision ${to}`] as const;
-  const [was, is] = [partModelOf(older.data.document, materials.data ?? []), partModelOf(newer.data.document, materials.data ?? [])];
+  const [was, is] = [partModelOf(older.data.document, materials.data ?? [], shops[0].data), partModelOf(newer.data.document, materials.data ?? [], shops[1].data)];
   const { units } = newer.data.document;
   return (
     <div className="grid grid-cols-1 gap-x-10 gap-y-8 xl:grid-cols-[minmax(0,1fr)_minmax(0,44rem)]">
