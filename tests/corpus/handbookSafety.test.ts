@@ -1,7 +1,7 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
 import { describe, expect, test } from "vitest";
-import { HSE_GUIDE_KG, LOAD_CONSTANT_KG, materialById } from "@/bending";
+import { HSE_GUIDE_KG, LOAD_CONSTANT_KG } from "@/bending";
 import { buildSheetView } from "@/lib/sheet/buildSheetView";
 import { channelPlan } from "@/lib/sheet/fixtures/channelPlan";
 
@@ -53,9 +53,4 @@ test.each(cases)("[$mark] $form: $time s is $expected, as published", ({ form, t
   const { factor, upTo } = forms[form] ?? { factor: NaN };
   const exact = factor * time;
   expect(upTo === undefined ? exact : Math.ceil(exact / upTo) * upTo).toBeCloseTo(expected, 9);
-});
-
-test("published values that nothing answers are of materials that are not built in", () => {
-  const { values } = read<{ readonly values: readonly (Marked & { readonly id: string; readonly what: string; readonly source: string })[] }>("unanswered", "materials.json");
-  for (const { id, source } of values) expect([id, source !== "", materialById(id)]).toEqual([id, true, undefined]);
 });

@@ -1,9 +1,11 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { builtInMaterials, deg, mm, mpa, rad, toRad } from "@/bending";
+import { builtInMaterials, deg, kiloNewton, mm, mpa, rad, toRad } from "@/bending";
+import { airBendForce } from "@/bending/handbook/airBendForce";
 import { airBendForces } from "@/bending/handbook/airBendForces";
 import { bendAllowance } from "@/bending/handbook/bendAllowance";
 import { bendDeduction } from "@/bending/handbook/bendDeduction";
+import { bendingWork, WORK_FILL } from "@/bending/handbook/bendingWork";
 import type { OpeningBetweenTops } from "@/bending/handbook/dieOpening";
 import { faaAllowance } from "@/bending/handbook/faaAllowance";
 import { forceForms } from "@/bending/handbook/forceForms";
@@ -91,6 +93,19 @@ describe("force with t² L / V", () => {
     fc.assert(fc.property(fc.constantFrom(...forceForms.filter(({ operation }) => operation === "v-die")), tensile, thickness, between(5, 20), (form, rm, t, times) => {
       const hinge = (2 / Math.sqrt(3)) * rm * t * t / 4;
       expect(publishedForce(form, rm, t, mm(times * t))).toBeGreaterThan((4 * hinge) / (times * t));
+    }));
+  });
+
+  test("the work of a stroke to 90 degrees is that of a plastic hinge, within the fill of the force-travel diagram and the whole of it", () => {
+    fc.assert(fc.property(tensile, between(0.5, 8), between(6, 12), between(0.15, 0.18), between(0.04, 0.12), (rm, t, times, radiusPart, shoulderPart) => {
+      const opening = mm(t * times);
+      const right = toRad(deg(90));
+      const travel = punchTravel(right, mm(radiusPart * opening), mm(t), { measured: "between-tops", opening, shoulderRadius: mm(shoulderPart * opening) });
+      const perMetre = airBendForce(rm, mm(t), opening);
+      // Moment times angle for each metre, in joules: the moment at tensile strength in plane strain.
+      const hinge = ((2 / Math.sqrt(3)) * rm * t * t / 4) * right;
+      expect(hinge).toBeGreaterThan(bendingWork(kiloNewton(perMetre), travel, WORK_FILL[0]));
+      expect(hinge).toBeLessThan(bendingWork(kiloNewton(perMetre), travel, 1));
     }));
   });
 });
