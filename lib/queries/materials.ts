@@ -44,7 +44,8 @@ export function useImportMaterials() {
 /** Where the browser loads the table from. */
 export const materialsTablePath = (separator: "comma" | "semicolon") => `/api/materials-table?separator=${separator}`;
 
+/** Flats follow from materials: parts, plans and sheets say when theirs would come out differently. */
 function useRefreshMaterials() {
   const client = useQueryClient();
-  return () => client.invalidateQueries({ queryKey: ["materials"] });
+  return () => Promise.all(["materials", "parts", "plans", "sheets", "bend table"].map((key) => client.invalidateQueries({ queryKey: [key] })));
 }
