@@ -34,3 +34,6 @@ export const CURVE_FIT_MM = 0.01;
 
 /** mm. A flat that comes out as near as this to what it was is the same flat: half of the last digit that is printed. */
 export const FLAT_CHANGE_MM = 0.005;
+
+/** mm. A drawn cut without width is opened to this, so that the sheet has two sides there: about what a laser takes away. */
+export const DRAWN_SLIT_MM = 0.1;

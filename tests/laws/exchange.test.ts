@@ -62,6 +62,20 @@ describe("a part drawn as DXF and read again has the same flat", () => {
   test("in inches", () => expectSameFlat({ ...curved, units: "in", thickness: 0.08, insideRadius: 0.08, flat: { outline: [[0, 0], [5, 0], [5, 3], [0, 3]], bends: [{ id: "b1", line: [[2, 0], [2, 3]], angle: 90, direction: "up" }] } } as PartDocument));
 });
 
+test("a cut without width beside a bend comes back as a narrow one, and the part folds as before", () => {
+  const part = mustBuild({
+    format: "part/1", name: "tab", units: "mm", material: "S235", thickness: 1, insideRadius: 1,
+    base: { outline: [[0, 0], [120, 0], [120, 80], [0, 80]] }, flanges: [{ id: "tab", on: "base", edge: 0, length: 25, angle: 90, direction: "up", start: 30, end: 40 }],
+  });
+  const read = importDxf(writeDxf(flatDrawing(part), "mm"), { name: "back", material: "S235", thickness: 1 });
+  if (!read.ok) throw new Error(read.error);
+  expect(read.value.found.repairs.map(({ kind }) => kind)).toEqual(["slit", "slit"]);
+  const back = mustBuild(read.value.document);
+  expect(back.faces.map(({ id }) => id)).toEqual(["base", "tab"]);
+  expect(flatPattern(part).area - flatPattern(back).area).toBeGreaterThan(0.1);
+  expect(flatPattern(part).area - flatPattern(back).area).toBeLessThan(3);
+});
+
 /** Area of a closed polyline of [x, y, bulge] by the trapezoids and circular segments. */
 function areaOf(vertices: readonly { readonly x: number; readonly y: number; readonly bulge?: number | undefined }[]): number {
   return Math.abs(vertices.reduce((sum, p, i) => {

@@ -21,6 +21,11 @@ test.each([
   expect(decided.reasons.length).toBeGreaterThan(0);
 });
 
+test("a header that says inch over a plain plate of 200 without holes is doubted", () => {
+  const decided = opened({ header: [[9, "$INSUNITS"], [70, 1]], entities: rectangle(0, 0, 200, 100) }).units;
+  expect([decided.unit, decided.sure, decided.header]).toEqual(["mm", false, "in"]);
+});
+
 test("a word on the drawing tips what is open", () => {
   expect(units(null, null, 30, 1, ["ALL DIMENSIONS IN INCHES"]).unit).toBe("in");
   expect(units(null, null, 30, 1, ["All dimensions in mm"]).unit).toBe("mm");

@@ -1,5 +1,5 @@
 "use client";
-import { mmPerDrawingUnit, type DrawingUnit } from "@/bending/exchange/dxf/import/drawingUnit";
+import { drawingUnitName, mmPerDrawingUnit, type DrawingUnit } from "@/bending/exchange/dxf/import/drawingUnit";
 import { mmPer } from "@/bending/core/units";
 import { Button } from "@/components/ui/Button";
 import { Choice } from "@/components/ui/Choice";
@@ -41,9 +41,9 @@ export function DrawingSettings({ facts, found, form, onForm }: DrawingSettingsP
         <div id="drawing-unit" tabIndex={-1} className="space-y-3">
           <Choice<DrawingUnit> label="Unit of the drawing" labelHidden value={form.unit} onChange={say} options={Object.keys(mmPerDrawingUnit).flatMap((name) => unitNames.filter((unit) => unit === name)).map((unit) => ({ value: unit, label: unit === "in" ? "inch" : unit }))} />
           {form.unitSaid ? null : (
-            <Notice tone="caution" title={units.header === null ? "The file does not say its unit" : `The header says ${units.header}, the sizes say ${units.unit}`}>
+            <Notice tone="caution" title={units.header === null ? "The file does not say its unit" : `The header says ${drawingUnitName[units.header]}, the sizes say ${drawingUnitName[units.unit]}`}>
               <p>{units.reasons.slice(1).join(" ")}</p>
-              <Button look="plain" size="small" onClick={() => say(form.unit)}>It is in {form.unit}</Button>
+              <Button look="plain" size="small" onClick={() => say(form.unit)}>It is in {drawingUnitName[form.unit]}</Button>
             </Notice>
           )}
         </div>

@@ -7,6 +7,7 @@ import type { MaterialFacts } from "@/bending/handbook/material";
 import { Button } from "@/components/ui/Button";
 import { PageHeader } from "@/components/ui/PageHeader";
 import { Panel } from "@/components/ui/Panel";
+import { StateMark } from "@/components/ui/StateMark";
 import { useToast } from "@/components/ui/ToastProvider";
 import { useCreatePart } from "@/lib/queries/parts";
 import type { PartDraft } from "../draft/partDraft";
@@ -98,7 +99,7 @@ export function ReadDrawing({ file, materials, kicker, list, facts, found, form,
           <div className="space-y-8">
             <DrawingSettings facts={facts} found={found} form={form} onForm={onForm} />
             <Panel title="Bend lines" aside="the selected one stands out in the drawing"><BendLineTable selected={selected} onSelect={setSelected} /></Panel>
-            <Panel title="Material and measures" aside={form.thicknessFrom === null ? undefined : `thickness ${form.thicknessFrom}; check it`}><CommonFields materials={materials} /></Panel>
+            <Panel title="Material and measures" aside={form.thicknessFrom === null ? undefined : <StateMark tone="caution">thickness {form.thicknessFrom}: check it</StateMark>}><CommonFields materials={materials} /></Panel>
             <Panel title="Name"><NameFields isNew /></Panel>
           </div>
         </div>

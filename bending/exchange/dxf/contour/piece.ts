@@ -11,7 +11,7 @@ export interface Piece {
 
 /** What was mended, where (mm, in the drawing's own place) and how large it was. */
 export interface Repair {
-  readonly kind: "no length" | "drawn twice" | "overlap" | "gap" | "crossing" | "joined";
+  readonly kind: "no length" | "drawn twice" | "overlap" | "gap" | "crossing" | "joined" | "slit";
   readonly at: Vec2;
   readonly message: string;
 }

@@ -2,7 +2,7 @@ import type { Vec2 } from "../../../geometry/vec2";
 import { polygonBounds } from "../../../geometry/polygonBounds";
 import type { DxfHeader } from "../read/dxfDrawing";
 import type { PlacedDrawing } from "../shape/placedShape";
-import { mmPerDrawingUnit, unitOfHeader, type DrawingUnit } from "./drawingUnit";
+import { drawingUnitName, mmPerDrawingUnit, unitOfHeader, type DrawingUnit } from "./drawingUnit";
 import { shapeMeasures } from "./shapeMeasures";
 
 export interface UnitDecision {
@@ -38,10 +38,10 @@ export function decideUnits(header: DxfHeader, drawing: PlacedDrawing): UnitDeci
     header: said,
     sure: said === unit && (best?.points ?? 0) - (next?.points ?? -Infinity) >= SURE_MARGIN,
     reasons: [
-      said === null ? "The file does not say its unit." : `The header says ${said}.`,
-      ...(other?.against.map((reason) => `In ${other.unit} ${reason}.`) ?? []),
-      ...(best?.against.map((reason) => `In ${unit} ${reason}.`) ?? []),
-      ...(best?.for.map((reason) => `In ${unit} ${reason}.`) ?? []),
+      said === null ? "The file does not say its unit." : `The header says ${drawingUnitName[said]}.`,
+      ...(other?.against.map((reason) => `In ${drawingUnitName[other.unit]} ${reason}.`) ?? []),
+      ...(best?.against.map((reason) => `In ${drawingUnitName[unit]} ${reason}.`) ?? []),
+      ...(best?.for.map((reason) => `In ${drawingUnitName[unit]} ${reason}.`) ?? []),
     ],
   };
 }
@@ -61,7 +61,7 @@ function judge(unit: DrawingUnit, said: DrawingUnit | null, measurement: number 
   if (word) { points += 1; good.push(`the drawing's text agrees`); }
   const sizeText = `the blank is ${round(long)} mm long`;
   if (long > 8000 || long < 8) { points -= 4; bad.push(`${sizeText}, which no press brake part is`); }
-  else if (long > 3200 || long < 25) { points -= 2; bad.push(`${sizeText}, which few parts are`); }
+  else if (long > 3200 || long < 25) { points -= long > 3200 ? 3.5 : 2; bad.push(`${sizeText}, which few parts are`); }
   else good.push(sizeText);
   if (radius !== null) {
     const text = `a middle-sized hole or corner has a radius of ${round(radius)} mm`;

@@ -3,6 +3,7 @@ import { arcToChords } from "../../../geometry/arcToChords";
 import { polygonContains } from "../../../geometry/polygonContains";
 import type { Vec2 } from "../../../geometry/vec2";
 import { findLoops } from "../contour/findLoops";
+import { openSlits } from "../contour/openSlits";
 import type { Loop, Piece } from "../contour/piece";
 import { pieceMiddle } from "../contour/pieceMiddle";
 import { placeText } from "../contour/placeText";
@@ -40,10 +41,12 @@ export function findFlat(shapes: readonly PlacedShape[], groups: readonly LineGr
     }
   }
   const { loops, repairs, rest } = findLoops(cut, choices.gap);
-  const outline = loops[choices.contour] ?? loops[0] ?? null;
+  const chosen = loops[choices.contour] ?? loops[0] ?? null;
+  const slits = openSlits(chosen?.vertices ?? []);
+  const outline = chosen && { ...chosen, vertices: slits.vertices };
   const sheet = outline ? chordsOf(outline) : null;
   const inside = (p: Vec2) => sheet !== null && polygonContains(sheet, p);
-  const inner = loops.filter((loop) => loop !== outline && outline !== null && loop.area < outline.area && inside(pointOf(loop)));
+  const inner = loops.filter((loop) => loop !== chosen && outline !== null && loop.area < outline.area && inside(pointOf(loop)));
   const { holes, islands } = topmost(inner);
   const single: Piece[] = [];
   for (const piece of rest) {
@@ -53,14 +56,14 @@ export function findFlat(shapes: readonly PlacedShape[], groups: readonly LineGr
   if (choices.singleLines === null) leftovers.push(...single.map((piece) => leftover(piece, shapes, "lies inside the contour and closes nothing")));
   else lines.push(...single.map((piece): FoundBend => ({ line: [piece.from, piece.to], direction: choices.singleLines ?? "up", data: null })));
   for (const loop of islands) leftovers.push(loopLeftover(loop, "a closed contour inside a hole"));
-  for (const loop of loops) if (loop !== outline && !inner.includes(loop)) leftovers.push(loopLeftover(loop, "a closed contour outside the sheet"));
+  for (const loop of loops) if (loop !== chosen && !inner.includes(loop)) leftovers.push(loopLeftover(loop, "a closed contour outside the sheet"));
   const found = findBends(lines, sheet);
   const bends = found.bends.filter((bend) => {
     const on = sheet === null || inside(at(bend.line, 0.5)) || inside(at(bend.line, 0.25)) || inside(at(bend.line, 0.75));
     if (!on) leftovers.push({ what: `a bend line outside the sheet at ${placeText(at(bend.line, 0.5))}`, at: at(bend.line, 0.5), path: bend.line });
     return on;
   });
-  return { outline, holes, bends, repairs: [...repairs, ...found.repairs], leftovers, contours: loops, singleLines: single.map(({ from, to }) => [from, to] as const) };
+  return { outline, holes, bends, repairs: [...repairs, ...slits.repairs, ...found.repairs], leftovers, contours: loops, singleLines: single.map(({ from, to }) => [from, to] as const) };
 }
 
 const lengthOf = ({ from, to }: Piece): number => Math.hypot(to[0] - from[0], to[1] - from[1]);

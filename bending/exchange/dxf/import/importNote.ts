@@ -1,7 +1,7 @@
 import type { Repair } from "../contour/piece";
 import type { FoundFlat } from "./foundFlat";
 import type { UnitDecision } from "./decideUnits";
-import type { DrawingUnit } from "./drawingUnit";
+import { drawingUnitName, type DrawingUnit } from "./drawingUnit";
 
 /** What a revision's note may hold. */
 const LONGEST = 1900;
@@ -11,7 +11,7 @@ const SPELT_OUT = 12;
 export function importNote(file: string, units: UnitDecision, unit: DrawingUnit, found: FoundFlat, notes: readonly { readonly line: number; readonly message: string }[]): string {
   const { repairs, leftovers } = found;
   const lines = [
-    `From ${file}, lengths in ${unit}${units.header !== null && units.header !== unit ? ` (its header says ${units.header})` : ""}.`,
+    `From ${file}, lengths in ${drawingUnitName[unit]}${units.header !== null && units.header !== unit ? ` (its header says ${drawingUnitName[units.header]})` : ""}.`,
     repairs.length === 0 ? "Nothing was mended." : `Mended (${summary(repairs)}): ${some(repairs.map(({ message }) => message))}.`,
     ...(leftovers.length === 0 ? [] : [`Left out: ${some(leftovers.map(({ what }) => what))}.`]),
     ...(notes.length === 0 ? [] : [`Not read: ${some(notes.map(({ line, message }) => `line ${line}: ${message}`))}.`]),
