@@ -129,6 +129,8 @@ export { reroot } from "./part/reroot";
 export { foldZonePoint } from "./part/foldZonePoint";
 export { unfoldZonePoint } from "./part/unfoldZonePoint";
 export { holeContour } from "./part/holeContour";
+export { sheetRegions, type SheetRegions } from "./part/sheetRegions";
+export { zoneStrips } from "./part/zoneStrips";
 
 export type * from "./tooling/tool";
 export type * from "./tooling/machine";
