@@ -10,6 +10,7 @@ import { PageHeader } from "@/components/ui/PageHeader";
 import { Panel } from "@/components/ui/Panel";
 import { useToast } from "@/components/ui/ToastProvider";
 import { formatLength } from "@/lib/format/formatLength";
+import { formatNumber } from "@/lib/format/formatNumber";
 import { useCreatePart } from "@/lib/queries/parts";
 import { FlatDrawing } from "../drawing/FlatDrawing";
 import { FlatFacts } from "../drawing/FlatFacts";
@@ -56,7 +57,7 @@ export function FoundPart({ fileName, part, mesh, materials, onAnother }: FoundP
           { label: "Bends", value: <span className="num">{part.bends.length}</span> },
           { label: "Faces of the sheet", value: <span className="num">{part.plates.length}</span> },
           { label: "Of the solid understood", value: <span className="num">{understood(part)}</span> },
-          ...(model === null ? [] : [{ label: "Folds back within", value: <span className="num">{formatLength(Math.max(0.001, Math.ceil(model.folded.farthest * 1000) / 1000), "mm") === "0 mm" ? "0.001 mm" : `${Math.max(0.001, Math.ceil(model.folded.farthest * 1000) / 1000)} mm`}</span> }]),
+          ...(model === null ? [] : [{ label: "Folds back within", value: <span className="num">{within(model.folded.farthest)}</span> }]),
         ]}
         actions={<><Button look="plain" onClick={onAnother}>Another file</Button><Button type="submit" busy={create.isPending || create.isSuccess} disabled={model === null}>Save part</Button></>} />
       <div className="grid grid-cols-1 gap-8 xl:grid-cols-[minmax(0,5fr)_minmax(0,6fr)]">
@@ -86,3 +87,6 @@ function understood({ volume, solidVolume }: RecognisedPart): string {
   const part = (volume / solidVolume) * 100;
   return Math.abs(part - 100) < 0.005 ? "all" : `${part.toFixed(part > 99 ? 2 : 1)} %`;
 }
+
+/** A distance in mm, rounded up to a thousandth. */
+const within = (distance: number): string => `${formatNumber(Math.max(0.001, Math.ceil(distance * 1000) / 1000), 3)} mm`;

@@ -4,6 +4,7 @@ import { Loading } from "@/components/ui/Loading";
 import { LoadProblem } from "@/components/ui/LoadProblem";
 import { Notice } from "@/components/ui/Notice";
 import { PageHeader } from "@/components/ui/PageHeader";
+import { TextLink } from "@/components/ui/TextLink";
 import { useMaterials } from "@/lib/queries/materials";
 import { useReadStep } from "@/lib/queries/stepReadings";
 import { BodyChoice } from "./BodyChoice";
@@ -39,7 +40,8 @@ export function ImportStep() {
   }
   return (
     <>
-      <PageHeader kicker="New part" title="Import a STEP file" summary="The folded part as a solid. Its thickness, faces, bends and holes are recognised, and it is unfolded with this shop’s own rules." />
+      <PageHeader kicker="New part" title="Import a STEP file" summary="The folded part as a solid. Its thickness, faces, bends and holes are recognised, and it is unfolded with this shop’s own rules."
+        actions={<TextLink href="/parts/import">Import drawings instead</TextLink>} />
       <div className="max-w-3xl space-y-5">
         {reading.isPending && file !== null ? <ReadingFile file={file} onStop={stop} /> : <StepFileBox onFile={(chosen) => read(chosen)} />}
         {stopped ? <Notice tone="note" title="Reading was stopped" live>Nothing was kept. Choose the file again, or another.</Notice> : null}
