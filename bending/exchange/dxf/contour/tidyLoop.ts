@@ -1,7 +1,7 @@
 import { DRAWN_POINT_MM } from "../../../core/tolerance";
 import type { Vec2 } from "../../../geometry/vec2";
 import { bulgeCentre } from "./bulgeCentre";
-import { bulgedArea } from "./bulgedArea";
+import { contourArea } from "../../../part/contourArea";
 import type { Loop } from "./piece";
 
 type Vertex = readonly [number, number, number];
@@ -16,7 +16,7 @@ export function tidyLoop(vertices: readonly Vertex[], shapes: readonly number[])
     return next && Math.hypot(next[0] - vertex[0], next[1] - vertex[1]) > DRAWN_POINT_MM / 2;
   });
   const kept = withoutMidpoints(apart);
-  const signed = bulgedArea(kept);
+  const signed = contourArea({ kind: "path", vertices: kept });
   if (kept.length < 2 || Math.abs(signed) < 1e-6) return null;
   return { vertices: signed < 0 ? reversed(kept) : kept, circle: circleOf(kept), shapes, area: Math.abs(signed) };
 }

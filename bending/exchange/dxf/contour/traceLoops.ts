@@ -1,4 +1,4 @@
-import { bulgedArea } from "./bulgedArea";
+import { contourArea } from "../../../part/contourArea";
 import type { Network, NetworkEdge } from "./network";
 import type { Piece } from "./piece";
 
@@ -33,7 +33,7 @@ export function traceLoops({ nodes, edges }: Network): TracedLoops {
       const at = nodes[(half & 1) === 0 ? (edge?.from ?? 0) : (edge?.to ?? 0)] ?? [0, 0];
       return [at[0], at[1], (half & 1) === 0 ? (edge?.piece.bulge ?? 0) : -(edge?.piece.bulge ?? 0)];
     };
-    const outer = faces.filter((face) => bulgedArea(face.map(vertex)) < 0);
+    const outer = faces.filter((face) => contourArea({ kind: "path", vertices: face.map(vertex) }) < 0);
     const used = new Set(outer.flatMap((face) => face.map((half) => half >> 1)));
     return {
       // The outside walk runs clockwise; its twins, backwards, run counter-clockwise.
