@@ -36,8 +36,7 @@ export function createReader(limitMs: number): Reader {
         current.once("error", () => done(null));
         current.postMessage(Uint8Array.from(bytes));
       });
-      // What failed may have left the kernel in any state; the product takes a new one for each file.
-      if (answer === null || answer.kind === "unreadable") {
+      if (answer === null) {
         worker = null;
         await current.terminate();
       }
