@@ -132,6 +132,19 @@ describe("real flats", () => {
     expect(part.bends.every(({ region }) => region !== null)).toBe(true);
   });
 
+  test("corner notches a little too small for the bends: both bends end where their borders meet", () => {
+    const flat = (corner: number): FlatShape => ({
+      outline: [[0, 0], [100 + corner, 0], [100 + corner, 20 - corner], [120, 20 - corner], [120, 80], [0, 80]],
+      bends: [{ id: "s", line: [[0, 20 - half], [100, 20 - half]], ...up }, { id: "e", line: [[100 + half, 20], [100 + half, 80]], ...up }],
+    });
+    const { part, ids, pieces, area } = shape(flat(1));
+    expect(ids).toEqual(["base", "s", "e"]);
+    // What is left over is the bit between the ends: no larger than the square that the borders make past their meeting.
+    expect(area - pieces).toBeGreaterThan(0);
+    expect(area - pieces).toBeLessThan(1 + 2 * half);
+    expect(part.bends.every(({ zone }) => signedArea(zone) > 0)).toBe(true);
+  });
+
   test("the base is where the document says, else the largest face", () => {
     const bends = [{ id: "a", line: [[20, 0], [20, 80]] as const, ...up }];
     expect(signedArea(must({ outline: sheet, bends }).faces[0]?.outline ?? [])).toBeGreaterThan(5000);

@@ -1,8 +1,6 @@
 import type { FieldProblem } from "../../core/problem";
 import { fail, ok, type Result } from "../../core/result";
 import type { LengthUnit } from "../../core/units";
-import { convexOverlap } from "../../geometry/convexOverlap";
-import { polygonBounds } from "../../geometry/polygonBounds";
 import type { MaterialFacts } from "../../handbook/material";
 import type { BendContext } from "../bendContext";
 import { edgeAxes } from "../edgeCut";
@@ -16,15 +14,13 @@ import type { PartShape } from "../partModel";
 import { resolveBend } from "../resolveBend";
 import { sheetHoles } from "../sheetHoles";
 import { strokePartners } from "../strokePartners";
+import { cutProblems } from "./cutProblems";
 import { cutSheet } from "./cutSheet";
-import { zoneQuad, type FlatZone } from "./flatZone";
 import { joinZones } from "./joinZones";
 import { partingHoles } from "./partingHoles";
+import { partZones } from "./partZones";
 import { zoneCuts } from "./zoneCuts";
 import { zonesOfLine } from "./zonesOfLine";
-
-/** Zones may lap by rounding (mm). */
-const LAP_MM = 1e-3;
 
 /**
  * A flat as drawn with its bend lines: the borders of each line's zone part the sheet, the largest piece (or the one at `base`)
@@ -44,15 +40,19 @@ export function buildFlat(
   const rings = [points, ...holes.filter((_, i) => parting.has(i)).map(({ outline }) => [...outline].reverse())];
   const problems: FieldProblem[] = holes.filter((hole, i) => parting.has(i) && !holeWithin(hole.outline, points))
     .map(({ path }) => ({ path, message: "the hole reaches over the edge of the sheet; move it inwards or make it smaller" }));
-  const zones = lines.flatMap((line) => {
-    const found = zonesOfLine(rings, line, units);
-    if (!found.ok) problems.push(found.error);
-    return found.ok ? found.value : [];
+  const found = lines.flatMap((line) => {
+    const zones = zonesOfLine(rings, line, units);
+    if (!zones.ok) problems.push(zones.error);
+    return zones.ok ? zones.value : [];
   });
-  if (problems.length === 0) problems.push(...zonesThatMeet(zones));
+  const { zones, problems: meetings } = partZones(found);
+  if (problems.length === 0) problems.push(...meetings);
   if (problems.length > 0) return fail(problems);
   const cuts = zones.flatMap((zone, i) => zoneCuts(rings, zone, i));
-  const joined = joinZones(cutSheet(rings, cuts), cuts, zones, flat.base);
+  const cutUp = cutSheet(rings, cuts);
+  const crossing = cutProblems(rings, cutUp, cuts, zones);
+  if (crossing.length > 0) return fail(crossing);
+  const joined = joinZones(cutUp, cuts, zones, flat.base);
   if (!joined.ok) return joined;
   const bends = strokePartners(joined.value.bends, new Map(flat.bends.map(({ id, strokeWith }, i) => [id, { strokeWith: strokeWith ?? null, path: `flat.bends[${i}].strokeWith` }])));
   if (!bends.ok) return bends;
@@ -67,18 +67,5 @@ export function buildFlat(
       outline: { kind: "path", vertices: flat.outline.map(([x, y, bulge]) => [x, y, bulge ?? 0]) },
       holes: holes.filter((_, i) => parting.has(i)).map(({ contour }) => contour),
     },
-  });
-}
-
-/** Bends whose zones lap: what lies in both would be bent twice. */
-function zonesThatMeet(zones: readonly FlatZone[]): readonly FieldProblem[] {
-  const quads = zones.map((zone) => {
-    const points = zoneQuad(zone);
-    return { zone, points, ...polygonBounds(points) };
-  });
-  return quads.flatMap((a, i) => {
-    const b = quads.slice(0, i).find((other) => other.min[0] <= a.max[0] && a.min[0] <= other.max[0] && other.min[1] <= a.max[1] && a.min[1] <= other.max[1]
-      && other.zone.bend !== a.zone.bend && convexOverlap(other.points, a.points) > LAP_MM);
-    return b ? [{ path: a.zone.path, message: `the bends "${a.zone.bend.id}" and "${b.zone.bend.id}" run into one another; move their lines further apart or cut the corner out` }] : [];
   });
 }

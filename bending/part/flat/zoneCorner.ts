@@ -7,10 +7,14 @@ const ON_BORDER_MM = 1e-6;
 /** An end that leans runs out of the bend by no more than this many times half its allowance; further on it is an edge of the face beside. */
 const LEAN = 4;
 
-/** Where a border of a bend zone ends: on the boundary of the sheet, or square above `slitFrom`, a corner of the boundary within the zone. */
+/**
+ * Where a border of a bend zone ends: on the boundary of the sheet; square above `slitFrom`, a corner of the boundary within the
+ * zone; or where it meets the border of another zone, from where the end runs to the other border's end.
+ */
 export type ZoneCorner =
   | { readonly kind: "place"; readonly place: RingPlace }
-  | { readonly kind: "slit"; readonly point: Vec2; readonly slitFrom: RingPlace };
+  | { readonly kind: "slit"; readonly point: Vec2; readonly slitFrom: RingPlace }
+  | { readonly kind: "meeting"; readonly point: Vec2 };
 
 /**
  * From the end of a bend line along the boundary to a border of its zone: `side` +1 is the border on the line's left. Null

@@ -27,7 +27,11 @@ export function zoneCuts(rings: Rings, zone: FlatZone, index: number): readonly 
   };
   const slits = [...zone.right, ...zone.left].flatMap((corner): readonly ZoneCut[] =>
     (corner.kind === "slit" ? [{ from: corner.slitFrom, to: endOf(corner), zone: index, border: "end" }] : []));
-  return [...border(zone.right[0], zone.right[1], -1), ...border(zone.left[1], zone.left[0], 1), ...slits];
+  const ends = ([0, 1] as const).flatMap((end): readonly ZoneCut[] => {
+    const [right, left] = [zone.right[end], zone.left[end]];
+    return right.kind === "meeting" || left.kind === "meeting" ? [{ from: endOf(right), to: endOf(left), zone: index, border: "end" }] : [];
+  });
+  return [...border(zone.right[0], zone.right[1], -1), ...border(zone.left[1], zone.left[0], 1), ...slits, ...ends];
 }
 
 const endOf = (corner: ZoneCorner): CutEnd => (corner.kind === "place" ? corner.place : { point: corner.point });
