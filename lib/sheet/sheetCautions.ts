@@ -25,7 +25,7 @@ export function sheetCautions({ plan, machine, tools }: PlanSource, model: PlanM
     always("caution", "Edges cut: gloves for handling, safety shoes, eyes protected."),
     always("caution", `Highest force ${format.force(force)} of the machine's ${format.force(machine.maxForce)}: set force and mode of control for this job. Tool ratings: ${[...new Set(ratings)].join("; ") || `${tools.length} tools`}.`),
     ...lift,
-    ...plan.cautions.map((caution): SheetCaution => ({
+    ...plan.cautions.filter(({ kind }) => kind !== "lift" || lift.length === 0).map((caution): SheetCaution => ({
       level: "caution",
       text: asSentence(caution.message, [...caution.bends, ...caution.tools]),
       steps: model.steps.flatMap((step, index) => (step.step.bends.some((bend) => caution.bends.includes(bend)) ? [index + 1] : [])),
