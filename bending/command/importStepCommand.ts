@@ -1,7 +1,7 @@
 import { toDeg, rad } from "../core/units";
 import { checkFolded } from "../exchange/step/checkFolded";
 import type { RecognisedPart } from "../exchange/step/recognisedPart";
-import { toPartDocument } from "../exchange/step/toPartDocument";
+import { importedDocument } from "../exchange/step/importedDocument";
 import { findingsOf } from "../findings/findingsOf";
 import { builtInMaterials, materialById } from "../handbook/materials";
 import { buildPart } from "../part/buildPart";
@@ -25,9 +25,9 @@ export function importStepCommand({ file, options }: Arguments, world: CommandWo
   if (!solid) return wrongInput(`${file}: there is no geometry kernel here to read a solid with`);
   if (!solid.ok) return wrongInput(`${file}: ${solid.error}`);
   const found = solid.value;
-  const document = readPartDocument(toPartDocument(found, {
+  const document = readPartDocument(importedDocument(found, {
     name: options.get("--name") ?? file.replace(/^.*[\\/]/, "").replace(/\.[^.]*$/, ""), material: options.get("--material") ?? USUAL_MATERIAL,
-  }));
+  }, { materials: materialById }));
   const built = document.ok ? buildPart(document.value, { materials: materialById, knownMaterials: builtInMaterials.map(({ id }) => id) }) : document;
   const report = reportOf(file, found);
   if (!document.ok || !built.ok) {

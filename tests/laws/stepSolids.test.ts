@@ -1,7 +1,11 @@
 import type { TopoDS_Shape } from "replicad-opencascadejs";
 import { beforeAll, describe, expect, test } from "vitest";
+import { importedDocument } from "@/bending/exchange/step/importedDocument";
 import type { RecognisedPart } from "@/bending/exchange/step/recognisedPart";
+import { toPartDocument } from "@/bending/exchange/step/toPartDocument";
 import { identityFrame } from "@/bending/geometry/identityFrame";
+import { materialById } from "@/bending/handbook/materials";
+import { flatPattern } from "@/bending/part/flatPattern";
 import type { BulgeVertex } from "@/bending/part/partModel";
 import type { Kernel } from "@/lib/step/kernel";
 import { loadKernel, type LoadedKernel } from "@/lib/step/loadKernel";
@@ -74,6 +78,19 @@ describe("what a solid may be", () => {
     expect(part.leftOut.map(({ message }) => message).join()).toContain("countersink");
     expect(part.notes.join()).toContain("wider on one side");
   });
+});
+
+test("a slot across a bend is kept, and the flat is that of the part with the slot in it", () => {
+  const part = read(cut(angle(), box([25, 20, -5], [40, 10, 17])));
+  expect(part.bends.map(({ windows, length }) => [windows.length, length])).toEqual([[1, expect.closeTo(60, 9)]]);
+  expect(part.leftOut).toEqual([]);
+  expect(part.volume / part.solidVolume).toBeCloseTo(1, 9);
+  const model = mustBuild(importedDocument(part, { name: "Angle", material: "S235" }, { materials: materialById }));
+  const closed = mustBuild(toPartDocument(part, { name: "Angle", material: "S235" }));
+  // 10 wide: 10 of the leg of 40 - 5, the bend, and 7 of the leg of 30 - 5.
+  const allowance = model.bends[0]?.allowance ?? 0;
+  expect(model.holesAcross.map(({ bends }) => bends)).toEqual([[0]]);
+  expect(flatPattern(closed).area - flatPattern(model).area).toBeCloseTo(10 * (10 + allowance + 7), 6);
 });
 
 describe("what is no sheet-metal part", () => {

@@ -15,10 +15,11 @@ export function faceRoles(solid: Solid, topology: SolidTopology, tree: GrownTree
     under.add(plate.bottom);
   }
   for (const { joint, direction } of tree.bends) {
-    const [inner, outer] = joint.insideRadius > 0 ? joint.faces : [undefined, joint.faces[0]];
-    const [onTop, below] = direction === "up" ? [inner, outer] : [outer, inner];
-    if (onTop !== undefined) top.add(onTop);
-    if (below !== undefined) under.add(below);
+    for (const face of joint.faces) {
+      const surface = solid.faces[face]?.surface;
+      const outside = surface?.kind === "cylinder" && surface.convex;
+      (outside === (direction === "down") ? top : under).add(face);
+    }
   }
   const plates = new Set(tree.plates.flatMap((plate) => [plate.top, plate.bottom]));
   solid.faces.forEach((_, face) => {

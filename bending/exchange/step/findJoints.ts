@@ -7,6 +7,7 @@ import { unitVector } from "../../geometry/unitVector";
 import type { Vec3 } from "../../geometry/vec3";
 import { coaxialPairs } from "./coaxialPairs";
 import { findSharpJoints } from "./findSharpJoints";
+import { mergedJoints } from "./mergedJoints";
 import type { Joint, JointSide } from "./joint";
 import type { CylinderSurface, Solid } from "./solid";
 import type { SolidTopology } from "./solidTopology";
@@ -30,7 +31,7 @@ export function findJoints(solid: Solid, topology: SolidTopology, other: Readonl
     if (angle < SOLID_PARALLEL_RAD) return [];
     return [{ axis: surface.axis, angle, insideRadius: surface.radius, inner: [a, b], outer: [c, d], faces: [inner, outer], overrun: 0 }];
   });
-  return [...round, ...findSharpJoints(solid, topology, other, thickness)];
+  return mergedJoints([...round, ...findSharpJoints(solid, topology, other, thickness)]);
 }
 
 interface TangentSide extends JointSide {

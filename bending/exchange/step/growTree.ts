@@ -23,9 +23,9 @@ export interface GrownBend {
   readonly child: number;
   readonly direction: BendDirection;
   readonly joint: Joint;
-  /** Edges of the solid along the bend, on the top side of the parent and of the child. */
-  readonly parentEdge: number;
-  readonly childEdge: number;
+  /** Edges of the solid along the bend, on the top side of the parent and of the child; several where a cut-out parts them. */
+  readonly parentEdges: readonly number[];
+  readonly childEdges: readonly number[];
   /** The edges' outside corner is sharp on the top side: they stand this much too far out. */
   readonly overrun: number;
   /** From the start of the parent's edge, along it. */
@@ -89,37 +89,29 @@ function placeOf(joint: Joint, { top }: GrownPlate): JointPlace | null {
 
 function grow(solid: Solid, topology: SolidTopology, parent: GrownPlate, place: JointPlace, thickness: number): {
   readonly frame: Frame;
-  readonly bend: Pick<GrownBend, "parentEdge" | "childEdge" | "overrun" | "start" | "length" | "unequal">;
+  readonly bend: Pick<GrownBend, "parentEdges" | "childEdges" | "overrun" | "start" | "length" | "unequal">;
 } | null {
   const along = runOf(solid, topology, parent.top, place.parentEdges[0] ?? -1);
   const surface = solid.faces[place.childTop]?.surface;
   if (!along || surface?.kind !== "plane") return null;
-  const span = (edge: number): Interval => {
-    const ends = [solid.edges[edge]?.from, solid.edges[edge]?.to].map((vertex) => dotProduct(solid.vertices[vertex ?? -1] ?? [0, 0, 0], along));
+  const span = (edges: readonly number[]): Interval => {
+    const ends = edges.flatMap((edge) => [solid.edges[edge]?.from, solid.edges[edge]?.to]).map((vertex) => dotProduct(solid.vertices[vertex ?? -1] ?? [0, 0, 0], along));
     return [Math.min(...ends), Math.max(...ends)];
   };
-  let best: { parentEdge: number; childEdge: number; mine: Interval; its: Interval; common: number } | null = null;
-  for (const parentEdge of place.parentEdges) {
-    for (const childEdge of place.childEdges) {
-      const [mine, its] = [span(parentEdge), span(childEdge)];
-      const common = Math.min(mine[1], its[1]) - Math.max(mine[0], its[0]);
-      if (common > SOLID_MATCH_MM && (!best || common > best.common)) best = { parentEdge, childEdge, mine, its, common };
-    }
-  }
-  if (!best) return null;
-  const { mine, its } = best;
+  const [mine, its] = [span(place.parentEdges), span(place.childEdges)];
+  if (Math.min(mine[1], its[1]) - Math.max(mine[0], its[0]) <= SOLID_MATCH_MM) return null;
   // Ends that are one by the solid's own exactness are one here, so that no step of a hair is left beside the bend.
   const one = (a: number, b: number) => Math.abs(a - b) <= SOLID_MATCH_MM;
   const first = one(mine[0], its[0]) ? mine[0] : Math.max(mine[0], its[0]);
   const common = (one(mine[1], its[1]) ? mine[1] : Math.min(mine[1], its[1])) - first;
-  const onEdge = solid.vertices[solid.edges[best.childEdge]?.from ?? -1] ?? [0, 0, 0];
+  const onEdge = solid.vertices[solid.edges[place.childEdges[0] ?? -1]?.from ?? -1] ?? [0, 0, 0];
   const axes = planeAxes(surface.normal, onEdge, along);
   // At the bend's start, on the underside, and back from a sharp outside corner to where a round one would begin.
   const start = moved(moved(onEdge, axes.x, first - dotProduct(onEdge, along)), axes.y, -place.overrun);
   return {
     frame: { ...axes, o: moved(start, axes.z, -thickness) },
     bend: {
-      parentEdge: best.parentEdge, childEdge: best.childEdge, overrun: place.overrun, start: first - mine[0], length: common,
+      parentEdges: place.parentEdges, childEdges: place.childEdges, overrun: place.overrun, start: first - mine[0], length: common,
       unequal: Math.max(mine[1] - mine[0], its[1] - its[0]) - common,
     },
   };

@@ -1,3 +1,5 @@
+import { bendWindows } from "./bendWindows";
+import { bridged } from "./bridged";
 import type { FlatLoop } from "./flattenLoop";
 import type { GrownBend, GrownPlate } from "./growTree";
 import { outlineArea } from "./outlineArea";
@@ -15,6 +17,8 @@ export interface ReadPlate {
   readonly widenedHoles: number;
   /** Its sides differ in size by this part: its rims are not square. */
   readonly uneven: number;
+  /** For each bend on it what is cut out of its edge there. */
+  readonly cutOuts: ReadonlyMap<GrownBend, readonly (readonly OutlineVertex[])[]>;
   /** Curves that became chords are in it. */
   readonly chords: boolean;
 }
@@ -23,12 +27,19 @@ export interface ReadPlate {
 export function readPlate(solid: Solid, { top, bottom, frame }: GrownPlate, bends: readonly GrownBend[]): ReadPlate | null {
   const [shape, below] = [plateShape(solid, top, frame), plateShape(solid, bottom, frame)];
   if (!shape) return null;
-  const outline = withoutOverrun(shape.outline, bends);
+  const cutOuts = new Map<GrownBend, readonly (readonly OutlineVertex[])[]>();
+  const whole = bends.reduce((loop, bend) => {
+    const drawn = bridged(loop, loop.edges.some((edge) => bend.parentEdges.includes(edge)) ? bend.parentEdges : bend.childEdges);
+    cutOuts.set(bend, drawn.cutOuts);
+    return drawn.outline;
+  }, shape.outline);
+  const outline = withoutOverrun(whole, bends);
   const holes = plateHoles(shape.holes, below?.holes ?? []);
   const area = outlineArea(shape.outline.vertices);
   return {
     plate: { faces: [top, bottom], frame, outline, holes: holes.outlines.map(readHole) },
-    edges: shape.outline.edges,
+    edges: whole.edges,
+    cutOuts,
     widenedHoles: holes.widened,
     uneven: bends.some(({ joint }) => joint.overrun > 0) ? 0 : Math.abs(outlineArea(below?.outline.vertices ?? []) - area) / area,
     chords: shape.outline.chords || shape.holes.some(({ chords }) => chords),
@@ -37,16 +48,18 @@ export function readPlate(solid: Solid, { top, bottom, frame }: GrownPlate, bend
 
 /** At a sharp outside corner the face is drawn on to the corner; the plate ends where a round bend would begin. */
 function withoutOverrun({ vertices, edges }: FlatLoop, bends: readonly GrownBend[]): readonly OutlineVertex[] {
-  return bends.filter(({ overrun }) => overrun > 0).reduce((outline, { parentEdge, childEdge, overrun }) => {
-    const at = edges.findIndex((edge) => edge === parentEdge || edge === childEdge);
+  return bends.filter(({ overrun }) => overrun > 0).reduce((outline, { parentEdges, childEdges, overrun }) => {
+    const at = edges.findIndex((edge) => parentEdges.includes(edge) || childEdges.includes(edge));
     return at < 0 ? outline : pulledIn(outline, at, overrun);
   }, vertices);
 }
 
-export function readBend(bend: GrownBend, parentEdges: readonly number[], childEdges: readonly number[]): RecognisedBend {
-  const { parent, child, direction, joint, start, length } = bend;
+export function readBend(bend: GrownBend, parent: ReadPlate, child: ReadPlate): RecognisedBend {
+  const { direction, joint, start, length, parentEdges, childEdges } = bend;
+  const parentEdge = parent.edges.findIndex((edge) => parentEdges.includes(edge));
   return {
-    parent, child, direction, angle: joint.angle, insideRadius: joint.insideRadius, start, length, faces: joint.faces,
-    parentEdge: parentEdges.indexOf(bend.parentEdge), childEdge: childEdges.indexOf(bend.childEdge),
+    parent: bend.parent, child: bend.child, direction, angle: joint.angle, insideRadius: joint.insideRadius, start, length, faces: joint.faces,
+    parentEdge, childEdge: child.edges.findIndex((edge) => childEdges.includes(edge)),
+    windows: bendWindows(parent.cutOuts.get(bend) ?? [], child.cutOuts.get(bend) ?? [], parent.plate.outline, parentEdge, start),
   };
 }

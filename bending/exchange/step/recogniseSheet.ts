@@ -43,7 +43,7 @@ function assemble(solid: Solid, topology: SolidTopology, tree: GrownTree, thickn
   const plates = read.flatMap((plate) => (plate ? [plate.plate] : []));
   const bends = tree.bends.flatMap((bend) => {
     const [parent, child] = [read[bend.parent], read[bend.child]];
-    return parent && child ? [readBend(bend, parent.edges, child.edges)] : [];
+    return parent && child ? [readBend(bend, parent, child)] : [];
   });
   if (plates.length !== tree.plates.length) return fail("This is not a sheet-metal part that can be read: one of its plates has no outline.");
   const volume = recognisedVolume(plates, bends, thickness);
@@ -54,7 +54,7 @@ function assemble(solid: Solid, topology: SolidTopology, tree: GrownTree, thickn
   const roles = faceRoles(solid, topology, tree);
   return ok({
     thickness, plates, bends, roles, leftOut: describeLeftOut(solid, topology, roles),
-    notes: recognitionNotes(tree, read.flatMap((plate) => (plate ? [plate] : []))), solidVolume: solid.volume, volume,
+    notes: recognitionNotes(tree, read.flatMap((plate) => (plate ? [plate] : [])), bends), solidVolume: solid.volume, volume,
   });
 }
 

@@ -48,6 +48,14 @@ export interface RecognisedBend {
   readonly length: number;
   /** Faces of the solid. */
   readonly faces: readonly number[];
+  /** Cut-outs that run across the bend from one plate into the other. */
+  readonly windows: readonly BendWindow[];
+}
+
+/** A cut-out's rim on the parent and on the child, each in its plate's coordinates and counter-clockwise round the plate; between them it runs straight through the bend. */
+export interface BendWindow {
+  readonly onParent: readonly OutlineVertex[];
+  readonly onChild: readonly OutlineVertex[];
 }
 
 /** Faces of the solid that belong together and are no plate, bend or edge of one. */

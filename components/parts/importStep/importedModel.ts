@@ -2,7 +2,7 @@ import type { FieldProblem } from "@/bending/core/problem";
 import { checkFolded, type FoldedCheck } from "@/bending/exchange/step/checkFolded";
 import type { ImportChoices } from "@/bending/exchange/step/importChoices";
 import type { RecognisedPart } from "@/bending/exchange/step/recognisedPart";
-import { toPartDocument } from "@/bending/exchange/step/toPartDocument";
+import { importedDocument } from "@/bending/exchange/step/importedDocument";
 import type { MaterialFacts } from "@/bending/handbook/material";
 import { buildPart } from "@/bending/part/buildPart";
 import { flatPattern, type FlatPattern } from "@/bending/part/flatPattern";
@@ -46,7 +46,7 @@ export function importedModel(found: RecognisedPart, form: ImportForm, materials
     name: form.name.trim(), material: form.material, bends,
     ...(form.rule === "default" ? {} : { rule: form.rule }), ...(thickness === undefined ? {} : { thickness }),
   };
-  const document = readPartDocument(toPartDocument(found, choices));
+  const document = readPartDocument(importedDocument(found, choices, { materials: byId }));
   if (!document.ok) return { model: null, problems: document.error };
   const part = buildPart(document.value, { materials: byId });
   if (!part.ok) return { model: null, problems: part.error };
