@@ -2,6 +2,7 @@ import type { FieldProblem } from "../core/problem";
 import { flatOverlaps } from "./flatOverlaps";
 import type { PartDocument } from "./partDocument";
 import type { PartModel } from "./partModel";
+import { stepOf } from "./stepOf";
 
 /** Faces that lie over one another in the unfolded sheet, as problems of the document; each pair is told once. */
 export function overlapProblems(part: PartModel, document: PartDocument): readonly FieldProblem[] {
@@ -12,7 +13,7 @@ export function overlapProblems(part: PartModel, document: PartDocument): readon
 }
 
 function pathOf(id: string, document: PartDocument): string {
-  if (document.flanges) return `flanges[${document.flanges.findIndex((flange) => flange.id === id)}]`;
+  if (document.flanges) return `flanges[${document.flanges.findIndex((flange) => flange.id === id || (flange.offset !== undefined && stepOf(flange.id) === id))}]`;
   if (document.profile) return `profile.bends[${Number(id.slice(1)) - 1}]`;
   return "flat";
 }

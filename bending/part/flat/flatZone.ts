@@ -1,4 +1,3 @@
-import type { Vec2 } from "../../geometry/vec2";
 import type { EdgeAxes } from "../edgeCut";
 import type { ResolvedBend } from "../resolveBend";
 import type { MaterialChord } from "./materialChords";
@@ -16,11 +15,4 @@ export interface FlatZone {
   readonly chord: MaterialChord;
   readonly right: readonly [ZoneCorner, ZoneCorner];
   readonly left: readonly [ZoneCorner, ZoneCorner];
-}
-
-export const cornerPoint = (corner: ZoneCorner): Vec2 => (corner.kind === "place" ? corner.place.point : corner.point);
-
-/** The zone's corners counter-clockwise: right border from start to end, left border back. */
-export function zoneQuad({ right, left }: Pick<FlatZone, "right" | "left">): readonly [Vec2, Vec2, Vec2, Vec2] {
-  return [cornerPoint(right[0]), cornerPoint(right[1]), cornerPoint(left[1]), cornerPoint(left[0])];
 }

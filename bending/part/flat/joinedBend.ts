@@ -1,16 +1,18 @@
+import { invariant } from "../../core/invariant";
 import { EMPTY_AREA_MM2 } from "../../core/tolerance";
 import { signedArea } from "../../geometry/signedArea";
 import type { Vec2 } from "../../geometry/vec2";
 import { fromEdge, onEdge } from "../edgeCut";
 import type { Bend } from "../partModel";
 import type { CutUp } from "./cutSheet";
-import { cornerPoint, type FlatZone } from "./flatZone";
+import { cornerPoint } from "./cornerPoint";
+import type { FlatZone } from "./flatZone";
 import type { ZoneJoint } from "./joinZones";
 
 /** A bend of the model, its line turned so that the parent lies on its left. */
 export function joinedBend(joint: ZoneJoint, { pieces }: CutUp, id: string, leftIsParent: boolean, parent: number, child: number): Bend {
   const [first] = joint.zones;
-  if (!first) throw new Error("invariant: a joint has a zone");
+  invariant(first, "joinedBend: a joint has a zone");
   const { source, basis, ...resolved } = first.bend;
   const { right, left, line } = extent(first, joint.zones);
   const quad = [right[0], right[1], left[1], left[0]];

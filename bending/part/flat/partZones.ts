@@ -4,7 +4,9 @@ import { polygonBounds, type Bounds2 } from "../../geometry/polygonBounds";
 import { segmentsCross } from "../../geometry/segmentsCross";
 import type { Vec2 } from "../../geometry/vec2";
 import { onEdge } from "../edgeCut";
-import { cornerPoint, zoneQuad, type FlatZone } from "./flatZone";
+import { cornerPoint } from "./cornerPoint";
+import type { FlatZone } from "./flatZone";
+import { zoneQuad } from "./zoneQuad";
 import type { ZoneCorner } from "./zoneCorner";
 
 /** Zones may lap by rounding (mm). */

@@ -1,7 +1,8 @@
 import type { Vec2 } from "../../geometry/vec2";
 import { fromEdge, onEdge } from "../edgeCut";
 import type { CutEnd, SheetCut } from "./cutSheet";
-import { cornerPoint, type FlatZone } from "./flatZone";
+import { cornerPoint } from "./cornerPoint";
+import type { FlatZone } from "./flatZone";
 import type { Rings } from "./ringPlace";
 import type { ZoneCorner } from "./zoneCorner";
 
