@@ -57,6 +57,15 @@ describe("what is mended, and listed with its place", () => {
   });
 });
 
+test("a curve drawn as many very short lines keeps its shape", () => {
+  const n = 4000;
+  const points = Array.from({ length: n }, (_, i) => [1000 * Math.cos((2 * Math.PI * i) / n), 1000 * Math.sin((2 * Math.PI * i) / n)] as const);
+  const sheet = found({ entities: points.map(([x, y], i) => { const [u, v] = points[(i + 1) % n] ?? [x, y]; return line(x, y, u, v); }) });
+  expect(sheet.outline?.area).toBeCloseTo((n / 2) * 1e6 * Math.sin((2 * Math.PI) / n), 0);
+  const fine = found({ entities: [lightPolyline([...Array.from({ length: 30_000 }, (_, i) => [500 * Math.cos((Math.PI * i) / 30_000), 500 * Math.sin((Math.PI * i) / 30_000)] as const), [-500, 0] as const])] });
+  expect((fine.outline?.area ?? 0) / (Math.PI * 125_000)).toBeCloseTo(1, 5);
+});
+
 describe("what is contour, hole, bend line or neither", () => {
   test("the largest contour is the sheet; contours in holes and outside are left over and named", () => {
     const flat = found({ entities: [...rectangle(0, 0, 100, 60), circle(50, 30, 10), circle(50, 30, 5), circle(200, 30, 5)] });

@@ -1,9 +1,9 @@
 import { DRAWN_POINT_MM } from "../../../core/tolerance";
 import type { Vec2 } from "../../../geometry/vec2";
+import { createPointGrid } from "./createPointGrid";
 import { joinEnds } from "./joinEnds";
 import { mergeOverlaps } from "./mergeOverlaps";
 import type { Loop, Piece, Repair } from "./piece";
-import { pieceMiddle } from "./pieceMiddle";
 import { placeText } from "./placeText";
 import { removeRepeats } from "./removeRepeats";
 import { tidyLoop } from "./tidyLoop";
@@ -46,29 +46,31 @@ function closesByItself(chain: readonly Piece[]): boolean {
   return meet(first.from, last.to) && chain.every((piece, i) => i === 0 || meet(chain[i - 1]?.to ?? piece.from, piece.from));
 }
 
-/** A contour that was drawn twice is kept once; loops come sorted by area. */
+/** A contour that was drawn twice is kept once; twins are looked for at the same place only. */
 function onlyOnce(loops: readonly Loop[], repairs: Repair[]): readonly Loop[] {
   const kept: Loop[] = [];
+  const places = createPointGrid(1);
   for (const loop of loops) {
-    let twin = false;
-    for (let i = kept.length - 1; i >= 0 && !twin; i--) {
-      const other = kept[i];
-      if (!other || other.area - loop.area > 1e-3 * Math.max(1, Math.sqrt(loop.area))) break;
-      twin = sameLoop(other, loop);
+    const place = placeOf(loop);
+    const twin = places.near(place, 2 * DRAWN_POINT_MM).some((id) => { const other = kept[id]; return other !== undefined && sameLoop(other, loop); });
+    if (twin) {
+      repairs.push({ kind: "drawn twice", at: place, message: `a closed contour drawn twice at ${placeText(place)} was taken out once` });
+      continue;
     }
-    if (!twin) kept.push(loop);
-    else {
-      const [x, y, bulge] = loop.vertices[0] ?? [0, 0, 0];
-      const next = loop.vertices[1] ?? [x, y, 0];
-      const at = loop.circle?.centre ?? pieceMiddle({ from: [x, y], to: [next[0], next[1]], bulge });
-      repairs.push({ kind: "drawn twice", at, message: `a closed contour drawn twice at ${placeText(at)} was taken out once` });
-    }
+    places.add(place, kept.length);
+    kept.push(loop);
   }
   return kept;
 }
 
+/** The middle of a circle, else the lower left corner of what the vertices span: the same wherever a contour begins. */
+function placeOf(loop: Loop): Vec2 {
+  return loop.circle?.centre ?? loop.vertices.reduce<Vec2>(([x, y], vertex) => [Math.min(x, vertex[0]), Math.min(y, vertex[1])], [Infinity, Infinity]);
+}
+
+const near = (p: readonly number[], q: readonly number[]) => Math.hypot((p[0] ?? 0) - (q[0] ?? 0), (p[1] ?? 0) - (q[1] ?? 0)) <= 2 * DRAWN_POINT_MM;
+
 function sameLoop(a: Loop, b: Loop): boolean {
-  const near = (p: readonly number[], q: readonly number[]) => Math.hypot((p[0] ?? 0) - (q[0] ?? 0), (p[1] ?? 0) - (q[1] ?? 0)) <= 2 * DRAWN_POINT_MM;
   if (a.circle && b.circle) return near(a.circle.centre, b.circle.centre) && Math.abs(a.circle.radius - b.circle.radius) <= 2 * DRAWN_POINT_MM;
   return a.vertices.length === b.vertices.length && a.vertices.every((p) => b.vertices.some((q) => near(p, q)));
 }

@@ -7,7 +7,9 @@ import type { Loop } from "./piece";
 type Vertex = readonly [number, number, number];
 
 /** Farthest that a vertex in the middle of a straight run may stand off it: rounding of files with six decimals. */
-const STRAIGHT_MM = 2e-5;
+const STRAIGHT_MM = 5e-6;
+/** So many vertices in a row are left out at most; a run of more is a curve of very short lines as a rule. */
+const LONGEST_RUN = 50;
 
 /** A closed contour without repeated points and points in the middle of straight runs; counter-clockwise; null when it holds no area. */
 export function tidyLoop(vertices: readonly Vertex[], shapes: readonly number[]): Loop | null {
@@ -23,13 +25,25 @@ export function tidyLoop(vertices: readonly Vertex[], shapes: readonly number[])
 
 function withoutMidpoints(vertices: readonly Vertex[]): readonly Vertex[] {
   const n = vertices.length;
-  const needless = (i: number): boolean => {
-    const [p, q, r] = [vertices[(i + n - 1) % n], vertices[i], vertices[(i + 1) % n]];
-    if (!p || !q || !r || p[2] !== 0 || q[2] !== 0) return false;
-    const [ux, uy, vx, vy] = [q[0] - p[0], q[1] - p[1], r[0] - q[0], r[1] - q[1]];
-    return ux * vx + uy * vy > 0 && Math.abs(ux * vy - uy * vx) <= STRAIGHT_MM * Math.min(Math.hypot(ux, uy), Math.hypot(vx, vy));
-  };
-  return n < 4 ? vertices : vertices.filter((_, i) => !needless(i));
+  if (n < 4) return vertices;
+  const kept: Vertex[] = [];
+  // Vertices left out since the last one kept: each must stay on the line that takes their place.
+  let run: Vertex[] = [];
+  vertices.forEach((q, i) => {
+    const [p, r] = [kept[kept.length - 1] ?? vertices[n - 1], vertices[(i + 1) % n]];
+    const needless = p && r && p[2] === 0 && q[2] === 0 && run.length < LONGEST_RUN && [...run, q].every((one) => liesBetween(p, one, r));
+    if (needless) run.push(q);
+    else {
+      kept.push(q);
+      run = [];
+    }
+  });
+  return kept.length >= 3 ? kept : vertices;
+}
+
+function liesBetween(p: Vertex, q: Vertex, r: Vertex): boolean {
+  const [ux, uy, vx, vy] = [q[0] - p[0], q[1] - p[1], r[0] - q[0], r[1] - q[1]];
+  return ux * vx + uy * vy > 0 && Math.abs(ux * vy - uy * vx) <= STRAIGHT_MM * Math.hypot(ux + vx, uy + vy);
 }
 
 /** The same contour the other way round. */

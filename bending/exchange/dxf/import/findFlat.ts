@@ -47,6 +47,7 @@ export function findFlat(shapes: readonly PlacedShape[], groups: readonly LineGr
   const sheet = outline ? chordsOf(outline) : null;
   const inside = (p: Vec2) => sheet !== null && polygonContains(sheet, p);
   const inner = loops.filter((loop) => loop !== chosen && outline !== null && loop.area < outline.area && inside(pointOf(loop)));
+  const within = new Set(inner);
   const { holes, islands } = topmost(inner);
   const single: Piece[] = [];
   for (const piece of rest) {
@@ -56,7 +57,7 @@ export function findFlat(shapes: readonly PlacedShape[], groups: readonly LineGr
   if (choices.singleLines === null) leftovers.push(...single.map((piece) => leftover(piece, shapes, "lies inside the contour and closes nothing")));
   else lines.push(...single.map((piece): FoundBend => ({ line: [piece.from, piece.to], direction: choices.singleLines ?? "up", data: null })));
   for (const loop of islands) leftovers.push(loopLeftover(loop, "a closed contour inside a hole"));
-  for (const loop of loops) if (loop !== chosen && !inner.includes(loop)) leftovers.push(loopLeftover(loop, "a closed contour outside the sheet"));
+  for (const loop of loops) if (loop !== chosen && !within.has(loop)) leftovers.push(loopLeftover(loop, "a closed contour outside the sheet"));
   const found = findBends(lines, sheet);
   const bends = found.bends.filter((bend) => {
     const on = sheet === null || inside(at(bend.line, 0.5)) || inside(at(bend.line, 0.25)) || inside(at(bend.line, 0.75));
