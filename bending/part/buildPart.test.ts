@@ -2,7 +2,11 @@ import { expect, test } from "vitest";
 import { mm } from "../core/units";
 import { materialById } from "../handbook/materials";
 import { buildPart } from "./buildPart";
+import { flatOverlaps } from "./flatOverlaps";
 import { flatPattern } from "./flatPattern";
+import { foldPoint } from "./foldPoint";
+import { reroot } from "./reroot";
+import { signedArea } from "../geometry/signedArea";
 import type { PartDocument } from "./partDocument";
 import type { PartModel } from "./partModel";
 
@@ -121,4 +125,38 @@ test("the tray of the folder's README", () => {
 
 test("mass: 100 x 172.325 x 2 of steel", () => {
   expect(flatPattern(build({ ...profile, insideRadius: 2 })).massKg).toBeCloseTo(0.1 * 0.172325 * 0.002 * 7850, 5);
+});
+
+test("flats that overlap are found and shown when they are asked for: both flanges of a re-entrant corner want the same square", () => {
+  const document: PartDocument = {
+    format: "part/1", name: "L", units: "mm", material: "S235", thickness: 1.5, insideRadius: 1.5, kFactor: 0.5,
+    base: { outline: [[0, 0], [200, 0], [200, 60], [100, 60], [100, 120], [0, 120]] },
+    flanges: [{ id: "a", on: "base", edge: 2, length: 30, ...up }, { id: "b", on: "base", edge: 3, length: 30, ...up }],
+  };
+  expect(buildPart(document, { materials: materialById }).ok).toBe(false);
+  const built = buildPart(document, { materials: materialById, keepOverlaps: true });
+  const overlaps = built.ok ? flatOverlaps(built.value) : [];
+  expect(overlaps.map(({ faces }) => faces)).toEqual([[1, 2]]);
+  // From the drawn corner: 30 - 3 plane, and the allowance of pi / 2 x 2.25 less the setback of 3.
+  const side = 27 + (Math.PI / 2) * 2.25 - 3;
+  expect(overlaps[0]?.regions.map((region) => signedArea(region))).toEqual([expect.closeTo(side * side, 6)]);
+});
+
+test("an offset is two bends that know one another, named after the flange", () => {
+  const part = build(tray([
+    { id: "front", on: "base", edge: 0, length: 30, angle: 60, direction: "up", offset: { height: 6 } },
+    { id: "lip", on: "front", edge: 2, length: 12, ...up },
+  ]));
+  expect(part.bends.map(({ id, direction, strokeWith }) => [id, direction, strokeWith])).toEqual([["front-step", "up", 1], ["front", "down", 0], ["lip", "up", null]]);
+  expect(reroot(part, 2).bends.map(({ id, strokeWith }) => [id, strokeWith])).toEqual([["front", 2], ["lip", null], ["front-step", 0]]);
+});
+
+test("a teardrop's loop turns on until the end of its leg rests on the sheet", () => {
+  const part = build({ ...profile, thickness: 1, profile: { width: 50, legs: [60, 12], bends: [{ angle: 180, direction: "up", hem: "teardrop", gap: 4 }] } });
+  const [bend] = part.bends;
+  const far = part.faces[1]?.outline.map(([x]) => x) ?? [];
+  const tip = foldPoint(part, 1, [bend?.angle ?? 0], [Math.max(...far), 25, 1]);
+  // The inside edge of the tip comes down to the sheet's top, 1 high.
+  expect(tip[2]).toBeCloseTo(1, 9);
+  expect(bend?.insideRadius).toBe(2);
 });
