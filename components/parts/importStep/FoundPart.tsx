@@ -12,6 +12,7 @@ import { useToast } from "@/components/ui/ToastProvider";
 import { formatLength } from "@/lib/format/formatLength";
 import { formatNumber } from "@/lib/format/formatNumber";
 import { useCreatePart } from "@/lib/queries/parts";
+import { useShopTable } from "@/lib/queries/shopTable";
 import { FlatDrawing } from "../drawing/FlatDrawing";
 import { FlatFacts } from "../drawing/FlatFacts";
 import { FoundBends } from "./FoundBends";
@@ -36,8 +37,9 @@ export function FoundPart({ fileName, part, mesh, materials, onAnother }: FoundP
   const create = useCreatePart();
   const usual = materials.find(({ id }) => id === "S235") ?? materials[0];
   const [form, setForm] = useState<ImportForm>(() => startImportForm(part, fileName, usual?.id ?? ""));
+  const { data: shopTable } = useShopTable(form.material);
   const [marked, setMarked] = useState<readonly number[]>([]);
-  const { model, problems } = useMemo(() => importedModel(part, form, materials), [part, form, materials]);
+  const { model, problems } = useMemo(() => importedModel(part, form, materials, shopTable), [part, form, materials, shopTable]);
   const problemAt = (path: string) => problems.find((problem) => problem.path === path)?.message;
   const change = (next: Partial<ImportForm>) => setForm((old) => ({ ...old, ...next }));
   const save = (event: FormEvent) => {

@@ -6,7 +6,7 @@ import { TextInput } from "@/components/ui/TextInput";
 import type { ImportForm } from "./importForm";
 
 const rules: readonly { readonly value: ImportForm["rule"]; readonly label: string }[] = [
-  { value: "default", label: "By the material, as usual" },
+  { value: "default", label: "As usual: the shop’s measured value, else the material’s rule" },
   { value: "shop", label: "Shop’s measured values first" },
   { value: "din6935", label: "DIN 6935" },
   { value: "machinery", label: "Straight length by material group" },

@@ -9,6 +9,7 @@ import { flatPattern, type FlatPattern } from "@/bending/part/flatPattern";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PartModel } from "@/bending/part/partModel";
 import { readPartDocument } from "@/bending/part/readPartDocument";
+import type { ShopTable } from "@/bending/shopTable/shopCell";
 import { parseAngle } from "@/lib/format/parseAngle";
 import { parseLength } from "@/lib/format/parseLength";
 import { degreesOf, type ImportForm } from "./importForm";
@@ -24,7 +25,7 @@ export interface ImportedModel {
 const WRITTEN = 5.1e-4;
 
 /** The document that the form stands for, with its part; and what must be mended, by the form's fields. */
-export function importedModel(found: RecognisedPart, form: ImportForm, materials: readonly MaterialFacts[]): { readonly model: ImportedModel | null; readonly problems: readonly FieldProblem[] } {
+export function importedModel(found: RecognisedPart, form: ImportForm, materials: readonly MaterialFacts[], shopTable: ShopTable | undefined): { readonly model: ImportedModel | null; readonly problems: readonly FieldProblem[] } {
   const byId = (id: string) => materials.find((material) => material.id === id);
   const problems: FieldProblem[] = [];
   const read = (path: string, parsed: ReturnType<typeof parseAngle>, as: number, least: number): number | undefined => {
@@ -46,9 +47,9 @@ export function importedModel(found: RecognisedPart, form: ImportForm, materials
     name: form.name.trim(), material: form.material, bends,
     ...(form.rule === "default" ? {} : { rule: form.rule }), ...(thickness === undefined ? {} : { thickness }),
   };
-  const document = readPartDocument(importedDocument(found, choices, { materials: byId }));
+  const document = readPartDocument(importedDocument(found, choices, { materials: byId, shopTable }));
   if (!document.ok) return { model: null, problems: document.error };
-  const part = buildPart(document.value, { materials: byId });
+  const part = buildPart(document.value, { materials: byId, shopTable });
   if (!part.ok) return { model: null, problems: part.error };
   return { model: { document: document.value, part: part.value, flat: flatPattern(part.value), folded: checkFolded(part.value, found) }, problems: [] };
 }
