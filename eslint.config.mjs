@@ -24,7 +24,7 @@ const zones = [
   zone("./db", "./lib", "db/ imports lib/env only.", ["./env.ts"]),
   zone("./lib", "./app", "lib/ never imports app."),
   zone("./lib", "./components", "lib/ never imports components."),
-  ...["schemas", "format", "queries", "exchange", "csv", "calculator", "sheet", "mail"].map((folder) =>
+  ...["schemas", "format", "queries", "exchange", "csv", "calculator", "sheet", "step", "mail"].map((folder) =>
     zone(`./lib/${folder}`, "./db", "Only lib/services, lib/jobs and lib/auth touch the database.")),
   ...["schemas", "format", "queries", "csv", "calculator", "sheet"].map((folder) =>
     zone(`./lib/${folder}`, "./lib/services", "lib/services is for the server only.")),
