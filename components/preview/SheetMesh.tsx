@@ -4,7 +4,8 @@ import type { ThreeEvent } from "@react-three/fiber";
 import { useMemo } from "react";
 import { DoubleSide, EdgesGeometry, type Plane } from "three";
 import type { Frame } from "@/bending/geometry/frame";
-import type { Bend, Face, FormedAngles, PartModel } from "@/bending/part/partModel";
+import type { FlatRegion, FormedAngles, PartModel } from "@/bending/part/partModel";
+import { sheetRegions } from "@/bending/part/sheetRegions";
 import { bendGeometry } from "./bendGeometry";
 import { faceGeometry } from "./faceGeometry";
 import { frameMatrix } from "./frameMatrix";
@@ -13,6 +14,7 @@ import { DRAGGED_PX } from "./PickEdges";
 import { SideLetters } from "./SideLetters";
 import { stageColours, type StageTheme } from "./stageColours";
 import { useDispose } from "./useDispose";
+import { zoneGeometry } from "./zoneGeometry";
 
 interface SheetMeshProps {
   readonly part: PartModel;
@@ -26,23 +28,24 @@ interface SheetMeshProps {
 
 /** The sheet folded so far: faces, bend arcs, edges, and the letters of its two sides. */
 export function SheetMesh({ part, frames, angles, theme, clip, letters = true, picking }: SheetMeshProps) {
+  const cut = useMemo(() => (part.holesAcross.length === 0 && part.bends.every(({ region }) => region === null) ? null : sheetRegions(part)), [part]);
   return (
     <group>
       {part.faces.map((face, index) => {
         const frame = frames[index];
-        return frame ? <FaceMesh key={face.id} face={face} thickness={part.thickness} frame={frame} theme={theme} clip={clip}
-          picked={picking?.picked === face.id} onPick={picking === undefined ? undefined : () => picking.onFace(face.id)} /> : null;
+        return frame ? (cut?.faces[index] ?? [face]).map((region, piece) => <FaceMesh key={`${face.id} ${piece}`} face={region} thickness={part.thickness} frame={frame} theme={theme} clip={clip}
+          picked={picking?.picked === face.id} onPick={picking === undefined ? undefined : () => picking.onFace(face.id)} />) : null;
       })}
       {part.bends.map((bend, index) => {
         const frame = frames[bend.parent];
-        return frame ? <BendMesh key={bend.id} bend={bend} thickness={part.thickness} angle={angles[index] ?? 0} frame={frame} theme={theme} clip={clip} /> : null;
+        return frame ? <BendMesh key={bend.id} part={part} index={index} regions={cut?.zones[index] ?? null} angle={angles[index] ?? 0} frame={frame} theme={theme} clip={clip} /> : null;
       })}
       {letters ? <SideLetters part={part} frames={frames} theme={theme} /> : null}
     </group>
   );
 }
 
-interface PieceProps { readonly thickness: number; readonly frame: Frame; readonly theme: StageTheme; readonly clip: readonly Plane[] | undefined }
+interface PieceProps { readonly frame: Frame; readonly theme: StageTheme; readonly clip: readonly Plane[] | undefined }
 
 function SheetMaterials({ theme, clip }: Pick<PieceProps, "theme" | "clip">) {
   const colours = stageColours[theme];
@@ -54,7 +57,8 @@ function SheetMaterials({ theme, clip }: Pick<PieceProps, "theme" | "clip">) {
 }
 
 interface FaceMeshProps extends PieceProps {
-  readonly face: Face;
+  readonly face: FlatRegion;
+  readonly thickness: number;
   readonly picked: boolean;
   readonly onPick: (() => void) | undefined;
 }
@@ -74,10 +78,19 @@ function FaceMesh({ face, thickness, frame, theme, clip, picked, onPick }: FaceM
   );
 }
 
-const closed = ({ outline }: Face) => [...outline, ...outline.slice(0, 1)];
+const closed = ({ outline }: FlatRegion) => [...outline, ...outline.slice(0, 1)];
 
-function BendMesh({ bend, thickness, angle, frame, theme, clip }: PieceProps & { readonly bend: Bend; readonly angle: number }) {
-  const solid = useMemo(() => bendGeometry(bend, thickness, angle), [bend, thickness, angle]);
+interface BendMeshProps extends PieceProps {
+  readonly part: PartModel;
+  readonly index: number;
+  /** The sheet within the zone where it is not simply the whole zone. */
+  readonly regions: readonly FlatRegion[] | null;
+  readonly angle: number;
+}
+
+function BendMesh({ part, index, regions, angle, frame, theme, clip }: BendMeshProps) {
+  const bend = part.bends[index];
+  const solid = useMemo(() => (regions === null && bend !== undefined ? bendGeometry(bend, part.thickness, angle) : zoneGeometry(part, index, regions ?? [], angle)), [part, index, bend, regions, angle]);
   useDispose(solid);
   return (
     <mesh geometry={solid} matrixAutoUpdate={false} matrix={frameMatrix(frame)}><SheetMaterials theme={theme} clip={clip} /></mesh>
