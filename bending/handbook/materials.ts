@@ -58,9 +58,9 @@ const ROWS: readonly (readonly [MaterialGroup, readonly Row[]])[] = [
     { id: "DC01", name: "Cold-rolled steel DC01", standard: "EN 10130", tensile: [270, 410], yield: 280, straight: "medium", strengths: published("EN 10130 / EN 10139; yield is the standard's maximum") },
     { id: "DC04", name: "Cold-rolled drawing steel DC04", standard: "EN 10130", tensile: [270, 370], yield: 240, straight: "medium", strengths: published("EN 10139; yield is the standard's maximum") },
     { id: "S235", name: "Structural steel S235", designation: "S235JR", standard: "EN 10025-2", tensile: [360, 510], yield: 235, straight: "medium", strengths: table7 },
-    { id: "S275", name: "Structural steel S275", designation: "S275JR", standard: "EN 10025-2", tensile: [410, 580], yield: 275, straight: "medium", strengths: table7Widened },
-    { id: "S355", name: "Structural steel S355", designation: "S355JR", standard: "EN 10025-2", tensile: [470, 680], yield: 355, straight: "hard", radiusPerV: 0.17, minimumRadii: S355_RADII, strengths: table7Widened,
-      origins: { naturalRadiusRatio: memory("upper end of 15 to 17 % of the V (trade magazine), from memory"), minimumRadii: published("DIN 6935 (1975-10) for 510 MPa") } },
+    { id: "S275", name: "Structural steel S275", designation: "S275JR", standard: "EN 10025-2", tensile: [410, 580], yield: 275, straight: "medium", strengths: table7, origins: { tensile: table7Widened } },
+    { id: "S355", name: "Structural steel S355", designation: "S355JR", standard: "EN 10025-2", tensile: [470, 680], yield: 355, straight: "hard", radiusPerV: 0.17, minimumRadii: S355_RADII, strengths: table7,
+      origins: { tensile: table7Widened, naturalRadiusRatio: memory("upper end of 15 to 17 % of the V (trade magazine), from memory"), minimumRadii: published("DIN 6935 (1975-10) for 510 MPa") } },
   ]],
   ["stainless", [
     { id: "1.4301", name: "Stainless steel 1.4301 (304)", designation: "X5CrNi18-10", standard: "EN 10088-2", tensile: [540, 750], yield: 230, straight: "hard", strengths: memory("EN 10088-2 cold strip, from memory") },

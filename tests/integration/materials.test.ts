@@ -40,7 +40,8 @@ describe("a material's versions", () => {
   it("begin with 1, and each change is another with who, why and what", async () => {
     expect((await detail("S275")).material).toMatchObject({ version: 1, withdrawn: null });
     const before = await detail("S275");
-    const facts = { ...materialById("S275")!, yield: 290, origins: { ...steel.origins, yield: { kind: "shop", text: "certificate 4711" } } };
+    const old = materialById("S275")!;
+    const facts = { ...old, yield: 290, origins: { ...old.origins, yield: { kind: "shop", text: "certificate 4711" } } };
     const saved = await change("S275", 1, facts, "new supplier");
     expect(saved.status).toBe(200);
     const after = saved.body as unknown as MaterialDetail;
