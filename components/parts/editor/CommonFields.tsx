@@ -13,7 +13,7 @@ import { fieldId } from "./fieldId";
 import { PathField } from "./PathField";
 
 const rules: readonly { readonly value: PartDraft["rule"]; readonly label: string }[] = [
-  { value: "default", label: "By the material: DIN 6935 for steel, else straight length" },
+  { value: "default", label: "As usual: the shop’s measured value, else the material’s rule" },
   { value: "shop", label: "Shop’s measured values first" },
   { value: "din6935", label: "DIN 6935" },
   { value: "machinery", label: "Straight length by material group" },
@@ -51,7 +51,7 @@ export function CommonFields({ materials }: { readonly materials: readonly Offer
       <PathField path="kFactor" label="K-factor (only to override)" kind="number" value={draft.kFactor} onChange={(kFactor) => set({ kFactor })} placeholder="from the rule" />
       <Select id={fieldId("rule")} label="Bend allowance by" value={draft.rule} options={rules} error={problemAt("rule")} className="col-span-2"
         onChange={(value) => { const rule = rules.find((one) => one.value === value); if (rule !== undefined) set({ rule: rule.value }); }} />
-      {draft.shape === "profile" ? null : <CutFields at="" relief={draft.relief} corner={draft.corner} otherwise={{ relief: "none", corner: "open" }} onChange={set} />}
+      {draft.shape !== "base" ? null : <CutFields at="" relief={draft.relief} corner={draft.corner} otherwise={{ relief: "none", corner: "open" }} onChange={set} />}
       <Select id={fieldId("grain")} label="Rolling direction (grain)" value={draft.grain} options={grains} error={problemAt("grain")}
         onChange={(value) => set({ grain: grains.find((one) => one.value === value)?.value ?? "absent" })} />
       {draft.grain === "angle" ? <PathField path="grain" label="From x, counter-clockwise" kind="angle" value={draft.grainAngle} onChange={(grainAngle) => set({ grainAngle })} /> : null}
