@@ -15,7 +15,7 @@ export const permissions = {
   "tools:read": ["engineer", "operator", "toolroom", "manager"],
   "tools:write": ["toolroom"],
   "machines:read": ["engineer", "toolroom", "manager"],
-  "materials:read": ["engineer", "toolroom", "manager"],
+  "materials:read": ["engineer", "operator", "toolroom", "manager"],
   "materials:write": ["engineer"],
   "settings:read": ["engineer", "toolroom", "manager"],
   "settings:write": ["engineer"],

@@ -1,5 +1,6 @@
 "use client";
 import { useEffect, useMemo, useRef, type ClipboardEvent, type Dispatch, type KeyboardEvent, type SetStateAction } from "react";
+import { flushSync } from "react-dom";
 import { cellId } from "./cellId";
 import { isBlankLine } from "./isBlankLine";
 import { newTrialId } from "./newTrialId";
@@ -11,7 +12,7 @@ import type { LineField, TrialDraft, TrialLine } from "./trialDraft";
 /** A mark alone in a cell stands for what is above it, as on paper. */
 const ditto = new Set(['"', "″", "”", "''"]);
 
-const focusCell = (line: string, field: LineField) => requestAnimationFrame(() => document.getElementById(cellId(line, field))?.focus());
+const focusCell = (line: string, field: LineField) => document.getElementById(cellId(line, field))?.focus();
 
 /**
  * What keys and pasting do in the grid: Enter goes to the next line, from the last one with work in it to a new one; arrows up and down
@@ -21,7 +22,8 @@ export function useTrialRows(draft: TrialDraft, setDraft: Dispatch<SetStateActio
   const now = useRef({ draft, lines: draft.lines, onSave, onRemoved });
   useEffect(() => { now.current = { draft, lines: draft.lines, onSave, onRemoved }; });
   return useMemo(() => {
-    const setLines = (next: (lines: readonly TrialLine[]) => readonly TrialLine[]) => setDraft((old) => ({ ...old, lines: next(old.lines) }));
+    // On the screen before the key is done with: whoever types fast must not type into the cell before.
+    const setLines = (next: (lines: readonly TrialLine[]) => readonly TrialLine[]) => flushSync(() => setDraft((old) => ({ ...old, lines: next(old.lines) })));
     const at = (line: string) => now.current.lines.findIndex(({ id }) => id === line);
     const remove = (line: string) => {
       const { lines } = now.current;

@@ -18,6 +18,12 @@ function read(key: string): Stored | null {
   }
 }
 
+/** The text field that is being typed in; null when something else is used. */
+function fieldInUse(): string | null {
+  const used = document.activeElement;
+  return used instanceof HTMLTextAreaElement || (used instanceof HTMLInputElement && used.type === "text") ? used.id : null;
+}
+
 /**
  * What is being typed, kept in this browser until it is saved or thrown away: it survives a reload, a failed
  * save and a lost network. `basedOn` is the revision it started from (0: a new part).
@@ -48,16 +54,16 @@ export function useStoredDraft(name: string, basedOn: number, start: () => PartD
     return () => window.removeEventListener("pagehide", leave);
   }, []);
   const forget = () => window.localStorage.removeItem(key);
-  const change = (next: (old: PartDraft) => PartDraft, together: boolean) => {
+  const change = (next: (old: PartDraft) => PartDraft, field: string | null) => {
     const now = Date.now();
-    setHistory((old) => changeHistory(old, next(old.draft), now, together));
+    setHistory((old) => changeHistory(old, next(old.draft), now, field));
   };
-  const setDraft = (next: (old: PartDraft) => PartDraft) => change(next, true);
+  const setDraft = (next: (old: PartDraft) => PartDraft) => change(next, fieldInUse());
   const undo = () => {
     if (past.at(-1) === begun.start) forget();
     setHistory(undoHistory);
   };
   const redo = () => setHistory(redoHistory);
-  const startAgain = () => { forget(); change(() => begun.start, false); setBase(basedOn); setRestoredAt(null); };
+  const startAgain = () => { forget(); change(() => begun.start, null); setBase(basedOn); setRestoredAt(null); };
   return { draft, setDraft, undo: past.length === 0 ? null : undo, redo: future.length === 0 ? null : redo, basedOn: base, setBasedOn: setBase, restoredAt, changed, forget, startAgain };
 }
