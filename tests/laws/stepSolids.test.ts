@@ -4,6 +4,7 @@ import { importedDocument } from "@/bending/exchange/step/importedDocument";
 import type { RecognisedPart } from "@/bending/exchange/step/recognisedPart";
 import { toPartDocument } from "@/bending/exchange/step/toPartDocument";
 import { identityFrame } from "@/bending/geometry/identityFrame";
+import { signedArea } from "@/bending/geometry/signedArea";
 import { materialById } from "@/bending/handbook/materials";
 import { flatPattern } from "@/bending/part/flatPattern";
 import type { BulgeVertex } from "@/bending/part/partModel";
@@ -91,6 +92,66 @@ test("a slot across a bend is kept, and the flat is that of the part with the sl
   const allowance = model.bends[0]?.allowance ?? 0;
   expect(model.holesAcross.map(({ bends }) => bends)).toEqual([[0]]);
   expect(flatPattern(closed).area - flatPattern(model).area).toBeCloseTo(10 * (10 + allowance + 7), 6);
+});
+
+describe.each(["up", "down"] as const)("cut-outs that end inside a bend, bent %s", (direction) => {
+  /** A base of 60 x 40 with a flange of 25 at y = 0, bent to `direction`; one at y = 40, bent up, says which side is the top. */
+  const solid = () => solidOfPart(kernel, mustBuild({
+    ...head, dimension: "tangent", base: { outline: [[0, 0], [60, 0], [60, 40], [0, 40]] },
+    flanges: [{ id: "front", on: "base", edge: 0, length: 25, angle: 90, direction }, { id: "back", on: "base", edge: 2, length: 20, angle: 90, direction: "up" }],
+  }));
+  const [sense, height] = direction === "up" ? [-1, 5] : [1, -3];
+  /** Out of the front bend, whose axis lies at y = 0 and `height`: 10 long from x on, between two angles from the base, from one radius to another. */
+  const sector = (x: number, from: number, to: number, [least, most]: readonly [number, number] = [2, 6]): TopoDS_Shape => {
+    const axis = new kernel.gp_Ax1(new kernel.gp_Pnt(0, 0, height), new kernel.gp_Dir(sense, 0, 0));
+    const at = (along: number, radius: number) => new kernel.gp_Pnt(along, -Math.sin(from) * radius, height + sense * Math.cos(from) * radius);
+    const corners = [at(x, least), at(x + 10, least), at(x + 10, most), at(x, most)];
+    const wire = new kernel.BRepBuilderAPI_MakeWire();
+    corners.forEach((corner, i) => wire.Add(new kernel.BRepBuilderAPI_MakeEdge(corner, corners[(i + 1) % 4] ?? corner).Edge()));
+    return new kernel.BRepPrimAPI_MakeRevol(new kernel.BRepBuilderAPI_MakeFace(wire.Wire(), true).Face(), axis, to - from, true).Shape();
+  };
+  const third = Math.PI / 6;
+  const cuts = (...tools: readonly TopoDS_Shape[]) => read(tools.reduce(cut, solid()));
+
+  test("begun in the base, wholly inside the bend, begun in the flange: each is kept as far as it goes", () => {
+    const intoFlange = box([45, -6, height > 0 ? height : height - 7], [10, 4, 7]);
+    const part = cuts(sector(5, 0, third), box([5, 0, -1], [10, 8, 4]), sector(25, third, 2 * third), sector(45, 2 * third, 3 * third), intoFlange);
+    const model = mustBuild(importedDocument(part, { name: "Tray", material: "S235" }, { materials: materialById }));
+    const closed = mustBuild(toPartDocument(part, { name: "Tray", material: "S235" }));
+    const front = model.bends.findIndex((_, i) => (part.bends[i]?.windows.length ?? 0) > 0);
+    const allowance = model.bends[front]?.allowance ?? 0;
+    expect(part.bends[front]).toMatchObject({ direction, length: expect.closeTo(60, 9) });
+    // Each 10 wide and a third of the quarter turn long; 8 more in the base, 7 more in the flange.
+    const areas = model.holesAcross.map(({ outline }) => Math.abs(signedArea(outline)));
+    expect(areas.sort((a, b) => a - b)).toEqual([0, 7, 8].map((onPlate) => expect.closeTo(10 * (onPlate + allowance / 3), 6)));
+    expect(model.holesAcross.map(({ bends, faces }) => [bends, faces.length])).toEqual(expect.arrayContaining([[[front], 0], [[front], 1], [[front], 1]]));
+    expect(flatPattern(closed).area - flatPattern(model).area).toBeCloseTo(10 * (15 + allowance), 6);
+    expect([part.leftOut, part.volume / part.solidVolume]).toEqual([[], expect.closeTo(1, 9)]);
+    expect(part.notes).toEqual([expect.stringMatching(/^3 cut-outs reach into the bend at faces \d+ and \d+: drawn in the flat/)]);
+  });
+
+  test("in one of the bend's two sides only: left closed, and said with its faces", () => {
+    const part = cuts(sector(25, third, 2 * third, [4, 6]));
+    expect(part.bends.map(({ windows }) => windows.length)).toEqual([0, 0]);
+    expect(part.notes).toEqual([expect.stringMatching(/^A cut-out in the bend at faces \d+ and \d+ is on one of its two sides only: it is left closed/)]);
+    expect(part.leftOut).toHaveLength(1);
+  });
+
+  test("at the end of the bend between the plates: taken straight, and said with its faces", () => {
+    const part = cuts(sector(-5, third, 2 * third));
+    expect(part.bends.map(({ length }) => length)).toEqual([expect.closeTo(60, 9), expect.closeTo(60, 9)]);
+    expect(part.notes).toEqual([expect.stringMatching(/^An end of the bend at faces \d+ and \d+ is not straight/)]);
+  });
+});
+
+test("a round hole across a bend keeps its shape: between its rims it follows the bend, not a straight line", () => {
+  // Drilled along the bisector of the bend, whose axis lies at x = 35, z = 5: its sides in the bend are no straight lines.
+  const drill = new kernel.BRepPrimAPI_MakeCylinder(new kernel.gp_Ax2(new kernel.gp_Pnt(25, 30, 15), new kernel.gp_Dir(1, 0, -1), new kernel.gp_Dir(0, 1, 0)), 8, 40).Shape();
+  const part = read(cut(angle(), drill));
+  const [window] = part.bends[0]?.windows ?? [];
+  const widest = window?.pieces.flatMap((piece) => (piece.on === "bend" ? piece.path.map(([along]) => along) : [])) ?? [];
+  // The drill is 16 across where the bisector meets the bend.
+  expect(Math.max(...widest) - Math.min(...widest)).toBeCloseTo(16, 2);
 });
 
 describe("what is no sheet-metal part", () => {

@@ -1,18 +1,65 @@
-import type { BendWindow, OutlineVertex } from "./recognisedPart";
+import { SOLID_MATCH_MM } from "../../core/tolerance";
+import { chainRims, type PlateRim } from "./chainRims";
+import type { GrownBend } from "./growTree";
+import type { BendWindow } from "./recognisedPart";
+import type { Solid } from "./solid";
+import { unrollBend, type BendRun } from "./unrollBend";
+import { zoneHoles } from "./zoneHoles";
+import type { Frame } from "../../geometry/frame";
 
-/** Pairs what is cut out of the parent's edge along a bend with what is cut out of the child's, by where they lie along it. */
-export function bendWindows(
-  onParent: readonly (readonly OutlineVertex[])[], onChild: readonly (readonly OutlineVertex[])[], outline: readonly OutlineVertex[], edge: number, start: number,
-): readonly BendWindow[] {
-  const [from, to] = [outline[edge], outline[(edge + 1) % outline.length]];
-  if (!from || !to) return [];
-  const length = Math.hypot(to[0] - from[0], to[1] - from[1]);
-  const along = ([x, y]: OutlineVertex) => ((x - from[0]) * (to[0] - from[0]) + (y - from[1]) * (to[1] - from[1])) / length - start;
-  return onParent.flatMap((rim): BendWindow[] => {
-    const [first, last] = [rim[0], rim[rim.length - 1]];
-    if (!first || !last) return [];
-    const middle = (along(first) + along(last)) / 2;
-    const facing = onChild.find((other) => Math.min(other[0]?.[0] ?? 0, other[other.length - 1]?.[0] ?? 0) < middle && Math.max(other[0]?.[0] ?? 0, other[other.length - 1]?.[0] ?? 0) > middle);
-    return facing ? [{ onParent: rim, onChild: facing }] : [];
+export interface BendWindows {
+  readonly windows: readonly BendWindow[];
+  /** Cut-outs that are left closed: into the bend from one plate, and on one side of the bend only. */
+  readonly closed: number;
+  readonly blind: number;
+  /** Holes wholly inside the bend that are wider on one side. */
+  readonly widened: number;
+  /** Ends of the bend that are not straight. */
+  readonly crooked: number;
+}
+
+/** Everything that is cut out of a bend, by the round face on the base's side: across it, into it from one plate, wholly inside it. */
+export function bendWindows(solid: Solid, bend: GrownBend, child: Frame, rims: readonly PlateRim[]): BendWindows {
+  const { joint, direction, parentEdges, childEdges } = bend;
+  const first = (direction === "up" ? joint.inner : joint.outer)[0].edges === parentEdges ? 0 : 1;
+  const beneath = direction === "up" ? joint.outer : joint.inner;
+  const unrolled = (onTop: boolean) => joint.faces.filter((face) => {
+    const surface = solid.faces[face]?.surface;
+    return surface?.kind === "cylinder" && (surface.convex === (direction === "down")) === onTop;
+  }).map((face) => unrollBend(solid, face, onTop ? { parent: parentEdges, child: childEdges } : { parent: beneath[first].edges, child: beneath[first === 0 ? 1 : 0].edges }, child, joint.angle));
+  const [top, under] = [unrolled(true), unrolled(false)];
+  const chained = chainRims(rims, top.flatMap(({ runs }) => runs));
+  const straight = straightAcross(chained.open);
+  const arc = joint.angle * Math.max(joint.insideRadius, ...joint.faces.map((face) => radiusOf(solid, face)));
+  const inside = zoneHoles(top.flatMap(({ holes }) => holes), under.flatMap(({ holes }) => holes), arc);
+  return {
+    windows: [...chained.windows, ...straight.map((pair) => ({ pieces: pair.map(({ on, rim }) => ({ on, rim })) })), ...inside.windows],
+    closed: chained.open.length - 2 * straight.length,
+    blind: inside.blind,
+    widened: inside.widened,
+    crooked: straight.length > 0 ? 0 : chained.unused.filter(isCrooked).length,
+  };
+}
+
+/** Rims that the round faces do not join (a sharp bend has none): one on each plate, facing one another, straight through the bend. */
+function straightAcross(rims: readonly PlateRim[]): readonly (readonly [PlateRim, PlateRim])[] {
+  return rims.filter(({ on }) => on === "parent").flatMap((rim) => {
+    const middle = (rim.from + rim.to) / 2;
+    const facing = rims.find(({ on, from, to }) => on === "child" && Math.min(from, to) < middle && Math.max(from, to) > middle);
+    return facing ? [[rim, facing] as const] : [];
+  });
+}
+
+const radiusOf = (solid: Solid, face: number): number => {
+  const surface = solid.faces[face]?.surface;
+  return surface?.kind === "cylinder" ? surface.radius : 0;
+};
+
+/** A rim of the bend, from one plate to the other, that leaves the straight line between its ends. */
+function isCrooked({ from, to, path }: BendRun): boolean {
+  const sense = from.on === "parent" ? 1 : -1;
+  return path.some(([along, turn]) => {
+    const part = sense > 0 ? turn : 1 - turn;
+    return Math.abs(along - from.along - (to.along - from.along) * part) > SOLID_MATCH_MM;
   });
 }

@@ -1,5 +1,6 @@
-import { bendWindows } from "./bendWindows";
+import { bendWindows, type BendWindows } from "./bendWindows";
 import { bridged } from "./bridged";
+import type { PlateRim } from "./chainRims";
 import type { FlatLoop } from "./flattenLoop";
 import type { GrownBend, GrownPlate } from "./growTree";
 import { outlineArea } from "./outlineArea";
@@ -9,6 +10,7 @@ import { pulledIn } from "./pulledIn";
 import { readHole } from "./readHole";
 import type { OutlineVertex, RecognisedBend, RecognisedPlate } from "./recognisedPart";
 import type { Solid } from "./solid";
+import type { BendSide } from "./unrollBend";
 
 export interface ReadPlate {
   readonly plate: RecognisedPlate;
@@ -54,12 +56,29 @@ function withoutOverrun({ vertices, edges }: FlatLoop, bends: readonly GrownBend
   }, vertices);
 }
 
-export function readBend(bend: GrownBend, parent: ReadPlate, child: ReadPlate): RecognisedBend {
+export interface ReadBend {
+  readonly bend: RecognisedBend;
+  readonly cutOuts: BendWindows;
+}
+
+export function readBend(solid: Solid, bend: GrownBend, parent: ReadPlate, child: ReadPlate): ReadBend {
   const { direction, joint, start, length, parentEdges, childEdges } = bend;
+  const { outline } = parent.plate;
   const parentEdge = parent.edges.findIndex((edge) => parentEdges.includes(edge));
+  const [from, to] = [outline[parentEdge], outline[(parentEdge + 1) % outline.length]];
+  const run = from && to ? Math.hypot(to[0] - from[0], to[1] - from[1]) : 0;
+  const alongParent = ([x, y]: OutlineVertex) => (from && to ? ((x - from[0]) * (to[0] - from[0]) + (y - from[1]) * (to[1] - from[1])) / run - start : 0);
+  const rimsOn = (on: BendSide, cutOuts: readonly (readonly OutlineVertex[])[], along: (p: OutlineVertex) => number) => cutOuts.flatMap((rim): readonly PlateRim[] => {
+    const [first, last] = [rim[0], rim[rim.length - 1]];
+    return first && last ? [{ on, rim, from: along(first), to: along(last) }] : [];
+  });
+  const rims = [...rimsOn("parent", parent.cutOuts.get(bend) ?? [], alongParent), ...rimsOn("child", child.cutOuts.get(bend) ?? [], ([x]) => x)];
+  const cutOuts = bendWindows(solid, bend, child.plate.frame, rims);
   return {
-    parent: bend.parent, child: bend.child, direction, angle: joint.angle, insideRadius: joint.insideRadius, start, length, faces: joint.faces,
-    parentEdge, childEdge: child.edges.findIndex((edge) => childEdges.includes(edge)),
-    windows: bendWindows(parent.cutOuts.get(bend) ?? [], child.cutOuts.get(bend) ?? [], parent.plate.outline, parentEdge, start),
+    bend: {
+      parent: bend.parent, child: bend.child, direction, angle: joint.angle, insideRadius: joint.insideRadius, start, length, faces: joint.faces,
+      parentEdge, childEdge: child.edges.findIndex((edge) => childEdges.includes(edge)), windows: cutOuts.windows,
+    },
+    cutOuts,
   };
 }

@@ -41,10 +41,11 @@ export function recogniseSheet(solid: Solid): Result<RecognisedPart, string> {
 function assemble(solid: Solid, topology: SolidTopology, tree: GrownTree, thickness: number): Result<RecognisedPart, string> {
   const read = tree.plates.map((plate, i) => readPlate(solid, plate, tree.bends.filter(({ parent, child }) => parent === i || child === i)));
   const plates = read.flatMap((plate) => (plate ? [plate.plate] : []));
-  const bends = tree.bends.flatMap((bend) => {
+  const readBends = tree.bends.flatMap((bend) => {
     const [parent, child] = [read[bend.parent], read[bend.child]];
-    return parent && child ? [readBend(bend, parent, child)] : [];
+    return parent && child ? [readBend(solid, bend, parent, child)] : [];
   });
+  const bends = readBends.map(({ bend }) => bend);
   if (plates.length !== tree.plates.length) return fail("This is not a sheet-metal part that can be read: one of its plates has no outline.");
   const volume = recognisedVolume(plates, bends, thickness);
   const part = volume / solid.volume;
@@ -54,7 +55,7 @@ function assemble(solid: Solid, topology: SolidTopology, tree: GrownTree, thickn
   const roles = faceRoles(solid, topology, tree);
   return ok({
     thickness, plates, bends, roles, leftOut: describeLeftOut(solid, topology, roles),
-    notes: recognitionNotes(tree, read.flatMap((plate) => (plate ? [plate] : [])), bends), solidVolume: solid.volume, volume,
+    notes: recognitionNotes(tree, read.flatMap((plate) => (plate ? [plate] : [])), readBends), solidVolume: solid.volume, volume,
   });
 }
 

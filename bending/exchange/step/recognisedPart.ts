@@ -1,4 +1,5 @@
 import type { Frame } from "../../geometry/frame";
+import type { Vec2 } from "../../geometry/vec2";
 import type { BendDirection, DocumentHole } from "../../part/partDocument";
 
 /** A sheet-metal part found in a solid: plane plates joined by bends, millimetres and radians. Plate 0 is the base, a parent stands before its children, and `bends[i]` carries `plates[i + 1]`. */
@@ -48,15 +49,22 @@ export interface RecognisedBend {
   readonly length: number;
   /** Faces of the solid. */
   readonly faces: readonly number[];
-  /** Cut-outs that run across the bend from one plate into the other. */
+  /** Cut-outs that run across the bend, that reach into it from one plate, or that lie wholly inside it. */
   readonly windows: readonly BendWindow[];
 }
 
-/** A cut-out's rim on the parent and on the child, each in its plate's coordinates and counter-clockwise round the plate; between them it runs straight through the bend. */
+/** The rim of a cut-out in a bend, its pieces end to end, closed, the material on the left. */
 export interface BendWindow {
-  readonly onParent: readonly OutlineVertex[];
-  readonly onChild: readonly OutlineVertex[];
+  readonly pieces: readonly WindowPiece[];
 }
+
+/**
+ * On a plate: the rim in the plate's coordinates, its ends on the bend. In the bend: points at (mm along the bend from its start, part of the
+ * bend's angle from the parent, 0 to 1), without those that lie on a plate's rim.
+ */
+export type WindowPiece =
+  | { readonly on: "parent" | "child"; readonly rim: readonly OutlineVertex[] }
+  | { readonly on: "bend"; readonly path: readonly Vec2[] };
 
 /** Faces of the solid that belong together and are no plate, bend or edge of one. */
 export interface LeftOut {

@@ -1,17 +1,22 @@
 import type { DocumentHole } from "../../part/partDocument";
 import { outlineArea } from "./outlineArea";
 import type { OutlineVertex, RecognisedBend, RecognisedPlate } from "./recognisedPart";
+import { windowHole } from "./windowHole";
 
 /** mm³ of plates and bends: plate area times thickness; a bend is a sector of a ring, angle x ((r + t)² - r²) / 2 times its length. */
 export function recognisedVolume(plates: readonly RecognisedPlate[], bends: readonly RecognisedBend[], thickness: number): number {
   const flat = plates.reduce((sum, { outline, holes }) => sum + outlineArea(outline) - holes.reduce((holed, hole) => holed + holeArea(hole), 0), 0);
-  return bends.reduce((sum, { angle, insideRadius, length, windows }) => sum + (angle * (length - open(windows)) * ((insideRadius + thickness) ** 2 - insideRadius ** 2)) / 2, (flat - bends.reduce((sum, { windows }) => sum + windows.reduce((cut, { onParent, onChild }) => cut + Math.abs(outlineArea(onParent)) + Math.abs(outlineArea(onChild)), 0), 0)) * thickness);
+  return bends.reduce((sum, bend) => {
+    const { onPlates, inBend } = cutOut(bend, plates[bend.parent]?.outline ?? []);
+    return sum + (bend.angle * (bend.length - inBend) * ((bend.insideRadius + thickness) ** 2 - bend.insideRadius ** 2)) / 2 - onPlates * thickness;
+  }, flat * thickness);
 }
 
-/** How much of a bend's length is cut out: the mean of what is at its two sides. */
-function open(windows: RecognisedBend["windows"]): number {
-  const wide = (rim: readonly OutlineVertex[]) => Math.hypot((rim[0]?.[0] ?? 0) - (rim[rim.length - 1]?.[0] ?? 0), (rim[0]?.[1] ?? 0) - (rim[rim.length - 1]?.[1] ?? 0));
-  return windows.reduce((sum, { onParent, onChild }) => sum + (wide(onParent) + wide(onChild)) / 2, 0);
+/** What a bend's cut-outs take off: mm² of the plates, and mm of the bend's length. Laid with an allowance of 0 a cut-out is on the plates alone; each mm of allowance adds its mean length. */
+function cutOut(bend: RecognisedBend, outline: readonly OutlineVertex[]): { readonly onPlates: number; readonly inBend: number } {
+  const area = (allowance: number) => bend.windows.reduce((sum, window) => sum + Math.abs(outlineArea(windowHole(window, bend, outline, allowance))), 0);
+  const onPlates = area(0);
+  return { onPlates, inBend: area(1) - onPlates };
 }
 
 function holeArea(hole: DocumentHole): number {

@@ -1,14 +1,12 @@
 import { SOLID_MATCH_MM } from "../../core/tolerance";
 import type { GrownTree } from "./growTree";
-import type { ReadPlate } from "./readPlates";
-import type { RecognisedBend } from "./recognisedPart";
+import type { ReadBend, ReadPlate } from "./readPlates";
 
 /** Sides of a plate that differ by more than this part are worth a word. */
 const UNEVEN = 1e-4;
 
 /** What was taken a little differently from how the solid has it. */
-export function recognitionNotes(tree: GrownTree, plates: readonly ReadPlate[], bends: readonly RecognisedBend[]): readonly string[] {
-  const cutOuts = tree.bends.map((bend) => Math.max(...[bend.parent, bend.child].map((plate) => plates[plate]?.cutOuts.get(bend)?.length ?? 0)));
+export function recognitionNotes(tree: GrownTree, plates: readonly ReadPlate[], bends: readonly ReadBend[]): readonly string[] {
   const faces = (numbers: readonly number[]) => `${numbers.length === 1 ? "face" : "faces"} ${numbers.map((face) => face + 1).join(" and ")}`;
   return [
     ...tree.bends.flatMap(({ joint, unequal, length }) => [
@@ -17,11 +15,15 @@ export function recognitionNotes(tree: GrownTree, plates: readonly ReadPlate[], 
         ? `The bend between ${faces(joint.inner.map(({ face }) => face))} is sharp inside and outside: taken with inside radius 0 and a round outside. Give it the radius that will be bent.`
         : `The bend between ${faces(joint.inner.map(({ face }) => face))} is sharp inside: taken with inside radius 0. Give it the radius that will be bent.`] : []),
     ]),
-    ...bends.flatMap(({ faces: numbers, windows }, i) => {
-      const open = cutOuts[i] ?? 0;
+    ...bends.flatMap(({ bend, cutOuts: { windows, closed, blind, widened, crooked } }) => {
+      const at = `the bend at ${faces(bend.faces)}`;
+      const wider = `${widened === 1 ? "A hole" : `${widened} holes`} in ${at} ${widened === 1 ? "is" : "are"} wider on one side: taken at the narrower.`;
       return [
-        ...(windows.length > 0 ? [`${windows.length === 1 ? "A cut-out runs" : `${windows.length} cut-outs run`} across the bend at ${faces(numbers)}: drawn in the flat by the allowance that the bend has now.`] : []),
-        ...(open > windows.length ? [`A cut-out reaches into the bend at ${faces(numbers)} from one side only: it is left closed.`] : []),
+        ...(windows.length > 0 ? [`${windows.length === 1 ? "A cut-out reaches" : `${windows.length} cut-outs reach`} into ${at}: drawn in the flat by the allowance that the bend has now.`] : []),
+        ...(widened > 0 ? [wider] : []),
+        ...(closed > 0 ? [`A cut-out reaches into ${at} from one side only: it is left closed.`] : []),
+        ...(blind > 0 ? [`A cut-out in ${at} is on one of its two sides only: it is left closed.`] : []),
+        ...(crooked > 0 ? [`${crooked === 1 ? "An end" : `${crooked} ends`} of ${at} ${crooked === 1 ? "is" : "are"} not straight, such as notched: taken straight.`] : []),
       ];
     }),
     ...tree.closing.map((joint) => `The bend at ${faces(joint.faces.length > 0 ? joint.faces : joint.inner.map(({ face }) => face))} joins plates that are joined already: a ring, or a bend cut in two. It is left open.`),
