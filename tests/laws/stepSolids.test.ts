@@ -144,6 +144,15 @@ describe.each(["up", "down"] as const)("cut-outs that end inside a bend, bent %s
   });
 });
 
+test("a cut-out into a bend square to the base and not to the bend: taken as the base's side has it, and said", () => {
+  // From 10 before the bend to 1.5 past its start, straight down: asin(1.5 / 3), a third of the quarter turn, on its inside.
+  const part = read(cut(angle(), box([25, 20, -1], [11.5, 10, 4])));
+  const choices = { name: "Angle", material: "S235" } as const;
+  const model = mustBuild(importedDocument(part, choices, { materials: materialById }));
+  expect(model.holesAcross.map(({ outline }) => Math.abs(signedArea(outline)))).toEqual([expect.closeTo(10 * (10 + (model.bends[0]?.allowance ?? 0) / 3), 6)]);
+  expect(part.notes).toEqual([expect.stringContaining("A cut-out reaches into the bend"), expect.stringMatching(/^Rims of cut-outs in the bend at faces \d+ and \d+ are not square to the sheet: taken as they are on face \d+\.$/)]);
+});
+
 test("a round hole across a bend keeps its shape: between its rims it follows the bend, not a straight line", () => {
   // Drilled along the bisector of the bend, whose axis lies at x = 35, z = 5: its sides in the bend are no straight lines.
   const drill = new kernel.BRepPrimAPI_MakeCylinder(new kernel.gp_Ax2(new kernel.gp_Pnt(25, 30, 15), new kernel.gp_Dir(1, 0, -1), new kernel.gp_Dir(0, 1, 0)), 8, 40).Shape();

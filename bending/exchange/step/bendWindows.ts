@@ -1,11 +1,12 @@
 import { SOLID_MATCH_MM } from "../../core/tolerance";
+import type { Frame } from "../../geometry/frame";
 import { chainRims, type PlateRim } from "./chainRims";
 import type { GrownBend } from "./growTree";
+import { leaningRuns } from "./leaningRuns";
 import type { BendWindow } from "./recognisedPart";
 import type { Solid } from "./solid";
 import { unrollBend, type BendRun } from "./unrollBend";
 import { zoneHoles } from "./zoneHoles";
-import type { Frame } from "../../geometry/frame";
 
 export interface BendWindows {
   readonly windows: readonly BendWindow[];
@@ -14,6 +15,9 @@ export interface BendWindows {
   readonly blind: number;
   /** Holes wholly inside the bend that are wider on one side. */
   readonly widened: number;
+  /** Rims of cut-outs that are not square to the sheet; taken as they are on `face`, the round face on the base's side. */
+  readonly leaning: number;
+  readonly face: number | null;
   /** Ends of the bend that are not straight. */
   readonly crooked: number;
 }
@@ -23,12 +27,14 @@ export function bendWindows(solid: Solid, bend: GrownBend, child: Frame, rims: r
   const { joint, direction, parentEdges, childEdges } = bend;
   const first = (direction === "up" ? joint.inner : joint.outer)[0].edges === parentEdges ? 0 : 1;
   const beneath = direction === "up" ? joint.outer : joint.inner;
-  const unrolled = (onTop: boolean) => joint.faces.filter((face) => {
+  const facesOn = (onTop: boolean) => joint.faces.filter((face) => {
     const surface = solid.faces[face]?.surface;
     return surface?.kind === "cylinder" && (surface.convex === (direction === "down")) === onTop;
-  }).map((face) => unrollBend(solid, face, onTop ? { parent: parentEdges, child: childEdges } : { parent: beneath[first].edges, child: beneath[first === 0 ? 1 : 0].edges }, child, joint.angle));
+  });
+  const unrolled = (onTop: boolean) => facesOn(onTop).map((face) => unrollBend(solid, face, onTop ? { parent: parentEdges, child: childEdges } : { parent: beneath[first].edges, child: beneath[first === 0 ? 1 : 0].edges }, child, joint.angle));
   const [top, under] = [unrolled(true), unrolled(false)];
-  const chained = chainRims(rims, top.flatMap(({ runs }) => runs));
+  const runs = top.flatMap((face) => face.runs);
+  const chained = chainRims(rims, runs);
   const straight = straightAcross(chained.open);
   const arc = joint.angle * Math.max(joint.insideRadius, ...joint.faces.map((face) => radiusOf(solid, face)));
   const inside = zoneHoles(top.flatMap(({ holes }) => holes), under.flatMap(({ holes }) => holes), arc);
@@ -37,6 +43,8 @@ export function bendWindows(solid: Solid, bend: GrownBend, child: Frame, rims: r
     closed: chained.open.length - 2 * straight.length,
     blind: inside.blind,
     widened: inside.widened,
+    leaning: leaningRuns(runs.filter((run) => !chained.unused.includes(run)), under.flatMap((face) => face.runs), arc),
+    face: facesOn(true)[0] ?? null,
     crooked: straight.length > 0 ? 0 : chained.unused.filter(isCrooked).length,
   };
 }

@@ -15,11 +15,12 @@ export function recognitionNotes(tree: GrownTree, plates: readonly ReadPlate[], 
         ? `The bend between ${faces(joint.inner.map(({ face }) => face))} is sharp inside and outside: taken with inside radius 0 and a round outside. Give it the radius that will be bent.`
         : `The bend between ${faces(joint.inner.map(({ face }) => face))} is sharp inside: taken with inside radius 0. Give it the radius that will be bent.`] : []),
     ]),
-    ...bends.flatMap(({ bend, cutOuts: { windows, closed, blind, widened, crooked } }) => {
+    ...bends.flatMap(({ bend, cutOuts: { windows, closed, blind, widened, leaning, face, crooked } }) => {
       const at = `the bend at ${faces(bend.faces)}`;
       const wider = `${widened === 1 ? "A hole" : `${widened} holes`} in ${at} ${widened === 1 ? "is" : "are"} wider on one side: taken at the narrower.`;
       return [
         ...(windows.length > 0 ? [`${windows.length === 1 ? "A cut-out reaches" : `${windows.length} cut-outs reach`} into ${at}: drawn in the flat by the allowance that the bend has now.`] : []),
+        ...(leaning > 0 && face !== null ? [`Rims of cut-outs in ${at} are not square to the sheet: taken as they are on face ${face + 1}.`] : []),
         ...(widened > 0 ? [wider] : []),
         ...(closed > 0 ? [`A cut-out reaches into ${at} from one side only: it is left closed.`] : []),
         ...(blind > 0 ? [`A cut-out in ${at} is on one of its two sides only: it is left closed.`] : []),
