@@ -44,7 +44,7 @@ export function DataTable<Row>({ caption, columns, rows, rowKey, list, loading =
   }
   return (
     <div className="min-w-0">
-      <div className="overflow-x-auto border-y border-ink" tabIndex={0} role="region" aria-label={caption} aria-busy={loading}>
+      <div className="relative overflow-x-auto border-y border-ink" tabIndex={0} role="region" aria-label={caption} aria-busy={loading}>
         <table className="w-full border-collapse text-left">
           <caption className="sr-only">{caption}</caption>
           <thead>

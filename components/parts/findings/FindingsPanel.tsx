@@ -38,7 +38,7 @@ export function FindingsPanel({ findings, units, selected, onSelect, cureOf, sho
     <section ref={panel} tabIndex={-1} aria-labelledby={`${id}-title`} className="border border-steel-500 bg-sheet outline-offset-0">
       <div className={classes("flex flex-wrap items-center gap-x-3 gap-y-1 px-2 py-1", open && list.length > 0 && "border-b border-steel-500")}>
         <h2 id={`${id}-title`} className="caption">Findings</h2>
-        <div role="status" className={classes("flex grow flex-wrap items-center gap-2 text-sm", findings?.behind === true && "opacity-60")}>
+        <div role="status" aria-busy={findings?.behind === true} className="flex grow flex-wrap items-center gap-2 text-sm">
           {findings === null ? <span className="text-ink-faint">Judging the part…</span> : null}
           {findings !== null && list.length === 0 ? <StateMark tone="good">nothing found</StateMark> : null}
           {severities.map((severity) => {
