@@ -61,9 +61,8 @@ test("entries outlive a closed tab, and a save waits for the network and is made
   await again.goto("/parts/new");
   await expect(again.getByText("Your unsaved entries were brought back")).toBeVisible();
   await expect(again.getByLabel("Name", { exact: true })).toHaveValue(name);
-  const gone = again.evaluate(() => new Promise((known) => window.addEventListener("offline", () => known(true), { once: true })));
   await context.setOffline(true);
-  await gone;
+  await again.waitForFunction(() => !navigator.onLine);
   await again.keyboard.press("Control+s");
   await expect(again.getByText("No connection: saving as soon as it is back")).toBeVisible();
   await context.setOffline(false);
