@@ -9,7 +9,7 @@ import type { ShopLimits } from "../shopLimits";
 import { trialShop } from "./trialShop";
 
 export function built(document: PartDocument): PartModel {
-  const part = buildPart(document, { materials: materialById });
+  const part = buildPart(document, { materials: materialById, keepOverlaps: true });
   invariant(part.ok, part.ok ? "" : JSON.stringify(part.error));
   return part.value;
 }
