@@ -1,11 +1,12 @@
 import { mmPer, type LengthUnit } from "@/bending/core/units";
 import type { BendTrial, Instrument } from "@/bending/shopTable/bendTrial";
 
-/** What a line of the notebook says, in its own units; instruments are named by their ids. */
-export interface TrialEntry {
+/** One bent strip as written down: lengths in the line's own units, the angle in degrees turned through. */
+export interface TrialFigures {
   readonly id: string;
   readonly material: string;
   readonly batch: string;
+  /** What the sheet was bought as; null: the nearest usual thickness. */
   readonly nominal: number | null;
   readonly thickness: number;
   readonly vOpening: number;
@@ -14,7 +15,12 @@ export interface TrialEntry {
   readonly blank: number;
   readonly flangeA: number;
   readonly flangeB: number;
+  /** Null: not measured. */
   readonly insideRadius: number | null;
+}
+
+/** What a line of the notebook says, with what it was measured by (instruments by their ids) and when. */
+export interface TrialEntry extends TrialFigures {
   readonly lengthInstrument: string;
   readonly thicknessInstrument: string | null;
   readonly angleInstrument: string;

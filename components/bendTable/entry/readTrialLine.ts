@@ -5,25 +5,12 @@ import { formatLength } from "@/lib/format/formatLength";
 import { parseAngle } from "@/lib/format/parseAngle";
 import { parseLength } from "@/lib/format/parseLength";
 import { trialAngle, trialLimits, type TrialLengthField } from "@/lib/schemas/bendTableLimits";
+import type { TrialFigures } from "@/lib/schemas/bendTrialOf";
 import { fieldWords } from "./fieldWords";
 import type { AngleKind, LineField, TrialLine } from "./trialDraft";
 
-/** A line read: lengths in the units that are typed, the angle in degrees turned through. */
-export interface ReadLine {
-  readonly id: string;
-  readonly material: string;
-  readonly batch: string;
-  /** What the sheet was bought as; null: the nearest usual thickness. */
-  readonly nominal: number | null;
-  readonly thickness: number;
-  readonly vOpening: number;
-  readonly punchRadius: number;
-  readonly angle: number;
-  readonly blank: number;
-  readonly flangeA: number;
-  readonly flangeB: number;
-  /** Null: not measured. */
-  readonly insideRadius: number | null;
+/** A line read, in the units that are typed. */
+export interface ReadLine extends TrialFigures {
   readonly note: string;
 }
 
