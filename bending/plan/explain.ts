@@ -1,11 +1,9 @@
-import type { ClearanceHit } from "../clearance/clearance";
 import { hitSides } from "../clearance/hitSides";
-import { mmPer, toDeg } from "../core/units";
 import { formatLength } from "../core/formatLength";
+import { clearanceReason } from "./clearanceReason";
 import type { StepChecks } from "./createStepChecks";
 import { formatBends } from "./formatBends";
 import type { PlanReason } from "./planDocument";
-import { rounded } from "./rounded";
 import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
@@ -83,25 +81,5 @@ function stopsOf(situation: Situation, checks: StepChecks, move: number, formed:
   const met = blocked.length > 0 ? blocked : [tools.punch, tools.die].flatMap((tool) => clearance.evidence(hit, tools.punch, tools.die, tool));
   const worst = [...met].sort((a, b) => b.depth - a.depth)[0];
   if (worst === undefined) return reason("sections", [], [tools.punch.id, tools.die.id], `${name}: no run of real pieces of ${tools.punch.id} and ${tools.die.id} fits the room there is`, 5);
-  return [{ reason: clearanceReason(situation, bends, worst, [tools.punch.id, tools.die.id]), off: worst.depth }];
-}
-
-function clearanceReason({ part, units }: Situation, bends: readonly string[], hit: ClearanceHit, pair: readonly string[]): PlanReason {
-  const face = part.faces[hit.face]?.id ?? "";
-  const other = hit.otherFace === null ? null : part.faces[hit.otherFace]?.id ?? "";
-  const at = toDeg(hit.strokeAngle);
-  const name = formatBends(bends);
-  const depth = formatLength(Math.round(hit.depth * 10) / 10, units);
-  const message = hit.kind === "trapped" ? `${name} with ${pair[0] ?? ""}: ${hit.need ?? "the part could not be taken off"}`
-    : hit.kind === "self" ? `${name}: ${face} meets ${other ?? "the part itself"} at ${at.toFixed(0)}°, ${depth} too near`
-      : `${name}: ${face} meets the ${hit.kind}${hit.tool === null ? "" : ` ${hit.tool}`} at ${at.toFixed(0)}°, ${depth} too near` +
-        (hit.kind === "punch" ? `; a punch relieved by ${depth} more there, a shorter flange or an earlier place in the order would clear` : "; a shorter flange or another place in the order would clear");
-  return {
-    kind: hit.kind === "self" ? "self-collision" : "clearance",
-    bends,
-    faces: other === null ? [face] : [face, other],
-    tools: hit.tool === null ? (hit.kind === "trapped" ? pair : []) : [hit.tool],
-    message,
-    evidence: { strokeAngle: rounded(at), depth: rounded(hit.depth / mmPer(units)), zFrom: rounded(hit.z[0] / mmPer(units)), zTo: rounded(hit.z[1] / mmPer(units)) },
-  };
+  return [{ reason: clearanceReason({ part, units, bends, pair: [tools.punch.id, tools.die.id] }, worst), off: worst.depth }];
 }
