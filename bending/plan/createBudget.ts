@@ -10,6 +10,8 @@ export interface SearchBudget {
   readonly batch: number;
   /** How many plans are wanted, the best among them. */
   readonly keep: number;
+  /** The first plan is enough. */
+  readonly firstPlan: boolean;
 }
 
 /** Progress is said once in so many asks: they come by the ten thousand a second. */
@@ -34,5 +36,6 @@ export function createBudget(request: PlanRequest): SearchBudget {
     onExpand: (count) => { expanded = count; },
     batch: request.batch,
     keep: 1 + (request.alternatives ?? 0),
+    firstPlan: request.firstPlan ?? false,
   };
 }

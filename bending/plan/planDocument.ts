@@ -1,6 +1,10 @@
 import type { Plain } from "../core/plain";
 import type { LengthUnit } from "../core/units";
 import type { AllowanceBasis } from "../handbook/allowanceBasis";
+import type { PlanChange } from "./planChange";
+import type { PlanCounts } from "./planCounts";
+import type { PlanFailure } from "./planFailure";
+import type { PlanRobustness } from "./planRobustness";
 
 /**
  * The plan document, format `plan/1`: what is stored, drawn and printed. Lengths in `units` (the part
@@ -22,16 +26,26 @@ export interface PlanDocument {
   readonly gap: number;
   readonly flat: PlanFlat;
   readonly flatLength: number;
+  /** Bends that several strokes make, evenly spread over the zone, with each stroke's own neutral length; absent when there are none. */
+  readonly splits?: readonly { readonly bend: string; readonly hits: number; readonly allowance: number }[];
   readonly steps: readonly PlanStep[];
   /** The bend ids in order; several formed by one stroke are joined with "+". */
   readonly order: readonly string[];
   readonly stations: readonly PlanStation[];
   readonly seconds: { readonly setup: number; readonly perPart: number; readonly total: number };
+  /** How often each time setting is paid; absent in plans of before it was kept, and where there are no steps. */
+  readonly counts?: PlanCounts;
   readonly cost: number;
   readonly proof: { readonly method: string; readonly expanded: number; readonly bound: number };
   readonly alternatives?: readonly Omit<PlanDocument, "alternatives" | "flat" | "elapsedMs">[];
   readonly reasons: readonly PlanReason[];
   readonly cautions: readonly PlanReason[];
+  /** Where an order ends and all that stands in the way, when that was asked for and there is no plan. */
+  readonly firstFailure?: PlanFailure;
+  /** The least changes that would work, when they were asked for. */
+  readonly changes?: readonly PlanChange[];
+  /** How far the time settings may be off before another plan wins, when that was asked for. */
+  readonly robustness?: PlanRobustness;
   readonly elapsedMs: number;
 }
 
@@ -54,6 +68,8 @@ export interface PlanFlat {
 
 export interface PlanStep {
   readonly bends: readonly string[];
+  /** Which stroke of how many it is, counted from the parent's side, where several make the bend; `angle` is this stroke's own. */
+  readonly hit?: { readonly number: number; readonly of: number };
   /** The face next to the bend line on the operator's side. */
   readonly front: string;
   readonly punch: string;

@@ -25,6 +25,8 @@ export interface PlanRequest {
   readonly airForceFactor?: number;
   /** How many other plans to give beside the best. */
   readonly alternatives?: number;
+  /** Be content with the first plan that is found: whether there is one is all that is asked. */
+  readonly firstPlan?: boolean;
   readonly shouldStop?: () => boolean;
   readonly onProgress?: (progress: PlanProgress) => void;
   readonly now?: () => number;

@@ -19,8 +19,46 @@ const reason = z.strictObject({
   evidence: z.strictObject({ strokeAngle: number, depth: number, zFrom: number, zTo: number }).optional(),
 });
 
+const texts = z.array(text);
+const failure = z.strictObject({
+  done: texts,
+  step: z.int().min(1).nullable(),
+  strokes: z.array(z.strictObject({
+    bends: texts,
+    reasons: z.array(reason.extend({ fronts: texts, pairs: z.array(z.strictObject({ punch: text, die: text })), leastDepth: number.optional() })),
+    wouldWork: z.array(z.strictObject({ before: texts, after: texts })),
+  })),
+  message: text,
+});
+
+const amount = z.strictObject({ name: text, value: number, unit: z.enum(["mm", "in", "deg", "kN", "kN/m", "bends", "pieces"]), from: number.optional() });
+const change = z.strictObject({
+  kind: z.enum(["move-bends", "one-by-one", "section", "punch-relief", "punch-height", "punch-width", "punch-angle", "punch-rating", "die-opening", "die-width", "die-angle",
+    "daylight", "force", "section-gap", "shorter-flange", "longer-flange", "leave-out", "clearance"]),
+  group: z.enum(["order", "stock", "tool", "machine", "part", "setting"]),
+  what: z.strictObject({ bends: texts.optional(), faces: texts.optional(), tools: texts.optional(), path: text.optional() }),
+  amount: amount.nullable(),
+  with: z.array(amount),
+  order: texts.optional(),
+  message: text,
+  plan: z.strictObject({ status: z.enum(["optimal", "feasible"]), cost: number, order: texts }),
+  found: z.strictObject({ plans: z.int(), notEnough: number.optional(), resolution: number.optional() }),
+});
+
+const counts = z.strictObject({ flips: number, turns: number, metres: number, strokes: number, gaugeMoves: number, stations: number, pieces: number });
+const robustnessEnd = z.strictObject({ seconds: number, factor: number, other: z.strictObject({ order: texts, stations: number, counts }), differs: text }).nullable();
+const robustness = z.strictObject({
+  range,
+  settings: z.array(z.strictObject({
+    setting: z.enum(["flip", "turn", "walkPerMetre", "stroke", "gaugeMove", "stationSetup", "sectionPlace"]),
+    seconds: number, count: number, low: robustnessEnd, high: robustnessEnd, settled: z.boolean(),
+  })),
+  plans: z.int(),
+});
+
 const step = z.strictObject({
   bends: z.array(text).min(1),
+  hit: z.strictObject({ number: z.int().min(1), of: z.int().min(2) }).optional(),
   front: text,
   punch: text,
   die: text,
@@ -67,16 +105,21 @@ const common = {
   gap: number.min(0).max(1),
   flat,
   flatLength: number,
+  splits: z.array(z.strictObject({ bend: text, hits: z.int().min(2), allowance: number.positive() })).optional(),
   steps: z.array(step),
   order: z.array(text),
   stations: z.array(z.strictObject({
     id: text, punch: text, die: text, from: number, to: number, punchSections: z.array(section), dieSections: z.array(section),
   })),
   seconds: z.strictObject({ setup: number, perPart: number, total: number }),
+  counts: counts.optional(),
   cost: number,
   proof: z.strictObject({ method: text, expanded: z.int(), bound: number }),
   reasons: z.array(reason),
   cautions: z.array(reason),
+  firstFailure: failure.optional(),
+  changes: z.array(change).optional(),
+  robustness: robustness.optional(),
   elapsedMs: number,
 };
 

@@ -47,6 +47,8 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   budget.doing("Looking for a first order", 0);
   const dived = diveOrder(relaxed, DIVE_STATES, budget.shouldStop);
   if (dived) constructBeds(bedQuestionOf(situation, checks, numbers, budget, keeper, null), dived.steps);
+  const enough = () => budget.firstPlan && keeper.kept().length > 0;
+  if (enough()) return answer(floor, { stopped: true });
   budget.doing("Looking for the best order with the bed left out", 0);
   const best = unhindered(relaxed, limits);
   tally.expanded += best.expanded;
@@ -55,6 +57,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
 
   const question = bedQuestionOf(situation, checks, numbers, budget, keeper, best);
   constructBeds(question, best.steps);
+  if (enough()) return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.weight * budget.batch), { stopped: true });
   let open = Infinity;
   for (let count = 1; count <= Math.min(MOST_STATIONS, situation.part.bends.length) && open === Infinity; count += 1) {
     const searched = searchBeds(question, count);
