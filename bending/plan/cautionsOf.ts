@@ -6,6 +6,7 @@ import type { Bend } from "../part/partModel";
 import { flatPattern } from "../part/flatPattern";
 import type { Layout } from "../setup/layout";
 import type { OrderStep } from "../order/orderProblem";
+import { readHitId } from "../strokes/hitId";
 import { formatBends } from "./formatBends";
 import type { PlanReason, PlanStep } from "./planDocument";
 import type { Situation } from "./situation";
@@ -29,6 +30,7 @@ export function cautionsOf(situation: Situation, layout: Layout, orderSteps: rea
   const { massKg } = flatPattern(part);
   if (massKg > LIFT_LIMIT_KG) say("lift", [], [], `the blank weighs ${massKg.toFixed(1)} kg; above ${LIFT_LIMIT_KG} kg (NIOSH load constant) plan for two people or a support`);
   radiusCautions(situation, say);
+  stepCautionsOfRows(situation, say);
   orderSteps.forEach((orderStep, index) => {
     const step = steps[index];
     if (step) stepCautions(situation, layout, orderStep, step, say);
@@ -39,7 +41,7 @@ export function cautionsOf(situation: Situation, layout: Layout, orderSteps: rea
 type Say = (kind: PlanReason["kind"], bends: readonly string[], tools: readonly string[], message: string) => void;
 
 /** Bends tighter than the material bears, those that lack the same together. */
-function radiusCautions({ part, units }: Situation, say: Say): void {
+function radiusCautions({ drawn: part, units }: Situation, say: Say): void {
   const tight = new Map<string, string[]>();
   for (const bend of part.bends) {
     const least = minimumRadius(part.material, part.thickness, bend.angle);
@@ -48,6 +50,14 @@ function radiusCautions({ part, units }: Situation, say: Say): void {
     tight.set(lack, [...(tight.get(lack) ?? []), bend.id]);
   }
   for (const [lack, bends] of tight) say("radius", bends, [], `${bends.length > 1 ? "bends" : "bend"} ${bends.join(", ")} ${bends.length > 1 ? "have" : "has"} ${lack}`);
+}
+
+/** Large radii that are made in steps. */
+function stepCautionsOfRows({ drawn, splits, units }: Situation, say: Say): void {
+  for (const { bend: id, hits } of splits) {
+    const bend = drawn.bends.find((one) => one.id === id);
+    if (bend) say("radius", [id], [], `bend ${id}: ${hits} strokes of ${(toDeg(bend.angle) / hits).toFixed(1)}°, ${formatLength(bend.allowance / hits, units)} apart, make the inside radius of ${formatLength(bend.insideRadius, units)}; try them on a strip first`);
+  }
 }
 
 function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep, step: PlanStep, say: Say): void {
@@ -70,7 +80,7 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   const setback = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2) - bend.allowance / 2;
   const flange = Math.min(reach.front, reach.back) + setback;
   const advised = Math.max(advisedFlange(pair.die.vOpening), minimumFlange(bend.angle, pair.die));
-  if (flange < advised) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
+  if (flange < advised && readHitId(bend.id) === null) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
 }
 
 /** The shop measured on another V than the die of this step has: the document gives the radius, and no single V makes every bend. */

@@ -7,10 +7,10 @@ import { vOpeningRule } from "../handbook/vOpeningRule";
 import { buildPart } from "../part/buildPart";
 import type { Bend, PartModel } from "../part/partModel";
 import type { PlanRequest } from "./planRequest";
+import { withStrokes, type StruckPart } from "./withStrokes";
 
 /** One flat pattern to plan: where the radius or the shop's value follows from the die, the V that it follows from. */
-export interface PartVariant {
-  readonly part: PartModel;
+export interface PartVariant extends StruckPart {
   readonly vOpening: number | null;
   /** Every bend is made on that V, also one whose radius the document gives. */
   readonly everyBend: boolean;
@@ -30,19 +30,19 @@ export function partVariants(request: PlanRequest): Result<readonly PartVariant[
   const part = plain.value;
   const given = part.bends.every(hasOwnRadius);
   const usual = vOpeningRule(part.thickness);
-  const wanted = (given ? wantedByRadius(part) : null) ?? usual;
+  const wanted = (given ? wantedByRadius(withStrokes(part, request).part) : null) ?? usual;
   const openings = openingsInService(request, part.thickness, wanted);
   const flats = given && !shopTable ? [] : openings.map((v) => ({ v, built: flatForOpening(request, part, v) }));
   const measured = flats.some(({ built }) => built.ok && built.value.bends.some((bend) => hasOwnRadius(bend) && bend.allowanceBasis?.shop));
-  const onEach = (everyBend: boolean) => flats.flatMap(({ v, built }): PartVariant[] => (built.ok ? [{ part: built.value, vOpening: v, everyBend, wantedV: v }] : []));
+  const onEach = (everyBend: boolean) => flats.flatMap(({ v, built }): PartVariant[] => (built.ok ? [{ ...withStrokes(built.value, request), vOpening: v, everyBend, wantedV: v }] : []));
   const strict = measured ? onEach(true) : [];
   if (given) {
-    return ok([...strict, { part: ofSeveralOpenings(request, part, measured), vOpening: null, everyBend: false, wantedV: wanted }]);
+    return ok([...strict, { ...withStrokes(ofSeveralOpenings(request, part, measured), request), vOpening: null, everyBend: false, wantedV: wanted }]);
   }
   const variants = [...strict, ...onEach(false)];
   if (variants.length > 0) return ok(variants);
   const problems = flats.flatMap(({ built }) => (built.ok ? [] : built.error));
-  return openings.length > 0 ? fail(problems) : ok([{ part, vOpening: null, everyBend: false, wantedV: usual }]);
+  return openings.length > 0 ? fail(problems) : ok([{ ...withStrokes(part, request), vOpening: null, everyBend: false, wantedV: usual }]);
 }
 
 /**

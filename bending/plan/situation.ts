@@ -3,6 +3,7 @@ import type { LengthUnit, KiloNewtonPerMetre, Mm, Rad } from "../core/units";
 import type { Move } from "../order/collectMoves";
 import type { PartModel } from "../part/partModel";
 import type { RunsOf } from "../setup/createRuns";
+import type { BendSplit } from "../strokes/bendSplit";
 import type { Machine } from "../tooling/machine";
 import type { ReasonKind } from "./planDocument";
 import type { ToolPair } from "./toolPair";
@@ -31,7 +32,10 @@ export interface FitProblem {
 
 /** Everything that a search asks about one part on one machine with the candidate tools. */
 export interface Situation {
+  /** Every stroke a bend of its own, also where several make one of the drawn bends. */
   readonly part: PartModel;
+  readonly drawn: PartModel;
+  readonly splits: readonly BendSplit[];
   readonly machine: Machine;
   readonly units: LengthUnit;
   readonly moves: readonly Move[];
@@ -40,6 +44,6 @@ export interface Situation {
   readonly runs: RunsOf;
   /** By bend, then by pair. */
   readonly fits: readonly (readonly ToolFit[])[];
-  /** False for moves that a person's own order rules out. */
+  /** False for moves that a person's own order rules out, or that would leave a gap in a row of strokes. */
   readonly allowed: (move: number, formed: number) => boolean;
 }

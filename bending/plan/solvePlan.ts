@@ -2,6 +2,7 @@ import { MAX_BENDS, DEMERIT_SECONDS } from "../order/orderProblem";
 import { candidatePairs } from "./candidatePairs";
 import { createSituation, withPairs } from "./createSituation";
 import { createStepChecks, type StepChecks } from "./createStepChecks";
+import { drawnReason } from "./drawnPlan";
 import { emptyPlan } from "./emptyPlan";
 import { flatLength } from "./flatLength";
 import { hemReason } from "./hemReason";
@@ -33,9 +34,9 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   if (!variants.ok) return refused(request, variants.error.map(({ path, message }) => reasonOf("part", `${path}: ${message}`)));
   const first = variants.value[0];
   if (first === undefined) return refused(request, [reasonOf("no-die", "there is no flat to plan")]);
-  const bends = first.part.bends.length;
+  const bends = first.drawn.bends.length;
   if (bends > MAX_BENDS) return withFlat(refused(request, [reasonOf("order", `the part has ${bends} bends; up to ${MAX_BENDS} are planned`)]), first, request);
-  const hems = first.part.bends.flatMap((bend) => hemReason(bend) ?? []);
+  const hems = first.drawn.bends.flatMap((bend) => hemReason(bend) ?? []);
   if (hems.length > 0) return withFlat(refused(request, hems), first, request);
   const { solved, toolReasons } = solveVariants(request, variants.value, createBudget(request), order);
   return withFlat(joined(request, solved, toolReasons, variants.value.length, order !== undefined), first, request);
@@ -84,7 +85,7 @@ function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: re
     const reasons = [...toolReasons, ...solved.flatMap(({ situation, checks, answer }) => (answer.deadEnds ? explain(situation, checks, answer.deadEnds) : []))];
     if (stopped) return unknown(request, method, expanded, reasonOf("budget", `no order was found in the time given, after ${expanded} states; more time may find one`));
     if (possible) return unknown(request, method, expanded, reasonOf("sections", "every bend can be made, but no bed that was tried holds them all; more pieces or another pair may"));
-    return { ...refused(request, onceEach(reasons)), proof: { method, expanded, bound: 0 } };
+    return { ...refused(request, onceEach(reasons).map(drawnReason)), proof: { method, expanded, bound: 0 } };
   }
   const bound = Math.min(...solved.map(({ answer }) => answer.bound));
   const floor = Math.min(...solved.map(({ answer }) => answer.floor));
@@ -106,7 +107,7 @@ const unknown = (request: PlanRequest, method: string, expanded: number, reason:
   ({ ...emptyPlan({ ...frameOf(request), status: "unknown", method, reasons: [reason] }), proof: { method, expanded, bound: 0 } });
 
 /** A plan without steps still tells the flat. */
-function withFlat(plan: PlanDocument, { part }: PartVariant, { document }: PlanRequest): PlanDocument {
+function withFlat(plan: PlanDocument, { drawn: part }: PartVariant, { document }: PlanRequest): PlanDocument {
   if (plan.flat.bends.length > 0 || plan.flat.width > 0) return plan;
   const flat = planFlat(part, document.units);
   return { ...plan, flat, flatLength: flatLength(document, flat) };

@@ -1,13 +1,13 @@
 import { MEANT_CONTACT_MM } from "../core/tolerance";
-import { kiloNewtonPerMetre, mm, toDeg, type LengthUnit } from "../core/units";
+import { kiloNewtonPerMetre, toDeg, type LengthUnit } from "../core/units";
 import { airBendForce } from "../handbook/airBendForce";
-import { minimumFlange } from "../handbook/minimumFlange";
 import { naturalRadius } from "../handbook/naturalRadius";
 import { springback } from "../handbook/springback";
 import { vOpeningRule } from "../handbook/vOpeningRule";
 import { formatLength } from "../core/formatLength";
 import type { Bend, PartModel } from "../part/partModel";
 import type { RunsOf } from "../setup/createRuns";
+import { levelNeeded } from "../strokes/levelNeeded";
 import type { Machine } from "../tooling/machine";
 import type { FitProblem, ToolFit } from "./situation";
 import type { ToolPair } from "./toolPair";
@@ -38,9 +38,7 @@ export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): Tool
   const problem = bedProblem(question, bend) ?? radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
     ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
   if (problem) return { ok: false, problem };
-  const tangentToApex = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2);
-  const held = minimumFlange(bend.angle, pair.die) - tangentToApex + bend.allowance / 2;
-  return { ok: true, wishes: wishes(question, bend, pair), demanded, force, reach: mm(Math.max(pair.die.vOpening / 2, held)) };
+  return { ok: true, wishes: wishes(question, bend, pair), demanded, force, reach: levelNeeded(bend, part.thickness, pair.die) };
 }
 
 /** The die is for another flat, which is asked about by itself: last of all to be told. */

@@ -1,5 +1,7 @@
+import { mmPer } from "../core/units";
 import { cautionsOf } from "./cautionsOf";
 import type { StepChecks } from "./createStepChecks";
+import { drawnReason, drawnStep } from "./drawnPlan";
 import { PLAN_ENGINE } from "./emptyPlan";
 import { planFlat } from "./planFlat";
 import type { PlanDocument, PlanFlat } from "./planDocument";
@@ -21,9 +23,10 @@ export interface PlanFrame {
 /** A candidate as a plan document, optimal when its total is the bound. */
 export function writePlan(situation: Situation, checks: StepChecks, candidate: Candidate, frame: PlanFrame): PlanDocument {
   const { layout, steps } = candidate;
-  const { part, machine, units } = situation;
-  const written = steps.map((step, index) => writeStep(situation, checks, layout, step, steps[index - 1] ?? null));
-  const flat = planFlat(part, units);
+  const { part, drawn, splits, machine, units } = situation;
+  const struck = steps.map((step, index) => writeStep(situation, checks, layout, step, steps[index - 1] ?? null));
+  const written = splits.length === 0 ? struck : struck.map((step) => drawnStep(step, drawn, part));
+  const flat = planFlat(drawn, units);
   const seconds = { setup: rounded(layout.setupSeconds), perPart: rounded(candidate.perPart), total: rounded(layout.setupSeconds + candidate.perPart * frame.batch) };
   const bound = Math.min(seconds.total, rounded(frame.bound));
   const gap = seconds.total - bound < 1e-6 ? 0 : rounded((seconds.total - bound) / seconds.total);
@@ -38,6 +41,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     gap,
     flat,
     flatLength: frame.flatLength(flat),
+    ...(splits.length === 0 ? {} : { splits: splits.map(({ bend, hits, allowance }) => ({ bend, hits, allowance: rounded(allowance / mmPer(units)) })) }),
     steps: written,
     order: written.map((step) => step.bends.join("+")),
     stations: layout.stations.map((station, index) => writeStation(situation, station, index)),
@@ -45,7 +49,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     cost: seconds.total,
     proof: { method: frame.method, expanded: frame.expanded, bound },
     reasons: [],
-    cautions: cautionsOf(situation, layout, steps, written),
+    cautions: cautionsOf(situation, layout, steps, struck).map(drawnReason),
     elapsedMs: 0,
   };
 }

@@ -49,7 +49,7 @@ function header({ plan, document, material, machine, part, sheet }: SheetInput, 
     status: statusText(plan.status, plan.gap),
     setupTime: format.time(plan.seconds.setup),
     timePerPart: format.time(plan.seconds.perPart),
-    bends: String(model.part.bends.length),
+    bends: String(plan.flat.bends.length),
     stations: String(model.stations.length),
     conventions: [
       "TOP is the top of the base as drawn, UNDER its underside.",

@@ -2,9 +2,8 @@ import { invariant } from "@/bending/core/invariant";
 import { mmPer, toRad, type Deg, type LengthUnit, type Rad } from "@/bending/core/units";
 import { completeMaterial } from "@/bending/handbook/completeMaterial";
 import type { Hit } from "@/bending/clearance/machineFrames";
-import { buildPart } from "@/bending/part/buildPart";
 import type { FormedAngles, PartModel } from "@/bending/part/partModel";
-import { plannedBends } from "@/bending/plan/plannedBends";
+import { plannedPart, type PlannedPart } from "@/bending/plan/plannedPart";
 import type { PlanStation, PlanStep } from "@/bending/plan/planDocument";
 import type { Machine } from "@/bending/tooling/machine";
 import type { Die, Punch, Tool } from "@/bending/tooling/tool";
@@ -14,6 +13,7 @@ import { stationPieces, type StationPiece } from "./stationPieces";
 /** A plan joined with its part, tools and machine; lengths in mm, angles in radians. */
 export interface PlanModel {
   readonly units: LengthUnit;
+  /** Every stroke a bend of its own. */
   readonly part: PartModel;
   readonly machine: Machine;
   readonly steps: readonly StepModel[];
@@ -51,10 +51,11 @@ export interface StationModel {
 export function planModel(source: PlanSource): PlanModel {
   const { plan, tools } = source;
   const perUnit = mmPer(plan.units);
-  const part = partOf(source);
+  const planned = partOf(source);
+  const { part } = planned;
   const formed = part.bends.map(() => 0);
   const steps = plan.steps.map((step) => {
-    const model = stepOf(step, part, tools, [...formed], perUnit);
+    const model = stepOf(step, planned, tools, [...formed], perUnit);
     for (const bend of model.hit.bends) formed[bend] = model.finished;
     return model;
   });
@@ -62,19 +63,19 @@ export function planModel(source: PlanSource): PlanModel {
   return { units: plan.units, part, machine: source.machine, steps, stations };
 }
 
-function partOf({ plan, document, material }: PlanSource): PartModel {
-  const built = buildPart(document, { materials: (id) => (id === material.id ? completeMaterial(material) : undefined), ...plannedBends(plan) });
+function partOf({ plan, document, material }: PlanSource): PlannedPart {
+  const built = plannedPart(document, (id) => (id === material.id ? completeMaterial(material) : undefined), plan);
   invariant(built.ok, "a planned part document can be built");
   return built.value;
 }
 
-function stepOf(step: PlanStep, part: PartModel, tools: readonly Tool[], formed: readonly number[], perUnit: number): StepModel {
-  const bends = step.bends.map((id) => part.bends.findIndex((bend) => bend.id === id));
-  invariant(bends.length > 0 && bends.every((bend) => bend >= 0), `the bends of step ${step.bends.join("+")} are the part's`);
+function stepOf(step: PlanStep, { places }: PlannedPart, tools: readonly Tool[], formed: readonly number[], perUnit: number): StepModel {
+  const { bends, front, gaugeFace, gaugeEdge } = places(step);
+  invariant(bends.length > 0 && [...bends, front, gaugeFace].every((index) => index >= 0), `the bends and faces of step ${step.bends.join("+")} are the part's`);
   const mask = formed.reduce((bits, angle, bend) => (angle > 0 ? bits + 2 ** bend : bits), 0);
   return {
     step,
-    hit: { bends, front: faceIndex(part, step.front), formed: mask },
+    hit: { bends, front, formed: mask },
     formed,
     finished: toRad(step.angle as Deg),
     demanded: toRad(step.demandedAngle as Deg),
@@ -85,8 +86,8 @@ function stepOf(step: PlanStep, part: PartModel, tools: readonly Tool[], formed:
     gaugeX: step.gauge.x * perUnit,
     gaugeR: step.gauge.r * perUnit,
     fingers: step.gauge.fingers.map((finger) => ({ x: finger.x * perUnit, r: finger.r * perUnit, z: finger.z * perUnit })),
-    gaugeFace: faceIndex(part, step.gauge.face),
-    gaugeEdge: step.gauge.edge,
+    gaugeFace,
+    gaugeEdge,
   };
 }
 
@@ -104,12 +105,6 @@ function stationOf(station: PlanStation, tools: readonly Tool[], perUnit: number
       ...stationPieces(station.dieSections, die, station.from * perUnit, perUnit),
     ],
   };
-}
-
-function faceIndex(part: PartModel, id: string): number {
-  const index = part.faces.findIndex((face) => face.id === id);
-  invariant(index >= 0, `face ${id} is the part's`);
-  return index;
 }
 
 function punchOf(tools: readonly Tool[], id: string): Punch {

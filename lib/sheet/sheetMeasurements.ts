@@ -15,15 +15,18 @@ export function sheetMeasurements({ document }: PlanSource, model: PlanModel): r
 function angles(document: PartDocument, model: PlanModel): readonly SheetMeasurement[] {
   const format = createSheetFormat(model.units);
   return model.steps.flatMap((step, index) =>
-    step.hit.bends.flatMap((bendIndex): SheetMeasurement[] => {
+    step.hit.bends.flatMap((bendIndex, place): SheetMeasurement[] => {
       const bend = model.part.bends[bendIndex];
-      if (!bend) return [];
+      const id = step.step.bends[place];
+      // Of a bend that several strokes make, the whole angle is measured after the last of them.
+      const goesOn = step.step.hit !== undefined && model.steps.slice(index + 1).some((later) => later.step.bends.includes(id ?? ""));
+      if (!bend || id === undefined || goesOn) return [];
       const own = bend.toleranceAngle !== null ? (bend.toleranceAngle * 180) / Math.PI : (document.toleranceAngle ?? null);
       const tolerance = own ?? generalTolerance("angle", shorterSide(model.part, bendIndex)) ?? 1;
-      const included = 180 - step.step.angle;
+      const included = 180 - step.step.angle * (step.step.hit?.of ?? 1);
       const digits = (value: number): string => `${value.toFixed(2)}°`;
       return [{
-        what: `Included angle at ${bend.id}`,
+        what: `Included angle at ${id}`,
         kind: "angle",
         nominal: format.angle(included),
         tolerance: `±${digits(tolerance)}`,

@@ -13,7 +13,7 @@ export function stepNumbers(step: PlanStep, units: LengthUnit): StepNumbers {
     x: format.gauge(finger.x * per), r: format.gauge(finger.r * per), z: format.place(finger.z * per),
   }));
   return {
-    bends: step.bends.join(" + "),
+    bends: `${step.bends.join(" + ")}${step.hit ? `, stroke ${step.hit.number} of ${step.hit.of}` : ""}`,
     handling: handling(step.handling),
     punch: step.punch,
     die: step.die,
