@@ -8,10 +8,11 @@
  *    bends is in S and no fact `blocked` of that move has `(S & mask) === value`. It comes to S with the move's bends.
  * 2. A step costs, in seconds: `stroke`; for the first one `gaugeMove`; for every other one
  *    `flip` when `up` differs from the move before, one `turn` for every quarter turn begun between the headings (the shorter
- *    way round; after a flip opposite headings are the same; up to 0.01 degrees count as none), `gaugeMove` when both gauge
- *    settings are known and differ; and `demeritSeconds` for each unmet wish. Gauge setting and wishes come from the fact
- *    `made` of that move with `(S & mask) === value`, S being the set before the step; without such a fact the setting is
- *    unknown and no wish is unmet. Two facts of one move that say different things never match the same set.
+ *    way round; after a flip opposite headings are the same; up to 0.01 degrees count as none), `gaugeMove` when the gauge
+ *    settings that the two steps may have are both known and none is common to both; and `demeritSeconds` for each unmet wish.
+ *    What a step may have follows from the facts `made` of that move with `(S & mask) === value`, S being the set before the
+ *    step: the settings that all of them name (`gauges` null names every one), the largest of their `demerit`. Without such
+ *    a fact the setting is unknown and no wish is unmet.
  * 3. `perPart` is not more than the cheapest way from the empty set to all bends (a plain dynamic programme over set and last
  *    move), and null exactly when there is no way. The flat's bound is `setup.seconds + batch x perPart`.
  *
@@ -56,4 +57,4 @@ export interface CertificateMove {
 /** Holds in every set S with `(S & mask) === value`; `move` is an index of `moves`. */
 export type CertificateFact =
   | { readonly kind: "blocked"; readonly move: number; readonly mask: number; readonly value: number; /** What stands in the way with one pair or another. */ readonly why: readonly string[] }
-  | { readonly kind: "made"; readonly move: number; readonly mask: number; readonly value: number; /** Equal numbers are equal gauge settings; null is not known. */ readonly gauge: number | null; readonly demerit: number };
+  | { readonly kind: "made"; readonly move: number; readonly mask: number; readonly value: number; /** The settings that the step can have, equal numbers being equal settings; null is any. */ readonly gauges: readonly number[] | null; /** Wishes left unmet at the least. */ readonly demerit: number };
