@@ -3,6 +3,7 @@ import * as access from "./migrations/001_access";
 import * as shop from "./migrations/002_shop";
 import * as materials from "./migrations/003_materials";
 import * as bendTrials from "./migrations/004_bend_trials";
+import * as planOrigin from "./migrations/005_plan_origin";
 
 export interface Migration {
   /** The file's name, so that the knex command line and the application agree on what has run. */
@@ -17,4 +18,5 @@ export const migrationList: readonly Migration[] = [
   { name: "002_shop.ts", up: shop.up, down: shop.down },
   { name: "003_materials.ts", up: materials.up, down: materials.down },
   { name: "004_bend_trials.ts", up: bendTrials.up, down: bendTrials.down },
+  { name: "005_plan_origin.ts", up: planOrigin.up, down: planOrigin.down },
 ];

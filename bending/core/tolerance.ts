@@ -37,3 +37,12 @@ export const FLAT_CHANGE_MM = 0.005;
 
 /** mm. A drawn cut without width is opened to this, so that the sheet has two sides there: about what a laser takes away. */
 export const DRAWN_SLIT_MM = 0.1;
+
+/** mm. What a place in a written plan may be off by its rounding: a stored plan is not called wrong for less. */
+export const WRITTEN_PLACE_MM = 1e-3;
+
+/** mm. Sizes of a part that differ by less are one size: a tenth of what a back gauge repeats at best. */
+export const SAME_SIZE_MM = 0.01;
+
+/** Radians. Bend lines and edges this near to parallel are: a tenth of a degree, as at the back gauge. */
+export const PARALLEL_RAD = 1.75e-3;

@@ -3,6 +3,7 @@ import type { PartDocument } from "../part/partDocument";
 import type { ShopTable } from "../shopTable/shopCell";
 import type { Machine } from "../tooling/machine";
 import type { Tool } from "../tooling/tool";
+import type { BendWish } from "./bendWish";
 
 export interface PlanProgress {
   /** Search states looked at so far. */
@@ -27,6 +28,8 @@ export interface PlanRequest {
   readonly alternatives?: number;
   /** Be content with the first plan that is found: whether there is one is all that is asked. */
   readonly firstPlan?: boolean;
+  /** What a person asks of single bends; the planner is free in everything else. */
+  readonly wishes?: readonly BendWish[];
   readonly shouldStop?: () => boolean;
   readonly onProgress?: (progress: PlanProgress) => void;
   readonly now?: () => number;

@@ -22,14 +22,19 @@ export async function insertPlan(db: Connection, entry: NewPlan): Promise<{ read
       machine_document: JSON.stringify(entry.machineDocument),
       tools: JSON.stringify(entry.tools),
       inputs_digest: entry.inputsDigest,
+      origin: entry.origin,
+      from_plan_id: entry.fromPlanId,
+      ended: entry.ended,
+      limit_ms: entry.limitMs,
+      asked: JSON.stringify(entry.asked),
       engine: plan.engine,
       created_by: entry.by,
     })
-    .onConflict(db.raw("(revision_id, inputs_digest) where status <> 'unknown'"))
+    .onConflict(db.raw("(revision_id, inputs_digest) where ended = 'itself'"))
     .ignore()
     .returning<{ id: string }[]>("id");
   if (rows[0]) return { id: rows[0].id, inserted: true };
-  const same = await findSamePlan(db, entry.revisionId, entry.inputsDigest);
+  const same = await findSamePlan(db, entry.revisionId, entry.inputsDigest, entry.limitMs);
   if (same === undefined) throw new Error("a plan of the same inputs vanished while it was looked for");
   return { id: same, inserted: false };
 }

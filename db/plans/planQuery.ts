@@ -12,5 +12,6 @@ export const planQuery = (db: Connection): Knex.QueryBuilder =>
 export const planListColumns: readonly string[] = [
   "plan.id", "plan.part_id", "part.number as part_number", "revision.name as part_name", "revision.revision", "plan.machine_id",
   "machine.name as machine_name", "plan.status", "plan.batch", "plan.steps", "plan.stations", "plan.seconds_per_part", "plan.setup_seconds",
+  "plan.origin",
   "plan.created_at", "author.name as created_by",
 ];

@@ -1,4 +1,5 @@
 import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { PlanOriginRow } from "./newPlan";
 
 export interface PlanListRow {
   readonly id: string;
@@ -14,6 +15,7 @@ export interface PlanListRow {
   readonly stations: number;
   readonly seconds_per_part: number;
   readonly setup_seconds: number;
+  readonly origin: PlanOriginRow;
   readonly created_at: Date;
   readonly created_by: string | null;
 }

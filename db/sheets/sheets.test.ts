@@ -9,6 +9,8 @@ import { openDatabase } from "@/tests/integration/openDatabase";
 import { deletePart } from "../parts/deletePart";
 import { insertPart } from "../parts/insertPart";
 import { findPlan } from "../plans/findPlan";
+import type { PlanEnd } from "@/bending/plan/planEnd";
+import { findSamePlan } from "../plans/findSamePlan";
 import { insertPlan } from "../plans/insertPlan";
 import { findSheet } from "./findSheet";
 import { findSheets } from "./findSheets";
@@ -27,19 +29,30 @@ beforeAll(async () => {
   ({ partId, revisionId } = await insertPart(database(), "B-1", bracketRevision()));
 });
 
-const plan = (inputsDigest: string, changes = {}) => insertPlan(database(), {
+const plan = (inputsDigest: string, changes = {}, ended: PlanEnd = "itself", limitMs = 60_000) => insertPlan(database(), {
   partId, revisionId, machineId, plan: { ...bracketPlan, ...changes }, material: builtInMaterials[0]!, materialVersionId: null, machineDocument: bracketMachine,
-  tools: [bracketPunch, bracketDie], inputsDigest, by: null,
+  tools: [bracketPunch, bracketDie], inputsDigest, by: null, origin: "planned", fromPlanId: null, ended, limitMs, asked: {},
 });
 const draft = async (letter: string) => insertSheet(database(), { planId: (await plan(digest(letter))).id, partId, machineId, by: null });
 const state = async (id: string) => (await findSheet(database(), every, id))?.state;
 
-it("stores a plan once for the same inputs, undecided ones each time", async () => {
+it("stores a plan once for the same inputs; one that was cut short is found for no longer a search, stopped by hand for none", async () => {
   const first = await plan(digest("a"));
-  expect(await plan(digest("a"))).toEqual({ id: first.id, inserted: false });
-  expect((await findPlan(database(), first.id))).toMatchObject({ plan: bracketPlan, tools: [bracketPunch, bracketDie], machine_document: bracketMachine, part_number: "B-1" });
-  const unknown = await plan(digest("u"), { status: "unknown" });
-  expect((await plan(digest("u"), { status: "unknown" })).id).not.toBe(unknown.id);
+  expect([first.inserted, await plan(digest("a"))]).toEqual([true, { id: first.id, inserted: false }]);
+  expect((await findPlan(database(), first.id))).toMatchObject({ plan: bracketPlan, tools: [bracketPunch, bracketDie], machine_document: bracketMachine, part_number: "B-1", ended: "itself", origin: "planned" });
+  const found = (letter: string, limitMs: number) => findSamePlan(database(), revisionId, digest(letter), limitMs);
+  expect(await found("a", 600_000)).toBe(first.id);
+  const timed = await plan(digest("b"), { status: "feasible" }, "limit", 10_000);
+  expect([await found("b", 10_000), await found("b", 10_001)]).toEqual([timed.id, undefined]);
+  const longer = await plan(digest("b"), { status: "feasible" }, "limit", 20_000);
+  expect([await found("b", 5_000), await found("b", 20_000)]).toEqual([longer.id, longer.id]);
+  const proven = await plan(digest("b"));
+  expect([proven.inserted, await found("b", 600_000)]).toEqual([true, proven.id]);
+  for (const [letter, status, ended] of [["c", "unknown", "limit"], ["d", "feasible", "person"]] as const) {
+    const { id } = await plan(digest(letter), { status }, ended);
+    const again = await plan(digest(letter), { status }, ended);
+    expect([again.inserted, again.id === id, await found(letter, 1_000)]).toEqual([true, false, undefined]);
+  }
 });
 
 it("makes one draft of a plan", async () => {

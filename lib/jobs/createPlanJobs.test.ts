@@ -1,32 +1,35 @@
 import { describe, expect, it } from "vitest";
-import type { PlanDocument } from "@/bending/plan/planDocument";
 import { emptyPlan } from "@/bending/plan/emptyPlan";
 import { builtInMaterials } from "@/bending/handbook/materials";
-import { createPlanJobs } from "./createPlanJobs";
+import { createPlanJobs, type PlanJobFacts } from "./createPlanJobs";
 import { PlanOverdue } from "./planOverdue";
+import type { JobAnswer } from "./jobAnswer";
+import type { JobTask } from "./jobTask";
 import type { PlanRunner } from "./planRunner";
-import type { PlanTask } from "./planTask";
 
-const task = { material: builtInMaterials[0]!, tools: [], batch: 1, alternatives: 0, limitMs: 1000 } as unknown as PlanTask;
+const task = { kind: "plan", limitMs: 1000, task: { material: builtInMaterials[0]!, tools: [], batch: 1, alternatives: 0, limitMs: 1000 } } as unknown as JobTask;
 const plan = emptyPlan({ part: "a", machine: "b", units: "mm", batch: 1, status: "infeasible", method: "none", reasons: [] });
+const answer: JobAnswer = { kind: "plan", plan, ended: "itself" };
 
 /** A runner that is told from outside what its runs come to. */
 function handRunner() {
-  const runs: { say: (message: string, fraction: number) => void; end: (plan: PlanDocument) => void; stopped: boolean }[] = [];
+  const runs: { say: (message: string, fraction: number) => void; end: (answer: JobAnswer) => void; stopped: boolean; finished: boolean }[] = [];
   const runner: PlanRunner = (_task, onProgress) => {
-    let end: (plan: PlanDocument) => void = () => undefined;
+    let end: (answer: JobAnswer) => void = () => undefined;
     let fail: (error: Error) => void = () => undefined;
-    const result = new Promise<PlanDocument>((resolve, reject) => {
+    const result = new Promise<JobAnswer>((resolve, reject) => {
       end = resolve;
       fail = reject;
     });
-    const run = { say: (message: string, fraction: number) => onProgress({ expanded: 0, fraction, message }), end, stopped: false };
+    const run = { say: (message: string, fraction: number) => onProgress({ expanded: 0, fraction, message }), end, stopped: false, finished: false };
     runs.push(run);
-    return { result, stop: () => { run.stopped = true; fail(new Error("stopped")); } };
+    return { result, stop: () => { run.stopped = true; fail(new Error("stopped")); }, finish: () => { run.finished = true; } };
   };
-  return { runs, jobs: createPlanJobs(runner, { atOnce: 1, waitingMost: 1, rememberedMost: 2 }) };
+  return { runs, jobs: createPlanJobs(runner, { atOnce: 1, quickAtOnce: 1, waitingMost: 1, rememberedMost: 2 }) };
 }
-const facts = (key: string, store: (plan: PlanDocument) => Promise<string> = async () => `plan of ${key}`) => ({ key, task, store });
+const place = { partId: "p", fromPlanId: null, subject: "P-1 rev 1 on Brake 1", by: "Ines" };
+const stored = (key: string) => Promise.resolve({ planId: `plan of ${key}`, message: "Done", result: null });
+const facts = (key: string, store: PlanJobFacts["store"] = () => stored(key)) => ({ key, place, task, store });
 const settled = () => new Promise((resolve) => setImmediate(resolve));
 
 describe("planning jobs", () => {
@@ -37,10 +40,10 @@ describe("planning jobs", () => {
     expect([runs.length, second?.message, jobs.start(facts("c"))]).toEqual([1, "Waiting for its turn", null]);
     runs[0]?.say("12 orders looked at", 0.5);
     expect(jobs.find(first?.id ?? "")).toMatchObject({ state: "running", progress: 0.5, message: "12 orders looked at" });
-    runs[0]?.end(plan);
+    runs[0]?.end(answer);
     await settled();
     expect(jobs.find(first?.id ?? "")).toMatchObject({ state: "done", planId: "plan of a", progress: 1 });
-    expect([runs.length, jobs.find(second?.id ?? "")?.message]).toEqual([2, "Planning"]);
+    expect([runs.length, jobs.find(second?.id ?? "")?.message]).toEqual([2, "Under way"]);
   });
 
   it("are one job when the same is asked twice", () => {
@@ -62,17 +65,42 @@ describe("planning jobs", () => {
     expect(jobs.cancel("nothing")).toBeUndefined();
   });
 
+  it("end with the best so far when asked to, once they run", async () => {
+    const { runs, jobs } = handRunner();
+    const first = jobs.start(facts("a"));
+    const second = jobs.start(facts("b"));
+    expect([jobs.finish(first?.id ?? "")?.state, jobs.finish(second?.id ?? "")?.state, jobs.finish("nothing")]).toEqual(["running", "running", undefined]);
+    expect(runs.map(({ finished }) => finished)).toEqual([true]);
+    runs[0]?.end(answer);
+    await settled();
+    expect(jobs.find(first?.id ?? "")).toMatchObject({ state: "done", planId: "plan of a" });
+  });
+
+  it("that take a moment only do not wait behind a search", () => {
+    const { runs, jobs } = handRunner();
+    jobs.start(facts("a"));
+    jobs.start({ ...facts("b"), task: { ...task, kind: "check" } as unknown as JobTask });
+    expect(runs.length).toBe(2);
+  });
+
+  it("are listed newest first with what they are about", () => {
+    const { jobs } = handRunner();
+    jobs.start(facts("a"));
+    jobs.start({ ...facts("b"), place: { ...place, fromPlanId: "plan" } });
+    expect(jobs.list().map(({ fromPlanId, subject, by, kind }) => [fromPlanId, subject, by, kind])).toEqual([["plan", place.subject, "Ines", "plan"], [null, place.subject, "Ines", "plan"]]);
+  });
+
   it("fail when the plan cannot be stored, and stay so", async () => {
     const { runs, jobs } = handRunner();
     const job = jobs.start(facts("a", () => Promise.reject(new Error("the database is away"))));
-    runs[0]?.end(plan);
+    runs[0]?.end(answer);
     await settled();
     expect(jobs.find(job?.id ?? "")).toMatchObject({ state: "failed", planId: null });
     expect(jobs.cancel(job?.id ?? "")?.state).toBe("failed");
   });
 
   it("say when the planner came to no end", async () => {
-    const jobs = createPlanJobs(() => ({ result: Promise.reject(new PlanOverdue(90)), stop: () => undefined }), { atOnce: 1, waitingMost: 1, rememberedMost: 2 });
+    const jobs = createPlanJobs(() => ({ result: Promise.reject(new PlanOverdue(90)), stop: () => undefined, finish: () => undefined }), { atOnce: 1, quickAtOnce: 1, waitingMost: 1, rememberedMost: 2 });
     const job = jobs.start(facts("a"));
     await settled();
     expect(jobs.find(job?.id ?? "")).toMatchObject({ state: "failed", message: expect.stringContaining("within 90 seconds") });
@@ -80,7 +108,7 @@ describe("planning jobs", () => {
 
   it("are forgotten, the oldest ended ones first", () => {
     const { jobs } = handRunner();
-    const ids = ["1", "2", "3"].map((planId) => jobs.finished(planId).id);
+    const ids = ["1", "2", "3"].map((planId) => jobs.finished(planId, place).id);
     expect(ids.map((id) => jobs.find(id)?.planId)).toEqual([undefined, "2", "3"]);
   });
 });

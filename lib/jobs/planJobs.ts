@@ -2,14 +2,15 @@ import { availableParallelism } from "node:os";
 import { createPlanJobs, type PlanJobs } from "./createPlanJobs";
 import { runInWorker } from "./runInWorker";
 
-const store = globalThis as typeof globalThis & { foldwrightPlanJobs?: PlanJobs };
+const store = globalThis as typeof globalThis & { foldwrightJobs?: PlanJobs };
 
 /** The process's own jobs: one set, whatever is reloaded around it. One processor is left to the requests. */
 export function planJobs(): PlanJobs {
-  store.foldwrightPlanJobs ??= createPlanJobs(runInWorker, {
+  store.foldwrightJobs ??= createPlanJobs(runInWorker, {
     atOnce: Math.max(1, Math.min(4, availableParallelism() - 1)),
+    quickAtOnce: 2,
     waitingMost: 20,
     rememberedMost: 200,
   });
-  return store.foldwrightPlanJobs;
+  return store.foldwrightJobs;
 }

@@ -1,5 +1,6 @@
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { PartDocument } from "@/bending/part/partDocument";
+import type { BendWish } from "@/bending/plan/bendWish";
 import type { ShopTable } from "@/bending/shopTable/shopCell";
 import type { Machine } from "@/bending/tooling/machine";
 import type { Tool } from "@/bending/tooling/tool";
@@ -16,6 +17,10 @@ export interface PlanTask {
   /** The shop's own; absent: the formula's force as it is. */
   readonly airForceFactor?: number;
   readonly alternatives: number;
+  /** A person's own order, to be followed; absent: the planner is free. */
+  readonly order?: readonly string[];
+  /** What a person asks of single bends. */
+  readonly wishes?: readonly BendWish[];
   /** When the search stops with the best so far. */
   readonly limitMs: number;
 }

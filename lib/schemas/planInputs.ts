@@ -18,11 +18,49 @@ export interface PlanListQuery extends ListQuery {
   readonly status?: (typeof planStates)[number] | undefined;
 }
 
+/** Seconds that a search may take. */
+export const planTimeLimit = { least: 1, most: 600, usual: 60 } as const;
+/** Other plans beside the best. */
+export const planAlternatives = { most: 8, usual: 3 } as const;
+
+const batch = z.number({ error: "must be the number of parts to be made" }).int("must be a whole number of parts").min(1, "must be 1 or more").max(1_000_000, "must be at most 1000000");
+const limitSeconds = z.number({ error: "must be a number of seconds" }).min(planTimeLimit.least, `must be ${planTimeLimit.least} or more`).max(planTimeLimit.most, `must be at most ${planTimeLimit.most}`);
+
 export const startPlanSchema = z.strictObject({
   partId: z.uuid("must be the id of a part"),
   /** The newest when absent. */
   revision: z.number().int("must be a whole number").min(1, "must be 1 or more").max(2_147_483_647).optional(),
   machineId: z.uuid("must be the id of a machine"),
-  batch: z.number({ error: "must be the number of parts to be made" }).int("must be a whole number of parts").min(1, "must be 1 or more").max(1_000_000, "must be at most 1000000"),
+  batch,
+  limitSeconds: limitSeconds.optional(),
+  alternatives: z.number({ error: "must be a number of plans" }).int("must be a whole number").min(0, "must be 0 or more").max(planAlternatives.most, `must be at most ${planAlternatives.most}`).optional(),
+  /** Whether pieces that stand at another brake may be fetched from there; if not they count as promised. */
+  otherBrakes: z.boolean().optional(),
 });
 export type StartPlanInput = z.input<typeof startPlanSchema>;
+
+const id = z.string().min(1, "must name something of the part").max(200);
+const bendWish = z.strictObject({ bend: id, front: id.exactOptional(), punch: id.exactOptional(), die: id.exactOptional() });
+
+/** A person's own order: bend ids, those of one stroke joined with "+"; and what is asked of single bends. */
+export const ownOrderSchema = z.strictObject({
+  order: z.array(id).min(1, "must name every bend").max(30),
+  wishes: z.array(bendWish).max(30).optional(),
+  limitSeconds: limitSeconds.optional(),
+});
+export type OwnOrderInput = z.input<typeof ownOrderSchema>;
+
+export const chooseAlternativeSchema = z.strictObject({ index: z.number().int("must be a whole number").min(0, "must be 0 or more").max(100) });
+export type ChooseAlternativeInput = z.input<typeof chooseAlternativeSchema>;
+
+export const searchOnSchema = z.strictObject({ moreSeconds: limitSeconds });
+export type SearchOnInput = z.input<typeof searchOnSchema>;
+
+export const planJobListQuerySchema = z.strictObject({
+  partId: z.uuid("must be the id of a part").optional(),
+  planId: z.uuid("must be the id of a plan").optional(),
+});
+export interface PlanJobListQuery {
+  readonly partId?: string | undefined;
+  readonly planId?: string | undefined;
+}

@@ -1,9 +1,11 @@
 import type { LengthUnit } from "@/bending/core/units";
 import type { PartDocument } from "@/bending/part/partDocument";
 import type { PlanDocument } from "@/bending/plan/planDocument";
+import type { PlanEnd } from "@/bending/plan/planEnd";
 import type { MaterialFacts } from "@/bending/handbook/material";
 import type { Machine } from "@/bending/tooling/machine";
 import type { Tool } from "@/bending/tooling/tool";
+import type { PlanCheckView } from "./planJobViews";
 import type { SheetView } from "@/lib/sheet/sheetView";
 import type { Role } from "./role";
 
@@ -134,9 +136,13 @@ export interface PlanListItem {
   readonly stations: number;
   readonly secondsPerPart: number;
   readonly setupSeconds: number;
+  readonly origin: PlanOrigin;
   readonly createdAt: string;
   readonly createdBy: string;
 }
+
+/** Found by the planner, along a person's own order, or chosen among the other plans that a search gave. */
+export type PlanOrigin = "planned" | "own order" | "chosen";
 
 export interface PlanDetail extends PlanListItem {
   readonly plan: PlanDocument;
@@ -152,17 +158,17 @@ export interface PlanDetail extends PlanListItem {
   /** The same tools read: millimetres and radians, with the pieces that were in service. */
   readonly tools: readonly Tool[];
   readonly sheets: readonly SheetListItem[];
+  /** The plan that this one was made from; null for one that was planned afresh. */
+  readonly fromPlanId: string | null;
+  /** What ended the search, and the time that it was given. */
+  readonly ended: PlanEnd;
+  readonly limitSeconds: number;
+  /** Newest of the times that it was looked over again. */
+  readonly lastCheck: PlanCheckView | null;
 }
 
-/** Planning runs in the background: POST /api/plans answers 202 with one of these; GET /api/plan-jobs/[id] follows it. */
-export interface PlanJobView {
-  readonly id: string;
-  readonly state: "running" | "done" | "failed" | "cancelled";
-  /** 0..1, or null when unknown. */
-  readonly progress: number | null;
-  readonly message: string;
-  readonly planId: string | null;
-}
+export type { PlanJobView } from "./planJobViews";
+export type { PlanShopView } from "./planShopView";
 
 export type SheetState = "draft" | "released" | "superseded";
 

@@ -52,9 +52,10 @@ async function released(of: PartDetail = part): Promise<SheetDetail> {
   const inputs = await planInputs(database(), { partId: of.id, machineId: machineId(), batch: 20 });
   if (!inputs.ok) throw new Error(JSON.stringify(inputs.error));
   const { task, revisionId, machineDocument, materialVersionId } = inputs.value;
-  const plan = runPlanTask(task, () => undefined);
+  const { plan } = runPlanTask(task, { onProgress: () => undefined, finishAsked: () => false });
   const { id } = await insertPlan(database(), {
     partId: of.id, revisionId, machineId: machineId(), plan, material: task.material, materialVersionId, machineDocument, tools: task.tools, inputsDigest: inputsDigest("1", task), by: null,
+    origin: "planned", fromPlanId: null, ended: "itself", limitMs: task.limitMs, asked: {},
   });
   const sheet = (await call("engineer", createSheet, `/api/plans/${id}/sheets`, { params: { id } })).body as unknown as SheetDetail;
   expect(sheet.flatChange).toBeNull();

@@ -124,7 +124,7 @@ describe("what was made of a material that has changed since", () => {
   const drift = async () => (await materialDrifts(database(), [(await findPlan(database(), planId))!]))[0];
   beforeAll(async () => {
     partId = ((await newPart()).body as unknown as PartDetail).id;
-    planId = await storePlan(person("engineer"), await inputs(), await digest(), bracketPlan);
+    planId = await storePlan(person("engineer"), await inputs(), { plan: bracketPlan, ended: "itself", digest: await digest(), fromPlanId: null });
     const draft = (await call("engineer", createSheet, `/api/plans/${planId}/sheets`, { params: { id: planId } })).body as unknown as SheetDetail;
     released = (await call("engineer", releaseSheet, `/api/sheets/${draft.id}/release`, { params: { id: draft.id } })).body as unknown as SheetDetail;
   });

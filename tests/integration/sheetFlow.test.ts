@@ -31,6 +31,7 @@ beforeAll(async () => {
 const planned = async (letter: string, changes: Partial<PlanDocument> = {}): Promise<string> => (await insertPlan(database(), {
   partId: part.id, revisionId: part.revision.id, machineId: machineId(), plan: { ...bracketPlan, ...changes },
   material: builtInMaterials.find(({ id }) => id === "S235")!, materialVersionId: null, machineDocument: bracketMachine, tools: [bracketPunch, bracketDie], inputsDigest: letter.repeat(64), by: null,
+  origin: "planned", fromPlanId: null, ended: "itself", limitMs: 60_000, asked: {},
 })).id;
 const draft = async (letter: string): Promise<SheetDetail> => {
   const id = await planned(letter);

@@ -25,12 +25,15 @@ it("is the same for the same inputs, in whatever order their keys stand", () => 
   const turned = Object.fromEntries(Object.entries(bracketDocument).reverse()) as unknown as PlanTask["document"];
   expect(digest({ document: turned })).toBe(digest({}));
   expect(digest(pieces({ rack: "elsewhere" }))).toBe(digest({}));
+  expect(digest({ limitMs: 2000 })).toBe(digest({}));
 });
 
 it("is another one for every change that a plan follows from", () => {
   const all = [
     digest({}), digest({}, "2"), digest({ batch: 11 }), digest({ document: { ...bracketDocument, thickness: 3 } }), digest({ tools: [] }),
     digest(pieces({ length: 150 })), digest({ machine: { ...machine.value, fingers: 1 } as PlanTask["machine"] }), digest({ material: builtInMaterials[1]! }), digest({ shopTable: table(96.3) }), digest({ shopTable: table(96.2) }),
+    digest({ airForceFactor: 1.1 }), digest({ alternatives: 4 }), digest({ order: ["a", "b"] }), digest({ order: ["b", "a"] }), digest({ wishes: [{ bend: "a", front: "f" }] }),
+    digest({ machine: { ...machine.value, settings: { ...machine.value.settings, clearance: 2 } } as PlanTask["machine"] }), digest({ machine: { ...machine.value, times: { ...machine.value.times, flip: 99 } } }),
   ];
   expect(new Set(all).size).toBe(all.length);
 });

@@ -2,12 +2,12 @@ import { createHash } from "node:crypto";
 import type { PlanTask } from "@/lib/jobs/planTask";
 
 /**
- * SHA-256 over everything that a plan follows from, keys in order. Rack places are left out: where a piece is kept
- * changes no plan.
+ * SHA-256 over everything that a plan follows from, keys in order. Two things are left out: where a piece is kept changes no plan, and
+ * how long may be searched does not change what is proven (see `findSamePlan`).
  */
 export function inputsDigest(engine: string, task: PlanTask): string {
   const tools = task.tools.map((tool) => ({ ...tool, pieces: tool.pieces.map(({ id, length, horn }) => ({ id, length, horn })) }));
-  return createHash("sha256").update(canonical({ engine, ...task, tools })).digest("hex");
+  return createHash("sha256").update(canonical({ engine, ...task, tools, limitMs: undefined })).digest("hex");
 }
 
 const canonical = (value: unknown): string =>

@@ -1,6 +1,7 @@
 import { sheetFlatChanges } from "../flatChange/sheetFlatChanges";
 import { sheetListItem } from "../sheets/sheetListItem";
 import { visibleSheetStates } from "../sheets/visibleSheetStates";
+import { lastCheck } from "./lastCheck";
 import { machineOf } from "./machineOf";
 import { planListItem } from "./planListItem";
 import { toolToDocument } from "@/bending/tooling/toolToDocument";
@@ -27,6 +28,10 @@ export async function planDetail(db: Connection, role: Role, id: string): Promis
     machineModel: machineOf(row.machine_document),
     tooling: { format: "tooling/1", units: "mm", tools: row.tools.map(toolToDocument) },
     tools: row.tools,
+    fromPlanId: row.from_plan_id,
+    ended: row.ended,
+    limitSeconds: row.limit_ms / 1000,
+    lastCheck: await lastCheck(db, id),
     sheets: sheets.rows.map((sheet) => sheetListItem(sheet, changes.get(sheet.id))),
   };
 }

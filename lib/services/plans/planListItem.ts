@@ -14,6 +14,7 @@ export const planListItem = (row: PlanListRow): PlanListItem => ({
   stations: row.stations,
   secondsPerPart: row.seconds_per_part,
   setupSeconds: row.setup_seconds,
+  origin: row.origin,
   createdAt: row.created_at.toISOString(),
   createdBy: row.created_by ?? "",
 });

@@ -8,8 +8,8 @@ import type { PieceRow } from "@/db/tools/pieceRow";
 export interface CurrentPieces {
   /** The tools as planned, their pieces with the rack places of now. */
   readonly tools: readonly Tool[];
-  /** Pieces that the plan names and that are out of service, gone or of another length now, each as "mark (why)". */
-  readonly missing: readonly string[];
+  /** Pieces that the plan names and that are out of service, gone or of another length now, with the reason. */
+  readonly missing: readonly { readonly piece: string; readonly why: string }[];
 }
 
 const SAME_LENGTH_MM = 0.01;
@@ -23,7 +23,7 @@ export async function currentPieces(db: Connection, plan: PlanDocument, tools: r
     tools: tools.map((tool) => ({ ...tool, pieces: tool.pieces.map((piece) => ({ ...piece, rack: (rows.get(piece.id)?.rack ?? piece.rack) || null })) })),
     missing: planned.flatMap((piece) => {
       const why = faultOf(rows.get(piece.id), piece.length);
-      return why === null ? [] : [`${piece.id} (${why})`];
+      return why === null ? [] : [{ piece: piece.id, why }];
     }),
   };
 }

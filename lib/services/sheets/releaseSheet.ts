@@ -28,7 +28,7 @@ async function release(within: Connection, person: SignedInPerson, id: string): 
   const plan = foundAgain(await findPlan(within, sheet.plan_id));
   const { tools, missing } = await currentPieces(within, plan.plan, plan.tools);
   if (missing.length > 0) {
-    return fail({ kind: "conflict", message: `The plan needs pieces that cannot be used now: ${missing.join(", ")}. Nothing was released; plan the part again, or have the toolroom bring them back.` });
+    return fail({ kind: "conflict", message: `The plan needs pieces that cannot be used now: ${missing.map(({ piece, why }) => `${piece} (${why})`).join(", ")}. Nothing was released; plan the part again, or have the toolroom bring them back.` });
   }
   const done = await releaseSheetRow(within, { id, snapshot: sheetViewOf(sheet, plan, tools), by: person.id });
   if (!done) return fail({ kind: "conflict", message: `Sheet ${sheet.number} was released by somebody else at this moment.` });
