@@ -7,11 +7,11 @@ import nextTypescript from "eslint-config-next/typescript";
 const zone = (target, from, message, except) => ({ target, from, message, ...(except ? { except } : {}) });
 
 const outside = ["./app", "./components", "./lib", "./db", "./seeds", "./scripts", "./tests"];
-const bendingOrder = [["core", "geometry", "handbook", "shopTable"], ["part", "tooling"], ["strokes"], ["clearance"], ["order", "setup", "findings", "exchange"], ["plan"]];
+const bendingOrder = [["core", "geometry", "handbook", "shopTable"], ["part", "tooling"], ["strokes"], ["clearance"], ["order", "setup", "findings", "exchange"], ["gauging"], ["plan"], ["whyNot"]];
 const bendingZones = bendingOrder.flatMap((layer, i) =>
   layer.flatMap((folder) =>
     bendingOrder.slice(i + 1).flat().map((later) =>
-      zone(`./bending/${folder}`, `./bending/${later}`, "bending/ imports to the left only: core, geometry, handbook, shopTable <- part, tooling <- strokes <- clearance <- order, setup, findings, exchange <- plan."),
+      zone(`./bending/${folder}`, `./bending/${later}`, "bending/ imports to the left only: core, geometry, handbook, shopTable <- part, tooling <- strokes <- clearance <- order, setup, findings, exchange <- gauging <- plan <- whyNot."),
     ),
   ),
 );

@@ -1,0 +1,45 @@
+import { createGaugeNumbers } from "../plan/gaugeNumbers";
+import { relaxedProblem } from "../plan/relaxedProblem";
+import type { WhySituation } from "./situationsOf";
+
+/** The state with most bends formed from which no stroke goes on, each stroke asked with the bed left out. */
+export interface FullestEnd {
+  readonly formed: number;
+  /** Moves that lead there, in order. */
+  readonly way: readonly number[];
+}
+
+/** Null when an order reaches the finished part (or the search was stopped before it knew). */
+export function fullestEnd({ situation, checks, follows }: WhySituation, shouldStop: () => boolean): FullestEnd | null {
+  const { moves, part } = situation;
+  const { option } = relaxedProblem(situation, checks, createGaugeNumbers());
+  const all = 2 ** part.bends.length - 1;
+  const before = new Map<number, { readonly from: number; readonly move: number } | null>([[0, null]]);
+  const waiting = [0];
+  const ends: number[] = [];
+  for (let formed = waiting.pop(); formed !== undefined; formed = waiting.pop()) {
+    let any = false;
+    for (let move = 0; move < moves.length; move += 1) {
+      const mask = moves[move]?.mask ?? 0;
+      if (shouldStop()) return null;
+      if (mask & formed || !follows(move, formed) || option(move, formed, 0) === null) continue;
+      any = true;
+      const next = formed | mask;
+      if (next === all) return null;
+      if (before.has(next)) continue;
+      before.set(next, { from: formed, move });
+      waiting.push(next);
+    }
+    if (!any) ends.push(formed);
+  }
+  const fullest = ends.sort((a, b) => bits(b) - bits(a) || a - b)[0] ?? 0;
+  const way: number[] = [];
+  for (let step = before.get(fullest) ?? null; step !== null; step = before.get(step.from) ?? null) way.unshift(step.move);
+  return { formed: fullest, way };
+}
+
+function bits(set: number): number {
+  let count = 0;
+  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
+  return count;
+}
