@@ -24,7 +24,7 @@ export interface WhySituations {
 
 /** The flats that a plan would look at, the likeliest first, every order free in them; a person's order is kept beside. */
 export function situationsOf(request: PlanRequest | CheckRequest): WhySituations {
-  const { document, machine, tools, airForceFactor } = request;
+  const { document, machine, tools, airForceFactor, wishes } = request;
   const variants = partVariants(request);
   const order = masksOf(request);
   const each: WhySituation[] = [];
@@ -35,7 +35,7 @@ export function situationsOf(request: PlanRequest | CheckRequest): WhySituations
       reasons.push(...found.reasons);
       continue;
     }
-    const facts = { variant, machine, units: document.units, pairs: found.pairs, airForceFactor };
+    const facts = { variant, machine, units: document.units, pairs: found.pairs, airForceFactor, wishes };
     const situation = createSituation(facts);
     const follows = order === null ? () => true : createSituation({ ...facts, order }).allowed;
     each.push({ situation, checks: createStepChecks(situation), follows });
