@@ -65,5 +65,6 @@ function moveOf(part: PartModel, bends: readonly number[], front: "parent" | "ch
     pose: poseOf(up, away * dy, -away * dx),
     halfLength,
     bentLength,
+    ...(first.hem === null ? {} : { strokes: 2 }),
   };
 }

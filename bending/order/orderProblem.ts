@@ -13,12 +13,16 @@ export interface OrderProblem {
   /** Seconds to walk from one station to another. */
   readonly walk: (from: number, to: number) => number;
   readonly option: (move: number, formed: number, station: number) => StepOption | null;
+  /** What is known of a move at any station without asking `option`; null where no station can make it. Absent: nothing is known. */
+  readonly least?: (move: number, formed: number) => LeastOption | null;
 }
 
 export interface OrderMove {
   /** The bends that the stroke forms. */
   readonly mask: number;
   readonly pose: Pose;
+  /** Strokes of the ram that it takes; 1 unless said (2 for a hem). */
+  readonly strokes?: number;
 }
 
 export interface OrderTimes {
@@ -33,6 +37,13 @@ export interface StepOption {
   readonly gauge: number;
   /** How many wishes (not demands) the step leaves unmet; fewer always goes before less time. */
   readonly demerit: number;
+}
+
+/** Never more than the answer at any station: what no answer goes below. */
+export interface LeastOption {
+  readonly demerit: number;
+  /** The gauge settings that an answer can have; null when it can have any. Equal objects are kept as one. */
+  readonly gauges: readonly number[] | null;
 }
 
 export interface OrderStep {

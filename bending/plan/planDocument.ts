@@ -77,6 +77,8 @@ export interface PlanStep {
   readonly station: string;
   readonly bendZ: readonly [number, number];
   readonly angle: number;
+  /** A hem takes two strokes: first to this angle (`demandedAngle` with its springback), then flat in the slot of the die. */
+  readonly acuteAngle?: number;
   readonly demandedAngle: number;
   readonly insideRadius: number;
   readonly forceKN: number;

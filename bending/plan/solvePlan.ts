@@ -36,7 +36,7 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   if (first === undefined) return refused(request, [reasonOf("no-die", "there is no flat to plan")]);
   const bends = first.drawn.bends.length;
   if (bends > MAX_BENDS) return withFlat(refused(request, [reasonOf("order", `the part has ${bends} bends; up to ${MAX_BENDS} are planned`)]), first, request);
-  const hems = first.drawn.bends.flatMap((bend) => hemReason(bend) ?? []);
+  const hems = first.drawn.bends.flatMap((bend) => hemReason(bend, request.tools) ?? []);
   if (hems.length > 0) return withFlat(refused(request, hems), first, request);
   const { solved, toolReasons } = solveVariants(request, variants.value, createBudget(request), order);
   return withFlat(joined(request, solved, toolReasons, variants.value.length, order !== undefined), first, request);
@@ -57,7 +57,7 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
     const found = candidatePairs(request.tools, request.machine, variant.part.thickness, variant.wantedV, request.document.units);
     toolReasons.push(...(found.pairs.length === 0 ? found.reasons : []));
     if (found.pairs.length === 0) continue;
-    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, airForceFactor: request.airForceFactor, ...(order ? { order } : {}) });
+    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, airForceFactor: request.airForceFactor, wishes: request.wishes, ...(order ? { order } : {}) });
     if (situation.pairs.length === 0) {
       const reasons = explain(situation, createStepChecks(situation), []);
       toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));

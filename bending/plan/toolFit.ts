@@ -9,6 +9,7 @@ import type { Bend, PartModel } from "../part/partModel";
 import type { RunsOf } from "../setup/createRuns";
 import { levelNeeded } from "../strokes/levelNeeded";
 import type { Machine } from "../tooling/machine";
+import { hemFit } from "./hemFit";
 import type { FitProblem, ToolFit } from "./situation";
 import type { ToolPair } from "./toolPair";
 
@@ -32,6 +33,7 @@ export interface FitQuestion {
 
 /** Whether a bend can be formed by a pair, apart from order and clearance; the first thing that is wrong, else. */
 export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): ToolFit {
+  if (bend.hem !== null) return hemFit(question, bend, pair, toolFit);
   const { part } = question;
   const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
   const force = kiloNewtonPerMetre(airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening) * question.airForceFactor);

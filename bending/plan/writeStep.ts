@@ -6,6 +6,7 @@ import type { Interval } from "../geometry/interval";
 import { handlingBetween } from "../order/handlingBetween";
 import type { OrderStep } from "../order/orderProblem";
 import type { Layout } from "../setup/layout";
+import { acuteHem } from "../strokes/acuteHem";
 import type { StepChecks } from "./createStepChecks";
 import { placeStep, type StepPlace } from "./placeStep";
 import type { PlanGauge, PlanStep } from "./planDocument";
@@ -23,6 +24,7 @@ export function writeStep(situation: Situation, checks: StepChecks, layout: Layo
   const bend = part.bends[move?.bends[0] ?? -1];
   const fit = fits[move?.bends[0] ?? -1]?.[station?.pair ?? -1];
   if (!place || !move || !station || !pair || !bend || !fit?.ok) throw new Error("invariant: a step that was found can be made");
+  const acute = bend.hem === null ? null : acuteHem(part, move.bends[0] ?? 0, pair.die.vOpening).bends[move.bends[0] ?? 0] ?? null;
   const inUnits = (value: number) => rounded(value / mmPer(units));
   const { hitZ } = place;
   return {
@@ -33,10 +35,11 @@ export function writeStep(situation: Situation, checks: StepChecks, layout: Layo
     station: stationName(step.station),
     bendZ: [inUnits(hitZ - move.halfLength), inUnits(hitZ + move.halfLength)],
     angle: rounded(toDeg(bend.angle)),
+    ...(acute === null ? {} : { acuteAngle: rounded(toDeg(acute.angle)) }),
     demandedAngle: rounded(toDeg(fit.demanded)),
     insideRadius: inUnits(bend.insideRadius),
     forceKN: rounded((fit.force * move.bentLength) / 1000),
-    depthMm: rounded(strokePlacement(bend, part.thickness, pair.die, fit.demanded).depth),
+    depthMm: rounded(strokePlacement(acute ?? bend, part.thickness, pair.die, fit.demanded).depth),
     toolWindow: toolWindow(checks.forbidden(step.move, step.formed, pair.index, pair.punch), station.z - hitZ, hitZ, machine.bedLength).map(inUnits) as unknown as readonly [number, number],
     gauge: writeGauge(situation, step, place, inUnits),
     handling: handlingBetween(before === null ? null : moves[before.move]?.pose ?? null, move.pose),

@@ -2,6 +2,7 @@ import type { FieldProblem } from "../core/problem";
 import { deg, toDeg, rad, type LengthUnit } from "../core/units";
 import type { ProfilePoint } from "../geometry/vec2";
 import { formatLength } from "../core/formatLength";
+import { polygonContains } from "../geometry/polygonContains";
 import { PROFILE_TOLERANCE_MM, PROFILE_TOLERANCE_RAD } from "./profileTolerance";
 import type { Die } from "./tool";
 
@@ -29,10 +30,21 @@ export function dieProblems(die: Die, path: string, units: LengthUnit): readonly
   } else {
     problems.push(...shapeOfV(die, at, text));
   }
+  problems.push(...slotProblems(die, at, text));
   if (-bottom < die.height - PROFILE_TOLERANCE_MM) {
     problems.push(at("height", `is ${text(die.height)}, but the profile ends ${text(-bottom)} under the top plane; draw the body down to its seat, or set the height to ${text(-bottom)}`));
   }
   return problems;
+}
+
+/** The slot of a hem die must be open in the profile: in front of its end, just over its floor. */
+function slotProblems({ flattening, profile, height }: Die, at: (field: string, message: string) => FieldProblem, text: (value: number) => string): readonly FieldProblem[] {
+  if (flattening === undefined) return [];
+  const { floor, back, opening } = flattening;
+  if (floor >= height) return [at("flattening.floor", `is ${text(floor)} under the top plane, but the die is ${text(height)} high`)];
+  const inSlot = [opening * 0.1, opening * 0.9].every((over) => !polygonContains(profile, [back - opening / 2, over - floor]));
+  if (!inSlot) return [at("flattening.back", `puts the end of the slot at x = ${text(back)}, ${text(floor)} under the top plane, but the profile has no slot of ${text(opening)} there, open to the front`)];
+  return [];
 }
 
 function shapeOfV(die: Die, at: (field: string, message: string) => FieldProblem, text: (value: number) => string): readonly FieldProblem[] {

@@ -7,8 +7,8 @@ import { dieProblems } from "./dieProblems";
 import { piecesOf } from "./piecesOf";
 import { profileProblem } from "./profileProblem";
 import { punchProblems } from "./punchProblems";
-import type { Tool } from "./tool";
-import type { ToolEntry } from "./toolingDocument";
+import type { Die, Tool } from "./tool";
+import type { DieEntry, ToolEntry } from "./toolingDocument";
 
 /** One tool of a tooling document in millimetres and radians, its profile counter-clockwise. */
 export function readTool(entry: ToolEntry, path: string, units: LengthUnit): Result<Tool, readonly FieldProblem[]> {
@@ -28,7 +28,10 @@ export function readTool(entry: ToolEntry, path: string, units: LengthUnit): Res
   };
   const tool: Tool = entry.kind === "punch"
     ? { ...common, kind: "punch", tipAngle: toRad(deg(entry.tipAngle)), tipRadius: mm(entry.tipRadius * scale) }
-    : { ...common, kind: "die", vOpening: mm(entry.vOpening * scale), vAngle: toRad(deg(entry.vAngle)), shoulderRadius: mm(entry.shoulderRadius * scale) };
+    : { ...common, kind: "die", vOpening: mm(entry.vOpening * scale), vAngle: toRad(deg(entry.vAngle)), shoulderRadius: mm(entry.shoulderRadius * scale), ...slot(entry.flattening, scale) };
   const all = [...problems, ...(tool.kind === "punch" ? punchProblems(tool, path, units) : dieProblems(tool, path, units))];
   return all.length ? fail(all) : ok(tool);
 }
+
+const slot = (given: DieEntry["flattening"], scale: number): Pick<Die, "flattening"> =>
+  given === undefined ? {} : { flattening: { floor: mm(given.floor * scale), back: mm(given.back * scale), opening: mm(given.opening * scale) } };

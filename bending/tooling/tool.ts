@@ -32,6 +32,18 @@ export interface Die extends ToolCommon {
   readonly vOpening: Mm;
   readonly vAngle: Rad;
   readonly shoulderRadius: Mm;
+  /** The slot of a two-stage hem die; absent on every other die. */
+  readonly flattening?: FlatteningSlot;
+}
+
+/** Where a two-stage hem die flattens: a slot in its front that the stroke closes, with the fold against its end. */
+export interface FlatteningSlot {
+  /** From the top plane down to the face that the sheet lies on. */
+  readonly floor: Mm;
+  /** Where the fold stops: x from the middle of the V, below 0 in front of it. */
+  readonly back: Mm;
+  /** Clear height while it stands open. */
+  readonly opening: Mm;
 }
 
 export interface ToolPiece {

@@ -15,7 +15,7 @@ export function toolToDocument(tool: Tool): ToolEntry {
   };
   return tool.kind === "punch"
     ? { ...common, kind: "punch", tipAngle: degrees(tool.tipAngle), tipRadius: tool.tipRadius }
-    : { ...common, kind: "die", vOpening: tool.vOpening, vAngle: degrees(tool.vAngle), shoulderRadius: tool.shoulderRadius };
+    : { ...common, kind: "die", vOpening: tool.vOpening, vAngle: degrees(tool.vAngle), shoulderRadius: tool.shoulderRadius, ...(tool.flattening ? { flattening: { ...tool.flattening } } : {}) };
 }
 
 /** Without the last digits of the turn to radians and back. */

@@ -30,6 +30,8 @@ export interface DieEntry extends ToolEntryCommon {
   readonly vOpening: number;
   readonly vAngle: number;
   readonly shoulderRadius: number;
+  /** The slot of a two-stage hem die: how far its floor lies under the top plane, x of its end from the middle of the V, clear height while open. */
+  readonly flattening?: { readonly floor: number; readonly back: number; readonly opening: number } | undefined;
 }
 
 /** `count` pieces alike; `pieces` are the shop's marks, one for each. */

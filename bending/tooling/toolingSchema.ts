@@ -32,6 +32,11 @@ const die = z.strictObject({
   vOpening: fields.positive("the V opening, between the tops of the shoulder arcs"),
   vAngle: fields.degrees("the angle of the V", 180),
   shoulderRadius: fields.notNegative("the radius of the shoulders"),
+  flattening: z.strictObject({
+    floor: fields.positive("how far the floor of the slot lies under the top plane"),
+    back: fields.number("where the slot ends, from the middle of the V"),
+    opening: fields.positive("the clear height of the open slot"),
+  }).optional(),
 });
 
 /** Shape of a tooling document; geometry is checked after it (`readTool`). */
