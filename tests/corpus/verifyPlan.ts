@@ -2,15 +2,20 @@ import { createClearance } from "@/bending/clearance/createClearance";
 import { machineFrames } from "@/bending/clearance/machineFrames";
 import { deg, mmPer, rad, toRad } from "@/bending/core/units";
 import { applyFrame } from "@/bending/geometry/applyFrame";
+import type { Frame } from "@/bending/geometry/frame";
+import type { FlatPoint } from "@/bending/geometry/vec2";
 import { buildPart } from "@/bending/part/buildPart";
 import type { PlanDocument, PlanSection, PlanStation, PlanStep } from "@/bending/plan/planDocument";
 import { plannedBends } from "@/bending/plan/plannedBends";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import type { Die, Punch } from "@/bending/tooling/tool";
+import { verifySeconds } from "./verifySeconds";
+import { verifyTools } from "./verifyTools";
 
 /**
- * Goes through a plan with its own small arithmetic and a fresh clearance: every bend once, pieces real and used
- * once, bends covered, no tool where it must not stand, gauge within its travel and on the part. Returns what is wrong.
+ * Goes through a plan with its own small arithmetic and a fresh clearance: every bend once, nothing in the way that no place helps, pieces real and
+ * used once, bends covered, no tool where it must not stand, gauge within its travel and on the part, forces, and the time worked out again.
+ * Returns what is wrong.
  */
 export function verifyPlan(plan: PlanDocument, request: PlanRequest): readonly string[] {
   const wrong: string[] = [];
@@ -30,6 +35,8 @@ export function verifyPlan(plan: PlanDocument, request: PlanRequest): readonly s
     if (bends.some((bend) => bend < 0 || (formed >> bend) & 1)) wrong.push(`${name}: no such bend, or made twice`);
     const hit = { bends, front: part.faces.findIndex((face) => face.id === step.front), formed };
     const [punch, die] = [tool("punch", step.punch), tool("die", step.die)];
+    if (!punch || !die) return [...wrong, `${name}: no such punch or die`];
+    wrong.push(...clearance.blocked(hit, punch, die).map((met) => `${name}: blocked (${met.kind})`));
     const middle = ((step.bendZ[0] + step.bendZ[1]) / 2) * per;
     for (const station of plan.stations) {
       for (const kind of ["punch", "die"] as const) {
@@ -47,13 +54,21 @@ export function verifyPlan(plan: PlanDocument, request: PlanRequest): readonly s
     const [frame, outline] = [frames[faceIndex], part.faces[faceIndex]?.outline];
     for (const finger of step.gauge.fingers) {
       if (!frame || !outline) { wrong.push(`${name}: the gauge names no face`); continue; }
-      const reach = Math.max(...outline.flatMap((p) => [0, part.thickness as number].map((z) => applyFrame(frame, [p[0], p[1], z])[0])));
+      const reach = reachAt(frame, outline, part.thickness, step, ((finger.z * per) - middle), request.machine.gauge.fingerWidth);
       if (Math.abs(finger.x * per - reach) > 0.02) wrong.push(`${name}: finger at ${finger.x}, the face ends at ${reach / per}`);
     }
     for (const bend of bends) formed |= 1 << bend;
   }
   if (formed !== 2 ** part.bends.length - 1) wrong.push("not every bend is made");
-  return wrong;
+  return [...wrong, ...verifyTools(plan, request, part), ...verifySeconds(plan, request, part)];
+}
+
+/** How far back the face stands where a finger is: its farthest point, or what a slanted edge has across the finger's width. */
+function reachAt(frame: Frame, outline: readonly FlatPoint[], thickness: number, { gauge }: PlanStep, z: number, width: number): number {
+  const [a, b] = [outline[gauge.edge], outline[(gauge.edge + 1) % outline.length]].map((p) => applyFrame(frame, [p?.[0] ?? 0, p?.[1] ?? 0, 0]));
+  const slope = a && b ? (b[0] - a[0]) / (b[2] - a[2]) : 0;
+  if (a && gauge.on === "edge" && Math.abs(slope) > 0.0018) return a[0] + slope * (z - a[2]) + (Math.abs(slope) * width) / 2;
+  return Math.max(...outline.flatMap((p) => [0, thickness].map((level) => applyFrame(frame, [p[0], p[1], level])[0])));
 }
 
 function spans(station: PlanStation, sections: readonly PlanSection[]): readonly (readonly [number, number])[] {
