@@ -6,7 +6,8 @@ import type { Pose } from "./pose";
  * Least seconds that the bends not yet formed can take, whatever their order: as few strokes as the moves
  * allow, one flip when a bend of the other side is left, one turn for every other axis that is left.
  * Each term counts something that no order can avoid and no two count the same, so it is a bound from below;
- * a move lowers it by at most its own seconds, so it is consistent too.
+ * a move lowers it by at most its own seconds, so it is consistent too. Handling takes as long either way, so the same
+ * holds of bends made before a pose as of bends left after it.
  */
 export function remainingBound(problem: OrderProblem): (remaining: number, pose: Pose | null) => number {
   const { times } = problem;
@@ -17,7 +18,7 @@ export function remainingBound(problem: OrderProblem): (remaining: number, pose:
   const turn = handlingSeconds({ flip: false, turn: 90 }, times);
   return (remaining, pose) => {
     let strokes = 0;
-    for (const group of groups) if (group & remaining) strokes += 1;
+    for (const group of groups) if (group.mask & remaining) strokes += group.strokes;
     const sides = (remaining & up ? 1 : 0) + (remaining & down ? 1 : 0);
     const sideSeen = pose !== null && remaining & (pose.up === 1 ? up : down) ? 1 : 0;
     const flips = pose === null ? Math.max(0, sides - 1) : sides - sideSeen;
@@ -55,12 +56,15 @@ function axesOf(problem: OrderProblem): readonly { readonly key: number; readonl
   return [...masks].map(([key, mask]) => ({ key, mask }));
 }
 
-/** Bends that may share a stroke, joined; each group needs at least one stroke. */
-function lineGroups(problem: OrderProblem): readonly number[] {
-  let groups: number[] = [];
-  for (const move of problem.moves) {
-    const joined = groups.filter((group) => group & move.mask).reduce((all, group) => all | group, move.mask);
-    groups = [...groups.filter((group) => !(group & move.mask)), joined];
+interface LineGroup { readonly mask: number; readonly strokes: number }
+
+/** Bends that may share a stroke, joined; each group needs at least the strokes of its quickest move. */
+function lineGroups(problem: OrderProblem): readonly LineGroup[] {
+  let groups: LineGroup[] = [];
+  for (const { mask, strokes = 1 } of problem.moves) {
+    const own = groups.filter((group) => group.mask & mask);
+    const joined = own.reduce((all, group) => ({ mask: all.mask | group.mask, strokes: Math.min(all.strokes, group.strokes) }), { mask, strokes });
+    groups = [...groups.filter((group) => !(group.mask & mask)), joined];
   }
   return groups;
 }

@@ -1,28 +1,25 @@
 import type { OrderProblem } from "../order/orderProblem";
 import { NEAR_GAP_MM } from "../setup/placeStations";
+import type { StationKind } from "../setup/stationKinds";
 import type { BedQuestion } from "./bedQuestion";
-import type { KindClass } from "./kindClasses";
 
 /**
- * The order question for stations of these classes, each as if alone on the bed and all as near as they may stand:
+ * The order question for stations of these kinds, each as if alone on the bed and all as near as they may stand:
  * no bed of them is better.
  */
-export function aloneProblem({ situation: { moves, part, machine }, alone }: BedQuestion, classes: readonly KindClass[]): OrderProblem {
+export function aloneProblem({ situation: { moves, part, machine }, alone, relaxed }: BedQuestion, kinds: readonly StationKind[]): OrderProblem {
   return {
     bends: part.bends.length,
     moves,
-    stations: classes.length,
+    stations: kinds.length,
     times: machine.times,
-    walk: (from, to) => {
-      const [a, b] = [classes[from]?.shortest ?? 0, classes[to]?.shortest ?? 0];
-      return (((a + b) / 2 + NEAR_GAP_MM) / 1000) * machine.times.walkPerMetre;
-    },
+    walk: (from, to) => (((kinds[from]?.length ?? 0) + (kinds[to]?.length ?? 0)) / 2 + NEAR_GAP_MM) / 1000 * machine.times.walkPerMetre,
+    ...(relaxed.least ? { least: relaxed.least } : {}),
     option: (move, formed, station) => {
-      const one = classes[station];
-      const kind = one?.kinds[0];
-      if (one === undefined || kind === undefined) return null;
-      const need = alone.need(move, formed, one.pair);
-      return need !== null && alone.holds(kind, need) ? alone.option(move, formed, one.pair) : null;
+      const kind = kinds[station];
+      if (kind === undefined) return null;
+      const need = alone.need(move, formed, kind.pair);
+      return need !== null && alone.holds(kind, need) ? alone.option(move, formed, kind.pair) : null;
     },
   };
 }

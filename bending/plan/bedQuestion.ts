@@ -1,3 +1,4 @@
+import type { OrderProblem } from "../order/orderProblem";
 import type { SearchLimits } from "../order/searchOrder";
 import type { Alone } from "./createAlone";
 import type { CandidateKeeper } from "./createCandidateKeeper";
@@ -14,11 +15,11 @@ export interface BedQuestion {
   readonly alone: Alone;
   readonly budget: SearchBudget;
   readonly keeper: CandidateKeeper;
+  /** The order question with the bed left out. */
+  readonly relaxed: OrderProblem;
   /** Weight of one part in the unhindered order: no bed is better. */
   readonly least: number;
   /** Pairs that the unhindered order uses. */
   readonly favoured: ReadonlySet<number>;
-  /** The sets of formed bends that an order can come to, ascending; null when there are too many to tell. */
-  readonly sets: readonly number[] | null;
   readonly limits: SearchLimits;
 }

@@ -1,3 +1,5 @@
+import type { OrderProblem, OrderStep } from "../order/orderProblem";
+import type { SearchLimits } from "../order/searchOrder";
 import type { BedQuestion } from "./bedQuestion";
 import { createAlone } from "./createAlone";
 import type { CandidateKeeper } from "./createCandidateKeeper";
@@ -5,22 +7,20 @@ import type { SearchBudget } from "./createBudget";
 import type { StepChecks } from "./createStepChecks";
 import type { GaugeNumbers } from "./gaugeNumbers";
 import type { Situation } from "./situation";
-import type { UnhinderedOrder } from "./unhindered";
 
-/** The question about beds, with what the unhindered order tells when it is known. */
+/** The question about beds, with the order found with the bed left out and the weight that no order goes below. */
 export function bedQuestionOf(
-  situation: Situation, checks: StepChecks, numbers: GaugeNumbers, budget: SearchBudget, keeper: CandidateKeeper,
-  best: Extract<UnhinderedOrder, { kind: "found" }> | null,
+  { situation, checks, numbers }: { readonly situation: Situation; readonly checks: StepChecks; readonly numbers: GaugeNumbers }, relaxed: OrderProblem,
+  budget: SearchBudget, keeper: CandidateKeeper, best: { readonly steps: readonly OrderStep[]; readonly least: number; readonly soFar: SearchLimits["soFar"] },
 ): BedQuestion {
   return {
-    situation, checks, numbers, budget, keeper,
+    situation, checks, numbers, budget, keeper, relaxed,
     alone: createAlone(situation, checks, numbers),
-    least: best?.weight ?? 0,
-    favoured: new Set((best?.steps ?? []).flatMap(({ move, formed }) => {
+    least: best.least,
+    favoured: new Set(best.steps.flatMap(({ move, formed }) => {
       const pair = situation.pairs.find(({ index }) => checks.possible(move, formed, index));
       return pair === undefined ? [] : [pair.index];
     })),
-    sets: best?.sets ?? null,
-    limits: { shouldStop: budget.shouldStop, onExpand: budget.onExpand, ...best?.better },
+    limits: { shouldStop: budget.shouldStop, onExpand: budget.onExpand, soFar: best.soFar ?? null },
   };
 }

@@ -1,5 +1,6 @@
 import { ANY_GAUGE, type OrderProblem, type StepOption } from "../order/orderProblem";
 import { freeShifts } from "../setup/freeShifts";
+import { createLeast } from "./createLeast";
 import type { StepChecks } from "./createStepChecks";
 import { fingerCount } from "./fingerCount";
 import { gaugeDemerits } from "./gaugeDemerits";
@@ -12,7 +13,7 @@ import type { Situation } from "./situation";
  * stand a shorter one within it may, so no plan costs less a part; if it has no order, none has.
  */
 export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): OrderProblem {
-  const { moves, pairs, machine, part, allowed, runs, fits } = situation;
+  const { moves, pairs, machine, part, allowed, runs } = situation;
   const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
     const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));
     return { punch: least(punch), die: least(die) };
@@ -30,17 +31,10 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
     const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
     return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };
   };
-  /** What every pair that fits leaves unmet at least; all gauge alike. */
-  const leastDemerit = (move: number, formed: number): number => {
-    const usable = pairs.filter(({ index }) => moves[move]?.bends.every((bend) => fits[bend]?.[index]?.ok));
-    const first = usable[0];
-    if (first === undefined) return 0;
-    const gauge = checks.gauges(move, formed, first.index)[0];
-    const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
-    return gaugeDemerits(fingers) + Math.min(...usable.map(({ index }) => checks.wishes(move, index)));
-  };
+  const least = createLeast(situation, checks, numbers);
   const known = new Map<number, StepOption | null>();
   return {
+    least,
     bends: part.bends.length,
     moves,
     stations: 1,
@@ -51,20 +45,20 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
       const key = formed * moves.length + move;
       const answer = known.get(key);
       if (answer !== undefined) return answer;
-      const agree = checks.gaugesAgree(move, formed);
-      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), agree, agree ? leastDemerit(move, formed) : 0);
-      known.set(key, best);
-      return best;
+      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), least(move, formed)?.demerit ?? 0);
+      const settled = best === null || checks.gaugesAgree(move, formed) ? best : { ...best, gauge: ANY_GAUGE };
+      known.set(key, settled);
+      return settled;
     },
   };
 }
 
-/** The option of least demerit; its gauge is left open when not every pair would gauge alike. */
-function bestOf(pairs: number, option: (pair: number) => StepOption | null, gaugesAgree: boolean, least: number): StepOption | null {
+/** The option of least demerit, looked for until one has the least that there can be. */
+function bestOf(pairs: number, option: (pair: number) => StepOption | null, least: number): StepOption | null {
   let best: StepOption | null = null;
   for (let pair = 0; pair < pairs && (best === null || best.demerit > least); pair += 1) {
     const found = option(pair);
     if (found && (best === null || found.demerit < best.demerit)) best = found;
   }
-  return best === null || gaugesAgree ? best : { ...best, gauge: ANY_GAUGE };
+  return best;
 }

@@ -1,4 +1,6 @@
-import { diveOrder } from "../order/diveOrder";
+import type { CostSoFar } from "../order/createCostSoFar";
+import { fullestDeadEnd } from "../order/fullestDeadEnd";
+import type { OrderStep } from "../order/orderProblem";
 import { bedQuestionOf } from "./bedQuestionOf";
 import { constructBeds } from "./constructBeds";
 import type { SearchBudget } from "./createBudget";
@@ -30,32 +32,33 @@ export interface VariantAnswer {
 
 /** Beds of up to so many stations are searched; more are only built for an order that works. */
 export const MOST_STATIONS = 3;
-/** How far the first order is dived for. */
-const DIVE_STATES = 500;
+/** Sets of formed bends looked at for one where every way ends. */
+const DEAD_END_SETS = 300;
 
 /** Best order, fronts, tools and stations for one flat pattern. */
 export function solveVariant(situation: Situation, checks: StepChecks, budget: SearchBudget): VariantAnswer {
   const numbers = createGaugeNumbers();
   const keeper = createCandidateKeeper(budget.keep);
   const limits = { shouldStop: budget.shouldStop, onExpand: budget.onExpand };
+  const asked = { situation, checks, numbers };
   const relaxed = relaxedProblem(situation, checks, numbers);
   const tally = { layouts: 0, expanded: 0 };
   const floor = floorOf(situation, budget.batch);
   const answer = (bound: number, ends: Partial<VariantAnswer>): VariantAnswer =>
     ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
 
-  budget.doing("Looking for a first order", 0);
-  const dived = diveOrder(relaxed, DIVE_STATES, budget.shouldStop);
-  if (dived) constructBeds(bedQuestionOf(situation, checks, numbers, budget, keeper, null), dived.steps);
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
-  if (enough()) return answer(floor, { stopped: true });
+  const onSome = (steps: readonly OrderStep[], soFar: CostSoFar | null): boolean => {
+    constructBeds(bedQuestionOf(asked, relaxed, budget, keeper, { steps, least: 0, soFar }), steps);
+    return !enough();
+  };
   budget.doing("Looking for the best order with the bed left out", 0);
-  const best = unhindered(relaxed, limits);
+  const { outcome: best, soFar } = unhindered(relaxed, limits, onSome);
   tally.expanded += best.expanded;
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
-  if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: best.deadEnds });
+  if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
 
-  const question = bedQuestionOf(situation, checks, numbers, budget, keeper, best);
+  const question = bedQuestionOf(asked, relaxed, budget, keeper, { steps: best.steps, least: best.weight, soFar });
   constructBeds(question, best.steps);
   if (enough()) return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.weight * budget.batch), { stopped: true });
   let open = Infinity;

@@ -1,33 +1,29 @@
-import { createCostToGo } from "../order/createCostToGo";
-import type { OrderProblem } from "../order/orderProblem";
-import { searchOrder, type SearchLimits } from "../order/searchOrder";
+import { createCostSoFar, type CostSoFar } from "../order/createCostSoFar";
+import type { OrderProblem, OrderStep } from "../order/orderProblem";
+import { searchOrder, type OrderOutcome, type SearchLimits } from "../order/searchOrder";
 
-export type UnhinderedOrder =
-  | {
-    readonly kind: "found";
-    readonly weight: number;
-    readonly steps: readonly { readonly move: number; readonly formed: number }[];
-    readonly expanded: number;
-    readonly better: Pick<SearchLimits, "toGo">;
-    /** The sets of formed bends that an order can come to, ascending; null when there are too many to tell. */
-    readonly sets: readonly number[] | null;
-  }
-  | { readonly kind: "none"; readonly deadEnds: readonly number[]; readonly expanded: number }
-  | { readonly kind: "stopped"; readonly bound: number; readonly expanded: number };
+export interface UnhinderedOrder {
+  readonly outcome: OrderOutcome;
+  /** Some order, when there is one; the best when `outcome` found it. */
+  readonly steps: readonly OrderStep[] | null;
+  /** What the steps before a state cost at the least: it bounds every order with a bed too. */
+  readonly soFar: CostSoFar | null;
+}
 
-/** Up to so many bends the cost to go is worked out for every state: it pays back on each bed that is tried. */
-const EVERY_STATE_UP_TO = 12;
+/** States after which some order is looked for before the search for the best goes on. */
+const STATES_BEFORE_SOME_ORDER = 300;
+/** How much more the rest of an order weighs while just some order is looked for. */
+const HASTE = 3;
 
-/** The best order with the bed left out, and the cost to go that bounds every order with a bed. */
-export function unhindered(problem: OrderProblem, limits: SearchLimits): UnhinderedOrder {
-  if (problem.bends > EVERY_STATE_UP_TO) {
-    const outcome = searchOrder(problem, limits);
-    return outcome.kind === "found" ? { ...outcome, better: {}, sets: null } : outcome;
-  }
-  const costToGo = createCostToGo(problem, limits.shouldStop ?? (() => false));
-  if (costToGo === null) return { kind: "stopped", bound: 0, expanded: 0 };
-  const weight = costToGo.from(0, null);
-  const expanded = costToGo.states();
-  if (!Number.isFinite(weight)) return { kind: "none", deadEnds: costToGo.deadEnds(), expanded };
-  return { kind: "found", weight, steps: costToGo.moves(), expanded, sets: costToGo.sets(), better: { toGo: (formed, move) => costToGo.from(formed, move) } };
+/** The best order with the bed left out; `onSome` is told of an order that may not be the best, when the best takes long. */
+export function unhindered(problem: OrderProblem, limits: SearchLimits, onSome: (steps: readonly OrderStep[], soFar: CostSoFar | null) => boolean): UnhinderedOrder {
+  const soFar = createCostSoFar(problem, limits.shouldStop ?? (() => false));
+  const first = searchOrder(problem, { ...limits, soFar, most: STATES_BEFORE_SOME_ORDER });
+  if (first.kind !== "stopped") return { outcome: first, steps: first.kind === "found" ? first.steps : null, soFar };
+  const some = searchOrder(problem, { ...limits, soFar, haste: HASTE });
+  const steps = some.kind === "found" ? some.steps : null;
+  if (some.kind === "none") return { outcome: some, steps, soFar };
+  if (steps && !onSome(steps, soFar)) return { outcome: first, steps, soFar };
+  const outcome = searchOrder(problem, { ...limits, soFar });
+  return { outcome, steps: outcome.kind === "found" ? outcome.steps : steps, soFar };
 }

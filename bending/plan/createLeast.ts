@@ -1,0 +1,117 @@
+import type { LeastOption } from "../order/orderProblem";
+import { pickBits } from "../order/pickBits";
+import type { StepChecks } from "./createStepChecks";
+import { createNearTools } from "./createNearTools";
+import { gaugeDemerits } from "./gaugeDemerits";
+import type { GaugeNumbers } from "./gaugeNumbers";
+import { gaugePatterns, type GaugePattern } from "./gaugePatterns";
+import type { Situation } from "./situation";
+
+/** Bends that are told apart for one move: the nearest to it. */
+const BENDS_TOLD_APART = 16;
+
+/**
+ * What is known of a step from the places alone that fingers could touch, nothing asked of clearance: with no place there
+ * is no gauge, and with some the setting is one of theirs. Worked out for a move when it is first asked for.
+ */
+export function createLeast(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): (move: number, formed: number) => LeastOption | null {
+  const { moves, pairs, fits } = situation;
+  const patternsOf = gaugePatterns(situation, BENDS_TOLD_APART);
+  const settings = createSettings(situation, numbers);
+  const tables = moves.map((): ((formed: number) => LeastOption | null) | null => null);
+  const tableFor = (move: number) => {
+    const usable = pairs.filter(({ index }) => moves[move]?.bends.every((bend) => fits[bend]?.[index]?.ok));
+    if (usable.length === 0) return () => null;
+    const wishes = Math.min(...usable.map(({ index }) => checks.wishes(move, index)));
+    const patterns = patternsOf(move);
+    const window = windowOf(patterns);
+    const pick = pickBits(window);
+    const sets = settings.sets(patterns, window, pick);
+    const options = new Map<number, LeastOption>();
+    for (const set of new Set(sets)) options.set(set, settings.option(set, wishes));
+    const answers = Array.from(sets, (set) => options.get(set) ?? null);
+    return (formed: number) => answers[pick(formed)] ?? null;
+  };
+  return (move, formed) => {
+    const known = tables[move] ?? tableFor(move);
+    tables[move] = known;
+    return known(formed);
+  };
+}
+
+/** The bends that patterns speak of, as many of the nearest as are told apart: patterns of few bends are near. */
+function windowOf(patterns: readonly GaugePattern[]): number {
+  let window = 0;
+  let count = 0;
+  for (const { mask } of [...patterns].sort((a, b) => bits(a.mask) - bits(b.mask))) {
+    for (let rest = mask & ~window; rest !== 0 && count < BENDS_TOLD_APART; rest &= rest - 1) {
+      window |= rest & -rest;
+      count += 1;
+    }
+  }
+  return window;
+}
+
+interface Place { readonly numbers: readonly number[] | null; readonly z: readonly [number, number] }
+
+/** Sets of places to touch, each set kept once under a number; 0 is the empty one. */
+function createSettings(situation: Situation, numbers: GaugeNumbers) {
+  const { machine } = situation;
+  const places: Place[] = [];
+  const placeNumbers = new Map<string, number>();
+  const members: (readonly number[])[] = [[]];
+  const longer = new Map<number, number>();
+  const nearTools = createNearTools(situation);
+  const placeOf = ({ contact }: GaugePattern): number => {
+    const found: Place = contact === null || nearTools(contact)
+      ? { numbers: null, z: contact?.z ?? [-Infinity, Infinity] }
+      : { numbers: [...new Set([-1, 1].map((side) => numbers({ ...contact, x: contact.x + side * NOISE_MM, r: contact.r + side * NOISE_MM, free: [] })))], z: contact.z };
+    const key = `${found.numbers?.join() ?? "any"}/${found.z.map((z) => z.toFixed(2)).join()}`;
+    const known = placeNumbers.get(key) ?? places.push(found) - 1;
+    placeNumbers.set(key, known);
+    return known;
+  };
+  const extended = (set: number, place: number): number => {
+    const key = set * 65_536 + place;
+    const known = longer.get(key);
+    if (known !== undefined) return known;
+    const old = members[set] ?? [];
+    const made = old.includes(place) ? set : members.push([...old, place]) - 1;
+    longer.set(key, made);
+    return made;
+  };
+  return {
+    /** For every state of the window the set of places that there may be. */
+    sets: (patterns: readonly GaugePattern[], window: number, pick: (set: number) => number): Int32Array => {
+      const size = 2 ** bits(window);
+      const sets = new Int32Array(size);
+      for (const pattern of patterns) {
+        const place = placeOf(pattern);
+        const value = pick(pattern.value & window);
+        const free = (size - 1) & ~pick(pattern.mask & window);
+        for (let rest = free; ; rest = (rest - 1) & free) {
+          sets[value | rest] = extended(sets[value | rest] as number, place);
+          if (rest === 0) break;
+        }
+      }
+      return sets;
+    },
+    option: (set: number, wishes: number): LeastOption => {
+      const found = (members[set] ?? []).map((index) => places[index] as Place);
+      if (found.length === 0) return { demerit: wishes + gaugeDemerits(0), gauges: [numbers(undefined)] };
+      const spread = Math.max(...found.map(({ z }) => z[1])) - Math.min(...found.map(({ z }) => z[0]));
+      const fingers = machine.gauge.fingers >= 2 && spread >= machine.gauge.minSpread - NOISE_MM ? 2 : Math.min(1, machine.gauge.fingers);
+      const all = found.flatMap((place) => place.numbers ?? []);
+      return { demerit: wishes + gaugeDemerits(fingers), gauges: found.some((place) => place.numbers === null) ? null : [...new Set(all)].sort((a, b) => a - b) };
+    },
+  };
+}
+
+/** mm. Over rounding noise, far under what settings are told apart by. */
+const NOISE_MM = 1e-6;
+
+function bits(set: number): number {
+  let count = 0;
+  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
+  return count;
+}
