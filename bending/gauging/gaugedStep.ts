@@ -22,11 +22,3 @@ export interface Repeats {
   readonly gauge: Mm;
   readonly angle: Rad;
 }
-
-/** The errors of one part, by step. */
-export interface StepErrors {
-  /** How far the bend line lies off in the sheet, towards the child of the step's first bend, mm. */
-  readonly shift: readonly number[];
-  /** How far the angles are bent over, radians. */
-  readonly turn: readonly number[];
-}

@@ -6,6 +6,7 @@ import type { Frame } from "../geometry/frame";
 import type { Vec3 } from "../geometry/vec3";
 import { bendDirections } from "../part/bendDirections";
 import type { PartModel } from "../part/partModel";
+import { endPoint } from "./endPoint";
 import { endPosition } from "./endPosition";
 import { faceEnds } from "./faceEnds";
 import type { DimensionEnd, PartDimension } from "./partDimension";
@@ -22,7 +23,7 @@ export function overallDimensions(part: PartModel): readonly PartDimension[] {
   const ends = [...corners(part), ...part.bends.map((_, bend): DimensionEnd => ({ at: "arc", bend }))];
   return axesOf(part, face).map((direction): PartDimension => {
     const farthest = (way: 1 | -1): readonly DimensionEnd[] => {
-      const places = ends.map((end) => (end.at === "arc" && !standsOut(part, frames, end.bend, direction, way) ? -Infinity : way * endPosition(part, part, frames, end, direction, way)));
+      const places = ends.map((end) => (end.at === "arc" && !standsOut(part, frames, end.bend, direction, way) ? -Infinity : way * endPosition(frames, endPoint(part, end, null), direction, way)));
       const most = Math.max(...places);
       return ends.filter((_, i) => (places[i] ?? 0) > most - SAME_SIZE_MM);
     };

@@ -5,13 +5,13 @@ import { mm, rad } from "../core/units";
 import { applyFrame } from "../geometry/applyFrame";
 import type { PartDocument } from "../part/partDocument";
 import type { PartModel } from "../part/partModel";
-import { bentAs } from "./bentAs";
-import { dimensionSizes } from "./dimensionSizes";
 import type { GaugedStep, Repeats } from "./gaugedStep";
 import { levelFrames } from "./levelFrames";
 import { legDimensions } from "./legDimensions";
 import { partDimensions } from "./partDimensions";
 import { partTolerances } from "./partTolerances";
+import { bentAs } from "./trial/bentAs";
+import { sizesAs } from "./trial/sizesAs";
 import { trialSteps, type Wanted } from "./trial/trialSteps";
 
 const gaugeOnly: Repeats = { gauge: mm(0.1), angle: rad(0) };
@@ -119,13 +119,13 @@ describe("2000 parts bent with random errors", () => {
     const steps = trialSteps(part, order);
     const dimensions = partDimensions(part).map((dimension) => ({ ...dimension, from: dimension.from.slice(0, 1), to: dimension.to.slice(0, 1) }));
     const expected = partTolerances(part, steps, both, dimensions);
-    const drawn = dimensionSizes(part, part, dimensions).flat();
+    const drawn = sizesAs(part, part, dimensions);
     const meant = meantBy(part, steps);
     const dice = createDice(20261201);
     const errors = drawn.map((): number[] => []);
     for (let made = 0; made < PARTS; made += 1) {
       const bent = bendOne(part, steps, meant, steps.map(() => dice(-both.gauge, both.gauge)), steps.map(() => dice(-both.angle, both.angle)));
-      dimensionSizes(part, bent, dimensions).flat().forEach((size, i) => errors[i]?.push(size - (drawn[i] ?? 0)));
+      sizesAs(part, bent, dimensions).forEach((size, i) => errors[i]?.push(size - (drawn[i] ?? 0)));
     }
     errors.forEach((found, i) => {
       const { worstCase, statistical, shares } = expected[i] ?? { worstCase: null, statistical: null, shares: [] };
