@@ -1,7 +1,9 @@
 import type { Mm } from "../core/units";
 import type { Vec2 } from "../geometry/vec2";
 import type { Shape } from "./convexPiece";
+import { mirrorShape } from "./mirrorShape";
 import type { Obstacle } from "./obstacle";
+import { placedShape, type PlacedShape } from "./placedShape";
 import { sweepShape } from "./sweepShape";
 
 /**
@@ -18,21 +20,33 @@ export interface AccessMotion {
 /** mm. Farther than any part reaches. */
 const AWAY = 1e4;
 
-/** What an obstacle goes through, seen from the part: where it may not stand beside the part, and where it may not stand at all. */
+/** What an obstacle goes through, seen from a half at the back: where it may not stand beside the part, and where it may not stand at all. */
 export interface AccessShapes {
-  readonly passed: Shape;
+  readonly passed: PlacedShape;
   /** Met anywhere along z, it is met somewhere on the way along the bed. */
-  readonly everywhere: Shape;
+  readonly everywhere: PlacedShape;
+}
+
+/** The same for a half at the back and for one in front; one object when there is no difference. */
+export interface AccessSides {
+  readonly back: AccessShapes;
+  readonly front: AccessShapes;
 }
 
 /** The motion as shapes seen from the punch's tip at rest; `base`: height of the obstacle's origin over the tip; `opening`: how far the ram goes up. */
-export function accessShapes(motion: AccessMotion, obstacle: Obstacle, base: number, opening: number, margin: Mm): AccessShapes {
+export function accessShapes(motion: AccessMotion, obstacle: Obstacle, base: number, opening: number, margin: Mm): AccessSides {
+  const { passed, everywhere } = shapes(motion, obstacle, base, opening, margin);
+  const back = { passed: placedShape(passed), everywhere: placedShape(everywhere) };
+  if (motion.kind !== "pull" && obstacle.shape === obstacle.turned) return { back, front: back };
+  return { back, front: { passed: placedShape(mirrorShape(passed)), everywhere: placedShape(mirrorShape(everywhere)) } };
+}
+
+function shapes(motion: AccessMotion, { on, shape: { pieces } }: Obstacle, base: number, opening: number, margin: Mm): { readonly passed: Shape; readonly everywhere: Shape } {
   const still: Vec2 = [0, 0];
-  if (motion.kind === "closed") return { passed: [], everywhere: sweepShape(obstacle.shape, [0, base], still, margin) };
-  const up = obstacle.on === "ram" ? opening : 0;
-  const apart = base + up - motion.lift;
-  const parting = obstacle.on === "ram" ? sweepShape(obstacle.shape, [0, base], [0, opening], margin) : sweepShape(obstacle.shape, [0, base], [0, -motion.lift], margin);
+  if (motion.kind === "closed") return { passed: [], everywhere: sweepShape(pieces, [0, base], still, margin) };
+  const apart = base + (on === "ram" ? opening : 0) - motion.lift;
+  const parting = sweepShape(pieces, [0, base], on === "ram" ? [0, opening] : [0, -motion.lift], margin);
   return motion.kind === "pull"
-    ? { passed: [...parting, ...sweepShape(obstacle.shape, [0, apart], [AWAY, 0], margin)], everywhere: [] }
-    : { passed: parting, everywhere: sweepShape(obstacle.shape, [0, apart], still, margin) };
+    ? { passed: [...parting, ...sweepShape(pieces, [0, apart], [AWAY, 0], margin)], everywhere: [] }
+    : { passed: parting, everywhere: sweepShape(pieces, [0, apart], still, margin) };
 }

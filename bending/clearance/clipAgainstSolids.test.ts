@@ -11,9 +11,12 @@ import type { PartModel } from "../part/partModel";
 import type { Punch, Tool } from "../tooling/tool";
 import { clipPrism, type Clipped } from "./clipPrism";
 import { dieShape } from "./dieShape";
-import { facePaths } from "./facePath";
-import { posePrism, wingPose } from "./pose";
-import { prismsOf } from "./prismsOf";
+import { createBendShapes } from "./createBendShapes";
+import { createHalf } from "./createHalf";
+import { facesOf } from "./facesOf";
+import { posePrism } from "./posePrism";
+import { POSE_NUMBERS } from "./strokeMotion";
+import { writePose } from "./writePose";
 import { punchShape } from "./punchShape";
 import { createClearance } from "./createClearance";
 import { machineFrames, type Hit } from "./machineFrames";
@@ -107,13 +110,15 @@ describe("the clip against a solid modeller", () => {
     for (let seed = 1; seed <= 600; seed++) {
       const c = randomCase(seed);
       const dice = createDice(seed + 200_000);
-      const path = pick(facePaths(c.part, c.hit), dice);
-      const face = c.part.faces[path.face];
-      const bend = path.line.bend;
+      const pieces = c.part.faces.map((face) => convexPieces(face.outline, face.holes));
+      const half = createHalf(c.part, c.hit.bends, c.hit.front, pieces, createBendShapes(c.part));
+      const bend = half.bend;
       const h = dice(0, bend.angle / 2);
-      const prism = pick(prismsOf(c.part, path, c.hit.formed & path.mask, convexPieces(face?.outline ?? [], face?.holes)), dice);
+      const prism = pick(pick(facesOf(half.at(c.hit.formed)), dice).plates().all, dice);
       const placed = new Float64Array(prism.points.length);
-      posePrism(prism.points, wingPose(bend, c.part.thickness, h), path.inFront, placed);
+      const pose = new Float64Array(POSE_NUMBERS);
+      writePose(bend, c.part.thickness, null, h, pose, 0);
+      posePrism(prism.points, pose, 0, dice(0, 1) < 0.5, placed);
       const solid = solids.hull(Array.from({ length: prism.count * 2 }, (_, i): Vec3 => [placed[3 * i] ?? 0, placed[3 * i + 1] ?? 0, placed[3 * i + 2] ?? 0]));
       const lift = liftOf(c, (2 * h) as Rad) - strokePlacement(bend, c.part.thickness, c.die, (2 * h) as Rad).tipHeight;
       for (const piece of c.obstacle.kind === "punch" ? punchShape(c.obstacle, mm(1)) : dieShape(c.obstacle, mm(1))) {

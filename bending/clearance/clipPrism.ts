@@ -1,4 +1,6 @@
-/** What the clip found: `separation` > 0 when a side of the piece parts them, else the z-extent of what they share (empty when from > to). */
+import { SAME_POINT_MM } from "../core/tolerance";
+
+/** What the clip found: `separation` over 0 (or as good as 0) when a side of the piece parts them, else the z-extent of what they share (empty when from > to). */
 export interface Clipped {
   /** Below 0: how far the piece would have to move, across one of its sides, to come free. */
   separation: number;
@@ -22,8 +24,8 @@ const cutting = new Float64Array(3 * MOST);
 export function clipPrism(points: Float64Array, count: number, planes: Float64Array, lift: number, out: Clipped): void {
   out.from = Infinity;
   out.to = -Infinity;
-  const cuts = separate(points, planes, lift, out);
-  if (out.separation > 0) return;
+  const cuts = separate(points, 6 * count, planes, lift, out);
+  if (out.separation > -SAME_POINT_MM) return;
   for (let first = 0; first <= 3 * count; first += 3 * count) {
     for (let i = 0; i < 3 * count; i++) source[i] = points[first + i] as number;
     clipSide(count, cuts, out);
@@ -41,7 +43,7 @@ export function clipPrism(points: Float64Array, count: number, planes: Float64Ar
 }
 
 /** Writes the widest separation, and gives how many half-planes cut the prism. */
-function separate(points: Float64Array, planes: Float64Array, lift: number, out: Clipped): number {
+function separate(points: Float64Array, length: number, planes: Float64Array, lift: number, out: Clipped): number {
   let widest = -Infinity;
   let cuts = 0;
   for (let p = 0; p < planes.length; p += 3) {
@@ -50,7 +52,7 @@ function separate(points: Float64Array, planes: Float64Array, lift: number, out:
     const c = (planes[p + 2] as number) + ny * lift;
     let least = Infinity;
     let most = -Infinity;
-    for (let i = 0; i < points.length; i += 3) {
+    for (let i = 0; i < length; i += 3) {
       const off = nx * (points[i] as number) + ny * (points[i + 1] as number) - c;
       if (off < least) least = off;
       if (off > most) most = off;

@@ -12,6 +12,8 @@ export interface ConvexPiece {
   readonly corners: readonly Vec2[];
   readonly withMargin: Float64Array;
   readonly withoutSkin: Float64Array;
+  /** Left, right, bottom and top of the piece with its margin. */
+  readonly box: readonly [number, number, number, number];
 }
 
 /** A tool's or a machine's cross-section, ready for the clip. */

@@ -1,101 +1,117 @@
 import { invariant } from "../core/invariant";
 import type { Rad } from "../core/units";
 import type { Interval } from "../geometry/interval";
-import { convexPieces } from "../geometry/convexPieces";
 import { mergeIntervals } from "../geometry/mergeIntervals";
 import type { PartModel } from "../part/partModel";
 import type { Machine } from "../tooling/machine";
-import type { Die, Punch } from "../tooling/tool";
-import { createAccess } from "./createAccess";
+import type { Die, Punch, Tool } from "../tooling/tool";
+import { askFace, askHalf, nearestMet, NOTHING } from "./askHalf";
 import type { Clearance, ClearanceHit, ClearanceOptions } from "./clearance";
 import { clearanceHit } from "./clearanceHit";
-import { createKeys } from "./createKeys";
-import { createObstacles } from "./createObstacles";
+import type { Asked } from "./createAsks";
+import { createHitPlaces, type HitPlace } from "./createHitPlaces";
+import { metBy, type HitState, type Moment } from "./createMoment";
+import { createStrokes, type Stroke } from "./createStrokes";
 import type { Hit } from "./hit";
-import { hitTable, type FaceMeeting, type HitTable } from "./hitTable";
-import { meetOwnZone } from "./meetOwnZone";
-import { meetStroke } from "./meetStroke";
-import type { Obstacle } from "./obstacle";
-import { selfMeetings } from "./selfMeetings";
-import { strokePlacement } from "./strokePlacement";
-import { strokeSamples } from "./strokeSamples";
+import type { Counts } from "./question";
+import { selfHit } from "./selfHit";
+import { trappedHits } from "./trappedHits";
 
 export type { Clearance, ClearanceHit, ClearanceOptions } from "./clearance";
 
 /** Bends that a bit mask can tell apart. */
 const MOST_BENDS = 30;
+const NOWHERE: readonly Interval[] = [];
+const NO_HITS: readonly ClearanceHit[] = [];
 
 /** See README.md of this folder. Lazy: nothing is worked out before it is asked. */
 export function createClearance(part: PartModel, machine: Machine, options: ClearanceOptions = {}): Clearance {
   invariant(part.bends.length <= MOST_BENDS, `clearance tells at most ${MOST_BENDS} bends apart, the part has ${part.bends.length}`);
   const margin = options.margin ?? machine.settings.clearance;
-  const counts = { clips: 0, entries: 0 };
-  const clip = () => { counts.clips++; };
-  const obstacles = createObstacles(machine, margin);
-  const pieces = part.faces.map((face) => convexPieces(face.outline, face.holes));
-  const tables = new Map<object, HitTable>();
-  const keys = createKeys();
-  const access = createAccess(part.thickness, machine, margin, obstacles, clip);
+  const counts: Counts = { clips: 0, entries: 0 };
+  const placeOf = createHitPlaces(part, margin, counts);
+  const demanded = (bend: number, die: Die): Rad => options.demandedAngle?.(bend, die) ?? ((part.bends[bend]?.angle ?? 0) as Rad);
+  const strokeOf = createStrokes({ machine, margin, demanded, counts });
 
-  const tableOf = (hit: Hit): HitTable => {
-    const key = keys(hit.front, ...hit.bends);
-    const known = tables.get(key);
-    if (known) return known;
-    const bend = part.bends[hit.bends[0] ?? -1];
-    invariant(bend, "a hit forms at least one bend of the part");
-    const made = hitTable(part, hit, bend, pieces, () => { counts.entries++; });
-    tables.set(key, made);
-    return made;
+  const setUp = (hit: Hit, punch: Punch, die: Die) => {
+    const place = placeOf(hit);
+    const state: HitState = { front: place.front.at(hit.formed), back: place.back.at(hit.formed) };
+    return { place, state, stroke: strokeOf(place, hit.bends[0] ?? 0, punch, die) };
   };
-  const demanded = (hit: Hit, die: Die): Rad => {
-    const bend = hit.bends[0] ?? 0;
-    return options.demandedAngle?.(bend, die) ?? ((part.bends[bend]?.angle ?? 0) as Rad);
-  };
-  const inStroke = (hit: Hit, die: Die, obstacle: Obstacle): readonly FaceMeeting[] => {
-    const table = tableOf(hit);
-    const { bend } = table;
-    const end = demanded(hit, die);
-    const place = obstacle.on === "ram" ? () => obstacle.lift
-      : (h: number) => obstacle.lift - strokePlacement(bend, part.thickness, die, (2 * h) as Rad).tipHeight;
-    const key = keys(obstacle, obstacle.on === "ram" ? null : die, end);
-    return table.ask(key, hit.formed, (path, plates) => {
-      const steps = strokeSamples(bend, part.thickness, obstacle.on === "ram" ? null : die, plates, end, margin);
-      return meetStroke({ bend, thickness: part.thickness, plates, inFront: path.inFront, shape: obstacle.shape, lift: place, from: 0, to: end / 2, steps, margin, count: clip });
-    });
-  };
-  const zones = new WeakMap<object, readonly FaceMeeting[]>();
-  const ownZone = (hit: Hit, die: Die, obstacle: Obstacle): readonly FaceMeeting[] => {
-    const [table, end] = [tableOf(hit), demanded(hit, die)];
-    const key = keys(table, die, obstacle, end);
-    const found = zones.get(key) ?? meetOwnZone(part, table, die, obstacle, end, margin);
-    zones.set(key, found);
-    return found;
-  };
-  const check = (hit: Hit, punch: Punch, die: Die, obstacle: Obstacle): { readonly hits: readonly ClearanceHit[]; readonly intervals: readonly Interval[] } => {
-    const end = demanded(hit, die);
-    const own = obstacle.tool === punch.id || obstacle.tool === die.id || obstacle.tool === null;
-    const zone = own ? [] : ownZone(hit, die, obstacle);
-    const met = [...inStroke(hit, die, obstacle), ...zone, ...access.meetings(tableOf(hit), hit.formed, punch, die, obstacle, end)];
-    return {
-      hits: met.map((meeting) => clearanceHit(obstacle.kind, obstacle.tool, meeting)),
-      intervals: mergeIntervals(met.flatMap(({ meeting }) => meeting.intervals)),
+  const forbidden = ({ moments, standing }: Stroke, state: HitState, tool: Tool): readonly Interval[] => {
+    const { asked, zone } = standing(tool);
+    let found: readonly Interval[] = zone.intervals;
+    let lists = found.length ? 1 : 0;
+    const add = (more: readonly Interval[]) => {
+      if (more.length === 0 || more === found) return;
+      found = lists++ ? [...found, ...more] : more;
     };
+    const addAll = ({ front, back }: Asked) => {
+      add(askHalf(front, state.front).front);
+      add(askHalf(back, state.back).back);
+    };
+    addAll(asked);
+    for (const moment of moments) {
+      const way = moment.way(state);
+      if (way !== null) addAll(moment.ask(way, asked.obstacle));
+    }
+    return lists > 1 ? mergeIntervals(found) : lists ? found : NOWHERE;
   };
-  const blockers = (hit: Hit, punch: Punch, die: Die): readonly (() => readonly ClearanceHit[])[] => [
-    ...[obstacles.ram(punch), obstacles.bed(die)].map((obstacle) => () => inStroke(hit, die, obstacle).map((meeting) => clearanceHit(obstacle.kind, null, meeting))),
-    () => selfMeetings(part, tableOf(hit), hit.formed, margin, () => { counts.entries++; }),
-    () => access.trapped(tableOf(hit), hit.formed, punch, die, demanded(hit, die)),
-  ];
+  const evidence = ({ moments, standing }: Stroke, place: HitPlace, state: HitState, tool: Tool): readonly ClearanceHit[] => {
+    const { asked, zone } = standing(tool);
+    const { obstacle } = asked;
+    const met = [asked, ...moments.flatMap((moment) => {
+      const way = moment.way(state);
+      return way === null ? [] : [moment.ask(way, obstacle)];
+    })].flatMap((one) => metBy(one, state));
+    const wing = place.back.paths[0];
+    return [
+      ...met.map(({ face, meeting, inFront }) => clearanceHit(obstacle.kind, obstacle.tool, face, meeting, inFront)),
+      ...(wing && zone.intervals.length ? [clearanceHit(obstacle.kind, obstacle.tool, { path: wing, state: 0 }, zone, false)] : []),
+    ];
+  };
+  /** What of ram or bed the nearest face meets. */
+  const fixedHit = ({ obstacle, front, back }: Asked, state: HitState): readonly ClearanceHit[] => {
+    for (const [question, half, inFront] of [[front, state.front, true], [back, state.back, false]] as const) {
+      const face = askHalf(question, half) === NOTHING ? null : nearestMet(question, half);
+      if (face) return [clearanceHit(obstacle.kind, null, face, askFace(question, face), inFront)];
+    }
+    return NO_HITS;
+  };
+  const ofSelf = ({ oneInFront }: HitPlace, { front, back }: HitState) => (oneInFront ? [front, back] as const : [back, front] as const);
+  const firstSelf = (place: HitPlace, state: HitState): readonly ClearanceHit[] => {
+    const met = place.self.first(...ofSelf(place, state));
+    return met ? [selfHit(met, place.oneInFront)] : NO_HITS;
+  };
+  const trapped = (moments: readonly Moment[], state: HitState): readonly ClearanceHit[] => {
+    for (const moment of moments) if (moment.way(state) === null) return trappedHits(moment.blocking(state), moment.angle);
+    return NO_HITS;
+  };
   return {
-    forbidden: (hit, punch, die, tool) => check(hit, punch, die, obstacles.ofTool(tool, punch, die)).intervals,
-    evidence: (hit, punch, die, tool) => check(hit, punch, die, obstacles.ofTool(tool, punch, die)).hits,
-    blocked: (hit, punch, die) => blockers(hit, punch, die).flatMap((ask) => ask()),
+    forbidden: (hit, punch, die, tool) => {
+      const { state, stroke } = setUp(hit, punch, die);
+      return forbidden(stroke, state, tool);
+    },
+    evidence: (hit, punch, die, tool) => {
+      const { place, state, stroke } = setUp(hit, punch, die);
+      return evidence(stroke, place, state, tool);
+    },
+    blocked: (hit, punch, die) => {
+      const { place, state, stroke } = setUp(hit, punch, die);
+      return [
+        ...[stroke.ram, stroke.bed].flatMap((asked) => metBy(asked, state).map(({ face, meeting, inFront }) => clearanceHit(asked.obstacle.kind, null, face, meeting, inFront))),
+        ...place.self.all(...ofSelf(place, state)).map((met) => selfHit(met, place.oneInFront)),
+        ...stroke.moments.flatMap((moment) => trapped([moment], state)),
+      ];
+    },
     firstBlock: (hit, punch, die) => {
-      for (const ask of blockers(hit, punch, die)) {
+      const { place, state, stroke } = setUp(hit, punch, die);
+      const asks = [() => fixedHit(stroke.ram, state), () => fixedHit(stroke.bed, state), () => firstSelf(place, state), () => trapped(stroke.moments, state)];
+      for (const ask of asks) {
         const hits = ask();
         if (hits.length > 0) return hits;
       }
-      return [];
+      return NO_HITS;
     },
     counts: () => ({ ...counts }),
   };

@@ -3,6 +3,9 @@ import type { Vec2 } from "../geometry/vec2";
 /** Widest turn of an offset corner, radians: it reaches at most 1 / cos(turn / 2) = 1.08 times the offset from the solid. */
 const WIDEST_TURN = Math.PI / 4;
 
+/** How many times the offset a corner reaches out at the most. */
+export const FARTHEST_CORNER = 1 / Math.cos(WIDEST_TURN / 2);
+
 /**
  * The half-planes of a convex counter-clockwise polygon (nx, ny, c a piece; inside nx x + ny y <= c), each side moved out by
  * its own offset (negative: in). Corners that turn sharply get further half-planes, so that no corner reaches far out.

@@ -1,10 +1,11 @@
 import type { Mm, Rad } from "../core/units";
 import type { Interval } from "../geometry/interval";
 import { mergeIntervals } from "../geometry/mergeIntervals";
-import type { Bend, PartModel } from "../part/partModel";
+import type { Bend } from "../part/partModel";
 import type { Die } from "../tooling/tool";
 import { clipPrism, type Clipped } from "./clipPrism";
-import type { FaceMeeting, HitTable } from "./hitTable";
+import type { Half } from "./half";
+import { NO_MEETING, type Meeting } from "./meeting";
 import type { Obstacle } from "./obstacle";
 import { strokePlacement } from "./strokePlacement";
 import { wingPose } from "./pose";
@@ -12,20 +13,17 @@ import { wingPose } from "./pose";
 /** Plates that the zone being bent is cut into; they lie within the true zone, so a tool that only touches it is not met. */
 const FACETS = 8;
 
-/** The bend zone in the making against a tool that is not one of the two that make it: their contact is meant, this one's is not. */
-export function meetOwnZone(part: PartModel, table: HitTable, die: Die, obstacle: Obstacle, end: Rad, margin: Mm): readonly FaceMeeting[] {
-  const [path] = table.paths;
-  if (!path) return [];
-  const { bend } = table;
+/** The bend zone in the making (of the bends that part the hit from `half` at the back) against a tool that is not one of the two that make it: their contact is meant, this one's is not. */
+export function meetOwnZone({ bend, thickness, lines }: Half, die: Die, obstacle: Obstacle, end: Rad, margin: Mm): Meeting {
   const steps = Math.max(8, Math.ceil((die.vOpening + bend.allowance) / margin));
   const found: Interval[] = [];
   let [first, depth] = [Infinity, 0];
   const clipped: Clipped = { separation: 0, from: 0, to: 0 };
   for (let sample = 0; sample <= steps; sample++) {
     const angle = ((end * sample) / steps) as Rad;
-    const lift = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - strokePlacement(bend, part.thickness, die, angle).tipHeight;
-    for (const points of table.lines.flatMap((line) => zonePrisms(bend, part.thickness, angle / 2, line))) {
-      for (const piece of obstacle.shape) {
+    const lift = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - strokePlacement(bend, thickness, die, angle).tipHeight;
+    for (const points of lines.flatMap((line) => zonePrisms(bend, thickness, angle / 2, line))) {
+      for (const piece of obstacle.shape.pieces) {
         clipPrism(points, 4, piece.withoutSkin, lift, clipped);
         if (clipped.separation > 0 || clipped.from > clipped.to) continue;
         found.push([clipped.from - margin, clipped.to + margin]);
@@ -34,7 +32,7 @@ export function meetOwnZone(part: PartModel, table: HitTable, die: Die, obstacle
       }
     }
   }
-  return found.length ? [{ path, state: 0, meeting: { intervals: mergeIntervals(found), strokeAngle: first, depth } }] : [];
+  return found.length ? { intervals: mergeIntervals(found), strokeAngle: first, depth } : NO_MEETING;
 }
 
 /** Plates between chords of the outside arc and tangents of the inside arc, seen from the punch's tip. */

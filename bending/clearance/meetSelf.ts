@@ -1,23 +1,22 @@
 import { MEANT_CONTACT_MM } from "../core/tolerance";
 import type { Mm } from "../core/units";
-import type { Bend } from "../part/partModel";
 import { NO_MEETING, type Meeting } from "./meeting";
-import { posePrism, wingPose } from "./pose";
+import { posePrism } from "./posePrism";
 import type { Prism } from "./prism";
 import { prismGap } from "./prismGap";
+import { POSE_NUMBERS, type StrokeMotion } from "./strokeMotion";
 
 export interface SelfQuestion {
-  readonly bend: Bend;
-  readonly thickness: Mm;
+  /** The stroke to the finished angle. */
+  readonly motion: StrokeMotion;
   /** Are the two faces joined by the bend in the making? */
   readonly neighbours: boolean;
-  /** Plates of a face in front and of one at the back, in the state of the moment. */
+  /** Plates of a face in front and of one at the back, each in its own half's coordinates, in the state of the moment. */
   readonly front: readonly Prism[];
   readonly back: readonly Prism[];
   /** The same in the finished part. */
   readonly finished: () => { readonly front: readonly Prism[]; readonly back: readonly Prism[] };
-  /** Half the finished angle; `steps` equal steps in which no two corners near each other by more than `margin`. */
-  readonly to: number;
+  /** Equal steps in which no two corners near each other by more than `margin`. */
   readonly steps: number;
   readonly margin: Mm;
 }
@@ -33,7 +32,8 @@ const EXACT_MARGINS = 4;
  */
 export function meetSelf(question: SelfQuestion): Meeting {
   const { front, back, margin } = question;
-  const [frontZ, backZ] = [extent(front), extent(back)];
+  const [turned, backZ] = [extent(front), extent(back)];
+  const frontZ = [-turned[1], -turned[0]] as const;
   const strictest = question.neighbours ? -MEANT_CONTACT_MM : margin - MEANT_CONTACT_MM;
   if (Math.max(backZ[0] - frontZ[1], frontZ[0] - backZ[1]) >= strictest) return NO_MEETING;
   const pair: Placed = { front: placed(front), back: placed(back) };
@@ -47,21 +47,20 @@ export function meetSelf(question: SelfQuestion): Meeting {
 /** How near the faces are by design, at most the margin. */
 function nearestByDesign(question: SelfQuestion, pair: Placed): number {
   const finished = question.finished();
-  const drawn = gapAt(question, { front: placed(finished.front), back: placed(finished.back) }, question.to, question.margin);
+  const drawn = gapAt(question, { front: placed(finished.front), back: placed(finished.back) }, question.steps, question.margin);
   const before = gapAt(question, pair, 0, question.margin);
   return Math.max(0, Math.min(drawn, before, question.margin)) - MEANT_CONTACT_MM;
 }
 
 /** Where the faces come nearer than wanted first, and by how much at the most; null when they do not. */
 function nearest(question: SelfQuestion, pair: Placed, wanted: number): { readonly strokeAngle: number; readonly depth: number } | null {
-  const { to, steps, margin } = question;
+  const { motion, steps, margin } = question;
   let depth = 0;
   let first = Infinity;
   for (let sample = 0; sample <= steps; ) {
-    const h = (to * sample) / steps;
-    const gap = gapAt(question, pair, h, wanted + EXACT_MARGINS * margin);
+    const gap = gapAt(question, pair, sample, wanted + EXACT_MARGINS * margin);
     if (gap < wanted) {
-      first = Math.min(first, 2 * h);
+      first = Math.min(first, motion.angle(sample, steps));
       depth = Math.max(depth, wanted - gap);
     }
     sample += Math.max(1, Math.floor((gap - wanted) / margin));
@@ -75,10 +74,10 @@ interface Placed { readonly front: readonly PlacedPrism[]; readonly back: readon
 const placed = (prisms: readonly Prism[]): readonly PlacedPrism[] => prisms.map((prism) => ({ prism, into: new Float64Array(prism.points.length) }));
 
 /** A gap that the faces surely have: exact up to `enough`; over that, what their boxes leave or `enough` at the least. */
-function gapAt({ bend, thickness }: SelfQuestion, { front, back }: Placed, h: number, enough: number): number {
-  const pose = wingPose(bend, thickness, h);
-  for (const { prism, into } of front) posePrism(prism.points, pose, true, into);
-  for (const { prism, into } of back) posePrism(prism.points, pose, false, into);
+function gapAt({ motion, steps }: SelfQuestion, { front, back }: Placed, sample: number, enough: number): number {
+  const poses = motion.poses(steps);
+  for (const { prism, into } of front) posePrism(prism.points, poses, POSE_NUMBERS * sample, true, into);
+  for (const { prism, into } of back) posePrism(prism.points, poses, POSE_NUMBERS * sample, false, into);
   const boxes = boxGap(front, back);
   if (boxes >= enough) return boxes;
   let least = enough;

@@ -18,15 +18,3 @@ export function wingPose(bend: Bend, thickness: Mm, h: number): WingPose {
   const rise = h < 1e-9 ? h / 2 : (2 * Math.sin(h / 2) ** 2) / h;
   return { sin, cos, x: neutral * (h < 1e-9 ? 1 : sin / h) + outer * sin, y: neutral * rise + outer * (1 - cos) - thickness };
 }
-
-/** Turns corners of a prism (a, b, z each) into x, y, z seen from the punch's tip, written into `into`. */
-export function posePrism(points: Float64Array, pose: WingPose, inFront: boolean, into: Float64Array): void {
-  const side = inFront ? -1 : 1;
-  for (let i = 0; i < points.length; i += 3) {
-    const a = points[i] as number;
-    const b = points[i + 1] as number;
-    into[i] = side * (pose.x + a * pose.cos - b * pose.sin);
-    into[i + 1] = pose.y + a * pose.sin + b * pose.cos;
-    into[i + 2] = points[i + 2] as number;
-  }
-}

@@ -5,7 +5,7 @@ import { convexPieces } from "../geometry/convexPieces";
 import { signedArea } from "../geometry/signedArea";
 import type { ProfilePoint, Vec2 } from "../geometry/vec2";
 import type { ConvexPiece, PieceRole, Shape } from "./convexPiece";
-import { halfPlanes } from "./halfPlanes";
+import { pieceOf } from "./pieceOf";
 
 /** A straight cut of a profile: what lies on the side of `normal` has the role `beyond`, the rest `before`. */
 export interface RoleCut {
@@ -30,12 +30,7 @@ export function shapeOf(profile: readonly ProfilePoint[], margin: Mm, cut: RoleC
 function piece(corners: readonly Vec2[], role: PieceRole, profile: readonly ProfilePoint[], margin: Mm): readonly ConvexPiece[] {
   if (corners.length < 3 || signedArea(corners) < EMPTY_AREA_MM2) return [];
   const skin = corners.map((p, i) => (onOutline(p, corners[(i + 1) % corners.length] ?? p, profile) ? -MEANT_CONTACT_MM : 0));
-  return [{
-    role,
-    corners,
-    withMargin: halfPlanes(corners, () => margin),
-    withoutSkin: halfPlanes(corners, (side) => skin[side] ?? 0),
-  }];
+  return [pieceOf(role, corners, margin, (side) => skin[side] ?? 0)];
 }
 
 /** Sides between two pieces lose no skin, or a thin corner could slip between them. */

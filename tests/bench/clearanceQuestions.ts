@@ -1,11 +1,14 @@
 import { clipPrism, type Clipped } from "@/bending/clearance/clipPrism";
-import { facePaths } from "@/bending/clearance/facePath";
+import { createBendShapes } from "@/bending/clearance/createBendShapes";
+import { createHalf } from "@/bending/clearance/createHalf";
+import { facesOf } from "@/bending/clearance/facesOf";
 import type { Hit } from "@/bending/clearance/hit";
 import { machineFrames } from "@/bending/clearance/machineFrames";
-import { posePrism, wingPose } from "@/bending/clearance/pose";
-import { prismsOf } from "@/bending/clearance/prismsOf";
+import { posePrism } from "@/bending/clearance/posePrism";
 import { punchShape } from "@/bending/clearance/punchShape";
 import { strokePlacement } from "@/bending/clearance/strokePlacement";
+import { POSE_NUMBERS } from "@/bending/clearance/strokeMotion";
+import { writePose } from "@/bending/clearance/writePose";
 import { createSolids } from "@/bending/clearance/trial/solids";
 import { createDice, randomPart } from "@/bending/clearance/trial/trialParts";
 import { straightPunch, trialMachine, vDie } from "@/bending/clearance/trial/trialTools";
@@ -34,19 +37,18 @@ export async function clearanceQuestions(count: number) {
     const out: Clipped = { separation: 0, from: 0, to: 0 };
     const bend = part.bends[hit.bends[0] ?? 0];
     if (!bend) return 0;
-    const pose = wingPose(bend, part.thickness, bend.angle / 2);
-    return facePaths(part, hit).filter((path) => {
-      const face = part.faces[path.face];
-      const prisms = prismsOf(part, path, hit.formed & path.mask, convexPieces(face?.outline ?? [], face?.holes ?? []));
-      return prisms.some((prism) => {
-        const placed = new Float64Array(prism.points.length);
-        posePrism(prism.points, pose, path.inFront, placed);
-        return prism.of === "face" && shape.some((piece) => {
-          clipPrism(placed, prism.count, piece.withMargin, 0, out);
-          return out.separation <= 0 && out.from <= out.to;
-        });
+    const pose = new Float64Array(POSE_NUMBERS);
+    writePose(bend, part.thickness, null, bend.angle / 2, pose, 0);
+    const pieces = part.faces.map((face) => convexPieces(face.outline, face.holes));
+    const shapes = createBendShapes(part);
+    return [bend.parent, bend.child].flatMap((front) => facesOf(createHalf(part, hit.bends, front, pieces, shapes).at(hit.formed)).filter((face) => face.plates().all.some((prism) => {
+      const placed = new Float64Array(prism.points.length);
+      posePrism(prism.points, pose, 0, front === bend.child, placed);
+      return prism.of === "face" && shape.some((piece) => {
+        clipPrism(placed, prism.count, piece.withMargin, 0, out);
+        return out.separation <= 0 && out.from <= out.to;
       });
-    }).length;
+    }))).length;
   }
 
   function solidFaces({ part, hit }: Question): number {
