@@ -43,6 +43,8 @@ export interface AskedPlan {
     readonly fingers?: Readonly<Record<string, number>>;
     /** Kinds that every reason has one of. */
     readonly reasons?: readonly string[];
+    /** What some reason says. */
+    readonly says?: string;
     /** Orders that can be made, and orders that cannot. */
     readonly works?: readonly string[];
     readonly fails?: readonly string[];

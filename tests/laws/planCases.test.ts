@@ -41,6 +41,7 @@ describe("known cases of the shop", () => {
           expect(verifyPlan(plan, request)).toEqual([]);
           expectPlan(plan, asked);
         }
+        if (asked.expect.says !== undefined) expect(plan.reasons.map(({ message }) => message).join("; ")).toContain(asked.expect.says);
         for (const { kind } of plan.reasons) expect(asked.expect.reasons ?? [kind]).toContain(kind);
         for (const order of asked.expect.works ?? []) {
           const own = checkOrder({ ...request, order: order.split(" ") });
