@@ -4,6 +4,7 @@ import * as shop from "./migrations/002_shop";
 import * as materials from "./migrations/003_materials";
 import * as bendTrials from "./migrations/004_bend_trials";
 import * as planOrigin from "./migrations/005_plan_origin";
+import * as hemDies from "./migrations/007_hem_dies";
 
 export interface Migration {
   /** The file's name, so that the knex command line and the application agree on what has run. */
@@ -19,4 +20,5 @@ export const migrationList: readonly Migration[] = [
   { name: "003_materials.ts", up: materials.up, down: materials.down },
   { name: "004_bend_trials.ts", up: bendTrials.up, down: bendTrials.down },
   { name: "005_plan_origin.ts", up: planOrigin.up, down: planOrigin.down },
+  { name: "007_hem_dies.ts", up: hemDies.up, down: hemDies.down },
 ];

@@ -13,7 +13,6 @@ export function shopLimitsOf(tools: readonly Tool[], machines: readonly Machine[
       ? [{ id: tool.id, tipAngle: toDeg(tool.tipAngle), tipRadius: tool.tipRadius, maxForcePerMetre: tool.maxForcePerMetre }] : [])),
     machines: machines.map(({ name, bedLength, betweenFrames, throatDepth, maxForce, settings }) => ({ name, bedLength, betweenFrames, throatDepth, maxForce, maxUncoveredEnd: settings.maxUncoveredEnd })),
     stock,
-    // No tool kind flattens a hem yet.
-    flattening: [],
+    flattening: serving.flatMap((tool) => (tool.kind === "die" && tool.flattening ? [tool.name] : [])),
   };
 }

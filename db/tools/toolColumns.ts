@@ -13,6 +13,7 @@ export function toolColumns(tool: Tool): Readonly<Record<string, unknown>> {
     tip_radius_mm: punch ? tool.tipRadius : null,
     v_opening_mm: punch ? null : tool.vOpening,
     shoulder_radius_mm: punch ? null : tool.shoulderRadius,
+    flattening: !punch && tool.flattening ? JSON.stringify(tool.flattening) : null,
     height_mm: tool.height,
     max_force_kn_per_m: tool.maxForcePerMetre,
     tang: tool.tang,

@@ -17,5 +17,7 @@ export function toolFromRow(row: ToolRow, pieces: readonly PieceRow[]): Tool {
   const angle = toRad(deg(row.angle_deg));
   return row.kind === "punch"
     ? { ...common, kind: "punch", tipAngle: angle, tipRadius: mm(row.tip_radius_mm ?? 0) }
-    : { ...common, kind: "die", vAngle: angle, vOpening: mm(row.v_opening_mm ?? 0), shoulderRadius: mm(row.shoulder_radius_mm ?? 0) };
+    : { ...common, kind: "die", vAngle: angle, vOpening: mm(row.v_opening_mm ?? 0), shoulderRadius: mm(row.shoulder_radius_mm ?? 0), ...(row.flattening ? { flattening: slotOf(row.flattening) } : {}) };
 }
+
+const slotOf = ({ floor, back, opening }: NonNullable<ToolRow["flattening"]>) => ({ floor: mm(floor), back: mm(back), opening: mm(opening) });

@@ -9,6 +9,8 @@ export interface ToolRow {
   readonly tip_radius_mm: number | null;
   readonly v_opening_mm: number | null;
   readonly shoulder_radius_mm: number | null;
+  /** The slot of a two-stage hem die. */
+  readonly flattening: { readonly floor: number; readonly back: number; readonly opening: number } | null;
   readonly height_mm: number;
   readonly max_force_kn_per_m: number;
   readonly tang: string;

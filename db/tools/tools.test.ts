@@ -1,4 +1,5 @@
 import { beforeAll, expect, it } from "vitest";
+import { mm } from "@/bending/core/units";
 import { bracketDie, bracketPunch } from "@/tests/integration/shop/bracketTools";
 import { bracketShop } from "@/tests/integration/shop/bracketShop";
 import { openDatabase } from "@/tests/integration/openDatabase";
@@ -7,6 +8,7 @@ import { findTool } from "./findTool";
 import { findTools, type ToolSort } from "./findTools";
 import { findToolsInService } from "./findToolsInService";
 import { insertTool } from "./insertTool";
+import { toolFromRow } from "./toolFromRow";
 import { updatePiece } from "./updatePiece";
 
 const database = openDatabase();
@@ -25,6 +27,17 @@ it("gives back the tools that were put in", async () => {
   expect(punch).toEqual({ ...bracketPunch, tipAngle: punch.tipAngle });
   expect(punch.tipAngle).toBeCloseTo(bracketPunch.tipAngle, 12);
   expect(die).toEqual({ ...bracketDie, vAngle: die.vAngle });
+});
+
+it("keeps the slot of a hem die, and refuses one on a punch", async () => {
+  const flattening = { floor: mm(30), back: mm(4), opening: mm(12) };
+  await database().transaction(async (within) => {
+    await insertTool(within, { ...bracketDie, id: "H-16", flattening }, []);
+    const row = await findTool(within, "H-16");
+    expect(row && toolFromRow(row, [])).toMatchObject({ id: "H-16", flattening });
+    await within("tools").where({ code: "H-16" }).delete();
+  });
+  await expect(database()("tools").where({ code: "P-1" }).update({ flattening: JSON.stringify(flattening) })).rejects.toThrow("tools_flattening_of_dies");
 });
 
 it("counts on pieces in the rack and at a brake alone", async () => {

@@ -41,6 +41,7 @@ const toolValues = {
   vOpening: z.unknown().optional(),
   vAngle: z.unknown().optional(),
   shoulderRadius: z.unknown().optional(),
+  flattening: z.unknown().optional(),
   height: z.unknown().optional(),
   maxForcePerMetre: z.unknown().optional(),
   tang: filledText(60).optional(),
@@ -68,6 +69,8 @@ interface ToolValues {
   readonly vOpening?: number | undefined;
   readonly vAngle?: number | undefined;
   readonly shoulderRadius?: number | undefined;
+  /** The slot of a two-stage hem die. */
+  readonly flattening?: { readonly floor: number; readonly back: number; readonly opening: number } | undefined;
   readonly height: number;
   readonly maxForcePerMetre: number;
   readonly tang?: string | undefined;

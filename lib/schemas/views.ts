@@ -119,6 +119,8 @@ export interface ToolListItem {
 export interface ToolDetail extends ToolListItem {
   readonly tang: string;
   readonly profile: readonly (readonly [number, number])[];
+  /** The slot of a two-stage hem die, mm; null on every other tool. */
+  readonly flattening: { readonly floor: number; readonly back: number; readonly opening: number } | null;
   readonly pieceList: readonly PieceView[];
   readonly updatedAt: string;
 }

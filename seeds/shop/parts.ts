@@ -98,4 +98,17 @@ export const parts: readonly DemonstrationPart[] = [
       ],
     },
   },
+  {
+    number: "RS-108",
+    note: "The open edge is hemmed so that it does not cut the cables.",
+    document: {
+      format: "part/1", name: "Cable cover", units: "mm", material: "DC01", thickness: 1,
+      base: { outline: [[0, 0], [260, 0], [260, 70], [0, 70]] },
+      flanges: [
+        { id: "hem", on: "base", edge: 0, length: 15, angle: 180, direction: "up", hem: "closed" },
+        { id: "wall", on: "base", edge: 2, length: 30, angle: 90, direction: "up" },
+        { id: "foot", on: "wall", edge: 2, length: 15, angle: 90, direction: "down" },
+      ],
+    },
+  },
 ];

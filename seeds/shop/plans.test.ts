@@ -27,7 +27,7 @@ function requestFor(number: string, codes?: readonly string[]) {
 }
 
 describe("the demonstration's parts on the large brake, with the shop's own tools", () => {
-  it.each(["RS-101", "RS-104", "RS-105", "RS-106"])("finds the best plan of %s among all tools", (number) => {
+  it.each(["RS-101", "RS-104", "RS-105", "RS-106", "RS-108"])("finds the best plan of %s among all tools", (number) => {
     const plan = planPart(requestFor(number));
     expect(plan.reasons).toEqual([]);
     expect(plan.status).toBe("optimal");

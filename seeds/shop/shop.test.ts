@@ -22,8 +22,8 @@ describe("the demonstration shop", () => {
   });
 
   it("has about sixty tools with about three hundred marked pieces, each with a place", () => {
-    expect(tooling.tools).toHaveLength(60);
-    expect(new Set(tooling.tools.map((tool) => tool.id)).size).toBe(60);
+    expect(tooling.tools).toHaveLength(62);
+    expect(new Set(tooling.tools.map((tool) => tool.id)).size).toBe(62);
     expect(pieces.length).toBeGreaterThanOrEqual(280);
     expect(pieces.length).toBeLessThanOrEqual(340);
     expect(new Set(marks).size).toBe(pieces.length);

@@ -36,10 +36,23 @@ export function ToolFields({ draft, update, problems }: ToolFieldsProps) {
           <TextInput id="tool-tang" label="Tang" value={draft.tang} onChange={(event) => update({ tang: event.target.value })} error={at("tang")} hint="Must be what the brake holds" />
         </div>
       </Panel>
+      {punch ? null : (
+        <Panel title="Hems">
+          <Choice label="Flattens hems" value={draft.flattens ? "slot" : "none"} onChange={(value) => update({ flattens: value === "slot" })}
+            options={[{ value: "none", label: "No" }, { value: "slot", label: "In a slot in its front" }]} />
+          {draft.flattens ? (
+            <div className="mt-4 grid grid-cols-3 gap-4">
+              <NumberInput id="tool-flattening.floor" label="Floor under the top" unit="mm" value={draft.slotFloor} onChange={(event) => update({ slotFloor: event.target.value })} error={at("flattening.floor")} />
+              <NumberInput id="tool-flattening.back" label="End behind the V’s middle" unit="mm" value={draft.slotBack} onChange={(event) => update({ slotBack: event.target.value })} error={at("flattening.back")} />
+              <NumberInput id="tool-flattening.opening" label="Opens" unit="mm" value={draft.slotOpening} onChange={(event) => update({ slotOpening: event.target.value })} error={at("flattening.opening")} />
+            </div>
+          ) : null}
+        </Panel>
+      )}
       <Panel title="Cross-section" aside={punch ? "tip at 0 0, body above, back to the right" : "middle of the V’s top at 0 0, body below"}>
         <div className="mb-3 flex flex-wrap items-end gap-3">
           <NumberInput id="tool-bodyWidth" label="Body width" unit="mm" className="w-32" value={draft.bodyWidth} onChange={(event) => update({ bodyWidth: event.target.value })} />
-          <Button look="plain" onClick={() => draw(false)}>{punch ? "Draw a straight punch" : "Draw a V die"}</Button>
+          <Button look="plain" onClick={() => draw(false)}>{punch ? "Draw a straight punch" : draft.flattens ? "Draw a V die over a slot" : "Draw a V die"}</Button>
           {punch ? <Button look="plain" onClick={() => draw(true)}>Draw a relieved punch</Button> : null}
         </div>
         <TextArea id="tool-profile" label="Corners: x and y, one corner a line" rows={14} numbers spellCheck={false} value={draft.profile} onChange={(event) => update({ profile: event.target.value })} error={at("profile")} />

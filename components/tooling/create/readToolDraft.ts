@@ -26,10 +26,16 @@ export function readToolDraft(draft: ToolDraft): Result<ToolInput, readonly Fiel
   };
   const own = draft.kind === "punch"
     ? { kind: draft.kind, tipAngle: take("tipAngle", parseAngle(draft.angle)), tipRadius: take("tipRadius", parseLength(draft.radius, "mm")) }
-    : { kind: draft.kind, vAngle: take("vAngle", parseAngle(draft.angle)), shoulderRadius: take("shoulderRadius", parseLength(draft.radius, "mm")), vOpening: take("vOpening", parseLength(draft.vOpening, "mm")) };
+    : { kind: draft.kind, vAngle: take("vAngle", parseAngle(draft.angle)), shoulderRadius: take("shoulderRadius", parseLength(draft.radius, "mm")), vOpening: take("vOpening", parseLength(draft.vOpening, "mm")), ...(draft.flattens ? { flattening: slot(draft, take) } : {}) };
   if (problems.length > 0) return fail(problems);
   const name = draft.name.trim() === "" ? {} : { name: draft.name.trim() };
   const read = readToolingDocument({ format: "tooling/1", units: "mm", tools: [{ id: draft.code.trim(), ...name, ...common, ...own, sections: [] }] });
   if (!read.ok) return fail(read.error.map(({ path, message }) => ({ path: path.replace(/^tools\[0\]\.?/, "").replace(/^id$/, "code"), message })));
   return ok({ code: draft.code.trim(), units: "mm", ...name, ...common, ...own });
 }
+
+const slot = (draft: ToolDraft, take: (path: string, read: Result<number, string>) => number) => ({
+  floor: take("flattening.floor", parseLength(draft.slotFloor, "mm")),
+  back: take("flattening.back", parseNumber(draft.slotBack)),
+  opening: take("flattening.opening", parseLength(draft.slotOpening, "mm")),
+});

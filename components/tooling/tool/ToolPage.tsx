@@ -59,6 +59,11 @@ function ratings(tool: ToolDetail) {
     { label: "Most force for each metre", value: <span className="num">{formatNumber(tool.maxForcePerMetreKN, 0)} kN/m</span> },
     { label: "On the longest piece", value: <span className="num">{longest === 0 ? "–" : `${formatNumber((tool.maxForcePerMetreKN * longest) / 1000, 0)} kN over ${formatLength(longest, "mm")}`}</span> },
     { label: "Working height, seat to working edge", value: <span className="num">{formatLength(tool.heightMm, "mm")}</span> },
+    ...(tool.flattening === null ? [] : [
+      { label: "Slot that flattens hems, under the top", value: <span className="num">{formatLength(tool.flattening.floor, "mm")}</span> },
+      { label: "Its end, from the middle of the V", value: <span className="num">{formatLength(tool.flattening.back, "mm")}</span> },
+      { label: "It opens", value: <span className="num">{formatLength(tool.flattening.opening, "mm")}</span> },
+    ]),
     { label: "Last changed", value: formatMoment(tool.updatedAt) },
   ];
 }

@@ -9,5 +9,5 @@ export async function toolDetail(db: Connection, code: string): Promise<ToolDeta
   const row = await findTool(db, code);
   if (!row) return undefined;
   const pieces = await findPieces(db, { toolCodes: [code] });
-  return { ...toolListItem(row), tang: row.tang, profile: row.profile, pieceList: pieces.map(pieceView), updatedAt: row.updated_at.toISOString() };
+  return { ...toolListItem(row), tang: row.tang, profile: row.profile, flattening: row.flattening, pieceList: pieces.map(pieceView), updatedAt: row.updated_at.toISOString() };
 }

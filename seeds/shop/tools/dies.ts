@@ -1,5 +1,6 @@
 import { deg, mm, toRad } from "@/bending/core/units";
 import type { DieEntry } from "@/bending/tooling/toolingDocument";
+import { hemDieProfile } from "@/bending/tooling/hemDieProfile";
 import { vDieProfile } from "@/bending/tooling/vDieProfile";
 import { drawer } from "./drawer";
 import { roundedProfile } from "./roundedProfile";
@@ -44,7 +45,20 @@ const rows: readonly (readonly [number, number, number, number, number, number, 
 /** Bodies of less than this over the opening are the narrow ones, for returns close to the bend. */
 const NARROW = 8;
 
-export const dies: readonly DieEntry[] = rows.map(([vOpening, vAngle, shoulderRadius, width, height, maxForcePerMetre, set], index) => {
+const slot = { floor: 44, back: 6, opening: 20 };
+
+/** Bends a hem acutely in its V and flattens it in the slot underneath, which stands open on springs. */
+const hemDie: DieEntry = {
+  id: "H8-26-H90", kind: "die", vOpening: 8, vAngle: 26, shoulderRadius: 0.8, height: 90, maxForcePerMetre: 600,
+  name: "Two-stage hem die V 8, 26°",
+  tang: "60 mm",
+  profile: roundedProfile(hemDieProfile({ vOpening: mm(8), vAngle: toRad(deg(26)), shoulderRadius: mm(0.8), height: mm(90), bodyWidth: mm(50) },
+    { floor: mm(slot.floor), back: mm(slot.back), opening: mm(slot.opening) })),
+  sections: sectionsOf("H8-26-H90", "split", drawer("F", rows.length)),
+  flattening: slot,
+};
+
+export const dies: readonly DieEntry[] = [...rows.map(([vOpening, vAngle, shoulderRadius, width, height, maxForcePerMetre, set], index): DieEntry => {
   const narrow = width - vOpening < NARROW;
   const id = `V${vOpening}-${vAngle}-H${height}${narrow ? "-narrow" : ""}`;
   const shape = { vOpening: mm(vOpening), vAngle: toRad(deg(vAngle)), shoulderRadius: mm(shoulderRadius), height: mm(height), bodyWidth: mm(width) };
@@ -55,4 +69,4 @@ export const dies: readonly DieEntry[] = rows.map(([vOpening, vAngle, shoulderRa
     profile: roundedProfile(vDieProfile(shape)),
     sections: sectionsOf(id, set, drawer("F", index)),
   };
-});
+}), hemDie];
