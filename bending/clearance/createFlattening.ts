@@ -1,20 +1,23 @@
-import type { Mm } from "../core/units";
-import { convexPieces } from "../geometry/convexPieces";
+import { rad, type Mm } from "../core/units";
 import type { Vec2 } from "../geometry/vec2";
 import type { Bend, PartModel } from "../part/partModel";
 import type { Machine } from "../tooling/machine";
 import type { Die, Punch, Tool } from "../tooling/tool";
+import { askFace } from "./askHalf";
+import { atRest } from "./atRest";
 import type { ClearanceHit } from "./clearance";
 import { clearanceHit } from "./clearanceHit";
 import type { Shape } from "./convexPiece";
+import { createHitPlaces } from "./createHitPlaces";
+import { createKeys } from "./createKeys";
 import { createObstacles } from "./createObstacles";
-import { facePaths, type FacePath } from "./facePath";
+import { facesOf } from "./facesOf";
+import type { Half } from "./half";
 import type { Hit } from "./hit";
-import type { FaceMeeting } from "./hitTable";
-import { meetStroke } from "./meetStroke";
+import { mirrorShape } from "./mirrorShape";
 import type { Obstacle } from "./obstacle";
-import { platesOf, type Plates } from "./plates";
-import { prismsOf } from "./prismsOf";
+import { placedShape } from "./placedShape";
+import type { Question } from "./question";
 import { sweepShape } from "./sweepShape";
 
 /** The second stroke of a hem: the part lies level in front, its fold against the end of the slot, while the die closes on it. */
@@ -35,40 +38,31 @@ const AWAY = 1e4;
  */
 export function createFlattening(part: PartModel, machine: Machine, margin: Mm): Flattening {
   const obstacles = createObstacles(machine, margin);
-  const pieces = part.faces.map((face) => convexPieces(face.outline, face.holes));
-  const plates = new Map<string, Plates>();
-  const known = new Map<string, readonly FaceMeeting[]>();
-  const platesAt = (hit: Hit, path: FacePath, state: number): Plates => {
-    const key = `${hit.bends.join()}/${path.face}/${state}`;
-    const found = plates.get(key) ?? platesOf(prismsOf(part, path, state, pieces[path.face] ?? []));
-    plates.set(key, found);
-    return found;
+  const counts = { clips: 0, entries: 0 };
+  const placeOf = createHitPlaces(part, margin, counts);
+  const keys = createKeys();
+  const questions = new WeakMap<object, Question>();
+  const questionOf = (half: Half, punch: Punch, die: Die, obstacle: Obstacle): Question => {
+    const key = keys(half, punch, die, obstacle);
+    const known = questions.get(key);
+    if (known) return known;
+    const { bend, thickness } = half;
+    const shape = placedShape(mirrorShape(passed(part, bend, die, obstacle, Math.max(0, Math.min(machine.stroke, machine.daylight - punch.height - die.height)), margin)));
+    const made: Question = { index: half.nextQuestion(), shape, everywhere: null, lift: 0, onBed: false, motion: atRest(bend, thickness, rad(0)), margin, counts };
+    questions.set(key, made);
+    return made;
   };
-  const met = (hit: Hit, die: Die, obstacle: Obstacle, punch: Punch): readonly FaceMeeting[] => {
-    const bend = part.bends[hit.bends[0] ?? -1];
-    const paths = facePaths(part, hit).filter(({ inFront }) => inFront);
-    const mask = paths.reduce((bits, path) => bits | path.mask, 0);
-    const key = [hit.bends.join(), hit.formed & mask, obstacle.kind, obstacle.tool, obstacle.lift, punch.id, die.id].join("/");
-    const answer = known.get(key);
-    if (answer || bend === undefined) return answer ?? [];
-    const shape = passed(part, bend, die, obstacle, Math.max(0, Math.min(machine.stroke, machine.daylight - punch.height - die.height)), margin);
-    const found = paths.flatMap((path): readonly FaceMeeting[] => {
-      const state = hit.formed & path.mask;
-      const meeting = meetStroke({
-        bend, thickness: part.thickness, plates: platesAt(hit, path, state), inFront: true, shape, lift: () => 0, from: 0, to: 0, steps: 0, margin, count: () => undefined,
-      });
-      return meeting.intervals.length > 0 ? [{ path, state, meeting: { ...meeting, strokeAngle: bend.angle } }] : [];
+  const met = (hit: Hit, die: Die, obstacle: Obstacle, punch: Punch): readonly ClearanceHit[] => {
+    const { front } = placeOf(hit);
+    const question = questionOf(front, punch, die, obstacle);
+    return facesOf(front.at(hit.formed)).flatMap((face): readonly ClearanceHit[] => {
+      const meeting = askFace(question, face);
+      return meeting.intervals.length > 0 ? [clearanceHit(obstacle.kind, obstacle.tool, face, { ...meeting, strokeAngle: front.bend.angle }, true)] : [];
     });
-    known.set(key, found);
-    return found;
   };
   return {
-    meets: (hit, punch, die, tool) => {
-      const obstacle = obstacles.ofTool(tool, punch, die);
-      return met(hit, die, obstacle, punch).map((meeting) => clearanceHit(obstacle.kind, obstacle.tool, meeting));
-    },
-    blocked: (hit, punch, die) => [obstacles.ram(punch), obstacles.bed(die)]
-      .flatMap((obstacle) => met(hit, die, obstacle, punch).map((meeting) => clearanceHit(obstacle.kind, null, meeting))),
+    meets: (hit, punch, die, tool) => met(hit, die, obstacles.ofTool(tool, punch, die), punch),
+    blocked: (hit, punch, die) => [obstacles.ram(punch), obstacles.bed(die)].flatMap((obstacle) => met(hit, die, obstacle, punch)),
   };
 }
 
@@ -82,7 +76,7 @@ function passed(part: PartModel, bend: Bend, die: Die, obstacle: Obstacle, openi
   const die0 = -part.thickness + slot.floor;
   const onBed = (up: number): Vec2 => [x, die0 + obstacle.lift + up];
   return obstacle.on === "bed"
-    ? sweepShape(obstacle.tool === die.id ? obstacle.shape.map((piece) => ({ ...piece, role: "left" as const })) : obstacle.shape, onBed(0), [AWAY, 0], margin)
-    : [...sweepShape(obstacle.shape, onBed(-depth), [0, depth + opening], margin), ...sweepShape(obstacle.shape, onBed(opening), [AWAY, 0], margin)];
+    ? sweepShape(obstacle.tool === die.id ? obstacle.shape.pieces.map((piece) => ({ ...piece, role: "left" as const })) : obstacle.shape.pieces, onBed(0), [AWAY, 0], margin)
+    : [...sweepShape(obstacle.shape.pieces, onBed(-depth), [0, depth + opening], margin), ...sweepShape(obstacle.shape.pieces, onBed(opening), [AWAY, 0], margin)];
 }
 
