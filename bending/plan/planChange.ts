@@ -28,8 +28,8 @@ export type ChangeGroup = "order" | "stock" | "tool" | "machine" | "part" | "set
 export type ChangeKind =
   | "move-bends" | "one-by-one"
   | "section"
-  | "punch-relief" | "punch-height" | "punch-width" | "punch-angle" | "punch-rating" | "die-opening" | "die-width" | "die-angle"
-  | "daylight" | "force" | "section-gap"
+  | "punch-relief" | "punch-height" | "punch-width" | "die-opening" | "die-height" | "die-width" | "tool-angle" | "tool-rating"
+  | "daylight" | "stroke" | "force" | "section-gap"
   | "shorter-flange" | "longer-flange" | "leave-out"
   | "clearance";
 

@@ -20,6 +20,8 @@ export interface WhySituations {
   readonly each: readonly WhySituation[];
   /** Why there are no tools to look at, where there are none. */
   readonly reasons: readonly PlanReason[];
+  /** mm; null when the part cannot be built. */
+  readonly thickness: number | null;
 }
 
 /** The flats that a plan would look at, the likeliest first, every order free in them; a person's order is kept beside. */
@@ -40,7 +42,7 @@ export function situationsOf(request: PlanRequest | CheckRequest): WhySituations
     const follows = order === null ? () => true : createSituation({ ...facts, order }).allowed;
     each.push({ situation, checks: createStepChecks(situation), follows });
   }
-  return { each, reasons };
+  return { each, reasons, thickness: variants.ok ? variants.value[0]?.part.thickness ?? null : null };
 }
 
 function masksOf(request: PlanRequest | CheckRequest): readonly number[] | null {
