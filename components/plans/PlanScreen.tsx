@@ -1,48 +1,45 @@
 "use client";
-import Link from "next/link";
+import { usePathname, useRouter, useSearchParams } from "next/navigation";
+import { JobsUnderWay } from "@/components/planJobs/JobsUnderWay";
 import { Notice } from "@/components/ui/Notice";
-import { PageHeader } from "@/components/ui/PageHeader";
-import { StateMark } from "@/components/ui/StateMark";
-import { createSheetFormat } from "@/lib/sheet/createSheetFormat";
+import { TabSet } from "@/components/ui/TabSet";
 import { usePlan } from "@/lib/queries/plans";
 import type { PlanDetail } from "@/lib/schemas/views";
-import { MakeSheet } from "./MakeSheet";
-import { planStatus } from "./planStatus";
+import { FlatNumbers } from "./FlatNumbers";
+import { OtherPlans } from "./others/OtherPlans";
+import { OwnOrder } from "./own/OwnOrder";
+import { PlanHeader } from "./PlanHeader";
+import { PlanProof } from "./PlanProof";
 import { PlanReasons } from "./PlanReasons";
 import { PlanWork } from "./PlanWork";
 
-/** One stored plan. */
+/** One stored plan. The tab stands in the address, so that it is there again on coming back. */
 export function PlanScreen({ id, mayWrite }: { readonly id: string; readonly mayWrite: boolean }) {
   const { data, error } = usePlan(id);
   if (error) return <Notice tone="wrong" title="This plan cannot be shown">{error.message}</Notice>;
   if (!data) return <p className="py-10 text-ink-faint">Loading the plan…</p>;
-  const works = data.plan.steps.length > 0;
   return (
     <>
-      <PlanHeader detail={data} mayWrite={mayWrite && works} />
-      {works ? <PlanWork detail={data} /> : <PlanReasons detail={data} mayWrite={mayWrite} />}
+      <PlanHeader detail={data} mayWrite={mayWrite} />
+      <JobsUnderWay of={{ planId: id }} mayWrite={mayWrite} except={({ kind }) => kind === "check"} />
+      <PlanTabs key={id} detail={data} mayWrite={mayWrite} />
     </>
   );
 }
 
-function PlanHeader({ detail, mayWrite }: { readonly detail: PlanDetail; readonly mayWrite: boolean }) {
-  const { plan } = detail;
-  const { tone, word, sentence } = planStatus(plan.status, plan.gap);
-  const format = createSheetFormat(plan.units);
-  const works = plan.steps.length > 0;
-  return (
-    <PageHeader kicker={<>Plan of <Link href={`/parts/${detail.partId}`} className="num underline">{detail.partNumber}</Link></>}
-      title={detail.partName} summary={sentence} actions={mayWrite ? <MakeSheet planId={detail.id} sheets={detail.sheets} /> : undefined}
-      facts={[
-        { label: "Status", value: <StateMark tone={tone}>{word}</StateMark> },
-        { label: "Revision", value: <span className="num">{detail.revision}</span> },
-        { label: "Brake", value: detail.machine },
-        { label: "Batch", value: <span className="num">{plan.batch}</span> },
-        ...(works ? [
-          { label: "Setup", value: <span className="num">{format.time(plan.seconds.setup)}</span> },
-          { label: "A part", value: <span className="num">{format.time(plan.seconds.perPart)}</span> },
-          { label: "Batch in all", value: <span className="num">{format.time(plan.seconds.total)}</span> },
-        ] : []),
-      ]} />
-  );
+function PlanTabs({ detail, mayWrite }: { readonly detail: PlanDetail; readonly mayWrite: boolean }) {
+  const router = useRouter();
+  const path = usePathname();
+  const asked = useSearchParams().get("view");
+  const works = detail.plan.steps.length > 0;
+  const others = detail.plan.alternatives?.length ?? 0;
+  const tabs = [
+    works ? { value: "plan", label: "Order and bed", content: <PlanWork detail={detail} /> } : { value: "plan", label: "What stands in the way", content: <PlanReasons detail={detail} mayWrite={mayWrite} /> },
+    { value: "own", label: "Your own order", content: <OwnOrder detail={detail} mayWrite={mayWrite} /> },
+    ...(works ? [{ value: "others", label: `Other plans (${others})`, content: <OtherPlans detail={detail} mayWrite={mayWrite} /> }] : []),
+    { value: "flat", label: "Flat", content: <FlatNumbers plan={detail.plan} /> },
+    { value: "proof", label: works ? "Proof and time" : "Proof", content: <PlanProof detail={detail} mayWrite={mayWrite} /> },
+  ];
+  const shown = tabs.find(({ value }) => value === asked)?.value ?? "plan";
+  return <TabSet label="The plan" tabs={tabs} value={shown} onChange={(view) => router.replace(view === "plan" ? path : `${path}?view=${view}`, { scroll: false })} />;
 }

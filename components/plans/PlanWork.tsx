@@ -9,9 +9,7 @@ import { asSentence } from "@/lib/format/asSentence";
 import { bedMap } from "@/lib/sheet/bedMap";
 import { planModel } from "@/lib/sheet/planModel";
 import type { PlanDetail } from "@/lib/schemas/views";
-import { FlatNumbers } from "./FlatNumbers";
 import { OrderTable } from "./OrderTable";
-import { PlanProof } from "./PlanProof";
 
 /** A plan that works: the order beside the machine, the bed, the flat, what to mind. */
 export function PlanWork({ detail }: { readonly detail: PlanDetail }) {
@@ -39,10 +37,6 @@ export function PlanWork({ detail }: { readonly detail: PlanDetail }) {
           <BedMapDrawing map={map} close className="mt-2 w-full border border-rule bg-sheet" />
         </details>
       </Panel>
-      <div className="grid gap-8 lg:grid-cols-2">
-        <Panel title="Flat"><FlatNumbers plan={plan} /></Panel>
-        <Panel title="Proof and time"><PlanProof plan={plan} /></Panel>
-      </div>
     </div>
   );
 }

@@ -1,10 +1,9 @@
 import { keepPreviousData, queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
-import type { PlanListQuery, StartPlanInput } from "@/lib/schemas/planInputs";
-import type { Page, PlanDetail, PlanJobView, PlanListItem } from "@/lib/schemas/views";
+import type { OwnOrderInput, PlanListQuery, StartPlanInput } from "@/lib/schemas/planInputs";
+import type { Page, PlanDetail, PlanJobView, PlanListItem, PlanShopView } from "@/lib/schemas/views";
+import { useKeepJob } from "./planJobs";
 import { queryText } from "./queryText";
 import { request } from "./request";
-
-const POLL_MS = 500;
 
 export const planListOptions = (query: PlanListQuery = {}) =>
   queryOptions({
@@ -19,40 +18,52 @@ export const planOptions = (id: string) =>
     queryFn: ({ signal }) => request<PlanDetail>(`/api/plans/${encodeURIComponent(id)}`, { signal }),
   });
 
-/** Asks again and again while the job runs. */
-export const planJobOptions = (id: string | null) =>
-  queryOptions({
-    queryKey: ["plan-jobs", id],
-    queryFn: ({ signal }) => request<PlanJobView>(`/api/plan-jobs/${encodeURIComponent(id ?? "")}`, { signal }),
-    enabled: id !== null,
-    refetchInterval: (query) => (query.state.data === undefined || query.state.data.state === "running" ? POLL_MS : false),
-  });
-
 export const usePlanList = (query: PlanListQuery = {}) => useQuery(planListOptions(query));
 
 export const usePlan = (id: string) => useQuery(planOptions(id));
 
-/** Follows a planning job; null: none yet. When `data.state` is `done`, `data.planId` is the plan. */
-export const usePlanJob = (id: string | null) => useQuery(planJobOptions(id));
+/** What the plan's question stands on today; asked for when an order of one's own is begun. */
+export const usePlanShop = (id: string) =>
+  useQuery({
+    queryKey: ["plans", "shop", id],
+    queryFn: ({ signal }) => request<PlanShopView>(`/api/plans/${encodeURIComponent(id)}/shop`, { signal }),
+    refetchOnWindowFocus: false,
+  });
 
-/** Answers the job at once; it may be done already when the same was planned before. */
-export function useStartPlan() {
+/** Posts what starts a job; the job is answered at once, and may be done already when the same was planned before. */
+function useJobStarter<Input>(start: (input: Input) => Promise<PlanJobView>) {
   const client = useQueryClient();
+  const keep = useKeepJob();
   return useMutation({
-    mutationFn: (input: StartPlanInput) => request<PlanJobView>("/api/plans", { method: "POST", body: input }),
-    onSuccess: (job) => {
-      client.setQueryData(planJobOptions(job.id).queryKey, job);
-      return client.invalidateQueries({ queryKey: ["plans", "list"] });
+    mutationFn: start,
+    onSuccess: async (job) => {
+      await keep(job);
+      await client.invalidateQueries({ queryKey: ["plans", "list"] });
     },
   });
 }
 
-export function useCancelPlanJob() {
+const of = (id: string, what: string) => `/api/plans/${encodeURIComponent(id)}/${what}`;
+
+export const useStartPlan = () => useJobStarter((input: StartPlanInput) => request<PlanJobView>("/api/plans", { method: "POST", body: input }));
+
+/** Plans an order of one's own for what the plan is about. */
+export const usePlanOwnOrder = (planId: string) => useJobStarter((input: OwnOrderInput) => request<PlanJobView>(of(planId, "order"), { method: "POST", body: input }));
+
+/** Goes through the stored plan with today's shop. */
+export const useCheckPlan = (planId: string) => useJobStarter(() => request<PlanJobView>(of(planId, "checks"), { method: "POST" }));
+
+/** Searches on with so many seconds more. */
+export const useSearchOn = (planId: string) => useJobStarter((moreSeconds: number) => request<PlanJobView>(of(planId, "more-time"), { method: "POST", body: { moreSeconds } }));
+
+/** Makes one of the other plans a plan of its own. */
+export function useChooseAlternative(planId: string) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (id: string) => request<PlanJobView>(`/api/plan-jobs/${encodeURIComponent(id)}`, { method: "DELETE" }),
-    onSuccess: (job) => {
-      client.setQueryData(planJobOptions(job.id).queryKey, job);
+    mutationFn: (index: number) => request<PlanDetail>(of(planId, "alternatives"), { method: "POST", body: { index } }),
+    onSuccess: (plan) => {
+      client.setQueryData(planOptions(plan.id).queryKey, plan);
+      return client.invalidateQueries({ queryKey: ["plans", "list"] });
     },
   });
 }
