@@ -31,7 +31,8 @@ export function buildPart(document: PartDocument, options: BuildPartOptions): Re
   if (early.length > 0 || !material) return fail(early);
   const built = buildShape(document, material, options);
   if (!built.ok) return built;
-  const part: PartModel = { name: document.name, thickness: mm(documentInUnits(document, "mm").thickness), material, ...built.value };
+  const { thickness, toleranceLength } = documentInUnits(document, "mm");
+  const part: PartModel = { name: document.name, thickness: mm(thickness), material, toleranceLength: toleranceLength === undefined ? null : mm(toleranceLength), ...built.value };
   const overlaps = options.keepOverlaps ? [] : overlapProblems(part, document);
   return overlaps.length > 0 ? fail(overlaps) : ok(part);
 }

@@ -20,6 +20,7 @@ export function flatDocument(part: PartModel, units: LengthUnit): PartDocument {
     units: "mm",
     material: part.material.id,
     thickness: part.thickness,
+    ...(part.toleranceLength === null ? {} : { toleranceLength: part.toleranceLength }),
     flat: {
       outline: outline.vertices.map(([x, y, bulge]) => (bulge === 0 ? [x, y] : [x, y, bulge])),
       ...(holes.length > 0 ? { holes: holes.map(holeEntry) } : {}),

@@ -19,6 +19,8 @@ export interface PartModel {
   readonly name: string;
   readonly thickness: Mm;
   readonly material: MaterialFacts;
+  /** Plus and minus on lengths that have no tolerance of their own; null when the general tolerance holds. */
+  readonly toleranceLength: Mm | null;
   readonly faces: readonly Face[];
   readonly bends: readonly Bend[];
   /** Holes that reach into bends; they belong to no face's `holes`. */
@@ -30,7 +32,7 @@ export interface PartModel {
 }
 
 /** What is read out of a document's shape. */
-export type PartShape = Omit<PartModel, "name" | "thickness" | "material">;
+export type PartShape = Omit<PartModel, "name" | "thickness" | "material" | "toleranceLength">;
 
 /** A hole over one or more bend zones: its shape holds in the flat, the folded one follows by bending it. */
 export interface HoleAcross {
@@ -122,6 +124,8 @@ export interface Bend {
   readonly strokeWith: number | null;
   /** Angular tolerance in radians, null when the general tolerance holds. */
   readonly toleranceAngle: Rad | null;
+  /** Plus and minus on the length of the flange that the bend carries; null when the general tolerance holds. */
+  readonly toleranceLength: Mm | null;
 }
 
 /**

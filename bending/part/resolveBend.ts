@@ -18,6 +18,7 @@ export interface BendEntry {
   readonly insideRadius?: number;
   readonly kFactor?: number;
   readonly toleranceAngle?: number;
+  readonly toleranceLength?: number;
   /** Of the flange that the bend carries, where it has them. */
   readonly length?: number;
   readonly outline?: readonly DocumentVertex[];
@@ -34,6 +35,7 @@ export interface ResolvedBend extends Omit<ResolvedAllowance, "basis"> {
   readonly insideRadius: Mm;
   readonly radiusSource: string;
   readonly toleranceAngle: Rad | null;
+  readonly toleranceLength: Mm | null;
 }
 
 /** Radius, allowance and setback of one bend; the document and the entry are in mm. */
@@ -41,6 +43,7 @@ export function resolveBend(entry: BendEntry, document: PartDocument, material: 
   const { radius, source } = insideRadius(entry, document, material, context);
   const angle = entry.hem === "teardrop" && entry.angle <= 180 ? closingAngle(entry, document, radius) : toRad(deg(entry.angle));
   const tolerance = entry.toleranceAngle ?? document.toleranceAngle;
+  const toleranceLength = entry.toleranceLength ?? document.toleranceLength;
   const thickness = mm(document.thickness);
   const decided = context.decidedOf?.(entry.id);
   return {
@@ -61,6 +64,7 @@ export function resolveBend(entry: BendEntry, document: PartDocument, material: 
     insideRadius: radius,
     radiusSource: source,
     toleranceAngle: tolerance === undefined ? null : toRad(deg(tolerance)),
+    toleranceLength: toleranceLength === undefined ? null : mm(toleranceLength),
   };
 }
 

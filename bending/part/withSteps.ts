@@ -24,10 +24,10 @@ export function withSteps(
     const radii = 2 * radiusOf(entry) + thickness;
     const plane = (offset.height - radii * (1 - Math.cos(angle))) / Math.sin(angle);
     if (plane < LEAST_PLANE_MM) problems.push({ path: `${flange.path}.offset.height`, message: tooLow(offset.height, radii, entry.angle, units) });
-    const { id, on, edge, start, end, relief, length, startAngle, endAngle, holes, ...bend } = entry;
+    const { id, on, edge, start, end, relief, length, startAngle, endAngle, holes, toleranceLength, ...bend } = entry;
     const step: FlangeEntry = { ...bend, ...given({ start, end, relief }), id: stepOf(id), on, edge, length: plane, dimension: "tangent", corner: { kind: "open" } };
     const far: FlangeEntry = {
-      ...bend, ...given({ length, startAngle, endAngle, holes }), id, on: step.id, edge: 2,
+      ...bend, ...given({ length, startAngle, endAngle, holes, toleranceLength }), id, on: step.id, edge: 2,
       direction: entry.direction === "up" ? "down" : "up", strokeWith: step.id, corner: { kind: "open" },
     };
     return [{ entry: step, path: flange.path, lengthPath: `${flange.path}.offset.height` }, { ...flange, entry: far }];

@@ -13,6 +13,8 @@ import type { PartModel } from "../part/partModel";
 import type { BackGauge, Machine } from "../tooling/machine";
 import type { Die, Punch } from "../tooling/tool";
 import { edgeContacts, type Contact } from "./edgeContacts";
+import { fingerHeight } from "./fingerHeight";
+import { foldContact } from "./foldContact";
 import type { GaugeOption } from "./gaugeOption";
 import { plateInProfile } from "./plateInProfile";
 import { uprightContact } from "./uprightContact";
@@ -35,6 +37,11 @@ export function gaugeOptions(part: PartModel, hit: Hit, machine: Machine, punch:
     const upright = uprightContact(part, index, frame, fingerHeight(gauge));
     if (upright) contacts.push(upright);
   });
+  part.bends.forEach(({ parent }, index) => {
+    const frame = frames[parent];
+    const fold = front[parent] || frame === undefined || !((hit.formed >> index) & 1) ? null : foldContact(part, index, frame);
+    if (fold) contacts.push(fold);
+  });
   const fingers = convexPieces(gauge.fingerProfile);
   const obstacles: Obstacles = {
     plates: part.faces.map((face, i) => ({ pieces: convexPieces(face.outline, face.holes), frame: frames[i] })),
@@ -46,12 +53,6 @@ export function gaugeOptions(part: PartModel, hit: Hit, machine: Machine, punch:
     .map((contact) => ({ ...contact, free: clearOf(contact, gauge, fingers, obstacles) }))
     .filter((option) => option.free.length > 0)
     .sort((a, b) => rank(a, gauge) - rank(b, gauge) || nearest(a) - nearest(b) || a.face - b.face || a.edge - b.edge);
-}
-
-/** Height of the stop face of a finger above its rest. */
-function fingerHeight(gauge: BackGauge): number {
-  const front = gauge.fingerProfile.filter((p) => Math.abs(p[0]) < MEANT_CONTACT_MM);
-  return Math.max(0, ...front.map((p) => p[1]));
 }
 
 const rank = (option: GaugeOption, gauge: BackGauge) => {
