@@ -41,7 +41,7 @@ export function createAttempts(request: PlanRequest | CheckRequest, limits: WhyL
     plans += 1;
     limits.onProgress?.({ expanded: plans, fraction: null, message });
     const changed = {
-      ...request, ...change, firstPlan, alternatives: 0, onProgress: undefined,
+      ...request, ...change, firstPlan, alternatives: 0, onProgress: () => undefined,
       shouldStop: () => {
         asked += 1;
         return asked > ASKS_A_PLAN || (limits.shouldStop?.() ?? false);

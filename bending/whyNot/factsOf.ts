@@ -20,7 +20,7 @@ export function factsOf(request: PlanRequest | CheckRequest, plan: PlanDocument,
   return {
     attempts, situations,
     kinds: new Set([...reasons, ...plan.reasons].map(({ kind }) => kind)),
-    faces: [...new Set([...reasons.flatMap(({ faces }) => faces), ...strokes.flatMap(({ bends, wouldWork }) => [...bends, ...wouldWork.flatMap(({ before }) => before)])])],
+    faces: [...new Set([...[...reasons, ...plan.reasons].flatMap(({ faces }) => faces), ...plan.reasons.flatMap(({ bends }) => bends), ...strokes.flatMap(({ bends, wouldWork }) => [...bends, ...wouldWork.flatMap(({ before }) => before)])])],
     punches: nearFirst(punchIds)(tools.flatMap((tool) => (tool.kind === "punch" && tool.tang === machine.punchTang && tool.pieces.length > 0 ? [tool] : []))),
     dies: nearFirst(dieIds)(tools.flatMap((tool) => (tool.kind === "die" && tool.tang === machine.dieTang && tool.pieces.length > 0 && tool.flattening === undefined ? [tool] : []))),
   };

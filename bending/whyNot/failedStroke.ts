@@ -2,9 +2,11 @@ import { formatLength } from "../core/formatLength";
 import { mmPer } from "../core/units";
 import { PAIRS_EXPLAINED } from "../plan/explain";
 import type { FailedStroke, FailureReason } from "../plan/planFailure";
+import { drawnReason } from "../plan/drawnPlan";
 import { rounded } from "../plan/rounded";
 import { stopsOf, type Stop } from "../plan/stopsOf";
 import type { ToolPair } from "../plan/toolPair";
+import { readStrip } from "../strokes/drawnIds";
 import { bendsOf } from "./bendsOf";
 import { placesThatWork } from "./placesThatWork";
 import type { WhySituation } from "./situationsOf";
@@ -55,10 +57,10 @@ function summedUp({ situation: { units } }: WhySituation, group: readonly Met[])
   const better = depth !== undefined && pairs.size > 1 && said.stop.off - least.stop.off > 0.05
     ? `; nearest with ${least.pair.punch.id} on ${least.pair.die.id}: ${formatLength(Math.round(depth * 10) / 10, units)}` : "";
   return {
-    ...said.stop.reason,
+    ...drawnReason(said.stop.reason),
     tools: [...new Set(group.flatMap(({ stop }) => stop.reason.tools))],
     message: `${said.stop.reason.message}${better}`,
-    fronts: [...new Set(group.map(({ front }) => front))],
+    fronts: [...new Set(group.map(({ front }) => readStrip(front)?.bend ?? front))],
     pairs: [...pairs.values()],
     ...(depth === undefined ? {} : { leastDepth: rounded(depth / mmPer(units)) }),
   };
