@@ -3,7 +3,7 @@ import type { ToolPiece } from "../tooling/tool";
 import { composeRuns, type Run } from "./composeRuns";
 
 /** mm. Shortest run that a press can hold: common practice, no source. */
-const SHORTEST_RUN_MM = 5;
+export const SHORTEST_RUN_MM = 5;
 
 /**
  * Runs that real pieces make for a line, each length and count of pieces once: those that cover the whole line, then
