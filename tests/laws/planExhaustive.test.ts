@@ -1,11 +1,11 @@
 import { describe, expect, it, vi } from "vitest";
 import { mm } from "@/bending/core/units";
-import type { PlanDocument } from "@/bending/plan/planDocument";
 import { planPart } from "@/bending/plan/planPart";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import { planCorpus } from "../corpus/planCorpus";
 import { verifyPlan } from "../corpus/verifyPlan";
 import { exhaustivePlan } from "./exhaustive/exhaustivePlan";
+import { planDemerits } from "./planDemerits";
 
 vi.setConfig({ testTimeout: 180_000 });
 
@@ -48,10 +48,6 @@ function asked({ name, pieces, tools = ["P88", "P88-relieved", "V12", "V16"], ba
   };
 }
 
-/** Fingers that a plan goes without, and wishes that its cautions name. */
-const demeritsOf = (plan: PlanDocument) => plan.steps.reduce((sum, { gauge }) => sum + 2 - gauge.fingers.length, 0)
-  + plan.cautions.filter(({ kind, tools }) => (kind === "radius" || kind === "tool-choice") && tools.length === 1).length;
-
 describe("the plan is as good as the best of everything tried", () => {
   it.each(SMALL)("$name with $pieces, $batch", (one) => {
     const request = asked(one);
@@ -59,7 +55,7 @@ describe("the plan is as good as the best of everything tried", () => {
     const best = exhaustivePlan(request, one.stations ?? 2, GAPS);
     expect(plan.status).toBe(best === null ? "infeasible" : "optimal");
     if (best === null) return;
-    expect({ demerits: demeritsOf(plan), seconds: plan.cost }).toEqual({ demerits: best.demerits, seconds: expect.closeTo(best.seconds, 5) });
+    expect({ demerits: planDemerits(plan), seconds: plan.cost }).toEqual({ demerits: best.demerits, seconds: expect.closeTo(best.seconds, 5) });
     expect(verifyPlan(plan, request)).toEqual([]);
   });
 
