@@ -75,12 +75,13 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   if (step.forceKN > NEAR_RATING * machine.maxForce) say("force", step.bends, [], `${name}: ${step.forceKN.toFixed(0)} kN of ${machine.maxForce.toFixed(0)} kN that ${machine.name} has`);
   const rating = Math.min(pair.punch.maxForcePerMetre, pair.die.maxForcePerMetre);
   if (fit.force > NEAR_RATING * rating) say("tool-force", step.bends, [pair.punch.id, pair.die.id], `${name}: ${fit.force.toFixed(0)} kN/m of the ${rating.toFixed(0)} kN/m that the tools bear`);
+  if (bend.hem !== null) say("hem", step.bends, [pair.die.id], `${name}: flattening pushes sideways on punch and die; see that both are clamped, and keep hands off the slot`);
   const reach = sheetReach(part, { bends: move.bends, front: move.front, formed: orderStep.formed });
   if (reach.front > WHIP_UP_MM) say("whip-up", step.bends, [], `${name}: ${formatLength(Math.round(reach.front), units)} of sheet swings up ${(toDeg(bend.angle) / 2).toFixed(0)}° in front; stand clear, support it from behind the swing`);
   const setback = (bend.insideRadius + part.thickness) * Math.tan(bend.angle / 2) - bend.allowance / 2;
   const flange = Math.min(reach.front, reach.back) + setback;
   const advised = Math.max(advisedFlange(pair.die.vOpening), minimumFlange(bend.angle, pair.die));
-  if (flange < advised && readHitId(bend.id) === null) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
+  if (flange < advised && readHitId(bend.id) === null && bend.hem === null) say("minimum-flange", step.bends, [pair.die.id], `${name}: the flange of ${formatLength(flange, units)} is held by the die's edge only; ${formatLength(advised, units)} is usual for a V ${formatLength(pair.die.vOpening, units)}`);
 }
 
 /** The shop measured on another V than the die of this step has: the document gives the radius, and no single V makes every bend. */

@@ -14,6 +14,8 @@ export interface ZonePiece {
 }
 
 const FACETS_OF_A_FORMED_BEND = 4;
+/** A finger may rest on the fold of a hem: finer, so that it touches where the fold really is. */
+export const FACETS_OF_A_FOLD = 24;
 
 /** Every bend zone before the stroke, as convex pieces seen along the bed; a little large, never small. */
 export function zonesInMachine(part: PartModel, hit: Hit, frames: readonly Frame[]): readonly ZonePiece[] {
@@ -21,7 +23,7 @@ export function zonesInMachine(part: PartModel, hit: Hit, frames: readonly Frame
     const frame = frames[bend.parent];
     if (frame === undefined) return [];
     const formed = (hit.formed >> index) & 1;
-    const facets = bendFacets(part, index, formed ? bend.angle : 0, formed ? FACETS_OF_A_FORMED_BEND : 1);
+    const facets = bendFacets(part, index, formed ? bend.angle : 0, formed ? (bend.hem === null ? FACETS_OF_A_FORMED_BEND : FACETS_OF_A_FOLD) : 1);
     return facets.map(({ inside, outside }): ZonePiece => {
       const points = [...inside, ...outside].map((p) => applyFrame(frame, p));
       const zs = points.map((p) => p[2]);

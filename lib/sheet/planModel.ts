@@ -25,6 +25,7 @@ export interface StepModel {
   readonly hit: Hit;
   /** Before the stroke. */
   readonly formed: FormedAngles;
+  /** What the stroke leaves, the die's flattening of a hem not yet made. */
   readonly finished: Rad;
   readonly demanded: Rad;
   readonly punch: Punch;
@@ -56,7 +57,7 @@ export function planModel(source: PlanSource): PlanModel {
   const formed = part.bends.map(() => 0);
   const steps = plan.steps.map((step) => {
     const model = stepOf(step, planned, tools, [...formed], perUnit);
-    for (const bend of model.hit.bends) formed[bend] = model.finished;
+    for (const bend of model.hit.bends) formed[bend] = toRad(step.angle as Deg);
     return model;
   });
   const stations = plan.stations.map((station) => stationOf(station, tools, perUnit));
@@ -77,7 +78,7 @@ function stepOf(step: PlanStep, { places }: PlannedPart, tools: readonly Tool[],
     step,
     hit: { bends, front, formed: mask },
     formed,
-    finished: toRad(step.angle as Deg),
+    finished: toRad((step.acuteAngle ?? step.angle) as Deg),
     demanded: toRad(step.demandedAngle as Deg),
     punch: punchOf(tools, step.punch),
     die: dieOf(tools, step.die),

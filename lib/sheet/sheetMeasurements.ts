@@ -18,9 +18,9 @@ function angles(document: PartDocument, model: PlanModel): readonly SheetMeasure
     step.hit.bends.flatMap((bendIndex, place): SheetMeasurement[] => {
       const bend = model.part.bends[bendIndex];
       const id = step.step.bends[place];
-      // Of a bend that several strokes make, the whole angle is measured after the last of them.
+      // Of a bend that several strokes make, the whole angle is measured after the last of them; a hem lies flat.
       const goesOn = step.step.hit !== undefined && model.steps.slice(index + 1).some((later) => later.step.bends.includes(id ?? ""));
-      if (!bend || id === undefined || goesOn) return [];
+      if (!bend || id === undefined || goesOn || step.step.acuteAngle !== undefined) return [];
       const own = bend.toleranceAngle !== null ? (bend.toleranceAngle * 180) / Math.PI : (document.toleranceAngle ?? null);
       const tolerance = own ?? generalTolerance("angle", shorterSide(model.part, bendIndex)) ?? 1;
       const included = 180 - step.step.angle * (step.step.hit?.of ?? 1);

@@ -9,11 +9,12 @@ type StepNumbers = Omit<SheetStep, "number" | "upSide" | "up" | "front" | "toGau
 export function stepNumbers(step: PlanStep, units: LengthUnit): StepNumbers {
   const format = createSheetFormat(units);
   const per = mmPer(units);
+  const angle = step.acuteAngle ?? step.angle;
   const fingers = step.gauge.fingers.map((finger) => ({
     x: format.gauge(finger.x * per), r: format.gauge(finger.r * per), z: format.place(finger.z * per),
   }));
   return {
-    bends: `${step.bends.join(" + ")}${step.hit ? `, stroke ${step.hit.number} of ${step.hit.of}` : ""}`,
+    bends: `${step.bends.join(" + ")}${step.hit ? `, stroke ${step.hit.number} of ${step.hit.of}` : ""}${step.acuteAngle === undefined ? "" : ", then flat in the slot"}`,
     handling: handling(step.handling),
     punch: step.punch,
     die: step.die,
@@ -23,8 +24,8 @@ export function stepNumbers(step: PlanStep, units: LengthUnit): StepNumbers {
     gaugeR: format.gauge(step.gauge.r * per),
     fingers,
     gaugeZ: fingers.map((finger) => finger.z).join(" / ") || "no finger",
-    angle: format.angle(step.angle),
-    includedAngle: format.angle(180 - step.angle),
+    angle: format.angle(angle),
+    includedAngle: format.angle(180 - angle),
     demandedAngle: format.angle(step.demandedAngle),
     insideRadius: format.fine(step.insideRadius * per),
     force: format.force(step.forceKN),
