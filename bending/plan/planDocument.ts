@@ -5,6 +5,7 @@ import type { PlanChange } from "./planChange";
 import type { PlanCounts } from "./planCounts";
 import type { PlanFailure } from "./planFailure";
 import type { PlanRobustness } from "./planRobustness";
+import type { PlanTolerance } from "./planTolerance";
 
 /**
  * The plan document, format `plan/1`: what is stored, drawn and printed. Lengths in `units` (the part
@@ -40,6 +41,8 @@ export interface PlanDocument {
   readonly alternatives?: readonly Omit<PlanDocument, "alternatives" | "flat" | "elapsedMs">[];
   readonly reasons: readonly PlanReason[];
   readonly cautions: readonly PlanReason[];
+  /** What gauge and angles let every dimension miss; absent in plans of before it was kept, and where there are no steps. */
+  readonly tolerances?: readonly PlanTolerance[];
   /** Where an order ends and all that stands in the way, when that was asked for and there is no plan. */
   readonly firstFailure?: PlanFailure;
   /** The least changes that would work, when they were asked for. */
@@ -115,7 +118,7 @@ export type PlanSection =
 
 export type ReasonKind =
   | "clearance" | "self-collision" | "minimum-flange" | "no-punch" | "no-die" | "force" | "tool-force" | "sections" | "bed"
-  | "daylight" | "gauge" | "angle" | "radius" | "lift" | "throat" | "hem" | "order" | "budget" | "part" | "whip-up" | "tool-choice";
+  | "daylight" | "gauge" | "angle" | "radius" | "lift" | "throat" | "hem" | "order" | "budget" | "part" | "whip-up" | "tool-choice" | "tolerance";
 
 export interface PlanReason {
   readonly kind: ReasonKind;

@@ -11,7 +11,7 @@ const section = z.union([
 
 const reason = z.strictObject({
   kind: z.enum(["clearance", "self-collision", "minimum-flange", "no-punch", "no-die", "force", "tool-force", "sections", "bed", "daylight", "gauge", "angle",
-    "radius", "lift", "throat", "hem", "order", "budget", "part", "whip-up", "tool-choice"]),
+    "radius", "lift", "throat", "hem", "order", "budget", "part", "whip-up", "tool-choice", "tolerance"]),
   bends: z.array(text),
   faces: z.array(text),
   tools: z.array(text),
@@ -43,6 +43,13 @@ const change = z.strictObject({
   message: text,
   plan: z.strictObject({ status: z.enum(["optimal", "feasible"]), cost: number, order: texts }),
   found: z.strictObject({ plans: z.int(), notEnough: number.optional(), resolution: number.optional() }),
+});
+
+const tolerance = z.strictObject({
+  kind: z.enum(["leg", "hole", "overall"]),
+  face: text, from: text, to: text, across: z.literal(true).optional(),
+  nominal: number, worstCase: number.nonnegative().nullable(), statistical: number.nonnegative().nullable(), asked: number.positive().optional(),
+  shares: z.array(z.strictObject({ step: z.int().min(1), gauge: number.nonnegative(), angle: number.nonnegative() })),
 });
 
 const counts = z.strictObject({ flips: number, turns: number, metres: number, strokes: number, gaugeMoves: number, stations: number, pieces: number });
@@ -118,6 +125,7 @@ const common = {
   proof: z.strictObject({ method: text, expanded: z.int(), bound: number }),
   reasons: z.array(reason),
   cautions: z.array(reason),
+  tolerances: z.array(tolerance).optional(),
   firstFailure: failure.optional(),
   changes: z.array(change).optional(),
   robustness: robustness.optional(),

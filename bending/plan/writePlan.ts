@@ -3,11 +3,14 @@ import { cautionsOf } from "./cautionsOf";
 import type { StepChecks } from "./createStepChecks";
 import { drawnReason, drawnStep } from "./drawnPlan";
 import { PLAN_ENGINE } from "./emptyPlan";
+import { gaugedSteps } from "./gaugedSteps";
 import { planFlat } from "./planFlat";
 import type { PlanDocument, PlanFlat } from "./planDocument";
+import { planTolerances } from "./planTolerances";
 import { rounded } from "./rounded";
 import type { Situation } from "./situation";
 import type { Candidate } from "./createCandidateKeeper";
+import { toleranceCautions } from "./toleranceCautions";
 import { writeStation } from "./writeStation";
 import { writeStep } from "./writeStep";
 
@@ -30,6 +33,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
   const seconds = { setup: rounded(layout.setupSeconds), perPart: rounded(candidate.perPart), total: rounded(layout.setupSeconds + candidate.perPart * frame.batch) };
   const bound = Math.min(seconds.total, rounded(frame.bound));
   const gap = seconds.total - bound < 1e-6 ? 0 : rounded((seconds.total - bound) / seconds.total);
+  const tolerances = planTolerances(situation, gaugedSteps(situation, checks, layout, steps));
   return {
     format: "plan/1",
     engine: PLAN_ENGINE,
@@ -49,7 +53,8 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     cost: seconds.total,
     proof: { method: frame.method, expanded: frame.expanded, bound },
     reasons: [],
-    cautions: cautionsOf(situation, layout, steps, struck).map(drawnReason),
+    cautions: [...cautionsOf(situation, layout, steps, struck).map(drawnReason), ...toleranceCautions(tolerances, written.map(({ bends }) => bends), units)],
+    tolerances,
     elapsedMs: 0,
   };
 }
