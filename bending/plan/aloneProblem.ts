@@ -14,7 +14,7 @@ export function aloneProblem({ situation: { moves, part, machine }, alone, relax
     stations: kinds.length,
     times: machine.times,
     walk: (from, to) => (((kinds[from]?.length ?? 0) + (kinds[to]?.length ?? 0)) / 2 + NEAR_GAP_MM) / 1000 * machine.times.walkPerMetre,
-    ...(relaxed.least ? { least: relaxed.least } : {}),
+    least: relaxed.least,
     option: (move, formed, station) => {
       const kind = kinds[station];
       if (kind === undefined) return null;

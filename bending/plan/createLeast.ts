@@ -1,5 +1,7 @@
+import { createFacts, type BlockedPattern } from "../order/createFacts";
 import type { LeastOption } from "../order/orderProblem";
 import { pickBits } from "../order/pickBits";
+import { bendsBehind } from "./bendsBehind";
 import type { StepChecks } from "./createStepChecks";
 import { createNearTools } from "./createNearTools";
 import { gaugeDemerits } from "./gaugeDemerits";
@@ -10,19 +12,33 @@ import type { Situation } from "./situation";
 /** Bends that are told apart for one move: the nearest to it. */
 const BENDS_TOLD_APART = 16;
 
+/** What is known of steps without asking, and grows with every answer. */
+export interface Least {
+  readonly of: (move: number, formed: number) => LeastOption | null;
+  /** The move cannot be made in any state of the pattern. */
+  readonly block: (move: number, pattern: BlockedPattern) => void;
+  /** All pairs gauge the move at this setting with so many fingers, also in every state that is the same behind the die. */
+  readonly settle: (move: number, formed: number, gauge: number, fingers: number) => void;
+  readonly learned: () => number;
+}
+
 /**
  * What is known of a step from the places alone that fingers could touch, nothing asked of clearance: with no place there
  * is no gauge, and with some the setting is one of theirs. Worked out for a move when it is first asked for.
  */
-export function createLeast(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): (move: number, formed: number) => LeastOption | null {
+export function createLeast(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): Least {
   const { moves, pairs, fits } = situation;
   const patternsOf = gaugePatterns(situation, BENDS_TOLD_APART);
   const settings = createSettings(situation, numbers);
   const tables = moves.map((): ((formed: number) => LeastOption | null) | null => null);
-  const tableFor = (move: number) => {
+  /** Wishes that the best of the pairs that fit leaves unmet; Infinity when none fits. */
+  const leastWishes = (move: number): number => {
     const usable = pairs.filter(({ index }) => moves[move]?.bends.every((bend) => fits[bend]?.[index]?.ok));
-    if (usable.length === 0) return () => null;
-    const wishes = Math.min(...usable.map(({ index }) => checks.wishes(move, index)));
+    return Math.min(...usable.map(({ index }) => checks.wishes(move, index)));
+  };
+  const tableFor = (move: number) => {
+    const wishes = leastWishes(move);
+    if (wishes === Infinity) return () => null;
     const patterns = patternsOf(move);
     const window = windowOf(patterns);
     const pick = pickBits(window);
@@ -32,10 +48,33 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
     const answers = Array.from(sets, (set) => options.get(set) ?? null);
     return (formed: number) => answers[pick(formed)] ?? null;
   };
-  return (move, formed) => {
+  const facts = createFacts(moves.length);
+  const behind = moves.map(({ bends, front }) => bendsBehind(situation, { bends, front, formed: 0 }));
+  /** Settled answers of moves that all pairs gauge alike, by what is formed behind the die. */
+  const gauged = moves.map(() => new Map<number, LeastOption>());
+  let settled = 0;
+  const table = (move: number, formed: number): LeastOption | null => {
     const known = tables[move] ?? tableFor(move);
     tables[move] = known;
     return known(formed);
+  };
+  return {
+    of: (move, formed) => {
+      if (facts.blocked(move, formed)) return null;
+      const own = gauged[move];
+      return (own && own.size > 0 ? own.get(formed & (behind[move] as number)) : undefined) ?? table(move, formed);
+    },
+    block: facts.block,
+    settle: (move, formed, gauge, fingers) => {
+      const hidden = formed & (behind[move] ?? 0);
+      const guess = table(move, formed);
+      if (guess === null || gauged[move]?.has(hidden)) return;
+      const demerit = leastWishes(move) + gaugeDemerits(fingers);
+      if (guess.demerit === demerit && guess.gauges?.length === 1) return;
+      gauged[move]?.set(hidden, { demerit, gauges: [gauge] });
+      settled += 1;
+    },
+    learned: () => facts.count() + settled,
   };
 }
 

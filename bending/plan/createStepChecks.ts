@@ -1,10 +1,10 @@
 import type { Hit } from "../clearance/hit";
-import { hitSides } from "../clearance/hitSides";
 import type { Interval } from "../geometry/interval";
 import { fingerMeetsTools } from "../setup/fingerMeetsTools";
 import type { GaugeOption } from "../setup/gaugeOption";
 import { gaugeOptions } from "../setup/gaugeOptions";
 import type { Tool } from "../tooling/tool";
+import { bendsBehind } from "./bendsBehind";
 import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
@@ -120,12 +120,6 @@ export function createStepChecks(situation: Situation): StepChecks {
       return found;
     };
   }
-}
-
-/** The bends that say how the sheet behind the line looks: only they matter to the gauge. */
-function bendsBehind({ part }: Situation, hit: Hit): number {
-  const front = hitSides(part, hit);
-  return part.bends.reduce((mask, bend, index) => (!hit.bends.includes(index) && !front[bend.parent] && !front[bend.child] ? mask | (1 << index) : mask), 0);
 }
 
 function must<T>(value: T | undefined): T {

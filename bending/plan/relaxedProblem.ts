@@ -1,5 +1,6 @@
-import { ANY_GAUGE, type OrderProblem, type StepOption } from "../order/orderProblem";
+import { ANY_GAUGE, type LeastOption, type OrderProblem, type StepOption } from "../order/orderProblem";
 import { freeShifts } from "../setup/freeShifts";
+import { blockedPattern } from "./blockedPattern";
 import { createLeast } from "./createLeast";
 import type { StepChecks } from "./createStepChecks";
 import { fingerCount } from "./fingerCount";
@@ -7,17 +8,28 @@ import { gaugeDemerits } from "./gaugeDemerits";
 import type { GaugeNumbers } from "./gaugeNumbers";
 import type { Situation } from "./situation";
 
+/** An order question that learns from its answers: what `least` says grows with them. */
+export interface RelaxedProblem extends OrderProblem {
+  readonly least: (move: number, formed: number) => LeastOption | null;
+  /** How much was learned so far. */
+  readonly learned: () => number;
+}
+
 /**
  * The order question with the bed left out: every stroke has the best pair and the shortest runs that real
  * pieces make, punch and die each where it suits it, alone on the bed and without a walk. Where a longer run may
  * stand a shorter one within it may, so no plan costs less a part; if it has no order, none has.
  */
-export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): OrderProblem {
+export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): RelaxedProblem {
   const { moves, pairs, machine, part, allowed, runs } = situation;
   const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
     const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));
     return { punch: least(punch), die: least(die) };
   }));
+  const fingersWith = (move: number, formed: number, pair: number): number => {
+    const gauge = checks.gauges(move, formed, pair)[0];
+    return gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
+  };
   const withPair = (move: number, formed: number, pair: number): StepOption | null => {
     const length = shortest[move]?.[pair];
     const tools = pairs[pair];
@@ -27,14 +39,24 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
       [{ offset: 0, length: run, forbidden: checks.forbidden(move, formed, pair, tool) }],
     ).length > 0;
     if (!fits(tools.punch, length.punch) || !fits(tools.die, length.die)) return null;
-    const gauge = checks.gauges(move, formed, pair)[0];
-    const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
-    return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };
+    return { gauge: numbers(checks.gauges(move, formed, pair)[0]), demerit: checks.wishes(move, pair) + gaugeDemerits(fingersWith(move, formed, pair)) };
   };
   const least = createLeast(situation, checks, numbers);
   const known = new Map<number, StepOption | null>();
+  const find = (move: number, formed: number): StepOption | null => {
+    const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), least.of(move, formed)?.demerit ?? 0);
+    if (best === null) {
+      const pattern = blockedPattern(situation, checks, move, formed);
+      if (pattern) least.block(move, pattern);
+      return null;
+    }
+    if (!checks.gaugesAgree(move, formed)) return { ...best.option, gauge: ANY_GAUGE };
+    least.settle(move, formed, best.option.gauge, fingersWith(move, formed, best.pair));
+    return best.option;
+  };
   return {
-    least,
+    least: least.of,
+    learned: least.learned,
     bends: part.bends.length,
     moves,
     stations: 1,
@@ -45,20 +67,21 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
       const key = formed * moves.length + move;
       const answer = known.get(key);
       if (answer !== undefined) return answer;
-      const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), least(move, formed)?.demerit ?? 0);
-      const settled = best === null || checks.gaugesAgree(move, formed) ? best : { ...best, gauge: ANY_GAUGE };
-      known.set(key, settled);
-      return settled;
+      const found = least.of(move, formed) === null ? null : find(move, formed);
+      known.set(key, found);
+      return found;
     },
   };
 }
 
-/** The option of least demerit, looked for until one has the least that there can be. */
-function bestOf(pairs: number, option: (pair: number) => StepOption | null, least: number): StepOption | null {
-  let best: StepOption | null = null;
-  for (let pair = 0; pair < pairs && (best === null || best.demerit > least); pair += 1) {
+interface WithPair { readonly option: StepOption; readonly pair: number }
+
+/** The option of least demerit and its pair, looked for until one has the least that there can be. */
+function bestOf(pairs: number, option: (pair: number) => StepOption | null, least: number): WithPair | null {
+  let best: WithPair | null = null;
+  for (let pair = 0; pair < pairs && (best === null || best.option.demerit > least); pair += 1) {
     const found = option(pair);
-    if (found && (best === null || found.demerit < best.demerit)) best = found;
+    if (found && (best === null || found.demerit < best.option.demerit)) best = { option: found, pair };
   }
   return best;
 }

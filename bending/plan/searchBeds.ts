@@ -58,7 +58,7 @@ export function searchBeds(question: BedQuestion, count: number): BedsAnswer {
 function searchBed({ situation, checks, numbers, keeper, budget, limits, relaxed }: BedQuestion, layout: Layout, perPart: number, tally: { layouts: number; expanded: number }): boolean {
   if (layout.setupSeconds + perPart * budget.batch >= keeper.worst()) return true;
   budget.doing("Looking for the order on one bed after another", tally.expanded);
-  const problem = { ...layoutProblem(situation, checks, numbers, layout), ...(relaxed.least ? { least: relaxed.least } : {}) };
+  const problem = { ...layoutProblem(situation, checks, numbers, layout), least: relaxed.least };
   const outcome = searchOrder(problem, { ...limits, under: (keeper.worst() - layout.setupSeconds) / budget.batch });
   tally.layouts += 1;
   tally.expanded += outcome.expanded;

@@ -1,6 +1,4 @@
-import type { CostSoFar } from "../order/createCostSoFar";
 import { fullestDeadEnd } from "../order/fullestDeadEnd";
-import type { OrderStep } from "../order/orderProblem";
 import { bedQuestionOf } from "./bedQuestionOf";
 import { constructBeds } from "./constructBeds";
 import type { SearchBudget } from "./createBudget";
@@ -48,12 +46,8 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
     ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
 
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
-  const onSome = (steps: readonly OrderStep[], soFar: CostSoFar | null): boolean => {
-    constructBeds(bedQuestionOf(asked, relaxed, budget, keeper, { steps, least: 0, soFar }), steps);
-    return !enough();
-  };
   budget.doing("Looking for the best order with the bed left out", 0);
-  const { outcome: best, soFar } = unhindered(relaxed, limits, onSome);
+  const { outcome: best, soFar } = unhindered(relaxed, limits);
   tally.expanded += best.expanded;
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
