@@ -4,6 +4,7 @@ import type { ShopTable } from "../shopTable/shopCell";
 import type { Machine } from "../tooling/machine";
 import type { Tool } from "../tooling/tool";
 import type { BendWish } from "./bendWish";
+import type { PlanMemory } from "./planMemory";
 
 export interface PlanProgress {
   /** Search states looked at so far. */
@@ -30,6 +31,8 @@ export interface PlanRequest {
   readonly firstPlan?: boolean;
   /** What a person asks of single bends; the planner is free in everything else. */
   readonly wishes?: readonly BendWish[];
+  /** What earlier plans of the same request with other times or another batch worked out. */
+  readonly memory?: PlanMemory;
   readonly shouldStop?: () => boolean;
   readonly onProgress?: (progress: PlanProgress) => void;
   readonly now?: () => number;

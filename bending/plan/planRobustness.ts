@@ -29,8 +29,8 @@ export interface SettingRobustness {
 
 export interface RobustnessEnd {
   readonly seconds: number;
-  /** Of the setting as it is. */
-  readonly factor: number;
+  /** Of the setting as it is; null where that is 0. */
+  readonly factor: number | null;
   /** The plan that takes over beyond. */
   readonly other: { readonly order: readonly string[]; readonly stations: number; readonly counts: PlanCounts };
   /** What it does otherwise, e.g. "1 flip fewer, 2 gauge moves more". */

@@ -53,7 +53,7 @@ const tolerance = z.strictObject({
 });
 
 const counts = z.strictObject({ flips: number, turns: number, metres: number, strokes: number, gaugeMoves: number, stations: number, pieces: number });
-const robustnessEnd = z.strictObject({ seconds: number, factor: number, other: z.strictObject({ order: texts, stations: number, counts }), differs: text }).nullable();
+const robustnessEnd = z.strictObject({ seconds: number, factor: number.nullable(), other: z.strictObject({ order: texts, stations: number, counts }), differs: text }).nullable();
 const robustness = z.strictObject({
   range,
   settings: z.array(z.strictObject({
@@ -78,6 +78,8 @@ const step = z.strictObject({
   forceKN: number.nonnegative(),
   depthMm: number,
   toolWindow: range,
+  room: z.strictObject({ punch: range, die: range, sheet: range }).optional(),
+  offCentre: z.strictObject({ z: number, limitKN: number.positive() }).optional(),
   gauge: z.strictObject({
     x: number, r: number, fingers: z.array(z.strictObject({ x: number, r: number, z: number })), face: text, edge: z.int(), on: z.enum(["edge", "face"]).optional(),
   }),

@@ -9,6 +9,7 @@ import { hemReason } from "./hemReason";
 import { explain } from "./explain";
 import { partVariants, type PartVariant } from "./partVariants";
 import { planFlat } from "./planFlat";
+import { createPlanMemory } from "./planMemory";
 import type { PlanDocument, PlanReason } from "./planDocument";
 import type { PlanRequest } from "./planRequest";
 import { proofMethod } from "./proofMethod";
@@ -47,17 +48,22 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
   const solved: Solved[] = [];
   const toolReasons: PlanReason[] = [];
   const left: { readonly variant: PartVariant; readonly situation: Situation }[] = [];
+  const memory = request.memory ?? createPlanMemory();
   const solve = (variant: PartVariant, situation: Situation, allPairs: number): boolean => {
-    const checks = createStepChecks(situation);
+    const key = `${variants.indexOf(variant)}/${situation.pairs.length}`;
+    const checks = memory.checks.get(key) ?? createStepChecks(situation);
+    memory.checks.set(key, checks);
     const answer = solveVariant(situation, checks, budget);
     solved.push({ variant, situation, checks, answer, allPairs });
     return answer.candidates.length > 0 || answer.stopped;
   };
-  for (const variant of variants) {
+  for (const [place, variant] of variants.entries()) {
     const found = candidatePairs(request.tools, request.machine, variant.part.thickness, variant.wantedV, request.document.units);
     toolReasons.push(...(found.pairs.length === 0 ? found.reasons : []));
     if (found.pairs.length === 0) continue;
-    const situation = createSituation({ variant, machine: request.machine, units: request.document.units, pairs: found.pairs, airForceFactor: request.airForceFactor, wishes: request.wishes, ...(order ? { order } : {}) });
+    const facts = { variant, machine: request.machine, units: request.document.units, pairs: found.pairs, airForceFactor: request.airForceFactor, wishes: request.wishes, ...(order ? { order } : {}) };
+    const situation = { ...memory.situations.get(place) ?? createSituation(facts), machine: request.machine };
+    memory.situations.set(place, situation);
     if (situation.pairs.length === 0) {
       const reasons = explain(situation, createStepChecks(situation), []);
       toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));

@@ -1,5 +1,6 @@
 import { mmPer } from "../core/units";
 import { cautionsOf } from "./cautionsOf";
+import { countsOf } from "./countsOf";
 import type { StepChecks } from "./createStepChecks";
 import { drawnReason, drawnStep } from "./drawnPlan";
 import { PLAN_ENGINE } from "./emptyPlan";
@@ -50,6 +51,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     order: written.map((step) => step.bends.join("+")),
     stations: layout.stations.map((station, index) => writeStation(situation, station, index)),
     seconds,
+    counts: countsOf(situation, checks, candidate),
     cost: seconds.total,
     proof: { method: frame.method, expanded: frame.expanded, bound },
     reasons: [],

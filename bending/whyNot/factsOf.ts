@@ -14,7 +14,7 @@ export function factsOf(request: PlanRequest | CheckRequest, plan: PlanDocument,
   const { tools, machine } = request;
   const nearFirst = (ids: readonly string[]) => <T extends { readonly id: string }>(list: readonly T[]): readonly T[] =>
     [...list].sort((a, b) => placeOf(ids, a.id) - placeOf(ids, b.id));
-  const usual = situations.each[0]?.situation.pairs ?? [];
+  const usual = situations.first()?.situation.pairs ?? [];
   const punchIds = [...named.map(({ punch }) => punch), ...usual.map(({ punch }) => punch.id)];
   const dieIds = [...named.map(({ die }) => die), ...usual.map(({ die }) => die.id)];
   return {

@@ -4,16 +4,18 @@ import type { PlanReason } from "../plan/planDocument";
 import type { CheckRequest, PlanRequest } from "../plan/planRequest";
 import { bendsOf } from "./bendsOf";
 import { failedStroke } from "./failedStroke";
+import { createGround, type Ground } from "./createGround";
 import { failureMessage } from "./failureMessage";
 import { fullestEnd, type FullestEnd } from "./fullestEnd";
 import { situationsOf, type WhySituation } from "./situationsOf";
 
 /**
  * The first step of a person's order that cannot be made, or the fullest state that a free plan can come to, with everything that stands in the
- * way there. Steps are asked each by itself, with the bed left out, over every front and pair; null when all of them work so.
+ * way there. Steps are asked each by itself, with the bed left out, over every front and pair; null when all of them work so. `ground`: of the same part, tools and
+ * wishes, kept from before: many orders are asked of one.
  */
-export function firstFailure(request: PlanRequest | CheckRequest, shouldStop: () => boolean = () => false): PlanFailure | null {
-  const { each, reasons } = situationsOf(request);
+export function firstFailure(request: PlanRequest | CheckRequest, shouldStop: () => boolean = () => false, ground: Ground = createGround(request)): PlanFailure | null {
+  const { each, reasons } = situationsOf(request, ground);
   const ordered = "order" in request;
   const told = (failure: Omit<PlanFailure, "message">): PlanFailure => ({ ...failure, message: failureMessage(failure) });
   const ends: { readonly why: WhySituation; readonly end: FullestEnd }[] = [];
@@ -23,7 +25,7 @@ export function firstFailure(request: PlanRequest | CheckRequest, shouldStop: ()
     ends.push({ why, end });
   }
   const farthest = ends.reduce<(typeof ends)[number] | null>((best, one) => (best === null || one.end.way.length > best.end.way.length ? one : best), null);
-  if (farthest === null) return reasons.length === 0 ? null : told({ done: [], step: ordered ? 1 : null, strokes: [unmade([], reasons)] });
+  if (farthest === null) return reasons().length === 0 ? null : told({ done: [], step: ordered ? 1 : null, strokes: [unmade([], reasons())] });
   const { why, end } = farthest;
   const done = namesOf(why, end.way);
   const strokes = strokesLeft(why, end.formed).map((ways) => {

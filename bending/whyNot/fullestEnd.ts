@@ -1,5 +1,3 @@
-import { createGaugeNumbers } from "../plan/gaugeNumbers";
-import { relaxedProblem } from "../plan/relaxedProblem";
 import type { WhySituation } from "./situationsOf";
 
 /** The state with most bends formed from which no stroke goes on, each stroke asked with the bed left out. */
@@ -10,9 +8,8 @@ export interface FullestEnd {
 }
 
 /** Null when an order reaches the finished part (or the search was stopped before it knew). */
-export function fullestEnd({ situation, checks, follows }: WhySituation, shouldStop: () => boolean): FullestEnd | null {
+export function fullestEnd({ situation, works, follows }: WhySituation, shouldStop: () => boolean): FullestEnd | null {
   const { moves, part } = situation;
-  const { option } = relaxedProblem(situation, checks, createGaugeNumbers());
   const all = 2 ** part.bends.length - 1;
   const before = new Map<number, { readonly from: number; readonly move: number } | null>([[0, null]]);
   const waiting = [0];
@@ -22,7 +19,7 @@ export function fullestEnd({ situation, checks, follows }: WhySituation, shouldS
     for (let move = 0; move < moves.length; move += 1) {
       const mask = moves[move]?.mask ?? 0;
       if (shouldStop()) return null;
-      if (mask & formed || !follows(move, formed) || option(move, formed, 0) === null) continue;
+      if (mask & formed || !follows(move, formed) || !works(move, formed)) continue;
       any = true;
       const next = formed | mask;
       if (next === all) return null;

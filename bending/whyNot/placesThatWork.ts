@@ -1,5 +1,3 @@
-import { createGaugeNumbers } from "../plan/gaugeNumbers";
-import { relaxedProblem } from "../plan/relaxedProblem";
 import type { FailurePlace } from "../plan/planFailure";
 import { drawnBend } from "../strokes/drawnIds";
 import type { WhySituation } from "./situationsOf";
@@ -13,16 +11,15 @@ const MOST_PLACES = 4;
  * The least changes of place with which a stroke can be made, the bed left out: which of the bends made before it would have to come
  * after it, and which of the others before it. Only bends of `mask`, the ones that decide what is met, can matter.
  */
-export function placesThatWork({ situation, checks }: WhySituation, ways: readonly number[], formed: number, mask: number): readonly FailurePlace[] {
+export function placesThatWork({ situation, works }: WhySituation, ways: readonly number[], formed: number, mask: number): readonly FailurePlace[] {
   const { part, moves } = situation;
-  const { option } = relaxedProblem(situation, checks, createGaugeNumbers());
   const own = ways.reduce((all, move) => all | (moves[move]?.mask ?? 0), 0);
   const bends = part.bends.flatMap((_, bend) => ((mask & ~own) >> bend & 1 ? [bend] : []));
   const found: number[] = [];
   for (const change of changesOf(bends)) {
     if (found.length >= MOST_PLACES) break;
     if (found.some((less) => (change & less) === less)) continue;
-    if (ways.some((move) => option(move, formed ^ change, 0) !== null)) found.push(change);
+    if (ways.some((move) => works(move, formed ^ change))) found.push(change);
   }
   const names = (set: number) => [...new Set(part.bends.flatMap(({ id }, bend) => ((set >> bend) & 1 ? [drawnBend(id)] : [])))];
   return found.map((change) => ({ before: names(change & formed), after: names(change & ~formed) }));

@@ -1,48 +1,48 @@
 import { buildPart } from "../part/buildPart";
-import { candidatePairs } from "../plan/candidatePairs";
-import { createSituation } from "../plan/createSituation";
-import { createStepChecks, type StepChecks } from "../plan/createStepChecks";
-import { partVariants } from "../plan/partVariants";
+import { followsOrder } from "../plan/followsOrder";
 import type { PlanReason } from "../plan/planDocument";
 import type { CheckRequest, PlanRequest } from "../plan/planRequest";
 import { readOrder } from "../plan/readOrder";
-import type { Situation } from "../plan/situation";
+import { createGround, type FlatGround, type Ground } from "./createGround";
 
-/** One flat of the part with all pairs of tools that fit some bend. */
-export interface WhySituation {
-  readonly situation: Situation;
-  readonly checks: StepChecks;
+/** One flat of the part, and a person's own order beside it. */
+export interface WhySituation extends FlatGround {
   /** Does a move come next in the person's own order? Every move does when there is none. */
   readonly follows: (move: number, formed: number) => boolean;
 }
 
 export interface WhySituations {
-  readonly each: readonly WhySituation[];
-  /** Why there are no tools to look at, where there are none. */
-  readonly reasons: readonly PlanReason[];
+  /** The flats that a plan would look at, the likeliest first; worked out one by one. */
+  readonly each: Iterable<WhySituation>;
+  /** The likeliest flat; undefined when there are no tools to look at. */
+  readonly first: () => WhySituation | undefined;
+  /** Why there are no tools to look at, where there are none; asked when `each` has been gone through. */
+  readonly reasons: () => readonly PlanReason[];
   /** mm; null when the part cannot be built. */
   readonly thickness: number | null;
 }
 
-/** The flats that a plan would look at, the likeliest first, every order free in them; a person's order is kept beside. */
-export function situationsOf(request: PlanRequest | CheckRequest): WhySituations {
-  const { document, machine, tools, airForceFactor, wishes } = request;
-  const variants = partVariants(request);
+/** The flats that a plan would look at, every order free in them; a person's order is kept beside. `ground`: the same request's, from before. */
+export function situationsOf(request: PlanRequest | CheckRequest, ground: Ground = createGround(request)): WhySituations {
   const order = masksOf(request);
-  const each: WhySituation[] = [];
-  const reasons: PlanReason[] = [];
-  for (const variant of variants.ok ? variants.value : []) {
-    const found = candidatePairs(tools, machine, variant.part.thickness, variant.wantedV, document.units);
-    if (found.pairs.length === 0) {
-      reasons.push(...found.reasons);
-      continue;
-    }
-    const facts = { variant, machine, units: document.units, pairs: found.pairs, airForceFactor, wishes };
-    const situation = createSituation(facts);
-    const follows = order === null ? () => true : createSituation({ ...facts, order }).allowed;
-    each.push({ situation, checks: createStepChecks(situation), follows });
+  const each = { [Symbol.iterator]: () => beside(ground, order) };
+  return { each, first: () => { for (const one of each) return one; return undefined; }, reasons: ground.reasons, thickness: ground.thickness };
+}
+
+function* beside(ground: Ground, order: readonly number[] | null): Generator<WhySituation> {
+  for (let index = 0; ; index += 1) {
+    const flat = ground.flat(index);
+    if (flat === undefined) return;
+    const { moves } = flat.situation;
+    const asked = order === null ? null : followsOrder(order, flat.bitsOf);
+    yield {
+      ...flat,
+      follows: (move, formed) => {
+        const found = moves[move];
+        return found !== undefined && (asked === null || asked(found, formed));
+      },
+    };
   }
-  return { each, reasons, thickness: variants.ok ? variants.value[0]?.part.thickness ?? null : null };
 }
 
 function masksOf(request: PlanRequest | CheckRequest): readonly number[] | null {

@@ -24,7 +24,7 @@ const MOST_ORDERS = 12;
  * sequence. Breadth first by how many are moved, over (formed set, last entry kept): exact with the bed left out; each is then really planned.
  */
 export function fewestMoved({ attempts, situations }: WhyFacts, own: readonly string[]): MovedOrder | null {
-  const why = situations.each[0];
+  const why = situations.first();
   if (why === undefined) return null;
   const can = strokeTest(why, own);
   const all = 2 ** why.situation.part.bends.length - 1;

@@ -28,7 +28,7 @@ function pieces(facts: WhyFacts, tools: readonly (Punch | Die)[]): PlanChange | 
   const { request } = attempts;
   const before = attempts.plans();
   const change = (lengths: readonly number[]): Change => ({ tools: request.tools.map((tool) => (tools.some(({ id }) => id === tool.id) ? withPieces(tool, lengths) : tool)) });
-  const lines = situations.each[0]?.situation.moves.map(({ halfLength }) => halfLength * 2) ?? [];
+  const lines = situations.first()?.situation.moves.map(({ halfLength }) => halfLength * 2) ?? [];
   const wholes = missingLengths(lines, [], request.machine.settings);
   if (wholes.length === 0 || attempts.first(change(wholes)).kind !== "works") return null;
   const needed = wholes.reduceRight((kept: readonly number[], one) => {
