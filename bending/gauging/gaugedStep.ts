@@ -15,6 +15,8 @@ export interface Touch {
   readonly point: Vec3;
   /** Of a slanted edge: millimetres of depth a millimetre along the bed, before the stroke. */
   readonly slope: number;
+  /** The hem whose fold is touched; `face` is then the sheet that it lies on. The fold moves with the hem's line. */
+  readonly fold?: number;
 }
 
 /** How well the brake repeats: every stop of the gauge and every angle stays within plus and minus this. */

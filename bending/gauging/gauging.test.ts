@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { machineFrames } from "../clearance/machineFrames";
-import { profilePart } from "../clearance/trial/trialParts";
+import { partOf, profilePart } from "../clearance/trial/trialParts";
 import { invariant } from "../core/invariant";
 import { mm, rad } from "../core/units";
 import { applyFrame } from "../geometry/applyFrame";
@@ -82,4 +82,14 @@ describe("hat of 20, 40, 60, 40 and 20", () => {
     // Line 1 lies off by two stops, line 2 by those and its own; line 3 by one: the side between 2 and 3 takes four.
     expect(worst(hat, steps)).toEqual(near([0.1, 0.1, 0.1, 0.4, 0.1]));
   });
+});
+
+test("the fold of a hem as the stop: the leg from fold to bend misses by one stop, the hem's own leg by its own", () => {
+  const hemmed = partOf({
+    format: "part/1", name: "Hem", units: "mm", material: "S235", thickness: 1, insideRadius: 1.5,
+    profile: { width: 200, legs: [10, 80, 40], bends: [{ angle: 180, direction: "up", hem: "closed" }, { angle: 90, direction: "up" }] },
+  });
+  const steps = trialSteps(hemmed, [[0, 0, "edge"], [1, 2, "face"]]);
+  expect(steps[1]?.touch?.fold).toBe(0);
+  expect(worst(hemmed, steps)).toEqual(near([0.1, 0.1, 0.2]));
 });

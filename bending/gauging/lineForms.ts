@@ -1,13 +1,9 @@
-import { invariant } from "../core/invariant";
-import { applyFrame } from "../geometry/applyFrame";
 import type { PartModel } from "../part/partModel";
 import type { BendMotion } from "./bendMotion";
 import { createAddDrift } from "./createAddDrift";
-import type { Drift } from "./drift";
+import { depthDrift } from "./depthDrift";
 import type { GaugedStep } from "./gaugedStep";
-import { levelFrames } from "./levelFrames";
 import { gaugeEntry, type LinearForm } from "./linearForm";
-import { pointDrift } from "./pointDrift";
 
 /**
  * How far each step's bend line lies off in the sheet, as a sum over the errors of the steps up to it (towards the first bend's
@@ -27,16 +23,4 @@ export function lineForms(part: PartModel, steps: readonly GaugedStep[], motions
     forms.push(form);
   });
   return forms;
-}
-
-/** How the touched place moves to the back with the bends formed between it and the line. */
-function depthDrift(part: PartModel, step: GaugedStep, motions: readonly BendMotion[]): readonly Drift[] {
-  const { touch } = step;
-  if (touch === null) return [];
-  const frames = levelFrames(part, step);
-  const [bend, frame] = [part.bends[step.bends[0] ?? -1], frames[touch.face]];
-  invariant(bend && frame, "the fingers touch a face of the part");
-  const isFormed = (index: number) => !step.bends.includes(index) && ((step.formed >> index) & 1) === 1;
-  // At a slanted edge what moves along the bed moves the crossing with the fingers as well.
-  return pointDrift(part, frames, motions, isFormed, bend.parent, touch.face, applyFrame(frame, touch.point), [1, 0, -touch.slope]);
 }

@@ -7,6 +7,9 @@ import type { GaugeOption } from "../setup/gaugeOption";
 import type { Touch } from "./gaugedStep";
 import { levelFrames } from "./levelFrames";
 
+/** A face that is touched on its outside stands upright, or lies level behind the fold of its hem. */
+const LYING = 0.5;
+
 /**
  * Where the fingers touch for one way of gauging. An edge is touched in its middle. A flange that stands upright is
  * touched from the finger's rest up to `fingerHeight` above it; of that its error is taken at the end that is farther from the
@@ -20,6 +23,11 @@ export function touchOf(part: PartModel, hit: Hit, option: Pick<GaugeOption, "fa
     const [p, q] = [outline[option.edge], outline[(option.edge + 1) % outline.length]];
     invariant(p && q, "the fingers touch an edge of the face");
     return { face: option.face, point: [(p[0] + q[0]) / 2, (p[1] + q[1]) / 2, part.thickness / 2], slope: option.slope };
+  }
+  const hem = face.bend === null ? undefined : part.bends[face.bend];
+  const under = levelFrames(part, hit)[hem?.parent ?? -1];
+  if (face.bend !== null && hem && under && Math.abs(frame.z[0]) < LYING) {
+    return { face: hem.parent, point: applyFrame(invertFrame(under), [option.x, option.r, 0]), slope: 0, fold: face.bend };
   }
   const placed = outline.map((p) => applyFrame(frame, [p[0], p[1], 0]));
   const heights = placed.map(([, y]) => y);
