@@ -152,8 +152,16 @@ export { applyCure } from "./findings/applyCure";
 export { shopLimitsOf } from "./findings/shopLimitsOf";
 export { stockSheets } from "./findings/stockSheets";
 
+export type * from "./plan/planChange";
+export type * from "./plan/planCounts";
 export type * from "./plan/planDocument";
+export type * from "./plan/planFailure";
+export type * from "./plan/planRobustness";
 export type { CheckRequest, PlanProgress, PlanRequest } from "./plan/planRequest";
 export { checkOrder } from "./plan/checkOrder";
 export { planPart } from "./plan/planPart";
 export { readPlanDocument } from "./plan/readPlanDocument";
+export { firstFailure } from "./whyNot/firstFailure";
+export { robustness } from "./whyNot/robustness";
+export type { WhyLimits } from "./whyNot/whyLimits";
+export { whyNot, type WhyNot } from "./whyNot/whyNot";
