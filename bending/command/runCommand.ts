@@ -12,21 +12,24 @@ import { planCommand } from "./planCommand";
 import { readArguments } from "./readArguments";
 import { readBendTable } from "./readBendTable";
 import { problemLine, readJsonFile } from "./readJsonFile";
+import { setupCommand } from "./setupCommand";
 
 const FLAT = ["--bend-table"];
-const PLANNING = [...FLAT, "--tooling", "--machine", "--batch", "--alternatives", "--time-limit"];
+const PLANNING = [...FLAT, "--tooling", "--machine", "--batch", "--alternatives", "--time-limit", "--why"];
 const VERBS = {
   flat: [...FLAT, "--tooling", "--machine"],
-  plan: PLANNING,
+  plan: [...PLANNING, "--robustness"],
   check: [...PLANNING, "--order"],
+  setup: ["--tooling", "--machine", "--time-limit"],
   draw: [...FLAT, "--out", "--ticks", "--text"],
   import: ["--thickness", "--material", "--radius", "--units", "--bend-layers", "--single-lines", "--gap", "--body", "--name", "--out"],
 } as const;
 
-/** The command line as a function of its arguments and files: flat, plan, check, draw, import. */
+/** The command line as a function of its arguments and files: flat, plan, check, setup, draw, import. */
 export function runCommand(args: readonly string[], world: CommandWorld): CommandOutcome {
-  const given = readArguments(args, VERBS);
+  const given = readArguments(args, VERBS, ["setup"]);
   if (!given.ok) return wrongInput(given.error);
+  if (given.value.verb === "setup") return setupCommand(given.value, world);
   if (given.value.verb === "import") return isSolidFile(given.value.file) ? importStepCommand(given.value, world) : importCommand(given.value, world);
   const document = readJsonFile(world, given.value.file, readPartDocument);
   if (!document.ok) return wrongInput(document.error);

@@ -2,8 +2,11 @@ import type { OrderStep } from "../order/orderProblem";
 import type { Layout, Station } from "../setup/layout";
 import { NEAR_GAP_MM, placeStations } from "../setup/placeStations";
 import { stationLength } from "../setup/layout";
+import { nearMiddle, type StationLoad } from "../setup/nearMiddle";
+import { offCentreReach } from "../tooling/offCentre";
 import type { BedQuestion } from "./bedQuestion";
 import { placeStep } from "./placeStep";
+import { stepLoad } from "./stepLoad";
 
 /**
  * Where real stations may stand: near each other, as near as the wanted steps leave one another's tools free, and so
@@ -14,8 +17,15 @@ export function bedsOf(question: BedQuestion, stations: readonly Station[], want
   const { machine } = situation;
   const near = placeStations(stations, [NEAR_GAP_MM], machine);
   if (stations.length < 2) return near;
+  const loads = machine.settings.offCentre === undefined ? [] : wanted.flatMap((step): readonly StationLoad[] => {
+    const station = stations[step.station];
+    if (station === undefined) return [];
+    const { forceKN, offset } = stepLoad(situation, checks, station, step);
+    return [{ station: step.station, offset, reach: offCentreReach(machine, forceKN) }];
+  });
+  const borne = (layouts: readonly Layout[]) => layouts.map((layout) => nearMiddle(layout, loads, machine.bedLength));
   const overhang = Math.max(NEAR_GAP_MM, Math.ceil(partOverhang(question)));
-  const clears = (layout: Layout) => wanted.every((step) => placeStep(situation, checks, layout, step) !== null);
+  const clears = (layout: Layout) => wanted.every((step) => placeStep(situation, checks, nearMiddle(layout, loads, machine.bedLength), step) !== null);
   const gaps = gapsBeside(question, stations, wanted).filter((gap) => gap > NEAR_GAP_MM && gap < overhang);
   const between: Layout[] = [];
   near.forEach((layout, order) => {
@@ -25,7 +35,7 @@ export function bedsOf(question: BedQuestion, stations: readonly Station[], want
       if (wider && clears(wider)) { between.push(wider); return; }
     }
   });
-  return [...near, ...between, ...placeStations(stations, [overhang], machine)];
+  return borne([...near, ...between, ...placeStations(stations, [overhang], machine)]);
 }
 
 /** Gaps at which a neighbour's run just ends where a wanted step's forbidden room begins. */

@@ -1,4 +1,4 @@
-import { toDeg, type LengthUnit } from "../core/units";
+import { mmPer, toDeg, type LengthUnit } from "../core/units";
 import { advisedFlange, minimumFlange } from "../handbook/minimumFlange";
 import { minimumRadius } from "../handbook/minimumRadius";
 import { formatLength } from "../core/formatLength";
@@ -73,6 +73,9 @@ function stepCautions(situation: Situation, layout: Layout, orderStep: OrderStep
   if (step.gauge.fingers.length === 0) say("gauge", step.bends, [], `${name}: nothing behind the die is straight enough for the back gauge; mark the bend line or use a stop`);
   if (step.gauge.fingers.length === 1) say("gauge", step.bends, [], `${name}: only one gauge finger can touch; hold the sheet square by hand or use a side stop`);
   if (step.forceKN > NEAR_RATING * machine.maxForce) say("force", step.bends, [], `${name}: ${step.forceKN.toFixed(0)} kN of ${machine.maxForce.toFixed(0)} kN that ${machine.name} has`);
+  if (step.offCentre && step.forceKN > NEAR_RATING * step.offCentre.limitKN && step.offCentre.limitKN < machine.maxForce) {
+    say("force", step.bends, [], `${name}: ${step.forceKN.toFixed(0)} kN of the ${step.offCentre.limitKN.toFixed(0)} kN that ${machine.name} bears ${formatLength(Math.round(Math.abs(step.offCentre.z) * mmPer(units)), units)} from the middle of its bed`);
+  }
   const rating = Math.min(pair.punch.maxForcePerMetre, pair.die.maxForcePerMetre);
   if (fit.force > NEAR_RATING * rating) say("tool-force", step.bends, [pair.punch.id, pair.die.id], `${name}: ${fit.force.toFixed(0)} kN/m of the ${rating.toFixed(0)} kN/m that the tools bear`);
   if (bend.hem !== null) say("hem", step.bends, [pair.die.id], `${name}: flattening pushes sideways on punch and die; see that both are clamped, and keep hands off the slot`);

@@ -3,8 +3,12 @@ import type { GaugeOption } from "../setup/gaugeOption";
 import type { Layout } from "../setup/layout";
 import { placeFingers } from "../setup/placeFingers";
 import { placeOnStation } from "../setup/placeOnStation";
+import type { Interval } from "../geometry/interval";
+import type { PlacedStation } from "../setup/layout";
+import { offCentreReach } from "../tooling/offCentre";
 import type { StepChecks } from "./createStepChecks";
 import type { Situation } from "./situation";
+import { stepLoad } from "./stepLoad";
 
 export interface StepPlace {
   /** Middle of the stroke's line along the bed. */
@@ -25,9 +29,16 @@ export function placeStep(situation: Situation, checks: StepChecks, layout: Layo
       punch: checks.forbidden(move, formed, own.pair, tools.punch),
       die: checks.forbidden(move, formed, own.pair, tools.die),
     };
-  }, machine.settings);
+  }, machine.settings, machine.settings.offCentre ? loadLimits(situation, checks, own, { move, formed }) : undefined);
   if (shift === null) return null;
   const hitZ = own.z + shift;
   const option = checks.gauges(move, formed, own.pair)[0];
   return { hitZ, gauge: option === undefined ? null : { option, fingers: placeFingers(option, machine.gauge, hitZ) } };
+}
+
+/** Where on a station the line's middle may lie, from the station's, so that the machine bears the load as far from the middle of its bed. */
+function loadLimits(situation: Situation, checks: StepChecks, own: PlacedStation, step: Pick<OrderStep, "move" | "formed">): Interval {
+  const { forceKN, offset } = stepLoad(situation, checks, own, step);
+  const reach = offCentreReach(situation.machine, forceKN);
+  return [-reach - own.z - offset, reach - own.z - offset];
 }

@@ -87,6 +87,10 @@ export interface PlanStep {
   readonly forceKN: number;
   readonly depthMm: number;
   readonly toolWindow: readonly [number, number];
+  /** What the step needs of any bed, from the middle of its line: where punch and die may stand, and where the part lies; absent in plans of before it was kept, and where no solid run may stand over the line. */
+  readonly room?: { readonly punch: readonly [number, number]; readonly die: readonly [number, number]; readonly sheet: readonly [number, number] };
+  /** Where the middle of the load is, from the middle of the bed, and what the machine bears there, in kN; absent when its rating holds everywhere. */
+  readonly offCentre?: { readonly z: number; readonly limitKN: number };
   readonly gauge: PlanGauge;
   readonly handling: { readonly flip: boolean; readonly turn: number };
 }

@@ -5,7 +5,7 @@ import { freeIntervals } from "../geometry/freeIntervals";
 import type { Interval } from "../geometry/interval";
 import { handlingBetween } from "../order/handlingBetween";
 import type { OrderStep } from "../order/orderProblem";
-import type { Layout } from "../setup/layout";
+import type { Layout, PlacedStation } from "../setup/layout";
 import { acuteHem } from "../strokes/acuteHem";
 import type { StepChecks } from "./createStepChecks";
 import { placeStep, type StepPlace } from "./placeStep";
@@ -13,6 +13,9 @@ import type { PlanGauge, PlanStep } from "./planDocument";
 import { rounded } from "./rounded";
 import type { Situation } from "./situation";
 import { stationName } from "./stationName";
+import { stepLoad } from "./stepLoad";
+import { stepRoom, type StepRoom } from "./stepRoom";
+import { offCentreLimit } from "../tooling/offCentre";
 
 /** One step of the plan with every number that the sheet prints. */
 export function writeStep(situation: Situation, checks: StepChecks, layout: Layout, step: OrderStep, before: OrderStep | null): PlanStep {
@@ -41,9 +44,23 @@ export function writeStep(situation: Situation, checks: StepChecks, layout: Layo
     forceKN: rounded((fit.force * move.bentLength) / 1000),
     depthMm: rounded(strokePlacement(acute ?? bend, part.thickness, pair.die, fit.demanded).depth),
     toolWindow: toolWindow(checks.forbidden(step.move, step.formed, pair.index, pair.punch), station.z - hitZ, hitZ, machine.bedLength).map(inUnits) as unknown as readonly [number, number],
+    ...roomOf(stepRoom(situation, checks, pair, step), inUnits),
+    ...offCentreOf(situation, checks, station, step, hitZ, inUnits),
     gauge: writeGauge(situation, step, place, inUnits),
     handling: handlingBetween(before === null ? null : moves[before.move]?.pose ?? null, move.pose),
   };
+}
+
+function roomOf(room: StepRoom | null, inUnits: (value: number) => number): Pick<PlanStep, "room"> {
+  const range = ([from, to]: Interval) => [inUnits(from), inUnits(to)] as const;
+  return room === null ? {} : { room: { punch: range(room.punch), die: range(room.die), sheet: range(room.sheet) } };
+}
+
+/** Where the load is and what the machine bears there, when that hangs on the place. */
+function offCentreOf(situation: Situation, checks: StepChecks, station: PlacedStation, step: OrderStep, hitZ: number, inUnits: (value: number) => number): Pick<PlanStep, "offCentre"> {
+  if (situation.machine.settings.offCentre === undefined) return {};
+  const z = hitZ + stepLoad(situation, checks, station, step).offset;
+  return { offCentre: { z: inUnits(z), limitKN: rounded(offCentreLimit(situation.machine, z)) } };
 }
 
 /** The longest run of bed round the station in which the punch may stand, z from the middle of the bed. */

@@ -12,7 +12,7 @@ export interface ForbiddenAt {
 
 /**
  * Where on a station a stroke's line may lie so that it is covered and no tool on the bed stands where it must
- * not: the place nearest to the station's middle, from that middle; null when there is none.
+ * not: the place nearest to the station's middle, from that middle, within the limits given; null when there is none.
  */
 export function placeOnStation(
   halfLength: number,
@@ -20,6 +20,7 @@ export function placeOnStation(
   bed: readonly PlacedStation[],
   forbidden: (station: PlacedStation) => ForbiddenAt,
   settings: MachineSettings,
+  within?: Interval,
 ): number | null {
   const reach = Math.min(station.punch.length, station.die.length) / 2 - (halfLength - settings.maxUncoveredEnd);
   const standing = bed.flatMap((other): readonly Standing[] => {
@@ -27,5 +28,8 @@ export function placeOnStation(
     const offset = other.z - station.z;
     return [{ offset, length: other.punch.length, forbidden: punch }, { offset, length: other.die.length, forbidden: die }];
   });
-  return nearestTo(0, freeShifts(reach, standing));
+  const free = freeShifts(reach, standing);
+  return nearestTo(0, within === undefined ? free : free.flatMap((one) => overlap(one, within)));
 }
+
+const overlap = (a: Interval, b: Interval): readonly Interval[] => (a[0] <= b[1] && a[1] >= b[0] ? [[Math.max(a[0], b[0]), Math.min(a[1], b[1])]] : []);

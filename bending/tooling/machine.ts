@@ -39,6 +39,8 @@ export interface MachineSettings {
   readonly maxUncoveredEnd: Mm;
   readonly angleRepeat: Rad;
   readonly gaugeRepeat: Mm;
+  /** How far the load's middle is from the bed's, and the share of the rating that holds there: outwards, shares not rising. Absent: the rating holds everywhere. */
+  readonly offCentre?: readonly (readonly [distance: Mm, share: number])[];
 }
 
 /** Seconds (each), and seconds a metre for walking. */

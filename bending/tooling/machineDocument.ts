@@ -34,6 +34,8 @@ export interface MachineDocument {
     readonly maxUncoveredEnd?: number | undefined;
     readonly angleRepeat?: number | undefined;
     readonly gaugeRepeat?: number | undefined;
+    /** Distance of the load's middle from the bed's and the share of `maxForce` that holds there, point by point; straight lines between. */
+    readonly offCentre?: Points | undefined;
   } | undefined;
   readonly times?: {
     readonly flip?: number | undefined;

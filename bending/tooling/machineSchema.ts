@@ -12,12 +12,20 @@ const gauge = z.strictObject({
   fingerWidth: fields.positive("the width of a finger"),
 });
 
+const offCentre = z.array(
+  z.tuple([fields.positive("the distance of the load from the middle of the bed"), fields.positive("the share of the rating that holds there").lte(1, "must be 1 at the most: the share of the rating that holds there")]),
+  "must be a list of points [distance, share]: how much of the rating holds so far from the middle of the bed",
+).min(1, "must have a point [distance, share]; leave it out where the rating holds everywhere").max(50, "must have 50 points at the most")
+  .refine((points) => points.every(([distance, share], i) => { const before = points[i - 1]; return !before || (distance > before[0] && share <= before[1]); }), "must go outwards from the middle, and no share may be larger than the one before")
+  .optional();
+
 const settings = z.strictObject({
   clearance: fields.positive("the clearance between part and tools").optional(),
   maxSectionGap: fields.notNegative("the widest gap between two pieces").optional(),
   maxUncoveredEnd: fields.notNegative("how far a bend may stand out over its station").optional(),
   angleRepeat: fields.notNegative("how far the angle repeats, in degrees").optional(),
   gaugeRepeat: fields.notNegative("how far the gauge repeats").optional(),
+  offCentre,
 });
 
 const seconds = fields.notNegative("seconds").optional();

@@ -64,6 +64,7 @@ function settings({ settings: given }: MachineDocument, scale: number): MachineS
     maxUncoveredEnd: length(given?.maxUncoveredEnd, defaults.maxUncoveredEnd),
     angleRepeat: toRad(deg(given?.angleRepeat ?? defaults.angleRepeat)),
     gaugeRepeat: length(given?.gaugeRepeat, defaults.gaugeRepeat),
+    ...(given?.offCentre ? { offCentre: given.offCentre.map(([distance, share]) => [mm(distance * scale), share] as const) } : {}),
   };
 }
 

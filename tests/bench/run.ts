@@ -6,6 +6,7 @@ import { planCorpus } from "../corpus/planCorpus";
 import { clearanceQuestions } from "./clearanceQuestions";
 import { findingParts, judged, partOf } from "./findingParts";
 import { randomProblem } from "./randomProblem";
+import { dayOfBends, dayOnOneBed } from "./sharedSetups";
 import { asFlat, comb, corrugated, unfold } from "./unfoldQuestions";
 
 interface Row {
@@ -90,6 +91,14 @@ function unfolds(): readonly Row[] {
   }));
 }
 
+/** One bed for a day's bends: the fewest stations out of the pieces there are, proven. */
+function sharedBeds(): readonly Row[] {
+  return [[10, 3], [30, 5], [60, 8], [100, 10]].map(([size = 0, sides = 0]): Row => {
+    const { medianMs, answer } = timed(() => dayOnOneBed(dayOfBends(size, sides)));
+    return { name: `one bed in ${answer.stations.length} stations, ${answer.status}`, size, medianMs, runs: RUNS, checksum: digest([answer.status, answer.stations.length, answer.kinds, answer.pieces, answer.carried]), peakMB: peakMB() };
+  });
+}
+
 function withGrowth(rows: readonly Row[]): readonly Row[] {
   return rows.map((row, i) => {
     const before = rows[i - 1];
@@ -98,7 +107,7 @@ function withGrowth(rows: readonly Row[]): readonly Row[] {
   });
 }
 
-const rows = [...withGrowth([...searches(), ...unfolds(), ...plans()]), ...findings(), ...await clearances()];
+const rows = [...withGrowth([...searches(), ...unfolds(), ...plans()]), ...findings(), ...sharedBeds(), ...await clearances()];
 if (process.argv.includes("--json")) process.stdout.write(`${JSON.stringify(rows, null, 2)}\n`);
 else {
   for (const row of rows) {
