@@ -4,9 +4,12 @@ import type { Hit } from "../clearance/hit";
 import type { GaugeOption } from "../setup/gaugeOption";
 import { askedTolerance } from "./askedTolerance";
 import { bendMotion } from "./bendMotion";
+import { depthDrift } from "./depthDrift";
+import type { Drift } from "./drift";
 import type { Repeats } from "./gaugedStep";
 import { legDimensions } from "./legDimensions";
 import { missWhenGauged, type AskedLength } from "./missWhenGauged";
+import { touchOf } from "./touchOf";
 
 /** What the lengths that the part document asks for say to the ways of gauging a stroke. */
 export interface Keeping {
@@ -18,7 +21,7 @@ export interface Keeping {
 
 const SLACK_MM = 1e-9;
 
-/** Null when the document asks for nothing that a gauge could hold. `fingers` says how many can touch. */
+/** Null when the document asks for no length. An option belongs to one stroke and one state behind the die; `fingers` says how many can touch. */
 export function createKeeping(part: PartModel, repeats: Repeats, fingerHeight: number, fingers: (option: GaugeOption) => number): Keeping | null {
   const asked = legDimensions(part).flatMap((dimension): readonly AskedLength[] => {
     const tolerance: Mm | null = askedTolerance(part, dimension);
@@ -26,15 +29,12 @@ export function createKeeping(part: PartModel, repeats: Repeats, fingerHeight: n
   });
   if (asked.length === 0) return null;
   const motions = part.bends.map((bend) => bendMotion(part, bend));
-  const known = new WeakMap<GaugeOption, Map<number, readonly number[]>>();
+  const drifts = new WeakMap<GaugeOption, readonly Drift[]>();
   /** By how much each length asked for may be missed over what is asked. */
   const over = (hit: Hit, option: GaugeOption): readonly number[] => {
-    const ofOption = known.get(option) ?? new Map<number, readonly number[]>();
-    known.set(option, ofOption);
-    const answer = ofOption.get(hit.formed)
-      ?? missWhenGauged(part, hit, option, { repeats, motions, fingerHeight, asked }).map((miss, i) => Math.max(0, miss - (asked[i]?.tolerance ?? 0) - SLACK_MM));
-    ofOption.set(hit.formed, answer);
-    return answer;
+    const drift = drifts.get(option) ?? depthDrift(part, { ...hit, touch: touchOf(part, hit, option, fingerHeight) }, motions);
+    drifts.set(option, drift);
+    return missWhenGauged(part, hit, drift, repeats, asked).map((miss, i) => Math.max(0, miss - (asked[i]?.tolerance ?? 0) - SLACK_MM));
   };
   const unkept = (hit: Hit, option: GaugeOption) => over(hit, option).filter((by) => by > 0).length;
   const excess = (hit: Hit, option: GaugeOption) => over(hit, option).reduce((sum, by) => sum + by, 0);

@@ -1,36 +1,25 @@
 import type { Mm } from "../core/units";
 import type { PartModel } from "../part/partModel";
 import type { Hit } from "../clearance/hit";
-import type { GaugeOption } from "../setup/gaugeOption";
-import type { BendMotion } from "./bendMotion";
-import { depthDrift } from "./depthDrift";
+import type { Drift } from "./drift";
 import type { Repeats } from "./gaugedStep";
 import type { PartDimension } from "./partDimension";
-import { touchOf } from "./touchOf";
 
 export interface AskedLength {
   readonly dimension: PartDimension;
   readonly tolerance: Mm;
 }
 
-export interface MissQuestion {
-  readonly repeats: Repeats;
-  readonly motions: readonly BendMotion[];
-  readonly fingerHeight: number;
-  readonly asked: readonly AskedLength[];
-}
-
 /**
- * How far each length asked for may miss when the stroke that decides it is gauged so: its own stop, and every bend formed between line and
- * fingers with one stop and its angle, as if each of them had been set on its own; 0 for lengths that the stroke does not
- * decide. A bend at the length's other end counts when it is formed already, and cancels when the fingers touch what it carries.
+ * How far each length asked for may miss when the stroke that decides it is gauged so that the bends formed between line and fingers
+ * move the touched place by `drift`: its own stop, and each of those bends with one stop and its angle, as if it had been set on
+ * its own; 0 for lengths that the stroke does not decide. A bend at the length's other end counts when it is formed already, and cancels when the fingers touch what it carries.
  * That is what can be said before the order is known; what the whole order does is added up by `partTolerances`.
  */
-export function missWhenGauged(part: PartModel, hit: Hit, option: GaugeOption, { repeats, motions, fingerHeight, asked }: MissQuestion): readonly number[] {
+export function missWhenGauged(part: PartModel, hit: Hit, drift: readonly Drift[], repeats: Repeats, asked: readonly AskedLength[]): readonly number[] {
   const first = part.bends[hit.bends[0] ?? -1];
   const mine = asked.map(({ dimension }) => endsOf(dimension).filter((bend) => hit.bends.includes(bend)));
   if (!first || mine.every((bends) => bends.length === 0)) return asked.map(() => 0);
-  const drift = depthDrift(part, { ...hit, touch: touchOf(part, hit, option, fingerHeight) }, motions);
   // The line moves against the depth when the child lies behind, with it when the parent does.
   const sign = hit.front === first.parent ? -1 : 1;
   return asked.map(({ dimension }, i) => {

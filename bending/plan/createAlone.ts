@@ -73,7 +73,7 @@ export function createAlone(situation: Situation, checks: StepChecks, numbers: G
       if (answer !== undefined) return answer;
       const gauge = checks.gauges(move, formed, pair)[0];
       const fingers = gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
-      const found = { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) };
+      const found = { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingers) + checks.unkept(move, formed, gauge) };
       known?.set(key, found);
       return found;
     },

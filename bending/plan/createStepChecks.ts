@@ -4,7 +4,10 @@ import { fingerMeetsTools } from "../setup/fingerMeetsTools";
 import type { GaugeOption } from "../setup/gaugeOption";
 import { gaugeOptions } from "../setup/gaugeOptions";
 import type { Tool } from "../tooling/tool";
+import { createKeeping } from "../gauging/createKeeping";
+import { fingerHeight } from "../setup/fingerHeight";
 import { bendsBehind } from "./bendsBehind";
+import { fingerCount } from "./fingerCount";
 import { passesFrames } from "./passesFrames";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
@@ -21,6 +24,8 @@ export interface StepChecks {
   readonly forbidden: (move: number, formed: number, pair: number, obstacle: Tool) => readonly Interval[];
   /** Ways to gauge the sheet that clear the tools of the pair, best first. */
   readonly gauges: (move: number, formed: number, pair: number) => readonly GaugeOption[];
+  /** How many lengths that the document asks for are not held when the move is gauged so. */
+  readonly unkept: (move: number, formed: number, option: GaugeOption | undefined) => number;
   /** Do all pairs that fit gauge this move alike? */
   readonly gaugesAgree: (move: number, formed: number) => boolean;
   /** Unmet wishes of the pair for the move. */
@@ -75,18 +80,22 @@ export function createStepChecks(situation: Situation): StepChecks {
       return known;
     });
   };
+  const { gaugeRepeat, angleRepeat } = machine.settings;
+  const keeping = createKeeping(part, { gauge: gaugeRepeat, angle: angleRepeat }, fingerHeight(machine.gauge), (option) => fingerCount(option, machine.gauge));
   const gauges = (move: number, formed: number, pair: number): readonly GaugeOption[] => {
     const hidden = formed & (behind[move] ?? 0);
     const key = state(move, hidden);
     const any = pairOf(0);
     const found = allGauges.get(key) ?? gaugeOptions(part, hitOf(move, hidden), machine, any.punch, any.die);
     allGauges.set(key, found);
-    return found.filter((option) => !meets(option, pairOf(pair)));
+    const clear = found.filter((option) => !meets(option, pairOf(pair)));
+    return keeping === null ? clear : keeping.preferred(hitOf(move, hidden), clear);
   };
   return {
     hitOf,
     possible,
     gauges,
+    unkept: (move, formed, option) => (keeping === null || option === undefined ? 0 : keeping.unkept(hitOf(move, formed), option)),
     gaugesAgree: (move, formed) => {
       const usable = pairs.filter(({ index }) => moveOf(move).bends.every((bend) => fits[bend]?.[index]?.ok));
       const first = usable.map(({ index }) => gauges(move, formed, index)[0]);

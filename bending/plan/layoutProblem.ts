@@ -23,7 +23,7 @@ export function layoutProblem(situation: Situation, checks: StepChecks, numbers:
       const place = allowed(move, formed) ? placeStep(situation, checks, layout, { move, formed, station }) : null;
       const option = place === null ? null : {
         gauge: numbers(place.gauge?.option),
-        demerit: checks.wishes(move, layout.stations[station]?.pair ?? 0) + gaugeDemerits(place.gauge?.fingers.length ?? 0),
+        demerit: checks.wishes(move, layout.stations[station]?.pair ?? 0) + gaugeDemerits(place.gauge?.fingers.length ?? 0) + checks.unkept(move, formed, place.gauge?.option),
       };
       known.set(key, option);
       return option;

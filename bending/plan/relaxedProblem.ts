@@ -39,7 +39,8 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
       [{ offset: 0, length: run, forbidden: checks.forbidden(move, formed, pair, tool) }],
     ).length > 0;
     if (!fits(tools.punch, length.punch) || !fits(tools.die, length.die)) return null;
-    return { gauge: numbers(checks.gauges(move, formed, pair)[0]), demerit: checks.wishes(move, pair) + gaugeDemerits(fingersWith(move, formed, pair)) };
+    const gauge = checks.gauges(move, formed, pair)[0];
+    return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingersWith(move, formed, pair)) + checks.unkept(move, formed, gauge) };
   };
   const least = createLeast(situation, checks, numbers);
   const known = new Map<number, StepOption | null>();

@@ -55,7 +55,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     cost: seconds.total,
     proof: { method: frame.method, expanded: frame.expanded, bound },
     reasons: [],
-    cautions: [...cautionsOf(situation, layout, steps, struck).map(drawnReason), ...toleranceCautions(tolerances, written.map(({ bends }) => bends), units)],
+    cautions: [...cautionsOf(situation, layout, steps, struck).map(drawnReason), ...toleranceCautions(tolerances, written.map(({ bends }) => bends), machine.settings.gaugeRepeat / mmPer(units), units)],
     tolerances,
     elapsedMs: 0,
   };
