@@ -1,3 +1,4 @@
+import type { PartModel } from "../part/partModel";
 import { candidatePairs } from "../plan/candidatePairs";
 import { createSituation } from "../plan/createSituation";
 import { createStepChecks, type StepChecks } from "../plan/createStepChecks";
@@ -22,8 +23,10 @@ export interface Ground {
   readonly flat: (index: number) => FlatGround | undefined;
   /** Why there are no tools to look at, of the flats asked for so far that have none. */
   readonly reasons: () => readonly PlanReason[];
-  /** mm; null when the part cannot be built. */
-  readonly thickness: number | null;
+  /** The likeliest flat; null when the part cannot be built. */
+  readonly part: PartModel | null;
+  /** The V that is looked for first, mm. */
+  readonly wantedV: number;
 }
 
 /** What questions about orders of one part are asked of. */
@@ -53,6 +56,7 @@ export function createGround(request: PlanRequest): Ground {
       return flats[index];
     },
     reasons: () => reasons,
-    thickness: all[0]?.part.thickness ?? null,
+    part: all[0]?.part ?? null,
+    wantedV: all[0]?.wantedV ?? 0,
   };
 }

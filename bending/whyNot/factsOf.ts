@@ -11,18 +11,20 @@ export function factsOf(request: PlanRequest | CheckRequest, plan: PlanDocument,
   const strokes = failure?.strokes ?? [];
   const reasons = strokes.flatMap((stroke) => stroke.reasons);
   const named = reasons.flatMap(({ pairs }) => pairs);
+  const told = [...plan.reasons, ...reasons].flatMap((reason) => reason.tools);
   const { tools, machine } = request;
   const nearFirst = (ids: readonly string[]) => <T extends { readonly id: string }>(list: readonly T[]): readonly T[] =>
     [...list].sort((a, b) => placeOf(ids, a.id) - placeOf(ids, b.id));
   const usual = situations.first()?.situation.pairs ?? [];
-  const punchIds = [...named.map(({ punch }) => punch), ...usual.map(({ punch }) => punch.id)];
-  const dieIds = [...named.map(({ die }) => die), ...usual.map(({ die }) => die.id)];
+  const punchIds = [...named.map(({ punch }) => punch), ...told, ...usual.map(({ punch }) => punch.id)];
+  const dieIds = [...named.map(({ die }) => die), ...told, ...usual.map(({ die }) => die.id)];
   return {
     attempts, situations,
     kinds: new Set([...reasons, ...plan.reasons].map(({ kind }) => kind)),
     faces: [...new Set([...[...reasons, ...plan.reasons].flatMap(({ faces }) => faces), ...plan.reasons.flatMap(({ bends }) => bends), ...strokes.flatMap(({ bends, wouldWork }) => [...bends, ...wouldWork.flatMap(({ before }) => before)])])],
     punches: nearFirst(punchIds)(tools.flatMap((tool) => (tool.kind === "punch" && tool.tang === machine.punchTang && tool.pieces.length > 0 ? [tool] : []))),
-    dies: nearFirst(dieIds)(tools.flatMap((tool) => (tool.kind === "die" && tool.tang === machine.dieTang && tool.pieces.length > 0 && tool.flattening === undefined ? [tool] : []))),
+    dies: nearFirst(dieIds)(tools.flatMap((tool) => (tool.kind === "die" && tool.tang === machine.dieTang && tool.pieces.length > 0 && tool.flattening === undefined ? [tool] : []))
+      .sort((a, b) => Math.abs(Math.log(a.vOpening / situations.wantedV)) - Math.abs(Math.log(b.vOpening / situations.wantedV)))),
   };
 }
 

@@ -7,7 +7,7 @@ const TOLD = 4;
 /** How far it gets, what fails there and which other place would do, in whole sentences. */
 export function failureMessage({ done, step, strokes }: Omit<PlanFailure, "message">): string {
   const far = done.length === 0 ? "" : `${done.join(", ")} can be made${step === null ? "; no stroke can follow" : ""}. `;
-  const said = strokes.slice(0, TOLD).map((stroke) => strokeSentences(stroke, step));
+  const said = [...new Set(strokes.slice(0, TOLD).map((stroke) => strokeSentences(stroke, step)))];
   const rest = strokes.length > TOLD ? ` ${strokes.length - TOLD} further strokes cannot be made either.` : "";
   return `${far}${said.join(" ")}${rest}`;
 }

@@ -1,4 +1,5 @@
 import { buildPart } from "../part/buildPart";
+import type { PartModel } from "../part/partModel";
 import { followsOrder } from "../plan/followsOrder";
 import type { PlanReason } from "../plan/planDocument";
 import type { CheckRequest, PlanRequest } from "../plan/planRequest";
@@ -18,15 +19,17 @@ export interface WhySituations {
   readonly first: () => WhySituation | undefined;
   /** Why there are no tools to look at, where there are none; asked when `each` has been gone through. */
   readonly reasons: () => readonly PlanReason[];
-  /** mm; null when the part cannot be built. */
-  readonly thickness: number | null;
+  /** The likeliest flat; null when the part cannot be built. */
+  readonly part: PartModel | null;
+  /** The V that is looked for first, mm. */
+  readonly wantedV: number;
 }
 
 /** The flats that a plan would look at, every order free in them; a person's order is kept beside. `ground`: the same request's, from before. */
 export function situationsOf(request: PlanRequest | CheckRequest, ground: Ground = createGround(request)): WhySituations {
   const order = masksOf(request);
   const each = { [Symbol.iterator]: () => beside(ground, order) };
-  return { each, first: () => { for (const one of each) return one; return undefined; }, reasons: ground.reasons, thickness: ground.thickness };
+  return { each, first: () => { for (const one of each) return one; return undefined; }, reasons: ground.reasons, part: ground.part, wantedV: ground.wantedV };
 }
 
 function* beside(ground: Ground, order: readonly number[] | null): Generator<WhySituation> {

@@ -6,6 +6,7 @@ import { newId } from "../newTool/asNew";
 import { tallerTool } from "../newTool/tallerTool";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 import { ratingNeeded } from "./ratingNeeded";
 
@@ -38,7 +39,7 @@ function ofHeight(facts: WhyFacts, like: Punch | Die, ladder: readonly number[])
   if (found === null) return null;
   const rating = ratingNeeded(facts, found.plan, found.change.tools ?? [], newId(like.kind));
   const way = found.value > like.height ? "at least" : "at most";
-  return offeredChange(attempts, before, { ...found, resolution: HEIGHT_MM }, {
+  return offeredChange(attempts, before, inUnits(found, HEIGHT_MM, units), {
     kind: like.kind === "punch" ? "punch-height" : "die-height", group: "tool", what: { tools: [like.id] },
     amount: lengthAmount("height", found.value, units, like.height), with: [rating],
     message: `A ${like.kind} like ${like.id} that is ${way} ${formatLength(found.value, units)} high (it has ${formatLength(like.height, units)}), rated for at least ${rating.value} kN/m, would do.`,

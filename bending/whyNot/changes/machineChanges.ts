@@ -4,6 +4,7 @@ import type { PlanChange } from "../../plan/planChange";
 import { leastAmount } from "../leastAmount";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 
 const MORE_MM = [20, 50, 100, 200, 400];
@@ -23,7 +24,7 @@ export function machineChanges(facts: WhyFacts): readonly PlanChange[] {
       attempts, from: machine[field], fromFails: true, ladder: MORE_MM.map((more) => Math.ceil((machine[field] + more) / LENGTH_MM) * LENGTH_MM), resolution: LENGTH_MM,
       change: (value) => ({ machine: { ...machine, [field]: mm(value) } }),
     });
-    return found === null ? [] : [offeredChange(attempts, before, { ...found, resolution: LENGTH_MM }, {
+    return found === null ? [] : [offeredChange(attempts, before, inUnits(found, LENGTH_MM, units), {
       kind: field, group: "machine", what: {}, amount: lengthAmount(field, found.value, units, machine[field]), with: [],
       message: `A brake like ${machine.name} with at least ${formatLength(found.value, units)} of ${field} (it has ${formatLength(machine[field], units)}) would do.`,
     })];

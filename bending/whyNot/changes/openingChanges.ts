@@ -7,6 +7,7 @@ import { bodyWidth } from "../newTool/bodyWidth";
 import { otherDie } from "../newTool/otherDie";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 import { ratingNeeded } from "./ratingNeeded";
 
@@ -19,17 +20,18 @@ const BESIDE_V = 6;
 
 /** A die of another V: the widest of the narrower ones where the level sheet is short, the narrowest of the wider ones where the force is high. */
 export function openingChanges(facts: WhyFacts): readonly PlanChange[] {
-  const { attempts, kinds, dies: [like], situations } = facts;
-  const thickness = situations.thickness;
-  if (like === undefined || thickness === null) return [];
+  const { attempts, kinds, dies, situations: { part } } = facts;
+  if (part === null) return [];
   const { request } = attempts;
   const units = request.document.units;
-  const [least, most] = [FORCE_V_RANGE[0] * thickness, FORCE_V_RANGE[1] * thickness];
+  const [least, most] = [FORCE_V_RANGE[0] * part.thickness, FORCE_V_RANGE[1] * part.thickness];
+  const byV = [...dies].sort((a, b) => a.vOpening - b.vOpening);
   const ways = [
-    ...(kinds.has("minimum-flange") || kinds.has("no-die") ? [{ ladder: NARROWER, says: "at most" }] : []),
-    ...(["force", "tool-force", "no-die"] as const).some((kind) => kinds.has(kind)) ? [{ ladder: WIDER, says: "at least" }] : [],
+    ...(kinds.has("minimum-flange") || kinds.has("no-die") ? [{ ladder: NARROWER, says: "at most", like: byV[0] }] : []),
+    ...(["force", "tool-force", "no-die"] as const).some((kind) => kinds.has(kind)) ? [{ ladder: WIDER, says: "at least", like: byV[byV.length - 1] }] : [],
   ];
-  return ways.flatMap(({ ladder, says }) => {
+  return ways.flatMap(({ ladder, says, like }) => {
+    if (like === undefined) return [];
     attempts.doing("Looking for a die of another V that would do");
     const before = attempts.plans();
     const found = leastAmount({
@@ -39,7 +41,7 @@ export function openingChanges(facts: WhyFacts): readonly PlanChange[] {
     });
     if (found === null) return [];
     const rating = ratingNeeded(facts, found.plan, found.change.tools ?? [], newId("die"));
-    return [offeredChange(attempts, before, { ...found, resolution: V_MM }, {
+    return [offeredChange(attempts, before, inUnits(found, V_MM, units), {
       kind: "die-opening", group: "tool", what: { tools: [like.id] },
       amount: lengthAmount("V opening", found.value, units, like.vOpening), with: [rating],
       message: `A die with a V of ${says} ${formatLength(found.value, units)}, rated for at least ${rating.value} kN/m, would do.`,

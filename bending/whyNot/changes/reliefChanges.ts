@@ -7,6 +7,7 @@ import { relievedPunch } from "../newTool/relievedPunch";
 import { newId } from "../newTool/asNew";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 import { ratingNeeded } from "./ratingNeeded";
 
@@ -44,7 +45,7 @@ export function reliefChanges(facts: WhyFacts): readonly PlanChange[] {
     const upTo = top?.value ?? highest(depth.value);
     const rating = ratingNeeded(facts, worked.plan, worked.change.tools ?? [], newId("punch"));
     const length = (value: number) => formatLength(value, units);
-    return [offeredChange(attempts, before, { ...depth, change: worked.change, plan: worked.plan, resolution: DEPTH_MM }, {
+    return [offeredChange(attempts, before, inUnits({ ...depth, change: worked.change, plan: worked.plan }, DEPTH_MM, units), {
       kind: "punch-relief", group: "tool", what: { tools: [like.id] },
       amount: lengthAmount("relief behind the tip's axis", depth.value, units),
       with: [lengthAmount("height of the relief over the tip", upTo, units), lengthAmount("height of the punch", height, units), rating],

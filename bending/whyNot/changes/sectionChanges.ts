@@ -5,6 +5,7 @@ import type { Die, Punch, Tool } from "../../tooling/tool";
 import type { Change } from "../createAttempts";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 import { missingLengths } from "./missingLengths";
 
@@ -43,7 +44,7 @@ function pieces(facts: WhyFacts, tools: readonly (Punch | Die)[]): PlanChange | 
   const units = request.document.units;
   const said = least.map((length) => formatLength(length, units)).join(" and ");
   const names = tools.map(({ id }) => id).join(" and ");
-  return offeredChange(attempts, before, { change: change(least), plan: attempt.plan, ...(fails && less[0] !== undefined ? { notEnough: less[0] } : {}), resolution: LESS_MM }, {
+  return offeredChange(attempts, before, inUnits({ change: change(least), plan: attempt.plan, ...(fails && less[0] !== undefined ? { notEnough: less[0] } : {}) }, LESS_MM, units), {
     kind: "section", group: "stock", what: { tools: tools.map(({ id }) => id) },
     amount: lengthAmount("length", least[0] ?? 0, units), with: least.slice(1).map((length) => lengthAmount("length", length, units)),
     message: `${least.length > 1 ? "Further pieces" : "A further piece"} of ${names}, ${said} long at least${tools.length > 1 ? ", of each" : ""}, would do.`,

@@ -5,6 +5,7 @@ import type { MachineSettings } from "../../tooling/machine";
 import { leastAmount } from "../leastAmount";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 
 const GAPS_MM = [10, 20, 40, 80];
@@ -44,7 +45,7 @@ function setting({ attempts }: WhyFacts, { field, kind, name, resolution, ladder
   const before = attempts.plans();
   const from = machine.settings[field];
   const found = leastAmount({ attempts, from, fromFails: true, ladder, resolution, change: (value) => ({ machine: { ...machine, settings: { ...machine.settings, [field]: mm(value) } } }) });
-  return found && offeredChange(attempts, before, { ...found, resolution }, {
+  return found && offeredChange(attempts, before, inUnits(found, resolution, units), {
     kind, group: "setting", what: {}, amount: lengthAmount(name, found.value, units, from), with: [],
     message: says(formatLength(found.value, units), formatLength(from, units)),
   });

@@ -8,6 +8,7 @@ import { otherDie } from "../newTool/otherDie";
 import { straightPunch } from "../newTool/straightPunch";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
+import { inUnits } from "./inUnits";
 import { lengthAmount } from "./lengthAmount";
 import { ratingNeeded } from "./ratingNeeded";
 
@@ -42,7 +43,7 @@ function narrower(facts: WhyFacts, like: Punch | Die): PlanChange | null {
   });
   if (found === null) return null;
   const rating = ratingNeeded(facts, found.plan, found.change.tools ?? [], newId(like.kind));
-  return offeredChange(attempts, before, { ...found, resolution: WIDTH_MM }, {
+  return offeredChange(attempts, before, inUnits(found, WIDTH_MM, units), {
     kind: like.kind === "punch" ? "punch-width" : "die-width", group: "tool", what: { tools: [like.id] },
     amount: lengthAmount("width of the body", found.value, units, from), with: [rating],
     message: `A ${like.kind === "punch" ? "straight punch" : "die"} like ${like.id} with a body at most ${formatLength(found.value, units)} wide (it has ${formatLength(from, units)}), rated for at least ${rating.value} kN/m, would do.`,
