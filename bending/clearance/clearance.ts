@@ -25,12 +25,24 @@ export interface ClearanceHit {
   readonly need: string | null;
 }
 
+/** Where a tool must not stand because of one face, z from the hit's middle, and the bends that decide it. */
+export interface StrokeMeeting {
+  readonly intervals: readonly Interval[];
+  readonly mask: number;
+  readonly value: number;
+}
+
 /** Answers every clearance question about one part on one machine; remembers what it has worked out. */
 export interface Clearance {
   /** z-intervals from the hit's middle in which `obstacle` must not stand while this hit is made with this punch and die: sorted, apart. */
   forbidden(hit: Hit, punch: Punch, die: Die, obstacle: Tool): readonly Interval[];
   /** The same question, answered with what is met (one entry for each face that is met). */
   evidence(hit: Hit, punch: Punch, die: Die, obstacle: Tool): readonly ClearanceHit[];
+  /**
+   * A part of the answer, for reasons that hold elsewhere too: what the obstacle meets during the stroke itself. Every state that agrees
+   * with `value` on `mask` has these intervals forbidden at least. Nothing is told of hems.
+   */
+  inStroke(hit: Hit, punch: Punch, die: Die, obstacle: Tool): readonly StrokeMeeting[];
   /** What no place on the bed and no length of tool helps: ram, bed, the part meeting itself, no way on or off. */
   blocked(hit: Hit, punch: Punch, die: Die): readonly ClearanceHit[];
   /** The same asked in turn, ended by the first kind of thing that blocks; empty when nothing does. */

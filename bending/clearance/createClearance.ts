@@ -2,6 +2,7 @@ import { invariant } from "../core/invariant";
 import type { Rad } from "../core/units";
 import type { Interval } from "../geometry/interval";
 import { mergeIntervals } from "../geometry/mergeIntervals";
+import { turnIntervals } from "../geometry/turnIntervals";
 import type { PartModel } from "../part/partModel";
 import type { Machine } from "../tooling/machine";
 import type { Die, Punch, Tool } from "../tooling/tool";
@@ -95,6 +96,12 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     evidence: (hit, punch, die, tool) => {
       const { place, state, stroke } = setUp(hit, punch, die);
       return evidence(stroke, place, state, tool);
+    },
+    inStroke: (hit, punch, die, tool) => {
+      const { state, stroke } = setUp(hit, punch, die);
+      return metBy(stroke.standing(tool).asked, state).map(({ face, meeting, inFront }) => ({
+        intervals: inFront ? turnIntervals(meeting.intervals) : meeting.intervals, mask: face.path.mask, value: face.state,
+      }));
     },
     blocked: (hit, punch, die) => {
       const { place, state, stroke } = setUp(hit, punch, die);

@@ -29,6 +29,7 @@ export function withHems(part: PartModel, machine: Machine, options: ClearanceOp
       : mergeIntervals([...acuteOf(hit, die).forbidden(hit, punch, die, tool), ...flattening.meets(hit, punch, die, tool).map(({ z }) => z)]),
     evidence: (hit, punch, die, tool) => !isHem(hit) ? plain.evidence(hit, punch, die, tool)
       : [...acuteOf(hit, die).evidence(hit, punch, die, tool), ...flattening.meets(hit, punch, die, tool)],
+    inStroke: (hit, punch, die, tool) => (isHem(hit) ? [] : plain.inStroke(hit, punch, die, tool)),
     blocked: (hit, punch, die) => !isHem(hit) ? plain.blocked(hit, punch, die)
       : [...acuteOf(hit, die).blocked(hit, punch, die), ...flattening.blocked(hit, punch, die)],
     firstBlock: (hit, punch, die) => {

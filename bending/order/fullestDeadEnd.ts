@@ -1,3 +1,4 @@
+import { bitCount } from "./bitCount";
 import type { OrderProblem } from "./orderProblem";
 
 /**
@@ -19,16 +20,10 @@ export function fullestDeadEnd(problem: OrderProblem, most: number, shouldStop: 
       any = true;
       if (seen.has(next)) return;
       seen.add(next);
-      waiting[bits(next)]?.push(next);
-      level = Math.max(level, bits(next));
+      waiting[bitCount(next)]?.push(next);
+      level = Math.max(level, bitCount(next));
     });
-    if (!any && bits(formed) > bits(fullest)) fullest = formed;
+    if (!any && bitCount(formed) > bitCount(fullest)) fullest = formed;
   }
   return fullest;
-}
-
-function bits(set: number): number {
-  let count = 0;
-  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
-  return count;
 }

@@ -14,12 +14,10 @@ export function aloneProblem({ situation: { moves, part, machine }, alone, relax
     stations: kinds.length,
     times: machine.times,
     walk: (from, to) => (((kinds[from]?.length ?? 0) + (kinds[to]?.length ?? 0)) / 2 + NEAR_GAP_MM) / 1000 * machine.times.walkPerMetre,
-    least: relaxed.least,
+    least: (move, formed) => (kinds.every((kind) => alone.cannot(kind, move, formed)) ? null : relaxed.least(move, formed)),
     option: (move, formed, station) => {
       const kind = kinds[station];
-      if (kind === undefined) return null;
-      const need = alone.need(move, formed, kind.pair);
-      return need !== null && alone.holds(kind, need) ? alone.option(move, formed, kind.pair) : null;
+      return kind !== undefined && alone.can(kind, move, formed) ? alone.option(move, formed, kind.pair) : null;
     },
   };
 }

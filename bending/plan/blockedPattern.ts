@@ -1,8 +1,10 @@
 import type { Hit } from "../clearance/hit";
+import { bitCount } from "../order/bitCount";
 import type { BlockedPattern } from "../order/createFacts";
 import type { PartModel } from "../part/partModel";
 import type { StepChecks } from "./createStepChecks";
 import { passesFrames } from "./passesFrames";
+import { roomPattern } from "./roomPattern";
 import { sheetReach } from "./sheetReach";
 import type { Situation } from "./situation";
 import type { ToolPair } from "./toolPair";
@@ -12,12 +14,17 @@ export interface Blocked extends BlockedPattern {
   readonly why: readonly string[];
 }
 
+/** The runs of a pair that stand while a stroke is made, mm; Infinity when there is none. */
+export type RunLengths = { readonly punch: number; readonly die: number };
+
 /**
- * Every state in which no pair can make a move for the same reasons as in this one; null when some pair can, or when one
- * fails for want of room along the bed, which depends on all bends.
+ * Every state in which none of some pairs can make a move for the same reasons as in this one; null when one can, or when one
+ * fails for a reason that may hold nowhere else. With `runs` each tool of a pair has to find room alone on the bed too.
  */
-export function blockedPattern(situation: Situation, checks: StepChecks, move: number, formed: number): Blocked | null {
-  const { part, machine, pairs, clearance } = situation;
+export function blockedPattern(
+  situation: Situation, checks: StepChecks, move: number, formed: number, pairs: readonly ToolPair[] = situation.pairs, runs?: (pair: number) => RunLengths | undefined,
+): Blocked | null {
+  const { part, machine, clearance } = situation;
   const hit = checks.hitOf(move, formed);
   const reach = sheetReach(part, hit);
   const level = levelBends(part, hit);
@@ -25,8 +32,20 @@ export function blockedPattern(situation: Situation, checks: StepChecks, move: n
   const known = new Map<object, readonly BlockedPattern[]>();
   let mask = 0;
   const take = (patterns: readonly BlockedPattern[]) => {
-    const added = patterns.map((pattern) => pattern.mask).sort((a, b) => bits(a & ~mask) - bits(b & ~mask));
+    const added = patterns.map((pattern) => pattern.mask).sort((a, b) => bitCount(a & ~mask) - bitCount(b & ~mask));
     mask |= added[0] ?? 0;
+  };
+  const noRoom = (pair: ToolPair): readonly BlockedPattern[] | null => {
+    const lengths = runs?.(pair.index);
+    if (lengths === undefined) return null;
+    why.add("room");
+    if (!Number.isFinite(lengths.punch) || !Number.isFinite(lengths.die)) return [{ mask: 0, value: 0 }];
+    for (const [tool, length] of [[pair.punch, lengths.punch], [pair.die, lengths.die]] as const) {
+      const reach = length / 2 - (situation.moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd;
+      const pattern = roomPattern(reach, [{ length, met: clearance.inStroke(hit, pair.punch, pair.die, tool) }], formed);
+      if (pattern) return [pattern];
+    }
+    return null;
   };
   const stops = (pair: ToolPair): readonly BlockedPattern[] | null => {
     const needed = neededReach(situation, move, pair.index);
@@ -37,7 +56,7 @@ export function blockedPattern(situation: Situation, checks: StepChecks, move: n
     if (before) return before;
     const hits = clearance.firstBlock(hit, pair.punch, pair.die);
     const kind = hits[0]?.kind;
-    if (kind === undefined) return null;
+    if (kind === undefined) return noRoom(pair);
     why.add(kind);
     if (kind !== "trapped") known.set(kind === "self" ? part : kind === "ram" ? pair.punch : pair.die, hits);
     return hits;
@@ -77,10 +96,4 @@ function levelBends(part: PartModel, hit: Hit): number {
     });
   }
   return mask;
-}
-
-function bits(set: number): number {
-  let count = 0;
-  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
-  return count;
 }

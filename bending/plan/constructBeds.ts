@@ -5,25 +5,33 @@ import { stationKinds, type StationKind } from "../setup/stationKinds";
 import type { BedQuestion } from "./bedQuestion";
 import { bedsOf } from "./bedsOf";
 import { layoutProblem } from "./layoutProblem";
+import type { ToolPair } from "./toolPair";
 
 /** One stroke of an order that works with the bed left out. */
 export interface WantedStep { readonly move: number; readonly formed: number }
 
-/** Pairs that stations are made of: the likeliest. */
+/** Pairs that stations are made of when those of the order itself do not do: the likeliest. */
 const PAIRS_TRIED = 12;
 
 /**
  * Some plan at once: the order that works without a bed, and as few kinds of station as cover its steps (each time the
- * one that covers most of what is left), set on the bed. Nothing is proven by it.
+ * one that covers most of what is left), set on the bed; first of the pairs that the order was found with, and of more when
+ * that is not `enough`. Nothing is proven by it.
  */
-export function constructBeds(question: BedQuestion, steps: readonly WantedStep[]): void {
+export function constructBeds(question: BedQuestion, steps: readonly WantedStep[], enough: () => boolean): void {
+  const { pairs } = question.situation;
+  construct(question, steps, pairs.filter(({ index }) => question.favoured.has(index)));
+  if (!enough()) construct(question, steps, pairs.slice(0, PAIRS_TRIED));
+}
+
+function construct(question: BedQuestion, steps: readonly WantedStep[], pairs: readonly ToolPair[]): void {
   const { situation, checks, numbers, keeper, budget } = question;
   const make = createStationMaker((pair) => {
     const found = situation.pairs[pair];
     if (found === undefined) throw new Error("invariant: a pair of the situation");
     return found;
   }, situation.machine.settings);
-  for (const { kinds, wanted } of covers(question, steps)) {
+  for (const { kinds, wanted } of covers(question, steps, pairs)) {
     const stations = make(kinds);
     for (const layout of stations === null ? [] : bedsOf(question, stations, wanted)) {
       if (budget.shouldStop() && keeper.kept().length > 0) return;
@@ -36,20 +44,17 @@ export function constructBeds(question: BedQuestion, steps: readonly WantedStep[
 interface Cover { readonly kinds: readonly StationKind[]; readonly wanted: readonly OrderStep[] }
 
 /** For every shut height that tools have together, the kinds that cover all steps; fewest first. */
-function covers({ situation, alone, budget }: BedQuestion, steps: readonly WantedStep[]): readonly Cover[] {
-  const { pairs, moves, runs } = situation;
+function covers({ situation, alone, budget }: BedQuestion, steps: readonly WantedStep[], tried: readonly ToolPair[]): readonly Cover[] {
+  const { moves, runs } = situation;
   const lengths = [...new Set(steps.map(({ move }) => (moves[move]?.halfLength ?? 0) * 2))];
   const byHeight = new Map<string, StationKind[]>();
-  for (const { index, punch, die } of pairs.slice(0, PAIRS_TRIED)) {
+  for (const { index, punch, die } of tried) {
     if (budget.shouldStop()) break;
     const key = (punch.height + die.height).toFixed(1);
     const kinds = stationKinds(lengths.map((lineLength) => ({ pair: index, punch, die, lineLength })), runs);
     byHeight.set(key, [...(byHeight.get(key) ?? []), ...kinds]);
   }
-  const holds = (kind: StationKind, { move, formed }: WantedStep) => {
-    const need = alone.need(move, formed, kind.pair);
-    return need !== null && alone.holds(kind, need);
-  };
+  const holds = (kind: StationKind, { move, formed }: WantedStep) => alone.can(kind, move, formed);
   return [...byHeight.values()].flatMap((kinds) => cover(kinds, steps, holds) ?? []).sort((a, b) => a.kinds.length - b.kinds.length);
 }
 

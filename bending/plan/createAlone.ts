@@ -1,70 +1,67 @@
+import { createFacts, type Facts } from "../order/createFacts";
 import type { StepOption } from "../order/orderProblem";
-import type { Interval } from "../geometry/interval";
 import { freeShifts } from "../setup/freeShifts";
 import type { StationKind } from "../setup/stationKinds";
+import { blockedPattern } from "./blockedPattern";
 import type { StepChecks } from "./createStepChecks";
 import { fingerCount } from "./fingerCount";
 import { gaugeDemerits } from "./gaugeDemerits";
 import type { GaugeNumbers } from "./gaugeNumbers";
+import { roomPattern } from "./roomPattern";
 import type { Situation } from "./situation";
-
-/** What a move needs of a station of some pair: room beside its line. Needs that ask the same are one object. */
-export interface Need {
-  readonly halfLength: number;
-  readonly punch: readonly Interval[];
-  readonly die: readonly Interval[];
-}
 
 /** Questions about one station alone on the bed. */
 export interface Alone {
-  /** Null when the pair cannot make the move now, whatever the station's lengths. */
-  readonly need: (move: number, formed: number, pair: number) => Need | null;
-  readonly holds: (kind: StationKind, need: Need) => boolean;
+  /** Can a station of this kind make the move now? */
+  readonly can: (kind: StationKind, move: number, formed: number) => boolean;
+  /** Is it known without asking that it cannot? */
+  readonly cannot: (kind: StationKind, move: number, formed: number) => boolean;
   /** How the step is gauged and what it leaves unmet at the least, with a pair that can make it. */
   readonly option: (move: number, formed: number, pair: number) => StepOption;
 }
 
+/** What was learned of one kind of station. */
+interface Learned { readonly facts: Facts; readonly known: Map<number, boolean> }
+
 export function createAlone(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): Alone {
-  const { moves, pairs, machine, allowed } = situation;
-  const interned = new Map<string, Need>();
-  const needs = pairs.map(() => new Map<number, Need | null>());
+  const { moves, pairs, machine, allowed, clearance } = situation;
   const options = pairs.map(() => new Map<number, StepOption>());
-  const held = new WeakMap<StationKind, Map<Need, boolean>>();
-  const find = (move: number, formed: number, pair: number): Need | null => {
-    const tools = pairs[pair];
-    if (!tools || !allowed(move, formed) || !checks.possible(move, formed, pair)) return null;
-    const need = {
-      halfLength: moves[move]?.halfLength ?? 0,
-      punch: checks.forbidden(move, formed, pair, tools.punch),
-      die: checks.forbidden(move, formed, pair, tools.die),
-    };
-    const key = `${need.halfLength}|${need.punch.join()}|${need.die.join()}`;
-    const known = interned.get(key) ?? need;
-    interned.set(key, known);
-    return known;
+  const ofPair = pairs.map(() => createFacts(moves.length));
+  const kinds = new Map<StationKind, Learned>();
+  const learnedOf = (kind: StationKind): Learned => {
+    const learned = kinds.get(kind) ?? { facts: createFacts(moves.length), known: new Map<number, boolean>() };
+    kinds.set(kind, learned);
+    return learned;
   };
+  const find = ({ pair, punchLength, dieLength }: StationKind, facts: Facts, move: number, formed: number): boolean => {
+    const tools = pairs[pair];
+    if (!tools || !allowed(move, formed)) return false;
+    if (!checks.possible(move, formed, pair)) {
+      const pattern = blockedPattern(situation, checks, move, formed, [tools]);
+      if (pattern) ofPair[pair]?.block(move, pattern);
+      return false;
+    }
+    const reach = Math.min(punchLength, dieLength) / 2 - (moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd;
+    const found = freeShifts(reach, [
+      { offset: 0, length: punchLength, forbidden: checks.forbidden(move, formed, pair, tools.punch) },
+      { offset: 0, length: dieLength, forbidden: checks.forbidden(move, formed, pair, tools.die) },
+    ]).length > 0;
+    if (found) return true;
+    const met = (tool: typeof tools.punch | typeof tools.die) => clearance.inStroke(checks.hitOf(move, formed), tools.punch, tools.die, tool);
+    const pattern = roomPattern(reach, [{ length: punchLength, met: met(tools.punch) }, { length: dieLength, met: met(tools.die) }], formed);
+    if (pattern) facts.block(move, pattern);
+    return false;
+  };
+  const cannot = (kind: StationKind, move: number, formed: number) => ofPair[kind.pair]?.blocked(move, formed) === true || learnedOf(kind).facts.blocked(move, formed);
   return {
-    need: (move, formed, pair) => {
-      const known = needs[pair];
+    cannot,
+    can: (kind, move, formed) => {
+      if (cannot(kind, move, formed)) return false;
+      const { facts, known } = learnedOf(kind);
       const key = formed * moves.length + move;
-      const answer = known?.get(key);
-      if (answer !== undefined) return answer;
-      const found = find(move, formed, pair);
-      known?.set(key, found);
-      return found;
-    },
-    holds: (kind, need) => {
-      const known = held.get(kind) ?? new Map<Need, boolean>();
-      held.set(kind, known);
-      const answer = known.get(need);
-      if (answer !== undefined) return answer;
-      const reach = Math.min(kind.punchLength, kind.dieLength) / 2 - need.halfLength + machine.settings.maxUncoveredEnd;
-      const found = freeShifts(reach, [
-        { offset: 0, length: kind.punchLength, forbidden: need.punch },
-        { offset: 0, length: kind.dieLength, forbidden: need.die },
-      ]).length > 0;
-      known.set(need, found);
-      return found;
+      const answer = known.get(key) ?? find(kind, facts, move, formed);
+      known.set(key, answer);
+      return answer;
     },
     option: (move, formed, pair) => {
       const known = options[pair];

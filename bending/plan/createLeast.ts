@@ -1,3 +1,4 @@
+import { bitCount } from "../order/bitCount";
 import { createFacts, type BlockedPattern } from "../order/createFacts";
 import type { LeastOption } from "../order/orderProblem";
 import { pickBits } from "../order/pickBits";
@@ -82,7 +83,7 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
 function windowOf(patterns: readonly GaugePattern[]): number {
   let window = 0;
   let count = 0;
-  for (const { mask } of [...patterns].sort((a, b) => bits(a.mask) - bits(b.mask))) {
+  for (const { mask } of [...patterns].sort((a, b) => bitCount(a.mask) - bitCount(b.mask))) {
     for (let rest = mask & ~window; rest !== 0 && count < BENDS_TOLD_APART; rest &= rest - 1) {
       window |= rest & -rest;
       count += 1;
@@ -122,7 +123,7 @@ function createSettings(situation: Situation, numbers: GaugeNumbers) {
   return {
     /** For every state of the window the set of places that there may be. */
     sets: (patterns: readonly GaugePattern[], window: number, pick: (set: number) => number): Int32Array => {
-      const size = 2 ** bits(window);
+      const size = 2 ** bitCount(window);
       const sets = new Int32Array(size);
       for (const pattern of patterns) {
         const place = placeOf(pattern);
@@ -148,9 +149,3 @@ function createSettings(situation: Situation, numbers: GaugeNumbers) {
 
 /** mm. Over rounding noise, far under what settings are told apart by. */
 const NOISE_MM = 1e-6;
-
-function bits(set: number): number {
-  let count = 0;
-  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
-  return count;
-}

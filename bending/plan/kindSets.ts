@@ -15,10 +15,14 @@ export interface KindSet {
 /** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */
 const SAME_SHUT_HEIGHT_MM = 0.1;
 
+/** mm. Over rounding noise; the search itself decides what is as near as this. */
+const NOISE_MM = 1e-3;
+
 /** The sets of `count` kinds that may be better than what is kept; null when told to stop. */
 export function kindSets(question: BedQuestion, count: number): readonly KindSet[] | null {
   const { situation, keeper, least, budget } = question;
   const { machine, pairs } = situation;
+  const longest = longestNeeded(question);
   const kinds = [...kindsFor(situation, count, question.favoured)].sort((a, b) => a.pieces - b.pieces);
   const fewest = kinds[0]?.pieces ?? 0;
   const heightOf = ({ pair }: StationKind) => (pairs[pair]?.punch.height ?? 0) + (pairs[pair]?.die.height ?? 0);
@@ -34,6 +38,7 @@ export function kindSets(question: BedQuestion, count: number): readonly KindSet
       if (setup + least * budget.batch >= worst) break;
       if (chosen[0] && Math.abs(heightOf(chosen[0]) - heightOf(one)) > SAME_SHUT_HEIGHT_MM) continue;
       const longer = [...chosen, one];
+      if (left === 0 && !longer.some((kind) => Math.min(kind.punchLength, kind.dieLength) >= longest)) continue;
       if (left > 0) {
         if (!add(longer, pieces + one.pieces, next + 1)) return false;
         continue;
@@ -44,6 +49,12 @@ export function kindSets(question: BedQuestion, count: number): readonly KindSet
     return true;
   };
   return add([], 0, 0) ? found : null;
+}
+
+/** mm. Some station holds the bend with the longest line, however it is made; what may stay uncovered taken off. */
+function longestNeeded({ situation: { moves, part, machine } }: BedQuestion): number {
+  const lines = part.bends.map((_, bend) => Math.min(...moves.filter(({ bends }) => bends.includes(bend)).map(({ halfLength }) => 2 * halfLength)));
+  return Math.max(0, ...lines) - 2 * machine.settings.maxUncoveredEnd - NOISE_MM;
 }
 
 /** Every station is walked to at least once, the nearest two standing near each other. */

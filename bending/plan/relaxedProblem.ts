@@ -47,7 +47,7 @@ export function relaxedProblem(situation: Situation, checks: StepChecks, numbers
   const find = (move: number, formed: number): StepOption | null => {
     const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), least.of(move, formed)?.demerit ?? 0);
     if (best === null) {
-      const pattern = blockedPattern(situation, checks, move, formed);
+      const pattern = blockedPattern(situation, checks, move, formed, pairs, (pair) => shortest[move]?.[pair]);
       if (pattern) least.block(move, pattern);
       return null;
     }

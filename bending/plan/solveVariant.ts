@@ -1,3 +1,4 @@
+import { createCostSoFar } from "../order/createCostSoFar";
 import { fullestDeadEnd } from "../order/fullestDeadEnd";
 import { bedQuestionOf } from "./bedQuestionOf";
 import { constructBeds } from "./constructBeds";
@@ -6,6 +7,7 @@ import { createCandidateKeeper, type Candidate } from "./createCandidateKeeper";
 import { createGaugeNumbers } from "./gaugeNumbers";
 import type { StepChecks } from "./createStepChecks";
 import { relaxedProblem } from "./relaxedProblem";
+import { kindSets } from "./kindSets";
 import { remainingBound } from "../order/remainingBound";
 import { searchBeds } from "./searchBeds";
 import { setupSeconds } from "./setupSeconds";
@@ -52,9 +54,12 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
 
-  const question = bedQuestionOf(asked, relaxed, budget, keeper, { steps: best.steps, least: best.weight, soFar });
-  constructBeds(question, best.steps);
-  if (enough()) return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.weight * budget.batch), { stopped: true });
+  const first = bedQuestionOf(asked, relaxed, budget, keeper, { steps: best.steps, least: best.weight, soFar });
+  const least = Math.min(...(kindSets(first, 1) ?? []).map((set) => set.floor), setupSeconds(situation.machine, 2) + best.weight * budget.batch);
+  const done = () => keeper.worst() <= least || enough();
+  constructBeds(first, best.steps, done);
+  if (enough()) return answer(least, { stopped: true });
+  const question = keeper.worst() <= least ? first : { ...first, limits: { ...first.limits, soFar: createCostSoFar(relaxed, budget.shouldStop) } };
   let open = Infinity;
   for (let count = 1; count <= Math.min(MOST_STATIONS, situation.part.bends.length) && open === Infinity; count += 1) {
     const searched = searchBeds(question, count);
