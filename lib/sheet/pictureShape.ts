@@ -3,7 +3,7 @@ import type { Vec2 } from "@/bending/geometry/vec2";
 /** What a shape of a drawing stands for; the renderer gives it its colour and line. */
 export type ShapeKind =
   | "ram" | "bed" | "punch" | "die" | "finger"
-  | "sheet-cut" | "sheet-beyond" | "sheet-before" | "front-face" | "bend-zone"
+  | "sheet-cut" | "sheet-met" | "sheet-beyond" | "sheet-before" | "front-face" | "bend-zone"
   | "bend-line" | "bend-done" | "bend-to-come" | "gauged-edge" | "tool-extent" | "arrow" | "centre";
 
 export interface PictureShape {

@@ -20,6 +20,7 @@ export const shapeLook: Record<ShapeKind, ShapeLook> = {
   die: { fill: "steel-300", line: "steel-600", width: 1.25 },
   finger: { fill: "amber-wash", line: "amber", width: 1.25 },
   "sheet-cut": { fill: "accent", line: "accent", width: 1 },
+  "sheet-met": { fill: "brick", line: "brick", width: 2 },
   "sheet-beyond": { fill: "accent-wash", line: "accent", width: 0.75, fade: 0.85 },
   "sheet-before": { fill: "steel-400", line: null, width: 0, fade: 0.4 },
   "front-face": { fill: "sheet", line: "accent", width: 0.75, fade: 0.95 },

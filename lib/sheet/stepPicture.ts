@@ -19,28 +19,37 @@ import { upSide } from "./upSide";
 /** mm. Farthest that the drawing reaches to the front and to the back of the bend. */
 const REACH_MM = 240;
 
+/** What a drawing of a stroke that cannot be made is about: where the part is cut, and the faces that meet something. */
+export interface MetAt {
+  /** z along the bed, mm. */
+  readonly plane: number;
+  /** Indices of faces. */
+  readonly faces: readonly number[];
+}
+
 /**
  * The step seen along the bed from its right end: a section through the bend with the operator on the left and the back gauge
- * on the right; the sheet before the stroke and bent, punch down (or at another moment of the stroke).
+ * on the right; the sheet before the stroke and bent, punch down (or at another moment of the stroke). With `met` the stroke cannot be made:
+ * nothing is gauged, and the faces that are in the way are marked.
  */
-export function stepPicture(model: PlanModel, step: StepModel, moment: { readonly angle: number; readonly lift: number } = { angle: step.finished, lift: 0 }): StepPicture {
+export function stepPicture(model: PlanModel, step: StepModel, moment: { readonly angle: number; readonly lift: number } = { angle: step.finished, lift: 0 }, met: MetAt | null = null): StepPicture {
   const before = stepFrames(model, step, 0);
   const after = stepFrames(model, step, moment.angle);
-  const plane = sectionPlane(model, step, before);
-  const cutBefore = sections(model, before, plane);
+  const plane = met?.plane ?? sectionPlane(model, step, before);
+  const cutBefore = met ? [] : sections(model, before, plane).map(({ points }) => points);
   const cutAfter = sections(model, after, plane);
-  const tools = toolShapes(model, step, after.tipHeight + moment.lift);
-  const bounds = pictureBounds([...cutAfter, ...tools.near.map((shape) => shape.points)], cutBefore);
+  const tools = toolShapes(model, step, after.tipHeight + moment.lift, met === null);
+  const bounds = pictureBounds([...cutAfter.map(({ points }) => points), ...tools.near.map((shape) => shape.points)], cutBefore);
   const lettering = letteringOf(bounds);
   const shapes: PictureShape[] = [
     ...tools.far,
     ...beyond(model, after),
     ...tools.near,
     ...cutBefore.map((points): PictureShape => ({ kind: "sheet-before", closed: true, points })),
-    ...cutAfter.map((points): PictureShape => ({ kind: "sheet-cut", closed: true, points })),
-    ...edgeMark(model, step, before),
+    ...cutAfter.map(({ points, face }): PictureShape => ({ kind: met?.faces.includes(face) ? "sheet-met" : "sheet-cut", closed: true, points })),
+    ...(met ? [] : edgeMark(model, step, before)),
   ];
-  const marks = signs(model, step, bounds, lettering);
+  const marks = met ? { shapes: [], labels: sides(bounds, lettering) } : signs(model, step, bounds, lettering);
   return finishPicture([...shapes, ...marks.shapes], marks.labels, bounds, lettering);
 }
 
@@ -48,10 +57,10 @@ const letteringOf = ([left, top, right, bottom]: Bounds): number => Math.max(rig
 const look = ([x, y]: readonly [number, number, number]): Vec2 => [x, -y];
 const placed = (profile: readonly ProfilePoint[], x: number, y: number): readonly Vec2[] => profile.map(([px, py]) => [px + x, -(py + y)]);
 
-function sections(model: PlanModel, moment: StrokeMoment, plane: number): readonly (readonly Vec2[])[] {
+function sections(model: PlanModel, moment: StrokeMoment, plane: number): readonly { readonly points: readonly Vec2[]; readonly face: number }[] {
   return sheetPrisms(model.part, moment.frames, moment.angles)
-    .map((prism) => prismSection(prism, plane).map(([x, y]): Vec2 => [x, -y]))
-    .filter((polygon) => polygon.length > 2);
+    .map((prism) => ({ points: prismSection(prism, plane).map(([x, y]): Vec2 => [x, -y]), face: prism.face ?? -1 }))
+    .filter(({ points }) => points.length > 2);
 }
 
 function beyond(model: PlanModel, moment: StrokeMoment): readonly PictureShape[] {
@@ -62,7 +71,7 @@ function beyond(model: PlanModel, moment: StrokeMoment): readonly PictureShape[]
   ];
 }
 
-function toolShapes(model: PlanModel, step: StepModel, tip: number): { far: readonly PictureShape[]; near: readonly PictureShape[] } {
+function toolShapes(model: PlanModel, step: StepModel, tip: number, gauged: boolean): { far: readonly PictureShape[]; near: readonly PictureShape[] } {
   const { machine } = model;
   const closed = (kind: PictureShape["kind"], points: readonly Vec2[]): PictureShape => ({ kind, closed: true, points });
   const finger = step.fingers[0] ?? { x: step.gaugeX, r: step.gaugeR };
@@ -70,7 +79,7 @@ function toolShapes(model: PlanModel, step: StepModel, tip: number): { far: read
     far: [
       closed("ram", placed(machine.ramProfile, 0, tip + step.punch.height)),
       closed("bed", placed(machine.bedProfile, 0, -step.die.height)),
-      closed("finger", placed(machine.gauge.fingerProfile, finger.x, finger.r)),
+      ...(gauged ? [closed("finger", placed(machine.gauge.fingerProfile, finger.x, finger.r))] : []),
     ],
     near: [closed("die", placed(step.die.profile, 0, 0)), closed("punch", placed(step.punch.profile, 0, tip))],
   };
@@ -96,7 +105,7 @@ function edgeMark(model: PlanModel, step: StepModel, before: StrokeMoment): read
 }
 
 function signs(model: PlanModel, step: StepModel, bounds: Bounds, lettering: number): { shapes: readonly PictureShape[]; labels: readonly PictureLabel[] } {
-  const [left, top, right] = bounds;
+  const [left, , right] = bounds;
   const thickness = model.part.thickness;
   const at = left + lettering * 1.1;
   const gauge = Math.min(step.gaugeX, right - lettering);
@@ -110,8 +119,12 @@ function signs(model: PlanModel, step: StepModel, bounds: Bounds, lettering: num
     labels: [
       { kind: "up", text: upSide(model, step), at: [at + lettering * 0.8, -thickness - lettering * 1.6], anchor: "start" },
       { kind: "gauge", text: `X ${format.gauge(step.gaugeX)}`, at: [small ? gauge + lettering * 0.4 : gauge, lettering * (small ? 1.6 : 2.6)], anchor: small ? "start" : "end" },
-      { kind: "front", text: "operator", at: [left + lettering * 0.6, top + lettering * 1.4], anchor: "start" },
-      { kind: "note", text: "gauge", at: [right - lettering * 0.6, top + lettering * 1.4], anchor: "end" },
+      ...sides(bounds, lettering),
     ],
   };
 }
+
+const sides = ([left, top, right]: Bounds, lettering: number): readonly PictureLabel[] => [
+  { kind: "front", text: "operator", at: [left + lettering * 0.6, top + lettering * 1.4], anchor: "start" },
+  { kind: "note", text: "gauge", at: [right - lettering * 0.6, top + lettering * 1.4], anchor: "end" },
+];

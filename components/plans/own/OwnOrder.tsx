@@ -58,11 +58,11 @@ function OwnOrderWork({ detail, shop, mayWrite }: { readonly detail: PlanDetail;
           <Button look="quiet" size="small" icon={<Redo2 aria-hidden />} disabled={!own.mayRedo} onClick={own.redo}>Redo</Button>
           <Button look="quiet" size="small" icon={<RotateCcw aria-hidden />} onClick={own.startOver}>Start over</Button>
         </span>}>
-          <OwnOrderList own={own} states={states} reasons={reasons} choices={choices} />
+          <OwnOrderList own={own} states={states} reasons={reasons} plan={check.plan} choices={choices} />
         </Panel>
         <div className="space-y-4 xl:sticky xl:top-4 xl:self-start">
           <OwnOrderVerdict detail={detail} tried={tried} check={check} mayWrite={mayWrite} />
-          <OwnOrderStage detail={detail} task={task} tried={tried} check={check} />
+          <OwnOrderStage detail={detail} task={task} part={part} check={check} />
         </div>
       </div>
     </div>
