@@ -6,7 +6,7 @@ import type { WhyFacts } from "../whyFacts";
 
 /** The rating that a tool must have for what a plan does with it, kN/m, rounded up. */
 export function ratingNeeded({ attempts: { request }, situations }: WhyFacts, plan: PlanDocument, tools: readonly Tool[], id: string): ChangeAmount {
-  const part = situations.first()?.situation.part;
+  const { part } = situations;
   const forces = plan.steps.filter(({ punch, die }) => punch === id || die === id).map(({ die }) => {
     const found = tools.find((tool) => tool.id === die);
     return part && found?.kind === "die" ? airBendForce(part.material.tensile[1], part.thickness, found.vOpening) * (request.airForceFactor ?? 1) : 0;
