@@ -2,8 +2,10 @@ import { applyFrame } from "../geometry/applyFrame";
 import type { Frame } from "../geometry/frame";
 import { bendFacets } from "../part/bendFacets";
 import type { PartModel } from "../part/partModel";
-import { FACETS_OF_A_FOLD } from "./zonesInMachine";
 import { SQUARE_SINE, type Contact } from "./edgeContacts";
+
+/** A finger may rest on the fold of a hem: finer than for clearance, so that it touches where the fold really is. */
+const FACETS_OF_A_FOLD = 24;
 
 /**
  * The fold of a closed hem on a level face, where it looks to the back of the machine: as good as an edge to a finger. `frame`: the parent's.

@@ -31,7 +31,7 @@ export const largeBrake = {
     fingers: 2, independent: true, x: [8, 800], r: [-30, 200], z: [-1500, 1500], minSpread: 60,
     fingerProfile, fingerWidth: 40,
   },
-  settings: { clearance: 1, maxSectionGap: 5, maxUncoveredEnd: 5, angleRepeat: 0.3, gaugeRepeat: 0.1 },
+  settings: { clearance: 1, maxSectionGap: 5, maxUncoveredEnd: 5, angleRepeat: 0.3, gaugeRepeat: 0.1, offCentre: [[400, 1], [1550, 0.5]] },
   times: { flip: 4, turn: 3, walkPerMetre: 2, stroke: 4, gaugeMove: 1.5, stationSetup: 60, sectionPlace: 8 },
 } as const;
 

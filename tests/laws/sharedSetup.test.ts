@@ -109,6 +109,20 @@ describe("sharedSetup", () => {
     expect(sharedSetup(wishes, stock, machine(399, 0, 0))).toMatchObject({ status: "unknown", reasons: [expect.stringContaining("no part comes to another station")] });
   });
 
+  it("stands the stronger load within the machine's off-centre diagram", () => {
+    const strong: SharedWish = { id: "strong", lineLength: 100, sheet: [-50, 50], forceKN: 500, ways: [{ punch: "p", die: "v", punchWindow: [-50, 50], dieWindow: [-500, 500] }] };
+    const weak: SharedWish = { ...strong, id: "weak", lineLength: 50, forceKN: 10, ways: [{ punch: "p", die: "v", punchWindow: [-25, 25], dieWindow: [-500, 500] }] };
+    const stock = [tool("punch", "p", [50, 100]), tool("die", "v", [50, 100])];
+    const plain = machine(1000, 0, 0);
+    const brake = { ...plain, settings: { ...plain.settings, offCentre: [[mm(20), 0.4]] as const } };
+    const z = (setup: SharedSetup) => Math.abs(setup.stations.flatMap(({ wishes }) => wishes).find(({ id }) => id === "strong")?.z ?? NaN);
+    expect(z(sharedSetup([strong, weak], stock, plain))).toBeGreaterThan(20);
+    // 500 of 1000 kN: 5/6 of the way to the point at 20 mm.
+    expect(z(sharedSetup([strong, weak], stock, brake))).toBeCloseTo(20 * 5 / 6, 6);
+    expect(wrongWith(sharedSetup([strong, weak], stock, brake), [strong, weak], brake)).toEqual([]);
+    expect(sharedSetup([strong, { ...weak, forceKN: 999 }], stock, brake).status).toBe("unknown");
+  });
+
   it("says what is missing", () => {
     const way: SharedWay = { punch: "p", die: "v", punchWindow: [-500, 500], dieWindow: [-500, 500] };
     const wish: SharedWish = { id: "b1", lineLength: 80, sheet: [-40, 40], forceKN: 1, ways: [way] };

@@ -22,7 +22,7 @@ export function sharedReasons({ wishes, stocks, classes, machine, leastStations,
     return classes.map(({ height, missing }) => `at a shut height of ${mm(height)} no tools make ${names(missing)}; all stations on one bed close at one height`);
   }
   if (spent) return [`no bed was found in the effort given; it needs ${leastStations} ${leastStations === 1 ? "station" : "stations"} at the least`];
-  if (lost) return [`stations were found, but not a place on the bed of ${mm(machine.bedLength)} where no part comes to another station; fewer parts on one bed, or a longer bed, may do`];
+  if (lost) return [`stations were found, but not a place on the bed of ${mm(machine.bedLength)} where no part comes to another station and the machine bears every load; fewer parts on one bed, or a longer bed, may do`];
   return [`no division of the ${wishes.length} bends among stations can be made of the pieces in stock on a bed of ${mm(machine.bedLength)} with ${mm(NEAR_GAP_MM)} between two; it needs ${leastStations} at the least`];
 }
 

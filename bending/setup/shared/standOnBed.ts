@@ -1,5 +1,7 @@
 import type { Interval } from "../../geometry/interval";
 import type { Machine } from "../../tooling/machine";
+import { offCentreReach } from "../../tooling/offCentre";
+import { shiftNearMiddle, type StationLoad } from "../nearMiddle";
 import { NEAR_GAP_MM } from "../placeStations";
 import type { SharedWay, SharedWish } from "./sharedWish";
 
@@ -25,9 +27,11 @@ interface Served { readonly wish: SharedWish; readonly lineAt: number; readonly 
  * place on it, where the part sticks out least to the farther side. Between two neighbours is room for a hand and for the
  * part of either, so that no part comes where another station stands. With e the room that a station wants beside it, the room between
  * neighbours is at least all e less the least one in any order, and just that where the e rise or fall all the way;
- * the strongest load stands nearest the middle where the bed is long enough for it.
+ * the strongest load stands nearest the middle where the bed is long enough for it. The whole is then moved along the bed as far as the
+ * machine's off-centre diagram asks.
  */
-export function standOnBed(stations: readonly StandingStation[], wishes: readonly SharedWish[], { bedLength, settings }: Machine): readonly StationPlace[] | null {
+export function standOnBed(stations: readonly StandingStation[], wishes: readonly SharedWish[], machine: Machine): readonly StationPlace[] | null {
+  const { bedLength, settings } = machine;
   const served = stations.map((): Served[] => []);
   for (const wish of wishes) {
     const places = stations.flatMap((station, index) => wish.ways.filter(({ punch, die }) => punch === station.punch && die === station.die).flatMap((way) => {
@@ -49,10 +53,14 @@ export function standOnBed(stations: readonly StandingStation[], wishes: readonl
     const [last, first] = [order[order.length - 1] ?? 0, order[0] ?? 0];
     const total = (z[last] ?? 0) + (length[last] ?? 0) / 2 - (z[first] ?? 0) + (length[first] ?? 0) / 2;
     if (total > bedLength + 1e-6) continue;
+    const loads = served.flatMap((ofStation, station) => ofStation.map(({ wish, lineAt }): StationLoad => ({ station, offset: lineAt, reach: offCentreReach(machine, wish.forceKN) })));
+    const start = -total / 2;
+    const by = start + shiftNearMiddle(z.map((middle, station) => ({ z: middle + start, length: length[station] ?? 0 })), loads, bedLength);
+    if (loads.some(({ station, offset, reach }) => Math.abs((z[station] ?? 0) + by + offset) > reach + 1e-6)) continue;
     return order.map((station) => ({
       station,
-      z: (z[station] ?? 0) - total / 2,
-      wishes: (served[station] ?? []).map(({ wish, lineAt }) => ({ id: wish.id, z: (z[station] ?? 0) - total / 2 + lineAt })),
+      z: (z[station] ?? 0) + by,
+      wishes: (served[station] ?? []).map(({ wish, lineAt }) => ({ id: wish.id, z: (z[station] ?? 0) + by + lineAt })),
     }));
   }
   return null;

@@ -13,6 +13,10 @@ const mmOf = (value: number) => num(formatLength(value, "mm"));
 const range = ([from, to]: readonly [number, number]) => num(`${formatNumber(from, 1)} to ${formatNumber(to, 1)} mm`);
 const seconds = (value: number, each = "s") => num(`${formatNumber(value, 1)} ${each}`);
 
+/** What the brake bears with the load so far from the middle of the bed; in between the straight line holds. */
+const offCentre = (maxForce: number, points: readonly (readonly [number, number])[] | undefined) => (points === undefined ? "the same all along"
+  : points.map(([distance, share], index) => <span key={distance}>{index > 0 && ", "}{num(formatForce(maxForce * share))} at {mmOf(distance)}</span>));
+
 /** A brake with everything that the planner knows of it. */
 export function MachineCard({ machine: view }: { readonly machine: MachineView }) {
   const read = readMachineDocument(view.document);
@@ -28,7 +32,7 @@ export function MachineCard({ machine: view }: { readonly machine: MachineView }
           <h3 className="caption mb-1">Frame and force</h3>
           <Facts rows={[
             { label: "Bed", value: mmOf(machine.bedLength) }, { label: "Between the frames", value: mmOf(machine.betweenFrames) }, { label: "Throat", value: mmOf(machine.throatDepth) },
-            { label: "Most force", value: num(formatForce(machine.maxForce)) }, { label: "Daylight", value: mmOf(machine.daylight) }, { label: "Stroke", value: mmOf(machine.stroke) },
+            { label: "Most force", value: num(formatForce(machine.maxForce)) }, { label: "Off the middle of the bed", value: offCentre(machine.maxForce, settings.offCentre) }, { label: "Daylight", value: mmOf(machine.daylight) }, { label: "Stroke", value: mmOf(machine.stroke) },
             { label: "Holds punches with tang", value: machine.punchTang }, { label: "Holds dies with tang", value: machine.dieTang },
           ]} />
         </div>
