@@ -12,6 +12,7 @@ import { PlanHeader } from "./PlanHeader";
 import { PlanProof } from "./PlanProof";
 import { PlanReasons } from "./PlanReasons";
 import { PlanWork } from "./PlanWork";
+import { ToleranceTable } from "./ToleranceTable";
 
 /** One stored plan. The tab stands in the address, so that it is there again on coming back. */
 export function PlanScreen({ id, mayWrite }: { readonly id: string; readonly mayWrite: boolean }) {
@@ -21,7 +22,7 @@ export function PlanScreen({ id, mayWrite }: { readonly id: string; readonly may
   return (
     <>
       <PlanHeader detail={data} mayWrite={mayWrite} />
-      <JobsUnderWay of={{ planId: id }} mayWrite={mayWrite} except={({ kind }) => kind === "check"} />
+      <JobsUnderWay of={{ planId: id }} mayWrite={mayWrite} except={({ kind }) => kind !== "plan"} />
       <PlanTabs key={id} detail={data} mayWrite={mayWrite} />
     </>
   );
@@ -37,6 +38,7 @@ function PlanTabs({ detail, mayWrite }: { readonly detail: PlanDetail; readonly 
     works ? { value: "plan", label: "Order and bed", content: <PlanWork detail={detail} /> } : { value: "plan", label: "What stands in the way", content: <PlanReasons detail={detail} mayWrite={mayWrite} /> },
     { value: "own", label: "Your own order", content: <OwnOrder detail={detail} mayWrite={mayWrite} /> },
     ...(works ? [{ value: "others", label: `Other plans (${others})`, content: <OtherPlans detail={detail} mayWrite={mayWrite} /> }] : []),
+    ...(works ? [{ value: "tolerances", label: "Tolerances", content: <ToleranceTable detail={detail} /> }] : []),
     { value: "flat", label: "Flat", content: <FlatNumbers plan={detail.plan} /> },
     { value: "proof", label: works ? "Proof and time" : "Proof", content: <PlanProof detail={detail} mayWrite={mayWrite} /> },
   ];

@@ -7,7 +7,6 @@ import { Choice } from "@/components/ui/Choice";
 import { DataTable, type Column, type ListState } from "@/components/ui/DataTable";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { StateMark } from "@/components/ui/StateMark";
-import { asSentence } from "@/lib/format/asSentence";
 import type { PlanDetail } from "@/lib/schemas/views";
 import { createSheetFormat } from "@/lib/sheet/createSheetFormat";
 import { toleranceState } from "@/lib/sheet/toleranceState";
@@ -55,7 +54,7 @@ function columns(units: PlanDetail["plan"]["units"]): readonly Column<PlanTolera
   const inUnits = (value: number) => gauge(value * mmPer(units));
   const plusMinus = (value: number | null | undefined) => <span className="num whitespace-nowrap">{value === undefined ? "" : value === null ? "unbounded" : `±${inUnits(value)}`}</span>;
   return [
-    { key: "name", header: "Dimension", rowHeader: true, cell: (row) => <span className="font-medium">{asSentence(toleranceName(row), [row.face, row.from, row.to])}</span> },
+    { key: "name", header: "Dimension", rowHeader: true, cell: (row) => <span className="font-medium">{row.kind === "overall" ? toleranceName(row).replace("over", "Over") : toleranceName(row)}</span> },
     { key: "nominal", header: `Nominal, ${units}`, align: "right", sortable: true, cell: (row) => <span className="num">{inUnits(row.nominal)}</span> },
     { key: "asked", header: "Asked for", align: "right", cell: (row) => plusMinus(row.asked) },
     { key: "worst", header: "At worst", align: "right", sortable: true, cell: (row) => plusMinus(row.worstCase) },
