@@ -15,7 +15,8 @@ import { stepLoad } from "./stepLoad";
 export function bedsOf(question: BedQuestion, stations: readonly Station[], wanted: readonly OrderStep[]): readonly Layout[] {
   const { situation, checks } = question;
   const { machine } = situation;
-  const near = placeStations(stations, [NEAR_GAP_MM], machine);
+  const strokes = wanted.map(({ station }) => station);
+  const near = placeStations(stations, [NEAR_GAP_MM], machine, strokes);
   if (stations.length < 2) return near;
   const loads = machine.settings.offCentre === undefined ? [] : wanted.flatMap((step): readonly StationLoad[] => {
     const station = stations[step.station];
@@ -31,11 +32,11 @@ export function bedsOf(question: BedQuestion, stations: readonly Station[], want
   near.forEach((layout, order) => {
     if (clears(layout)) return;
     for (const gap of gaps) {
-      const wider = placeStations(stations, [gap], machine)[order];
+      const wider = placeStations(stations, [gap], machine, strokes)[order];
       if (wider && clears(wider)) { between.push(wider); return; }
     }
   });
-  return borne([...near, ...between, ...placeStations(stations, [overhang], machine)]);
+  return borne([...near, ...between, ...placeStations(stations, [overhang], machine, strokes)]);
 }
 
 /** Gaps at which a neighbour's run just ends where a wanted step's forbidden room begins. */
