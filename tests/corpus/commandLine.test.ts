@@ -79,6 +79,15 @@ describe("the command line", () => {
     expect((none.json as PlanDocument).reasons.length).toBeGreaterThan(0);
   });
 
+  it("says where an own order fails; with --why the least changes, with --robustness how firm a plan is", () => {
+    const failing = runCommand(["check", "hat.json", ...SHOP, "--order", "b2,b3,b1,b4"], world);
+    expect([failing.exitCode, (failing.json as PlanDocument).firstFailure]).toEqual([3, expect.objectContaining({ done: ["b2", "b3"], step: 3 })]);
+    const why = runCommand(["plan", "shortLeg.json", ...SHOP, "--why"], world);
+    expect([why.exitCode, (why.json as PlanDocument).changes?.map(({ kind, amount }) => [kind, amount?.value])]).toEqual([3, [["longer-flange", 8]]]);
+    const firm = runCommand(["plan", "hat.json", ...SHOP, "--robustness", "--batch", "20"], world);
+    expect([firm.exitCode, (firm.json as PlanDocument).robustness?.settings[0]]).toEqual([0, expect.objectContaining({ setting: "flip", low: expect.objectContaining({ factor: 0.375 }) })]);
+  });
+
   it.each([
     [[], "verb"],
     [["fold", "u.json"], "fold"],

@@ -25,8 +25,7 @@ export function missingLengths(lines: readonly number[], stock: readonly ToolPie
   for (const need of needs) {
     for (const [sum, count] of sums) {
       for (const gaps of count > 0 ? [0, count * settings.maxSectionGap] : [0]) {
-        const length = Number((need - sum - gaps).toFixed(3));
-        if (length >= SHORTEST_MM) lengths.add(length);
+        if (sum < need) lengths.add(Math.max(SHORTEST_MM, Number((need - sum - gaps).toFixed(3))));
       }
     }
   }
