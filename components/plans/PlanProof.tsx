@@ -3,11 +3,12 @@ import { Panel } from "@/components/ui/Panel";
 import { asSentence } from "@/lib/format/asSentence";
 import { createSheetFormat } from "@/lib/sheet/createSheetFormat";
 import type { PlanDetail } from "@/lib/schemas/views";
+import { Firmness } from "./Firmness";
 import { SearchOn } from "./SearchOn";
 
 /** How it is known that the plan is that good, over what, and what it takes; and the way to search on where the time ended the search. */
 export function PlanProof({ detail, mayWrite }: { readonly detail: PlanDetail; readonly mayWrite: boolean }) {
-  const { plan, ended, limitSeconds } = detail;
+  const { plan, ended, limitSeconds, origin } = detail;
   const format = createSheetFormat(plan.units);
   const works = plan.steps.length > 0;
   const saved = plan.seconds.total - plan.proof.bound;
@@ -35,8 +36,10 @@ export function PlanProof({ detail, mayWrite }: { readonly detail: PlanDetail; r
             { label: "Each part", value: <span className="num">{format.time(plan.seconds.perPart)}</span> },
             { label: `Batch of ${plan.batch}`, value: <span className="num">{format.time(plan.seconds.total)}</span> },
           ]} />
+          <p className="mt-3 text-sm text-ink-faint">Times are the brake’s settings; the plan is as good as they are.</p>
         </Panel>
       ) : null}
+      {plan.status === "optimal" && origin !== "chosen" ? <div className="lg:col-span-2"><Firmness detail={detail} mayWrite={mayWrite} /></div> : null}
     </div>
   );
 }

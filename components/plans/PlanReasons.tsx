@@ -13,6 +13,7 @@ import { mmPer } from "@/bending/core/units";
 import { asSentence } from "@/lib/format/asSentence";
 import { createSheetFormat } from "@/lib/sheet/createSheetFormat";
 import type { PlanDetail } from "@/lib/schemas/views";
+import { FindChanges } from "./changes/FindChanges";
 import { FlatEvidence } from "./FlatEvidence";
 
 /** Why there is no plan: each reason can be chosen, and shows the bends, faces and tools that it is about. */
@@ -26,24 +27,30 @@ export function PlanReasons({ detail, mayWrite }: { readonly detail: PlanDetail;
   const reason = plan.reasons[chosen];
   if (!reason) return <EmptyState title="No reason was recorded">Plan the part again.</EmptyState>;
   return (
-    <div className="grid gap-8 lg:grid-cols-2">
-      <Panel title="What stands in the way" aside={`${plan.reasons.length} ${plan.reasons.length === 1 ? "reason" : "reasons"}`}>
-        <ul className="border-t border-rule">
-          {plan.reasons.map((entry, index) => (
-            <li key={index} className="border-b border-rule">
-              <button type="button" aria-pressed={index === chosen} onClick={() => setChosen(index)}
-                className={classes("flex w-full items-baseline gap-3 px-3 py-2.5 text-left", index === chosen ? "border-l-4 border-brick bg-brick-wash" : "border-l-4 border-transparent hover:bg-wash")}>
-                <span className="num text-ink-faint">{index + 1}</span><span>{asSentence(entry.message, [...entry.bends, ...entry.tools])}</span>
-              </button>
-            </li>
-          ))}
-        </ul>
-        <p className="mt-3 text-sm text-ink-soft">{asSentence(plan.proof.method)}</p>
-        <NextMoves detail={detail} mayWrite={mayWrite} />
-      </Panel>
-      <Panel title="Where" aside="The unfolded sheet, what the reason is about marked">
-        {part ? <FlatEvidence part={part} bends={reason.bends} faces={reason.faces} className="h-80 w-full border border-rule bg-sheet" /> : null}
-        <div className="mt-3"><Facts rows={evidence(reason, detail)} /></div>
+    <div className="space-y-8">
+      <div className="grid gap-8 lg:grid-cols-2">
+        <Panel title="What stands in the way" aside={`${plan.reasons.length} ${plan.reasons.length === 1 ? "reason" : "reasons"}`}>
+          <ul className="border-t border-rule">
+            {plan.reasons.map((entry, index) => (
+              <li key={index} className="border-b border-rule">
+                <button type="button" aria-pressed={index === chosen} onClick={() => setChosen(index)}
+                  className={classes("flex w-full items-baseline gap-3 px-3 py-2.5 text-left", index === chosen ? "border-l-4 border-brick bg-brick-wash" : "border-l-4 border-transparent hover:bg-wash")}>
+                  <span className="num text-ink-faint">{index + 1}</span><span>{asSentence(entry.message, [...entry.bends, ...entry.tools])}</span>
+                </button>
+              </li>
+            ))}
+          </ul>
+          <p className="mt-3 text-sm text-ink-soft">{asSentence(plan.proof.method)}</p>
+          <NextMoves detail={detail} mayWrite={mayWrite} />
+        </Panel>
+        <Panel title="Where" aside="The unfolded sheet, what the reason is about marked">
+          {part ? <FlatEvidence part={part} bends={reason.bends} faces={reason.faces} className="h-80 w-full border border-rule bg-sheet" /> : null}
+          <div className="mt-3"><Facts rows={evidence(reason, detail)} /></div>
+        </Panel>
+      </div>
+      <Panel title="What would make it work" aside="the least of each kind, each really planned">
+        {plan.firstFailure ? <p className="mb-3 max-w-prose">{plan.firstFailure.message}</p> : null}
+        <FindChanges detail={detail} mayWrite={mayWrite} tried={null} />
       </Panel>
     </div>
   );

@@ -91,6 +91,8 @@ export const apiAccess = {
   "POST /api/plans/[id]/alternatives": "plans:write",
   "POST /api/plans/[id]/checks": "plans:write",
   "POST /api/plans/[id]/more-time": "plans:write",
+  "POST /api/plans/[id]/changes": "plans:write",
+  "POST /api/plans/[id]/robustness": "plans:write",
   "GET /api/plans/[id]/shop": "plans:read",
   "GET /api/plan-jobs": "plans:read",
   "POST /api/plan-jobs/[id]/finish": "plans:write",

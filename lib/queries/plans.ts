@@ -1,5 +1,5 @@
 import { keepPreviousData, queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
-import type { OwnOrderInput, PlanListQuery, StartPlanInput } from "@/lib/schemas/planInputs";
+import type { FindChangesInput, OwnOrderInput, PlanListQuery, StartPlanInput } from "@/lib/schemas/planInputs";
 import type { Page, PlanDetail, PlanJobView, PlanListItem, PlanShopView } from "@/lib/schemas/views";
 import { useKeepJob } from "./planJobs";
 import { queryText } from "./queryText";
@@ -55,6 +55,12 @@ export const useCheckPlan = (planId: string) => useJobStarter(() => request<Plan
 
 /** Searches on with so many seconds more. */
 export const useSearchOn = (planId: string) => useJobStarter((moreSeconds: number) => request<PlanJobView>(of(planId, "more-time"), { method: "POST", body: { moreSeconds } }));
+
+/** Looks for what would make the plan, or an order of one's own, work. */
+export const useFindChanges = (planId: string) => useJobStarter((input: FindChangesInput) => request<PlanJobView>(of(planId, "changes"), { method: "POST", body: input }));
+
+/** Looks how far the time settings may be off. */
+export const useFindRobustness = (planId: string) => useJobStarter(() => request<PlanJobView>(of(planId, "robustness"), { method: "POST" }));
 
 /** Makes one of the other plans a plan of its own. */
 export function useChooseAlternative(planId: string) {

@@ -50,6 +50,10 @@ export const ownOrderSchema = z.strictObject({
 });
 export type OwnOrderInput = z.input<typeof ownOrderSchema>;
 
+/** Without an order: what the plan itself is about. */
+export const findChangesSchema = ownOrderSchema.omit({ limitSeconds: true }).partial();
+export type FindChangesInput = z.input<typeof findChangesSchema>;
+
 export const chooseAlternativeSchema = z.strictObject({ index: z.number().int("must be a whole number").min(0, "must be 0 or more").max(100) });
 export type ChooseAlternativeInput = z.input<typeof chooseAlternativeSchema>;
 

@@ -10,6 +10,7 @@ import { buildPart } from "@/bending/part/buildPart";
 import { plannedBends } from "@/bending/plan/plannedBends";
 import { usePlanShop } from "@/lib/queries/plans";
 import type { PlanDetail, PlanShopView } from "@/lib/schemas/views";
+import { FindChanges } from "../changes/FindChanges";
 import { OwnOrderList } from "./OwnOrderList";
 import { OwnOrderVerdict } from "./OwnOrderVerdict";
 import { OwnOrderStage } from "./OwnOrderStage";
@@ -65,6 +66,14 @@ function OwnOrderWork({ detail, shop, mayWrite }: { readonly detail: PlanDetail;
           <OwnOrderStage detail={detail} task={task} part={part} check={check} />
         </div>
       </div>
+      {check.failure === null ? null : (
+        <Panel title="What would make this order work" aside="the least of each kind, each really planned">
+          <FindChanges detail={detail} mayWrite={mayWrite} tried={tried} act={(change) => {
+            const { order } = change;
+            return order === undefined ? null : <Button look="plain" size="small" className="mt-1" onClick={() => own.settle(order)}>Take this order</Button>;
+          }} />
+        </Panel>
+      )}
     </div>
   );
 }
