@@ -7,7 +7,10 @@ import type { Question } from "./question";
 
 export const NOTHING: HalfAnswer = { back: [], front: [] };
 
-/** Where the question's thing must not stand because of a half. A face that lies within what nearer faces forbid is not looked at. */
+/**
+ * Where the question's thing must not stand because of a half. A face that lies within what nearer faces forbid is not looked
+ * at, unless it might forbid more than its own extent.
+ */
 export function askHalf(question: Question, state: HalfState): HalfAnswer {
   const known = state.answers[question.index];
   if (known) return known;
@@ -18,7 +21,7 @@ export function askHalf(question: Question, state: HalfState): HalfAnswer {
 }
 
 function withFace(question: Question, before: HalfAnswer, face: FaceState): HalfAnswer {
-  if (before !== NOTHING) {
+  if (before !== NOTHING && !question.everywhere?.pieces.length) {
     const { z } = face.bounds();
     if (before.back.some(([from, to]) => from <= z[0] - question.margin && to >= z[1] + question.margin)) return before;
   }

@@ -39,7 +39,11 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     const state: HitState = { front: place.front.at(hit.formed), back: place.back.at(hit.formed) };
     return { place, state, stroke: strokeOf(place, hit.bends[0] ?? 0, punch, die) };
   };
-  const forbidden = ({ moments, standing }: Stroke, state: HitState, tool: Tool): readonly Interval[] => {
+  /** Nothing of punch, die, ram and bed is met in the stroke. */
+  const clearStroke = ({ usual }: Stroke, { front, back }: HitState): boolean => usual.front(front) && usual.back(back);
+  const forbidden = (stroke: Stroke, punch: Punch, die: Die, state: HitState, tool: Tool): readonly Interval[] => {
+    const own = tool === punch || tool === die;
+    const { moments, standing } = stroke;
     const { asked, zone } = standing(tool);
     let found: readonly Interval[] = zone.intervals;
     let lists = found.length ? 1 : 0;
@@ -51,10 +55,10 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
       add(askHalf(front, state.front).front);
       add(askHalf(back, state.back).back);
     };
-    addAll(asked);
+    if (!own || !clearStroke(stroke, state)) addAll(asked);
     for (const moment of moments) {
       const way = moment.way(state);
-      if (way !== null) addAll(moment.ask(way, asked.obstacle));
+      if (way !== null && !(own && moment.nothing(way, state))) addAll(moment.ask(way, asked.obstacle));
     }
     return lists > 1 ? mergeIntervals(found) : lists ? found : NOWHERE;
   };
@@ -91,7 +95,7 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
   return {
     forbidden: (hit, punch, die, tool) => {
       const { state, stroke } = setUp(hit, punch, die);
-      return forbidden(stroke, state, tool);
+      return forbidden(stroke, punch, die, state, tool);
     },
     evidence: (hit, punch, die, tool) => {
       const { place, state, stroke } = setUp(hit, punch, die);
@@ -113,7 +117,11 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     },
     firstBlock: (hit, punch, die) => {
       const { place, state, stroke } = setUp(hit, punch, die);
-      const asks = [() => fixedHit(stroke.ram, state), () => fixedHit(stroke.bed, state), () => firstSelf(place, state), () => trapped(stroke.moments, state)];
+      const clear = clearStroke(stroke, state);
+      const asks = [
+        ...(clear ? [] : [() => fixedHit(stroke.ram, state), () => fixedHit(stroke.bed, state)]),
+        () => firstSelf(place, state), () => trapped(stroke.moments, state),
+      ];
       for (const ask of asks) {
         const hits = ask();
         if (hits.length > 0) return hits;

@@ -19,7 +19,7 @@ export interface HitPlace extends Halves {
 interface Parted { readonly sides: readonly [Half, Half]; readonly self: Self; readonly places: [HitPlace | null, HitPlace | null] }
 
 /** Finds the halves of a hit again; both fronts share them. */
-export function createHitPlaces(part: PartModel, margin: Mm, counts: Counts): (hit: Hit) => HitPlace {
+export function createHitPlaces(part: PartModel, margin: Mm, counts: Counts): (hit: Pick<Hit, "bends" | "front">) => HitPlace {
   const pieces = part.faces.map((face) => convexPieces(face.outline, face.holes));
   const shapes = createBendShapes(part);
   const parted = new Map<string, Parted>();

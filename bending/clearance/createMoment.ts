@@ -12,6 +12,7 @@ import type { Obstacles } from "./createObstacles";
 import { facesOf } from "./facesOf";
 import type { FaceState, HalfState } from "./half";
 import type { Meeting } from "./meeting";
+import { createUsual, type Usual } from "./createUsual";
 import type { Obstacle } from "./obstacle";
 import { strokePlacement } from "./strokePlacement";
 
@@ -35,6 +36,8 @@ export interface Moment {
   readonly way: (state: HitState) => number | null;
   /** What an obstacle is met by on a way. */
   readonly ask: (way: number, obstacle: Obstacle) => Asked;
+  /** Does the part meet nothing at all of punch, die, ram and bed on this way? */
+  readonly nothing: (way: number, state: HitState) => boolean;
   /** For a trapped part, what is in its way, way by way. */
   readonly blocking: (state: HitState) => readonly InTheWay[];
 }
@@ -75,11 +78,18 @@ export function createMoment({ halves, punch, die, angle, machine, margin, obsta
     const { front: ofFront, back: ofBack } = ask(way, obstacle);
     return askHalf(ofFront, front) !== NOTHING || askHalf(ofBack, back) !== NOTHING;
   };
+  const usuals = motions.map((): { readonly front: Usual; readonly back: Usual } | null => null);
+  const usualOf = (way: number) => {
+    const known = usuals[way];
+    if (known) return known;
+    const all = [...tools, ...fixed].map((thing) => ask(way, thing));
+    return (usuals[way] = { front: createUsual(all.map(({ front }) => front)), back: createUsual(all.map(({ back }) => back)) });
+  };
   const free = { front: motions.map((): boolean[] => []), back: motions.map((): boolean[] => []) };
   /** Does the half leave ram, bed and the whole bend line free? */
   const leavesFree = (way: number, side: "front" | "back", half: HalfState): boolean => {
     const row = free[side][way] as boolean[];
-    return (row[half.index] ??= fixed.every((thing) => askHalf(ask(way, thing)[side], half) === NOTHING)
+    return (row[half.index] ??= usualOf(way)[side](half) || fixed.every((thing) => askHalf(ask(way, thing)[side], half) === NOTHING)
       && tools.every((thing) => measure(intersectIntervals(askHalf(ask(way, thing)[side], half)[side], lines)) === 0));
   };
   const most = new Map<HalfState, Map<HalfState, number | null>>();
@@ -101,6 +111,7 @@ export function createMoment({ halves, punch, die, angle, machine, margin, obsta
   return {
     angle,
     ask,
+    nothing: (way, { front, back }) => usualOf(way).front(front) && usualOf(way).back(back),
     way: (state) => {
       for (let way = 0; way < motions.length; way++) if (leavesFree(way, "front", state.front) && leavesFree(way, "back", state.back)) return way;
       return mostFree(state);

@@ -7,6 +7,7 @@ import { createMoment, type Moment } from "./createMoment";
 import { createObstacles } from "./createObstacles";
 import { meetOwnZone } from "./meetOwnZone";
 import type { Counts } from "./question";
+import { createUsual, type Usual } from "./createUsual";
 import { NO_MEETING, type Meeting } from "./meeting";
 
 /** A tool on the bed while a hit is made. */
@@ -23,6 +24,8 @@ export interface Stroke {
   readonly bed: Asked;
   readonly moments: readonly Moment[];
   readonly standing: (tool: Tool) => Standing;
+  /** Does a half meet nothing of punch, die, ram and bed in the stroke? */
+  readonly usual: { readonly front: Usual; readonly back: Usual };
 }
 
 export interface StrokeFacts {
@@ -42,17 +45,20 @@ export function createStrokes({ machine, margin, demanded, counts }: StrokeFacts
     const end = demanded(bend, die);
     const standing = new Map<Tool, Standing>();
     const moment = (angle: Rad) => createMoment({ halves: place, punch, die, angle, machine, margin, obstacles, asks });
+    const own = [obstacles.ofTool(punch, punch, die), obstacles.ofTool(die, punch, die), obstacles.ram(punch), obstacles.bed(die)];
+    const asked = own.map((obstacle) => asks.stroke(place, obstacle, die, end));
     return {
       end,
       ram: asks.stroke(place, obstacles.ram(punch), die, end),
       bed: asks.stroke(place, obstacles.bed(die), die, end),
       moments: [moment(0 as Rad), moment(end)],
+      usual: { front: createUsual(asked.map(({ front }) => front)), back: createUsual(asked.map(({ back }) => back)) },
       standing: (tool) => {
         const known = standing.get(tool);
         if (known) return known;
         const obstacle = obstacles.ofTool(tool, punch, die);
-        const own = tool === punch || tool === die || tool.id === punch.id || tool.id === die.id;
-        const made = { asked: asks.stroke(place, obstacle, die, end), zone: own ? NO_MEETING : meetOwnZone(place.back, die, obstacle, end, margin) };
+        const makes = tool === punch || tool === die || tool.id === punch.id || tool.id === die.id;
+        const made = { asked: asks.stroke(place, obstacle, die, end), zone: makes ? NO_MEETING : meetOwnZone(place.back, die, obstacle, end, margin) };
         standing.set(tool, made);
         return made;
       },

@@ -1,6 +1,6 @@
 import type { Interval } from "../geometry/interval";
 import { mergeIntervals } from "../geometry/mergeIntervals";
-import { boxGap } from "./boxGap";
+import { boxGap, poseBox } from "./boxGap";
 import type { FaceState } from "./half";
 import { NO_MEETING, type Meeting } from "./meeting";
 import { meetPlates, type Met } from "./meetPlates";
@@ -17,6 +17,8 @@ export function meetFace(question: Question, face: FaceState): Meeting {
   return question.shape.pieces.length === 0 ? NO_MEETING : meetShape(question, face, question.shape);
 }
 
+const posed = new Float64Array(4);
+
 function meetShape(question: Question, face: FaceState, shape: PlacedShape): Meeting {
   const { motion, lift, onBed, margin } = question;
   const bounds = face.bounds();
@@ -25,7 +27,8 @@ function meetShape(question: Question, face: FaceState, shape: PlacedShape): Mee
   let sample = 0;
   while (sample <= steps) {
     const at = POSE_NUMBERS * sample;
-    const gap = boxGap(poses, at, bounds, shape.box, onBed ? lift - (poses[at + 4] as number) : lift);
+    poseBox(poses, at, bounds, posed);
+    const gap = boxGap(posed, shape, onBed ? lift - (poses[at + 4] as number) : lift);
     if (gap <= 0) break;
     sample += Math.max(1, Math.floor(gap / margin));
   }

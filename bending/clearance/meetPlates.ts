@@ -1,5 +1,6 @@
 import { SAME_POINT_MM } from "../core/tolerance";
 import type { Interval } from "../geometry/interval";
+import { gapOfBoxes, poseBox } from "./boxGap";
 import { clipPrism, type Clipped } from "./clipPrism";
 import type { ConvexPiece, Shape } from "./convexPiece";
 import { planeGap } from "./planeGap";
@@ -32,9 +33,10 @@ export function meetPlates(question: Question, { prisms, bounds }: Plates["group
     const raised = onBed ? lift - (poses[at + 4] as number) : lift;
     let next = Infinity;
     let near = false;
+    poseBox(poses, at, bounds, posed);
     for (const one of open) {
       if (one.next <= sample) {
-        const gap = planeGap(poses, at, bounds, one.piece.withMargin, raised);
+        const gap = Math.max(gapOfBoxes(posed, one.piece.box, raised), planeGap(poses, at, bounds, one.piece.withMargin, raised));
         if (gap <= 0) near = true;
         else one.next = sample + Math.max(1, Math.floor(gap / margin));
       }
@@ -65,6 +67,7 @@ interface Plate {
   next: number;
 }
 
+const posed = new Float64Array(4);
 const clipped: Clipped = { separation: 0, from: 0, to: 0 };
 let placed = new Float64Array(3 * 64);
 

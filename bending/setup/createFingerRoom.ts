@@ -12,7 +12,7 @@ import type { BackGauge } from "../tooling/machine";
 import type { JoinedContact } from "./joinContacts";
 
 /** Where the middle of a finger may stand on a contact; `half`: the one behind the die. */
-export type FingerRoom = (half: Half, back: HalfState, contact: Omit<JoinedContact, "z">) => readonly Interval[];
+export type FingerRoom = (half: Half, back: HalfState, contact: JoinedContact) => readonly Interval[];
 
 /** A plate of the part in the machine's frame before the stroke: `count` corners on one side, then on the other. */
 interface Plate { readonly count: number; readonly points: Float64Array; readonly round: boolean }
@@ -40,35 +40,32 @@ export function createFingerRoom(part: PartModel, gauge: BackGauge): FingerRoom 
     plates.set(face, made);
     return made;
   };
-  /** z-extents of what is in a finger at (x, r). */
-  const meets = ({ bend, thickness, lines }: Half, back: HalfState, x: number, r: number): readonly Interval[] => {
+  /**
+   * z-extents of what is in a finger at (x, r). Along a slanted edge x grows by `slope` a millimetre of z: then everything is sheared until the edge runs
+   * along the bed, and the finger, which reaches half its width to either side, is longer by what that shears it. So nothing is missed.
+   */
+  const meets = ({ bend, thickness, lines }: Half, back: HalfState, x: number, r: number, slope: number): readonly Interval[] => {
+    const grow = Math.abs(slope) * half;
     const met: Interval[] = [];
     let placed: readonly (readonly [Float64Array, Float64Array])[] | null = null;
     const look = ({ count, points, round }: Plate) => {
-      placed ??= fingers.map(([within, whole]) => [moved(within, x, r), moved(whole, x, r)] as const);
+      placed ??= fingers.map(([within, whole]) => [moved(within, x, r, grow), moved(whole, x, r, grow)] as const);
       for (const planes of placed) {
-        clipPrism(points, count, planes[round ? 1 : 0], 0, clipped);
+        clipPrism(slope === 0 ? points : sheared(points, slope), count, planes[round ? 1 : 0], 0, clipped);
         if (clipped.from <= clipped.to) met.push([clipped.from, clipped.to]);
       }
     };
     for (const face of facesOf(back)) {
       const { a, b } = face.bounds();
-      if (!apart([a[0] + bend.allowance / 2, a[1] + bend.allowance / 2, b[0], b[1]], box, x, r)) platesOf(face, bend.allowance).forEach(look);
+      if (slope !== 0 || !apart([a[0] + bend.allowance / 2, a[1] + bend.allowance / 2, b[0], b[1]], box, x, r)) platesOf(face, bend.allowance).forEach(look);
     }
     const zone: Box = [-bend.allowance / 2, bend.allowance / 2, 0, thickness];
-    if (!apart(zone, box, x, r)) for (const line of lines) look(bar(zone, line));
+    if (slope !== 0 || !apart(zone, box, x, r)) for (const line of lines) look(bar(zone, line));
     return met;
   };
   return (behind, back, contact) => {
-    const blocked: Interval[] = [];
-    const [first, last] = [Math.min(...contact.spans.map(([z]) => z)), Math.max(...contact.spans.map(([, z]) => z))];
-    for (const z of contact.slope === 0 ? [0] : [first, (first + last) / 2, last]) {
-      for (const met of meets(behind, back, contact.x + contact.slope * z, contact.r)) {
-        if (contact.slope === 0) blocked.push([met[0] - half, met[1] + half]);
-        else if (Math.max(met[0], z - half) < Math.min(met[1], z + half)) blocked.push([z - half, z + half]);
-      }
-    }
-    const taken = mergeIntervals(blocked);
+    const met = meets(behind, back, contact.x, contact.r, contact.slope);
+    const taken = mergeIntervals(met.map(([from, to]): Interval => [from - half, to + half]));
     return mergeIntervals(contact.spans.map(([from, to]): Interval => {
       const inset = Math.max(0, Math.min(half, (to - from - gauge.minSpread) / 2));
       return [from + inset, to - inset];
@@ -85,9 +82,12 @@ function apart(one: Box, finger: Box, x: number, r: number): boolean {
   return Math.min(one[1] - finger[0] - x, finger[1] + x - one[0], one[3] - finger[2] - r, finger[3] + r - one[2]) <= SAME_POINT_MM;
 }
 
-function moved(planes: Float64Array, x: number, y: number): Float64Array {
-  return planes.map((value, i) => (i % 3 === 2 ? value + (planes[i - 2] as number) * x + (planes[i - 1] as number) * y : value));
+/** The half-planes at (x, y), and longer by `grow` to the back and to the front. */
+function moved(planes: Float64Array, x: number, y: number, grow: number): Float64Array {
+  return planes.map((value, i) => (i % 3 === 2 ? value + (planes[i - 2] as number) * x + (planes[i - 1] as number) * y + Math.abs(planes[i - 2] as number) * grow : value));
 }
+
+const sheared = (points: Float64Array, slope: number) => points.map((value, i) => (i % 3 === 0 ? value - slope * (points[i + 2] as number) : value));
 
 function bar([left, right, bottom, top]: Box, [from, to]: Interval): Plate {
   const ring = (z: number) => [left, bottom, z, right, bottom, z, right, top, z, left, top, z];

@@ -33,7 +33,7 @@ export function createGaugeOptions(part: PartModel, gauge: BackGauge): GaugeOpti
     const fold = foldOf(face);
     const made = [...edgeContacts(part, face.path.face, frame, gauge.independent && gauge.fingers > 1), ...(upright ? [upright] : []), ...(fold ? [{ ...fold, x: fold.x + bend.allowance / 2 }] : [])]
       .map((contact) => ({ ...contact, x: contact.x + (Math.abs(contact.slope) * gauge.fingerWidth) / 2 }))
-      .filter((contact) => inTravel(contact, gauge));
+      .flatMap((contact) => withinTravel(contact, gauge));
     known.set(face, made);
     return made;
   };
@@ -48,7 +48,7 @@ export function createGaugeOptions(part: PartModel, gauge: BackGauge): GaugeOpti
     const contacts = facesOf(back).flatMap((face) => contactsOf(half, face)).sort((p, q) => p.face - q.face);
     if (contacts.length === 0) return [];
     return joinContacts(contacts)
-      .map(({ spans, z: _, ...contact }): GaugeOption => ({ ...contact, free: room(half, back, { ...contact, spans }) }))
+      .map((contact): GaugeOption => ({ ...settingOf(contact), free: room(half, back, contact) }))
       .filter((option) => option.free.length > 0)
       .sort((a, b) => rank(a, gauge) - rank(b, gauge) || nearest(a) - nearest(b) || a.face - b.face || a.edge - b.edge);
   };
@@ -65,6 +65,8 @@ function beforeStroke({ x, y, z, o }: Frame, allowance: number): Frame {
   return { x, y, z, o: [o[0] + allowance / 2, o[1], o[2]] };
 }
 
+const settingOf = ({ x, slope, r, on, face, edge }: Contact): Omit<GaugeOption, "free"> => ({ x, slope, r, on, face, edge });
+
 const rank = (option: GaugeOption, gauge: BackGauge) => {
   const [first, last] = [option.free[0], option.free[option.free.length - 1]];
   const two = gauge.fingers > 1 && first && last && last[1] - first[0] >= gauge.minSpread;
@@ -73,8 +75,11 @@ const rank = (option: GaugeOption, gauge: BackGauge) => {
 
 const nearest = (option: GaugeOption) => Math.min(...option.free.map(([z]) => option.x + option.slope * z));
 
-/** X travel holds for every finger: at both ends of a slanted edge. */
-function inTravel(contact: Contact, { x, r }: BackGauge): boolean {
-  const ends = contact.z.map((z) => contact.x + contact.slope * z);
-  return ends.every((at) => at >= x[0] && at <= x[1]) && contact.r >= r[0] - MEANT_CONTACT_MM && contact.r <= r[1] + MEANT_CONTACT_MM;
+/** The contact as far as X and R reach it: of a slanted edge the stretch that is within X. */
+function withinTravel(contact: Contact, { x, r }: BackGauge): readonly Contact[] {
+  if (contact.r < r[0] - MEANT_CONTACT_MM || contact.r > r[1] + MEANT_CONTACT_MM) return [];
+  if (contact.slope === 0) return contact.x >= x[0] && contact.x <= x[1] ? [contact] : [];
+  const [one, other] = x.map((at) => (at - contact.x) / contact.slope);
+  const z = [Math.max(contact.z[0], Math.min(one ?? 0, other ?? 0)), Math.min(contact.z[1], Math.max(one ?? 0, other ?? 0))] as const;
+  return z[0] < z[1] ? [{ ...contact, z }] : [];
 }

@@ -20,7 +20,7 @@ export function trialSteps(part: PartModel, order: readonly (readonly [bend: num
   return order.map(([bend, front, wanted]): GaugedStep => {
     const hit = { bends: [bend], front, formed };
     formed |= 1 << bend;
-    const options = gaugeOptions(part, hit, machine, punch, die);
+    const options = gaugeOptions(part, hit, machine);
     const option = options.find((one) => (typeof wanted === "string" ? one.on === wanted : wanted(one)));
     invariant(option, `bend ${bend} cannot be gauged so, only: ${JSON.stringify(options)}`);
     return { ...hit, touch: touchOf(part, hit, option, FINGER_HEIGHT) };

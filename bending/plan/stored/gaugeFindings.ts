@@ -26,7 +26,7 @@ export function gaugeFindings({ part, machine, per, units }: StoredContext, { st
   const spread = (places[places.length - 1] ?? 0) - (places[0] ?? 0);
   if (fingers.length > 1 && spread < gauge.minSpread - TOUCHES_MM) return [say(`the fingers stand ${formatLength(mm(spread), units)} apart; at least ${formatLength(gauge.minSpread, units)} is needed`)];
   const middle = ((step.bendZ[0] + step.bendZ[1]) / 2) * per;
-  const options = gaugeOptions(part, hit, machine, punch, die);
+  const options = gaugeOptions(part, hit, machine);
   const touches = fingers.every((finger) => options.some((option) => {
     const z = finger.z * per - middle;
     const near = Math.abs(option.x + option.slope * z - finger.x * per) <= TOUCHES_MM && Math.abs(option.r - finger.r * per) <= TOUCHES_MM;
