@@ -33,6 +33,6 @@ export function touchOf(part: PartModel, hit: Hit, option: Pick<GaugeOption, "fa
   const heights = placed.map(([, y]) => y);
   const alongBed = placed.map(([, , z]) => z);
   const [low, high] = [Math.min(...heights), Math.max(...heights)];
-  const y = low >= 0 ? Math.min(high, option.r + fingerHeight) : option.r;
+  const y = low >= 0 ? Math.min(high, option.r + fingerHeight) : Math.max(low, option.r);
   return { face: option.face, point: applyFrame(invertFrame(frame), [option.x, y, (Math.min(...alongBed) + Math.max(...alongBed)) / 2]), slope: 0 };
 }
