@@ -17,10 +17,11 @@ export function uprightContact(part: PartModel, face: number, frame: Frame, fing
   const [low, high] = [Math.min(...outline.map((p) => p[1])), Math.max(...outline.map((p) => p[1]))];
   const band = Math.min(fingerHeight, high - low);
   if (band < LEAST_HOLD_MM) return null;
-  const r = low >= 0 ? low : Math.max(low, high - fingerHeight);
+  // A flange that hangs is touched from its bend down; of a short one the finger reaches beyond the end.
+  const r = low >= 0 ? low : high - fingerHeight;
+  const at = low >= 0 ? low + band / 2 : high - band / 2;
   const cuts = outline.flatMap((p, i) => {
     const q = outline[(i + 1) % outline.length] ?? p;
-    const at = r + band / 2;
     if (p[1] > at === q[1] > at) return [];
     return [p[2] + ((at - p[1]) / (q[1] - p[1])) * (q[2] - p[2])];
   });
