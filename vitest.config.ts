@@ -12,7 +12,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: "unit",
-          include: ["{bending,lib,components,app,seeds,scripts}/**/*.test.{ts,tsx}", "tests/{corpus,repro,laws}/**/*.test.ts"],
+          include: ["{bending,lib,components,app,seeds,scripts}/**/*.test.{ts,tsx}", "tests/{checker,corpus,repro,laws}/**/*.test.ts"],
         },
       },
       {
