@@ -20,7 +20,7 @@ export interface SearchLimits {
 
 export type OrderOutcome =
   | { readonly kind: "found"; readonly steps: readonly OrderStep[]; readonly seconds: number; readonly demerits: number; readonly weight: number; readonly expanded: number }
-  | { readonly kind: "none"; readonly expanded: number }
+  | { readonly kind: "none"; readonly expanded: number; /** What was left aside for being over the limit weighs so much at the least; Infinity when nothing was. */ readonly over: number }
   | { readonly kind: "stopped"; /** No plan weighs less. */ readonly bound: number; readonly expanded: number };
 
 /**
@@ -39,6 +39,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
   const nodes = createNodes();
   const best = new Map<number, number>();
   let expanded = 0;
+  let over = Infinity;
 
   const strokesOf = (move: number) => (moves[move]?.strokes ?? 1) * times.stroke;
   /** What the steps up to and with an unasked one cost at the least. */
@@ -59,7 +60,8 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
       for (let station = 0; station < stations; station += 1) {
         const weight = next === null ? 0 : next.weight + (hand[move * moves.length + next.move] ?? 0) + (station === next.station ? 0 : problem.walk(station, next.station));
         const total = weight + gauge + haste * upTo;
-        if (total < under - SAME_SECONDS) nodes.add({ formed, move, station, gauge: UNASKED, weight, demerits: next?.demerits ?? 0, depth: (next?.depth ?? 0) + 1, after }, total);
+        if (total >= under - SAME_SECONDS) over = Math.min(over, total);
+        else nodes.add({ formed, move, station, gauge: UNASKED, weight, demerits: next?.demerits ?? 0, depth: (next?.depth ?? 0) + 1, after }, total);
       }
     }
   };
@@ -85,7 +87,8 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
     if (limits.shouldStop?.() || expanded >= most) return { kind: "stopped", bound: total, expanded };
     if (node.gauge === UNASKED) {
       const asked = ask(at, node);
-      if (asked === null || asked >= under - SAME_SECONDS) continue;
+      if (asked === null) continue;
+      if (asked >= under - SAME_SECONDS) { over = Math.min(over, asked); continue; }
       node = nodes.get(at);
       const known = best.get(keyOf(node));
       if (known !== undefined && known <= node.weight + SAME_SECONDS) continue;
@@ -98,7 +101,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
     limits.onExpand?.(expanded);
     queue(at, node);
   }
-  return { kind: "none", expanded };
+  return { kind: "none", expanded, over };
 
   function found(first: number): OrderOutcome {
     const steps: OrderStep[] = [];

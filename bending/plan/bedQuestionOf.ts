@@ -1,4 +1,5 @@
 import type { OrderStep } from "../order/orderProblem";
+import type { LearningProblem } from "../order/searchLearning";
 import type { SearchLimits } from "../order/searchOrder";
 import type { BedQuestion } from "./bedQuestion";
 import { createAlone } from "./createAlone";
@@ -6,12 +7,11 @@ import type { CandidateKeeper } from "./createCandidateKeeper";
 import type { SearchBudget } from "./createBudget";
 import type { StepChecks } from "./createStepChecks";
 import type { GaugeNumbers } from "./gaugeNumbers";
-import type { RelaxedProblem } from "./relaxedProblem";
 import type { Situation } from "./situation";
 
 /** The question about beds, with the order found with the bed left out and the weight that no order goes below. */
 export function bedQuestionOf(
-  { situation, checks, numbers }: { readonly situation: Situation; readonly checks: StepChecks; readonly numbers: GaugeNumbers }, relaxed: RelaxedProblem,
+  { situation, checks, numbers }: { readonly situation: Situation; readonly checks: StepChecks; readonly numbers: GaugeNumbers }, relaxed: LearningProblem,
   budget: SearchBudget, keeper: CandidateKeeper, best: { readonly steps: readonly OrderStep[]; readonly least: number; readonly soFar: SearchLimits["soFar"] },
 ): BedQuestion {
   return {

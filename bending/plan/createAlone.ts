@@ -16,6 +16,8 @@ export interface Alone {
   readonly can: (kind: StationKind, move: number, formed: number) => boolean;
   /** Is it known without asking that it cannot? */
   readonly cannot: (kind: StationKind, move: number, formed: number) => boolean;
+  /** How much was learned of a kind. */
+  readonly learned: (kind: StationKind) => number;
   /** How the step is gauged and what it leaves unmet at the least, with a pair that can make it. */
   readonly option: (move: number, formed: number, pair: number) => StepOption;
 }
@@ -55,6 +57,7 @@ export function createAlone(situation: Situation, checks: StepChecks, numbers: G
   const cannot = (kind: StationKind, move: number, formed: number) => ofPair[kind.pair]?.blocked(move, formed) === true || learnedOf(kind).facts.blocked(move, formed);
   return {
     cannot,
+    learned: (kind) => (ofPair[kind.pair]?.count() ?? 0) + learnedOf(kind).facts.count(),
     can: (kind, move, formed) => {
       if (cannot(kind, move, formed)) return false;
       const { facts, known } = learnedOf(kind);

@@ -1,4 +1,5 @@
-import { ANY_GAUGE, type LeastOption, type OrderProblem, type StepOption } from "../order/orderProblem";
+import { ANY_GAUGE, type StepOption } from "../order/orderProblem";
+import type { LearningProblem } from "../order/searchLearning";
 import { freeShifts } from "../setup/freeShifts";
 import { blockedPattern } from "./blockedPattern";
 import { createLeast } from "./createLeast";
@@ -8,19 +9,12 @@ import { gaugeDemerits } from "./gaugeDemerits";
 import type { GaugeNumbers } from "./gaugeNumbers";
 import type { Situation } from "./situation";
 
-/** An order question that learns from its answers: what `least` says grows with them. */
-export interface RelaxedProblem extends OrderProblem {
-  readonly least: (move: number, formed: number) => LeastOption | null;
-  /** How much was learned so far. */
-  readonly learned: () => number;
-}
-
 /**
  * The order question with the bed left out: every stroke has the best pair and the shortest runs that real
  * pieces make, punch and die each where it suits it, alone on the bed and without a walk. Where a longer run may
  * stand a shorter one within it may, so no plan costs less a part; if it has no order, none has.
  */
-export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): RelaxedProblem {
+export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): LearningProblem {
   const { moves, pairs, machine, part, allowed, runs } = situation;
   const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
     const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));

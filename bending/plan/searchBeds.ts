@@ -1,12 +1,13 @@
 import TinyQueue from "tinyqueue";
 import type { OrderStep } from "../order/orderProblem";
+import { searchLearning } from "../order/searchLearning";
 import { searchOrder } from "../order/searchOrder";
-import type { Layout } from "../setup/layout";
+import type { Layout, Station } from "../setup/layout";
 import { createStationMaker } from "../setup/createStationMaker";
 import { aloneProblem } from "./aloneProblem";
 import type { BedQuestion } from "./bedQuestion";
 import { bedsOf } from "./bedsOf";
-import { kindSets, type KindSet } from "./kindSets";
+import { kindSets, spareSets, type KindSet } from "./kindSets";
 import { layoutProblem } from "./layoutProblem";
 import { setupSeconds } from "./setupSeconds";
 
@@ -24,9 +25,13 @@ interface Promising extends KindSet {
   readonly best: { readonly perPart: number; readonly steps: readonly OrderStep[] } | null;
 }
 
+/** A set is searched on by this part of its weight at the least, before another set has its turn. */
+const STEP = 0.01;
+
 /**
  * Every bed of so many stations that may be better than what is kept, those that promise most first: a set of kinds is
- * queued at its floor, then at the weight of its best order with each station alone, and only then set on the bed.
+ * queued at its floor, searched on while no other promises more, queued at the weight of its best order with each station
+ * alone, and only then set on the bed.
  */
 export function searchBeds(question: BedQuestion, count: number): BedsAnswer {
   const { situation, keeper, least, budget, limits } = question;
@@ -36,17 +41,22 @@ export function searchBeds(question: BedQuestion, count: number): BedsAnswer {
   const sets = kindSets(question, count);
   if (sets === null) return { ...tally, open: least1 };
   const queue = new TinyQueue<Promising>(sets.map((set) => ({ ...set, bound: set.floor, best: null })), (a, b) => a.bound - b.bound);
+  const seen = new Set<string>();
   const make = createStationMaker((pair) => must(situation.pairs[pair]), situation.machine.settings);
   for (let one = queue.pop(); one !== undefined && one.bound < keeper.worst(); one = queue.pop()) {
     if (one.best === null) {
       budget.doing("Looking which stations go together", tally.expanded);
-      const outcome = searchOrder(aloneProblem(question, one.kinds), { ...limits, under: (keeper.worst() - one.setup) / budget.batch });
+      const wanted = Math.max(queue.peek()?.bound ?? Infinity, one.bound + STEP * (one.bound - one.setup));
+      const most = Math.min(wanted, keeper.worst());
+      const { outcome } = searchLearning(aloneProblem(question, one.kinds), { ...limits, under: (most - one.setup) / budget.batch });
       tally.expanded += outcome.expanded;
       if (outcome.kind === "stopped") return { ...tally, open: one.bound };
       if (outcome.kind === "found") queue.push({ ...one, bound: Math.max(one.bound, one.setup + outcome.weight * budget.batch), best: { perPart: outcome.weight, steps: outcome.steps } });
+      else if (outcome.kind === "none" && outcome.over < Infinity) queue.push({ ...one, bound: Math.max(one.bound, one.setup + outcome.over * budget.batch) });
       continue;
     }
     const stations = make(one.kinds);
+    if (stations === null || piecesOf(stations) > one.pieces) for (const spare of spareSets(question, one, seen)) queue.push({ ...spare, bound: spare.floor, best: null });
     for (const layout of stations === null ? [] : bedsOf(question, stations, one.best.steps)) {
       if (!searchBed(question, layout, one.best.perPart, tally)) return { ...tally, open: one.bound };
     }
@@ -65,6 +75,8 @@ function searchBed({ situation, checks, numbers, keeper, budget, limits, relaxed
   if (outcome.kind === "found") keeper.keep({ layout, steps: outcome.steps, perPart: outcome.seconds, demerits: outcome.demerits, weight: layout.setupSeconds + outcome.weight * budget.batch });
   return outcome.kind !== "stopped";
 }
+
+const piecesOf = (stations: readonly Station[]) => stations.reduce((sum, { punch, die }) => sum + punch.pieces.length + die.pieces.length, 0);
 
 function must<T>(value: T | undefined): T {
   if (value === undefined) throw new Error("invariant: a pair of the situation");

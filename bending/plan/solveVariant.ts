@@ -9,10 +9,10 @@ import type { StepChecks } from "./createStepChecks";
 import { relaxedProblem } from "./relaxedProblem";
 import { kindSets } from "./kindSets";
 import { remainingBound } from "../order/remainingBound";
+import { searchLearning } from "../order/searchLearning";
 import { searchBeds } from "./searchBeds";
 import { setupSeconds } from "./setupSeconds";
 import type { Situation } from "./situation";
-import { unhindered } from "./unhindered";
 
 export interface VariantAnswer {
   /** Best first. */
@@ -49,7 +49,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
 
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
   budget.doing("Looking for the best order with the bed left out", 0);
-  const { outcome: best, soFar } = unhindered(relaxed, limits);
+  const { outcome: best, soFar } = searchLearning(relaxed, limits);
   tally.expanded += best.expanded;
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
