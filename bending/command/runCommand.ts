@@ -20,7 +20,7 @@ const VERBS = {
   flat: [...FLAT, "--tooling", "--machine"],
   plan: [...PLANNING, "--robustness"],
   check: [...PLANNING, "--order"],
-  setup: ["--tooling", "--machine", "--time-limit"],
+  setup: ["--parts", "--tooling", "--machine", "--time-limit"],
   draw: [...FLAT, "--out", "--ticks", "--text"],
   import: ["--thickness", "--material", "--radius", "--units", "--bend-layers", "--single-lines", "--gap", "--body", "--name", "--out"],
 } as const;

@@ -7,6 +7,7 @@ import { buildPart } from "@/bending/part/buildPart";
 import { plannedBends } from "@/bending/plan/plannedBends";
 import type { PlanDocument } from "@/bending/plan/planDocument";
 import { planPart } from "@/bending/plan/planPart";
+import { waysOf } from "@/bending/plan/waysOf";
 import { wishesOf } from "@/bending/plan/wishesOf";
 import { sharedSetup } from "@/bending/setup/shared/sharedSetup";
 import type { Die, Punch } from "@/bending/tooling/tool";
@@ -57,6 +58,23 @@ describe("several plans on one bed", () => {
     });
   });
 
+  it("needs no more stations or tools when every tool that makes a step may", () => {
+    const ways = plans.map((plan, index) => {
+      const request = requests[index];
+      const found = request ? waysOf({ ...request, plan }) : null;
+      if (!found?.ok) throw new Error("the ways of a plan's own part");
+      return found.value;
+    });
+    plans.forEach((plan, index) => plan.steps.forEach((step, at) => expect(ways[index]?.[at]).toContainEqual(expect.objectContaining({ punch: step.punch, die: step.die }))));
+    const [own, any] = [wishesOf(plans), wishesOf(plans, ways)];
+    const [request] = requests;
+    if (!request || !own.ok || !any.ok) throw new Error("the corpus has plans");
+    const [narrow, wide] = [own.value, any.value].map((wishes) => sharedSetup(wishes, request.tools, request.machine));
+    expect(wide?.status).toBe("optimal");
+    expect([wide?.stations.length, wide?.kinds].map(Number)).toEqual([expect.toSatisfy((count: number) => count <= (narrow?.stations.length ?? 0)), expect.toSatisfy((kinds: number) => (wide?.stations.length ?? 0) < (narrow?.stations.length ?? 0) || kinds <= (narrow?.kinds ?? 0))]);
+    expect(any.value.some((wish) => wish.ways.length > 1)).toBe(true);
+  });
+
   it("tells two of one part apart, and refuses a plan that cannot say what it needs", () => {
     const [plan] = plans;
     if (!plan) throw new Error("the corpus has plans");
@@ -77,7 +95,7 @@ describe("the command line's setup", () => {
     readText: (path) => {
       const text = files.get(path);
       if (text !== undefined) return { ok: true, value: text };
-      return /^(tooling|machine)\.json$/.test(path) ? { ok: true, value: readFileSync(new URL(`plans/${path}`, import.meta.url), "utf8") } : { ok: false, error: "there is no such file" };
+      return /^(tooling|machine|tray|u|hat)\.json$/.test(path) ? { ok: true, value: readFileSync(new URL(`plans/${path}`, import.meta.url), "utf8") } : { ok: false, error: "there is no such file" };
     },
   };
   const SHOP = ["--tooling", "tooling.json", "--machine", "machine.json"];
@@ -88,7 +106,15 @@ describe("the command line's setup", () => {
     expect(json).toMatchObject({ status: "optimal", units: "mm", stations: [expect.objectContaining({ id: "A", bends: expect.anything(), punchRun: expect.objectContaining({ pieces: expect.anything() }) }), ...Array.from({ length: (json as { stations: unknown[] }).stations.length - 1 }, () => expect.anything())] });
   });
 
+  it("takes other tools when the parts are named", () => {
+    const { exitCode, json } = runCommand(["setup", "tray.plan.json", "u.plan.json", ...SHOP, "--parts", "tray.json,u.json"], world);
+    expect([exitCode, json]).toEqual([0, expect.objectContaining({ status: "optimal" })]);
+  });
+
   it.each([
+    [["setup", "u.plan.json", ...SHOP, "--parts", "u.json,hat.json"], "--parts"],
+    [["setup", "u.plan.json", ...SHOP, "--parts", "nowhere.json"], "nowhere.json"],
+    [["setup", "tray.plan.json", ...SHOP, "--parts", "u.json"], "u.json: steps[0].bends"],
     [["setup", ...SHOP], "PLAN.json"],
     [["setup", "tray.plan.json", "nowhere.json", ...SHOP], "nowhere.json"],
     [["setup", "machine.json", ...SHOP], "machine.json: format"],

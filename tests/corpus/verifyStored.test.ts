@@ -55,6 +55,15 @@ describe("a stored plan looked over again", () => {
     expect(weak.wrong.map(({ reason }) => reason.kind)).toEqual(tray.stored.plan.steps.map(() => "force"));
   });
 
+  it("fails a step whose load is farther from the middle than the machine bears today", () => {
+    const far = Math.max(...tray.stored.plan.steps.map(({ bendZ }) => Math.abs(bendZ[0] + bendZ[1]) / 2));
+    const weak = check({ machine: settings({ offCentre: [[mm(far - 1), 0.001]] }) });
+    expect(weak.changed).toEqual([{ what: "force off the middle of the bed", before: "the same all along", now: expect.stringContaining("0.1 % at") }]);
+    expect(weak.wrong.map(({ reason }) => [reason.kind, reason.message.includes("from the middle of the bed")])).toEqual(weak.wrong.map(() => ["force", true]));
+    expect(weak.wrong.length).toBeGreaterThan(0);
+    expect(check({ machine: settings({ offCentre: [[mm(far + 1), 0.9]] }) }).holds).toBe(true);
+  });
+
   it("holds the gauge to its travel, the stations to the bed and the tangs to the machine", () => {
     const { gauge } = tray.now.machine;
     const near = check({ machine: onMachine({ gauge: { ...gauge, x: [gauge.x[0], mm(20)] } }) });

@@ -24,6 +24,7 @@ export function machineChanges(before: Machine, now: Machine, units: LengthUnit)
   look("daylight", (machine) => machine.daylight, length);
   look("ram stroke", (machine) => machine.stroke, length);
   look("force", (machine) => machine.maxForce, (value) => `${value} kN`);
+  look("force off the middle of the bed", (machine) => machine.settings.offCentre, (points) => points?.map(([distance, share]) => `${Number((share * 100).toFixed(1))} % at ${length(distance)}`).join(", ") ?? "the same all along");
   look("punch tang", (machine) => machine.punchTang, String);
   look("die tang", (machine) => machine.dieTang, String);
   look("gauge fingers", (machine) => machine.gauge.fingers, String);
