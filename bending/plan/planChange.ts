@@ -28,7 +28,7 @@ export type ChangeGroup = "order" | "stock" | "tool" | "machine" | "part" | "set
 export type ChangeKind =
   | "move-bends" | "one-by-one"
   | "section"
-  | "punch-relief" | "punch-height" | "punch-width" | "die-opening" | "die-height" | "die-width" | "tool-angle" | "tool-rating"
+  | "punch-relief" | "punch-height" | "punch-width" | "die-opening" | "die-height" | "die-width" | "tool-angle" | "tool-rating" | "hem-die"
   | "daylight" | "stroke" | "force" | "section-gap"
   | "shorter-flange" | "longer-flange" | "leave-out"
   | "clearance";

@@ -13,6 +13,8 @@ export type Attempt = { readonly kind: "works"; readonly plan: PlanDocument } | 
 /** The planner, asked again and again with something changed, within one budget. */
 export interface Attempts {
   readonly request: PlanRequest | CheckRequest;
+  /** Is it proven that the request as it is gives no plan? */
+  readonly impossible: boolean;
   /** Is there any plan with the change? */
   readonly first: (change: Change) => Attempt;
   /** The best plan with a change that works, or the one that is known when the budget does not reach. */
@@ -28,7 +30,7 @@ const MOST_PLANS = 400;
 /** How often one plan may ask whether to stop: a deterministic limit, some seconds on a usual machine. */
 const ASKS_A_PLAN = 60_000;
 
-export function createAttempts(request: PlanRequest | CheckRequest, limits: WhyLimits): Attempts {
+export function createAttempts(request: PlanRequest | CheckRequest, answer: PlanDocument, limits: WhyLimits): Attempts {
   const most = limits.plans ?? MOST_PLANS;
   let [plans, stopped] = [0, false];
   let message = "Looking what stands in the way";
@@ -51,6 +53,7 @@ export function createAttempts(request: PlanRequest | CheckRequest, limits: WhyL
   };
   return {
     request,
+    impossible: answer.status === "infeasible",
     first: (change) => {
       if (ended()) return { kind: "unknown" };
       const plan = made(change, true);

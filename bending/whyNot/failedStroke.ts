@@ -1,5 +1,5 @@
 import { formatLength } from "../core/formatLength";
-import { mmPer } from "../core/units";
+import { mmPer, type LengthUnit } from "../core/units";
 import { PAIRS_EXPLAINED } from "../plan/explain";
 import type { FailedStroke, FailureReason } from "../plan/planFailure";
 import { drawnReason } from "../plan/drawnPlan";
@@ -11,8 +11,11 @@ import { bendsOf } from "./bendsOf";
 import { placesThatWork } from "./placesThatWork";
 import type { WhySituation } from "./situationsOf";
 
+/** mm. Less line left free is not worth telling. */
+const FREE_MM = 10;
+
 /** A stop, and with which front and which tools. */
-interface Met { readonly stop: Stop; readonly front: string; readonly pair: ToolPair }
+interface Met { readonly stop: Stop; readonly front: string; readonly pair: ToolPair; readonly halfLength: number }
 
 /** Everything that keeps a stroke from being made in a state, what stops the front and pair that come nearest first. `ways`: its moves, one for each front. */
 export function failedStroke(why: WhySituation, ways: readonly number[], formed: number): FailedStroke {
@@ -21,7 +24,7 @@ export function failedStroke(why: WhySituation, ways: readonly number[], formed:
   const fitting = pairs.filter(({ index }) => ways.some((move) => moves[move]?.bends.every((bend) => fits[bend]?.[index]?.ok)));
   const likely = (fitting.length > 0 ? fitting : pairs).slice(0, PAIRS_EXPLAINED);
   const met = ways.flatMap((move) => likely.flatMap((pair): readonly Met[] =>
-    stopsOf(situation, checks, move, formed, pair.index).map((stop) => ({ stop, front: part.faces[moves[move]?.front ?? 0]?.id ?? "", pair }))));
+    stopsOf(situation, checks, move, formed, pair.index).map((stop) => ({ stop, front: part.faces[moves[move]?.front ?? 0]?.id ?? "", pair, halfLength: moves[move]?.halfLength ?? 0 }))));
   const groups = new Map<string, Met[]>();
   for (const one of met) {
     const key = `${one.stop.reason.kind}/${one.stop.hit?.kind ?? ""}/${[...one.stop.reason.faces].sort().join("/")}`;
@@ -59,9 +62,18 @@ function summedUp({ situation: { units } }: WhySituation, group: readonly Met[])
   return {
     ...drawnReason(said.stop.reason),
     tools: [...new Set(group.flatMap(({ stop }) => stop.reason.tools))],
-    message: `${said.stop.reason.message}${better}`,
+    message: `${said.stop.reason.message}${stretch(said, units)}${better}`,
     fronts: [...new Set(group.map(({ front }) => readStrip(front)?.bend ?? front))],
     pairs: [...pairs.values()],
     ...(depth === undefined ? {} : { leastDepth: rounded(depth / mmPer(units)) }),
   };
+}
+
+/** Which stretch of the line a tool is in the way on, where that is not all of it. */
+function stretch({ stop: { hit }, halfLength }: Met, units: LengthUnit): string {
+  if (hit === null || (hit.kind !== "punch" && hit.kind !== "die")) return "";
+  const [from, to] = [Math.max(-halfLength, hit.z[0]), Math.min(halfLength, hit.z[1])];
+  if (from >= to || to - from > 2 * halfLength - FREE_MM) return "";
+  const at = (z: number) => formatLength(Math.round(z * 10) / 10, units);
+  return `; only from ${at(from)} to ${at(to)}, from the middle of the line`;
 }

@@ -5,8 +5,8 @@ export interface AmountQuestion {
   readonly attempts: Attempts;
   /** The amount as it is, or the end of what makes sense. */
   readonly from: number;
-  /** Is it known that this amount gives no plan? */
-  readonly fromFails: boolean;
+  /** Is this what the request has, so that it is known to give no plan where that was proven? */
+  readonly asItIs: boolean;
   /** Amounts to try in turn, each farther from it than the one before. */
   readonly ladder: readonly number[];
   /** What the answer is known to; amounts are whole multiples of it. */
@@ -24,8 +24,8 @@ export interface LeastAmount {
 }
 
 /** The amount nearest to `from` that gives a plan: up the ladder to the first that does, then halving; null when none does. */
-export function leastAmount({ attempts, from, fromFails, ladder, resolution, change }: AmountQuestion): LeastAmount | null {
-  let bad = { value: from, proven: fromFails };
+export function leastAmount({ attempts, from, asItIs, ladder, resolution, change }: AmountQuestion): LeastAmount | null {
+  let bad = { value: from, proven: asItIs && attempts.impossible };
   const ask = (value: number): LeastAmount | null => {
     const changed = change(value);
     const attempt = changed === null ? null : attempts.first(changed);

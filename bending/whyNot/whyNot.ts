@@ -6,6 +6,7 @@ import type { CheckRequest, PlanRequest } from "../plan/planRequest";
 import { angleChanges } from "./changes/angleChanges";
 import { flangeChanges } from "./changes/flangeChanges";
 import { heightChanges } from "./changes/heightChanges";
+import { hemDieChanges } from "./changes/hemDieChanges";
 import { leaveOutChanges } from "./changes/leaveOutChanges";
 import { machineChanges } from "./changes/machineChanges";
 import { openingChanges } from "./changes/openingChanges";
@@ -34,8 +35,11 @@ const GROUPS: readonly ChangeGroup[] = ["order", "stock", "tool", "machine", "pa
 
 /** In the order in which they are worth knowing, as time may end. */
 const CHANGES = [
-  orderChanges, sectionChanges, reliefChanges, openingChanges, angleChanges, ratingChanges, heightChanges, flangeChanges, widthChanges, machineChanges, leaveOutChanges, settingChanges,
+  orderChanges, sectionChanges, reliefChanges, openingChanges, angleChanges, ratingChanges, hemDieChanges, heightChanges, flangeChanges, widthChanges, machineChanges, leaveOutChanges, settingChanges,
 ];
+
+/** Changes that a person's own order is no reason for. */
+const NOT_OF_ORDER: readonly ((typeof CHANGES)[number])[] = [flangeChanges, machineChanges, leaveOutChanges, settingChanges];
 
 /**
  * Why there is no plan, and the least changes with which there is one, each found and proven least by planning again. `plan`: the answer to the
@@ -43,11 +47,15 @@ const CHANGES = [
  */
 export function whyNot(request: PlanRequest | CheckRequest, plan: PlanDocument, limits: WhyLimits = {}): WhyNot {
   if (plan.steps.length > 0 || !buildPart(request.document, { materials: request.materials }).ok) return { firstFailure: null, changes: [], plans: 0, complete: true };
-  const attempts = createAttempts(request, limits);
+  const attempts = createAttempts(request, plan, limits);
   const failure = firstFailure(request, limits.shouldStop);
   const facts = factsOf(request, plan, failure, attempts);
   const changes: PlanChange[] = [];
-  for (const find of CHANGES) if (!attempts.ended()) changes.push(...find(facts));
+  for (const find of CHANGES) {
+    // Where another order works, neither part nor brake nor settings are at fault.
+    const atFault = !changes.some(({ group }) => group === "order") || !NOT_OF_ORDER.includes(find);
+    if (atFault && !attempts.ended()) changes.push(...find(facts));
+  }
   const sorted = changes.sort((a, b) => GROUPS.indexOf(a.group) - GROUPS.indexOf(b.group) || a.plan.cost - b.plan.cost);
   return { firstFailure: failure, changes: sorted, plans: attempts.plans(), complete: !attempts.ended() };
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { mm, toDeg, type LengthUnit } from "@/bending/core/units";
+import { deg, mm, toDeg, toRad, type LengthUnit } from "@/bending/core/units";
 import { applyCure } from "@/bending/findings/applyCure";
 import { airBendForce } from "@/bending/handbook/airBendForce";
 import type { PartDocument } from "@/bending/part/partDocument";
@@ -10,6 +10,8 @@ import type { CheckRequest, PlanRequest } from "@/bending/plan/planRequest";
 import { readPlanDocument } from "@/bending/plan/readPlanDocument";
 import { relievedPunchProfile } from "@/bending/tooling/relievedPunchProfile";
 import { firstFailure } from "@/bending/whyNot/firstFailure";
+import { hemDie } from "@/bending/whyNot/newTool/hemDie";
+import { straightPunch } from "@/bending/whyNot/newTool/straightPunch";
 import { whyNot } from "@/bending/whyNot/whyNot";
 import { planCorpus } from "../corpus/planCorpus";
 import { withLengths } from "./lawRequests";
@@ -101,6 +103,19 @@ describe("the least changes", () => {
     const included = Number(/taken to ([\d.]+)° included/.exec(plan.reasons[0]?.message ?? "")?.[1]);
     const [sharper] = ofKind(asked(profile([60, 60], 120)).changes, "tool-angle");
     expect([sharper?.amount?.value, sharper?.found.notEnough]).toEqual([Math.floor(included), Math.floor(included) + 1]);
+  });
+
+  it("a die that closes a hem: a slot just as high as the leg stands after the acute stroke, rated for the closing", () => {
+    const request = planCorpus("hem");
+    const [hem] = ofKind(asked(request).changes, "hem-die");
+    const [opening, rating] = [hem?.amount?.value ?? NaN, hem?.with[2]?.value ?? NaN];
+    const like = request.tools.find(({ id }) => id === "V12");
+    const punch = request.tools.find(({ id }) => id === "P88");
+    if (like?.kind !== "die" || punch?.kind !== "punch") throw new Error("the corpus has V12 and P88");
+    const planned = (slot: number, kN: number) => planPart({ ...request, tools: [...request.tools, hemDie(like, { vOpening: 12, opening: slot, depth: 31, rating: kN }), straightPunch(punch, 20, toRad(deg(26)))] });
+    const stands = Number(/stands ([\d.]+) mm high/.exec(planned(opening - 1, rating).reasons[0]?.message ?? "")?.[1]);
+    expect([opening, hem?.found.notEnough]).toEqual([Math.ceil(stands), Math.ceil(stands) - 1]);
+    expect([planned(opening, rating).steps.length, planned(opening, rating - 1).status]).toEqual([1, "infeasible"]);
   });
 
   it("force and rating: no more than the bend needs, and nothing is loaded beyond what it bears", () => {

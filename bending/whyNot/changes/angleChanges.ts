@@ -25,7 +25,7 @@ export function angleChanges(facts: WhyFacts): readonly PlanChange[] {
   const sharpPunch = (angle: number) => straightPunch(punch, bodyWidth(punch), toRad(deg(angle)));
   const sharpDie = (angle: number) => otherDie(die, { vAngle: toRad(deg(angle)), width: bodyWidth(die) });
   const found = leastAmount({
-    attempts, from, fromFails: true, ladder: ANGLES.filter((angle) => angle < from), resolution: ANGLE_DEG,
+    attempts, from, asItIs: true, ladder: ANGLES.filter((angle) => angle < from), resolution: ANGLE_DEG,
     change: (angle) => ({ tools: [...request.tools, sharpPunch(angle), sharpDie(angle)] }),
   });
   if (found === null) return [];

@@ -33,7 +33,7 @@ function ofLength({ attempts }: WhyFacts, face: string, { path, length }: { read
   const step = STEP[document.units];
   const onGrid = (value: number) => Number(((way === "shorter" ? Math.floor(value / step + 1e-9) : Math.ceil(value / step - 1e-9)) * step).toFixed(6));
   const found = leastAmount({
-    attempts, from: length, fromFails: true, resolution: step,
+    attempts, from: length, asItIs: true, resolution: step,
     ladder: way === "shorter" ? SHORTER.map((part) => onGrid(length * (1 - part))).filter((value) => value > 0) : LONGER.map((part) => onGrid(length * (1 + part))),
     change: (value) => ({ document: applyCure<PartDocument>(document, { path, value, says: "" }) }),
   });

@@ -32,7 +32,7 @@ function ofHeight(facts: WhyFacts, like: Punch | Die, ladder: readonly number[])
   const before = attempts.plans();
   const units = request.document.units;
   const found = leastAmount({
-    attempts, from: like.height, fromFails: true, resolution: HEIGHT_MM,
+    attempts, from: like.height, asItIs: true, resolution: HEIGHT_MM,
     ladder: ladder.map((more) => Math.round(like.height + more)).filter((height) => height >= LEAST_HEIGHT),
     change: (height) => ({ tools: [...request.tools, tallerTool(like, height)] }),
   });

@@ -21,7 +21,7 @@ export function machineChanges(facts: WhyFacts): readonly PlanChange[] {
   const lengths = open ? (["daylight", "stroke"] as const).flatMap((field) => {
     const before = attempts.plans();
     const found = leastAmount({
-      attempts, from: machine[field], fromFails: true, ladder: MORE_MM.map((more) => Math.ceil((machine[field] + more) / LENGTH_MM) * LENGTH_MM), resolution: LENGTH_MM,
+      attempts, from: machine[field], asItIs: true, ladder: MORE_MM.map((more) => Math.ceil((machine[field] + more) / LENGTH_MM) * LENGTH_MM), resolution: LENGTH_MM,
       change: (value) => ({ machine: { ...machine, [field]: mm(value) } }),
     });
     return found === null ? [] : [offeredChange(attempts, before, inUnits(found, LENGTH_MM, units), {
@@ -36,7 +36,7 @@ function moreForce({ attempts }: WhyFacts): readonly PlanChange[] {
   const { machine } = attempts.request;
   const before = attempts.plans();
   const found = leastAmount({
-    attempts, from: machine.maxForce, fromFails: true, ladder: MORE_FORCE.map((by) => Math.ceil(machine.maxForce * by)), resolution: FORCE_KN,
+    attempts, from: machine.maxForce, asItIs: true, ladder: MORE_FORCE.map((by) => Math.ceil(machine.maxForce * by)), resolution: FORCE_KN,
     change: (force) => ({ machine: { ...machine, maxForce: kiloNewton(force) } }),
   });
   return found === null ? [] : [offeredChange(attempts, before, { ...found, resolution: FORCE_KN }, {

@@ -35,7 +35,7 @@ export function openingChanges(facts: WhyFacts): readonly PlanChange[] {
     attempts.doing("Looking for a die of another V that would do");
     const before = attempts.plans();
     const found = leastAmount({
-      attempts, from: like.vOpening, fromFails: true, resolution: V_MM,
+      attempts, from: like.vOpening, asItIs: true, resolution: V_MM,
       ladder: ladder.map((by) => Math.round((like.vOpening * by) / V_MM) * V_MM).filter((v) => v >= least && v <= most && v !== like.vOpening),
       change: (vOpening) => ({ tools: [...request.tools, otherDie(like, { vOpening, width: Math.max(bodyWidth(like), vOpening + 2 * BESIDE_V) })] }),
     });

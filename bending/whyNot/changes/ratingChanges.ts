@@ -24,7 +24,7 @@ function rated({ attempts }: WhyFacts, likes: readonly (Punch | Die)[]): PlanCha
   const before = attempts.plans();
   const from = Math.floor(Math.min(...likes.map(({ maxForcePerMetre }) => maxForcePerMetre)));
   const found = leastAmount({
-    attempts, from, fromFails: true, ladder: TIMES.map((by) => Math.ceil(from * by)), resolution: 1,
+    attempts, from, asItIs: true, ladder: TIMES.map((by) => Math.ceil(from * by)), resolution: 1,
     change: (rating) => ({ tools: [...attempts.request.tools, ...likes.map((like) => strongerTool(like, rating))] }),
   });
   const names = likes.map(({ id }) => id).join(" and ");

@@ -38,9 +38,9 @@ export function reliefChanges(facts: WhyFacts): readonly PlanChange[] {
       const punch = depth < 0 ? null : relievedPunch(like, { depth, top, height, width });
       return punch === null ? null : { tools: [...request.tools, punch] };
     };
-    const depth = leastAmount({ attempts, from: -DEPTH_MM, fromFails: false, ladder: DEPTHS, resolution: DEPTH_MM, change: (value) => changed(value, highest(value)) });
+    const depth = leastAmount({ attempts, from: -DEPTH_MM, asItIs: false, ladder: DEPTHS, resolution: DEPTH_MM, change: (value) => changed(value, highest(value)) });
     if (depth === null) continue;
-    const top = leastAmount({ attempts, from: LEAST_TOP, fromFails: false, ladder: [highest(depth.value)], resolution: TOP_MM, change: (value) => changed(depth.value, value) });
+    const top = leastAmount({ attempts, from: LEAST_TOP, asItIs: false, ladder: [highest(depth.value)], resolution: TOP_MM, change: (value) => changed(depth.value, value) });
     const worked = top ?? depth;
     const upTo = top?.value ?? highest(depth.value);
     const rating = ratingNeeded(facts, worked.plan, worked.change.tools ?? [], newId("punch"));

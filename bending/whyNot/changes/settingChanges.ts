@@ -44,7 +44,7 @@ function setting({ attempts }: WhyFacts, { field, kind, name, resolution, ladder
   attempts.doing("Looking whether another setting would do");
   const before = attempts.plans();
   const from = machine.settings[field];
-  const found = leastAmount({ attempts, from, fromFails: true, ladder, resolution, change: (value) => ({ machine: { ...machine, settings: { ...machine.settings, [field]: mm(value) } } }) });
+  const found = leastAmount({ attempts, from, asItIs: true, ladder, resolution, change: (value) => ({ machine: { ...machine, settings: { ...machine.settings, [field]: mm(value) } } }) });
   return found && offeredChange(attempts, before, inUnits(found, resolution, units), {
     kind, group: "setting", what: {}, amount: lengthAmount(name, found.value, units, from), with: [],
     message: says(formatLength(found.value, units), formatLength(from, units)),

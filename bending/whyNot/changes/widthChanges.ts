@@ -37,7 +37,7 @@ function narrower(facts: WhyFacts, like: Punch | Die): PlanChange | null {
   const least = like.kind === "punch" ? THINNEST_PUNCH : like.vOpening + 2 * BESIDE_V;
   const grid = (value: number) => Math.floor(value / WIDTH_MM) * WIDTH_MM;
   const found = leastAmount({
-    attempts, from, fromFails: like.kind === "die" || isStraight(like), resolution: WIDTH_MM,
+    attempts, from, asItIs: like.kind === "die" || isStraight(like), resolution: WIDTH_MM,
     ladder: PARTS.map((part) => grid(from * part)).filter((width) => width >= least),
     change: (width) => ({ tools: [...request.tools, like.kind === "punch" ? straightPunch(like, width) : otherDie(like, { width })] }),
   });
