@@ -5,6 +5,7 @@ import { rad } from "../core/units";
 import type { Frame } from "../geometry/frame";
 import { invertFrame } from "../geometry/invertFrame";
 import { bendFrame } from "../part/bendFrame";
+import { foldContact } from "../setup/foldContact";
 import { edgeContacts, SQUARE_SINE, type Contact } from "../setup/edgeContacts";
 import { uprightContact } from "../setup/uprightContact";
 import type { Situation } from "./situation";
@@ -16,11 +17,13 @@ export interface GaugePattern {
   readonly contact: Contact | null;
 }
 
+type GaugeQuestion = Pick<Situation, "part" | "machine" | "moves" | "pairs">;
+
 /** One more step from face to face. */
 interface Joint { readonly bend: number; readonly to: number; readonly flat: Float64Array; readonly formed: Float64Array }
 
 /** Answers, for a move, every place behind the die that a finger could touch in some state, whatever may be in its way. */
-export function gaugePatterns(situation: Situation, deepest: number): (move: number) => readonly GaugePattern[] {
+export function gaugePatterns(situation: GaugeQuestion, deepest: number): (move: number) => readonly GaugePattern[] {
   const { part, machine: { gauge }, moves, pairs } = situation;
   const height = Math.max(0, ...gauge.fingerProfile.filter((p) => Math.abs(p[0]) < MEANT_CONTACT_MM).map((p) => p[1]));
   const joints = jointsOf(situation);
@@ -45,7 +48,14 @@ export function gaugePatterns(situation: Situation, deepest: number): (move: num
         for (const contact of touch(face, frameOf(at))) found.push({ mask, value, contact });
       }
       for (const { bend, to, flat, formed } of joints[face] ?? []) {
-        if (bend === from || (own >> bend) & 1) continue;
+        if ((own >> bend) & 1) continue;
+        const bit = 1 << bend;
+        // The fold of a hem that lies on this face, also when the way came in over it.
+        if (part.bends[bend]?.hem && to === part.bends[bend].child && (bend !== from || (value & bit) !== 0)) {
+          const fold = foldContact(part, bend, frameOf(at));
+          if (fold && inTravel(fold, situation)) found.push({ mask: mask | bit, value: value | bit, contact: fold });
+        }
+        if (bend === from) continue;
         if (depth === deepest) { found.push({ mask, value, contact: null }); return; }
         compose(at, flat, frames[depth + 1] as Float64Array);
         visit(to, bend, mask | (1 << bend), value, depth + 1);
@@ -69,13 +79,14 @@ export function gaugePatterns(situation: Situation, deepest: number): (move: num
 /** mm. Over rounding noise of frames put together in another order, far under the gauge's own step. */
 const NOISE_MM = 1e-6;
 
-function inTravel(contact: Contact, { machine: { gauge: { x, r } } }: Situation): boolean {
+/** Of a slanted edge some stretch is enough. */
+function inTravel(contact: Contact, { machine: { gauge: { x, r } } }: GaugeQuestion): boolean {
   const ends = contact.z.map((z) => contact.x + contact.slope * z);
-  return ends.every((at) => at >= x[0] - NOISE_MM && at <= x[1] + NOISE_MM)
+  return Math.max(...ends) >= x[0] - NOISE_MM && Math.min(...ends) <= x[1] + NOISE_MM
     && contact.r >= r[0] - MEANT_CONTACT_MM - NOISE_MM && contact.r <= r[1] + MEANT_CONTACT_MM + NOISE_MM;
 }
 
-function jointsOf({ part }: Situation): readonly (readonly Joint[])[] {
+function jointsOf({ part }: GaugeQuestion): readonly (readonly Joint[])[] {
   const joints: Joint[][] = part.faces.map(() => []);
   part.bends.forEach((bend, index) => {
     const [flat, formed] = [bendFrame(part, bend, 0), bendFrame(part, bend, bend.angle)];
