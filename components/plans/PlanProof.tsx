@@ -16,12 +16,12 @@ export function PlanProof({ detail, mayWrite }: { readonly detail: PlanDetail; r
     <div className="grid gap-8 lg:grid-cols-2">
       <Panel title="What is proven">
         <p className="max-w-prose">{proven(detail)}</p>
+        <p className="mt-2 max-w-prose text-ink-soft"><span className="font-medium text-ink">Looked over: </span>{asSentence(plan.proof.method)}</p>
         <div className="mt-3"><Facts rows={[
           ...(works ? [
             { label: "No plan can take less than", value: <span className="num">{format.time(plan.proof.bound)}</span> },
             { label: "Left to be gained at most", value: <span className="num">{saved < 0.5 ? "nothing" : `${format.time(saved)} (${(plan.gap * 100).toFixed(1)} %)`}</span> },
           ] : []),
-          { label: "Proven over", value: asSentence(plan.proof.method) },
           { label: "States looked at", value: <span className="num">{plan.proof.expanded.toLocaleString("en-GB")}</span> },
           { label: "Searched for", value: <span className="num">{searched(plan.elapsedMs)}</span> },
           { label: "Ended by", value: ended === "itself" ? "itself: searching on would change nothing" : ended === "limit" ? `its time, ${limitSeconds} s` : "a person, the best so far was kept" },

@@ -36,18 +36,19 @@ export function OwnOrderVerdict({ detail, tried, check, mayWrite }: OwnOrderVerd
       <Verdict detail={detail} check={check} />
       {start.error === null || !ofThis ? null : <Notice tone="wrong" title="The order was not planned" live>{start.error.message}</Notice>}
       {job.data !== undefined && ofThis && planId !== detail.id ? <JobLine job={job.data} mayWrite={mayWrite} here={detail.id} /> : null}
-      {mayWrite ? <Button busy={start.isPending || (ofThis && job.data?.state === "running")} disabled={check.failure !== null} onClick={plan}>Plan this order</Button> : null}
+      {mayWrite ? <Button busy={start.isPending || (ofThis && job.data?.state === "running")} disabled={check.failure !== null && check.whole} onClick={plan}>Plan this order</Button> : null}
     </div>
   );
 }
 
 function Verdict({ detail, check }: Pick<OwnOrderVerdictProps, "detail" | "check">) {
-  const { failure, looking, planning, plan } = check;
+  const { failure, looking, whole, planning, plan } = check;
   if (looking) return <Notice tone="note" title="Looking the order over…" />;
   if (failure !== null) {
     const places = failure.strokes[0]?.wouldWork ?? [];
     return (
       <Notice tone="wrong" title={`Step ${failure.step ?? failure.done.length + 1} cannot be made there`}>
+        {whole ? null : <p>Not on the likeliest V. The other dies are still being looked at…</p>}
         {places.length === 0 ? "No other place in the order would help this stroke by itself." : <ul>{places.map((place, index) => <li key={index}>It would work {placeWords(place.before, place.after)}.</li>)}</ul>}
       </Notice>
     );

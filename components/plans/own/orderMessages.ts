@@ -15,5 +15,6 @@ export type OrderAsk =
   | { readonly kind: "try" | "plan"; readonly id: number; readonly tried: TriedOrder };
 
 export type OrderAnswer =
-  | { readonly kind: "tried"; readonly id: number; readonly failure: PlanFailure | null }
+  /** `whole` false: it fails on the likeliest V; on the others it is still being looked at, and another answer follows. */
+  | { readonly kind: "tried"; readonly id: number; readonly failure: PlanFailure | null; readonly whole: boolean }
   | { readonly kind: "planned"; readonly id: number; readonly plan: PlanDocument };

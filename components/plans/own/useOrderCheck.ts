@@ -13,6 +13,8 @@ export interface OrderCheck {
   readonly looking: boolean;
   /** Where the newest order fails; null: each step can be made, or it is not known yet. */
   readonly failure: PlanFailure | null;
+  /** False while other V openings than the likeliest are still being looked at. */
+  readonly whole: boolean;
   /** The best plan along the order; null until it is worked out. */
   readonly plan: PlanDocument | null;
   /** True while that plan is being worked out. */
@@ -20,7 +22,7 @@ export interface OrderCheck {
   readonly broken: boolean;
 }
 
-interface Found extends Pick<OrderCheck, "failure" | "plan"> { readonly of: TriedOrder; readonly tried: boolean }
+interface Found extends Pick<OrderCheck, "failure" | "whole" | "plan"> { readonly of: TriedOrder }
 
 const startThread = (task: PlanShopView["task"]): Worker => {
   const thread = new Worker(new URL("./order.worker.ts", import.meta.url), { type: "module" });
@@ -39,6 +41,7 @@ export function useOrderCheck(task: PlanShopView["task"], tried: TriedOrder): Or
   useEffect(() => {
     const thread = startThread(task);
     let asked: TriedOrder | null = null;
+    let last: TriedOrder | null = null;
     let waiting: TriedOrder | null = null;
     let count = 0;
     const ask = (next: TriedOrder): void => {
@@ -47,13 +50,14 @@ export function useOrderCheck(task: PlanShopView["task"], tried: TriedOrder): Or
       thread.postMessage({ kind: "try", id: (count += 1), tried: next } satisfies OrderAsk);
     };
     thread.onmessage = ({ data }: MessageEvent<OrderAnswer>) => {
-      const of = asked;
+      if (data.kind !== "tried" || data.id !== count) return;
+      last = asked ?? last;
       asked = null;
       if (waiting !== null) {
         const next = waiting;
         waiting = null;
         ask(next);
-      } else if (of !== null && data.kind === "tried") setFound({ of, tried: true, failure: data.failure, plan: null });
+      } else if (last !== null) setFound({ of: last, failure: data.failure, whole: data.whole, plan: null });
     };
     thread.onerror = () => setBroken(true);
     trier.current = { ask };
@@ -67,7 +71,7 @@ export function useOrderCheck(task: PlanShopView["task"], tried: TriedOrder): Or
     const timer = setTimeout(() => {
       thread = startThread(task);
       thread.onmessage = ({ data }: MessageEvent<OrderAnswer>) => {
-        if (data.kind === "planned") setFound({ of: tried, tried: true, failure: null, plan: data.plan });
+        if (data.kind === "planned") setFound({ of: tried, failure: null, whole: true, plan: data.plan });
         thread?.terminate();
       };
       thread.onerror = () => setBroken(true);
@@ -76,5 +80,5 @@ export function useOrderCheck(task: PlanShopView["task"], tried: TriedOrder): Or
     return () => { clearTimeout(timer); thread?.terminate(); };
   }, [task, tried, works]);
   const newest = found !== null && found.of === tried ? found : null;
-  return { looking: newest === null, failure: newest?.failure ?? null, plan: newest?.plan ?? null, planning: works && newest?.plan === null, broken };
+  return { looking: newest === null, failure: newest?.failure ?? null, whole: newest?.whole ?? false, plan: newest?.plan ?? null, planning: works && newest?.plan === null, broken };
 }
