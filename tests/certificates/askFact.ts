@@ -35,7 +35,7 @@ export function askFact(facts: SituationFacts, bends: readonly number[], front: 
   const fingers = !first || !last ? 0 : machine.gauge.fingers > 1 && last[1] - first[0] >= machine.gauge.minSpread ? 2 : 1;
   return {
     setting: option === undefined ? "none" : [option.x.toFixed(2), option.slope.toFixed(4), option.r.toFixed(2)].join(),
-    demerit: checks.wishes(move, 0) + 2 - fingers,
+    demerit: checks.wishes(move, 0) + checks.unkept(move, formed, option) + 2 - fingers,
   };
 }
 

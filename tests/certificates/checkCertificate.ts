@@ -48,7 +48,7 @@ export function checkCertificate(certificate: PlanCertificate, request: PlanRequ
     if (spoken.length !== flat.pairs.length) wrong.push(`${name}: it speaks of pairs that are not in service`);
     const said = (texts: readonly string[]) => wrong.push(...texts.map((text) => `${name}: ${text}`));
     said(strokesWrong(flat, situation));
-    const weight = cheapestWay(flat, certificate.times, certificate.demeritSeconds);
+    const weight = cheapestWay(flat, certificate.times, certificate.demeritSeconds)?.seconds ?? null;
     said(boundWrong(flat, weight));
     said(setupWrong(flat, situation, spoken));
     if (weight !== null) bounds.push(flat.setup.seconds + batch * weight);

@@ -31,5 +31,5 @@ export function slowCertificate(request: PlanRequest): PlanCertificate {
   const { flip, turn, stroke, gaugeMove, stationSetup, sectionPlace } = machine.times;
   const times = { flip, turn, stroke, gaugeMove };
   const flat = { vOpening: variant.vOpening, bends, moves, pairs: pairs.map(({ punch, die }) => ({ punch: punch.id, die: die.id })), facts, setup: { stations: 1, pieces: 2, seconds: stationSetup + 2 * sectionPlace }, perPart: null };
-  return { format: "certificate/1", units: "mm", batch, times, demeritSeconds: 1e6, flats: [{ ...flat, perPart: cheapestWay(flat, times, 1e6) }] };
+  return { format: "certificate/1", units: "mm", batch, times, demeritSeconds: 1e6, flats: [{ ...flat, perPart: cheapestWay(flat, times, 1e6)?.seconds ?? null }] };
 }

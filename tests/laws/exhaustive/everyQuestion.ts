@@ -70,6 +70,6 @@ function askOnce(situation: Situation, move: number, formed: number, pair: numbe
       return found;
     },
     gauge: option === undefined ? "none" : [option.x.toFixed(2), option.slope.toFixed(4), option.r.toFixed(2)].join(),
-    demerit: checks.wishes(move, pair) + 2 - fingers,
+    demerit: checks.wishes(move, pair) + checks.unkept(move, formed, option) + 2 - fingers,
   };
 }
