@@ -1,16 +1,20 @@
 import type { StationKind } from "../setup/stationKinds";
 import { NEAR_GAP_MM } from "../setup/placeStations";
 import type { BedQuestion } from "./bedQuestion";
-import { SAME_WEIGHT } from "./createCandidateKeeper";
 import { kindFamilies, type KindFamily } from "./kindFamilies";
 import { kindsFor } from "./kindsFor";
 import { setupSeconds } from "./setupSeconds";
 
-/** Kinds of station for one bed; no bed of them on which every station is used weighs less than `floor`. */
+/** So many stations of a bed are each of one of these families. */
+export interface KindGroup {
+  readonly families: readonly KindFamily[];
+  readonly times: number;
+}
+
+/** The beds whose stations are of these groups; none of them on which every station is used weighs less than `floor`. */
 export interface KindSet {
-  readonly kinds: readonly StationKind[];
-  /** Kinds never better than each of them, for when the stock does not hold them together. */
-  readonly spares: readonly (readonly StationKind[])[];
+  readonly groups: readonly KindGroup[];
+  /** Fewest pieces, and the seconds to set them. */
   readonly pieces: number;
   readonly setup: number;
   readonly floor: number;
@@ -18,61 +22,58 @@ export interface KindSet {
 
 /** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */
 const SAME_SHUT_HEIGHT_MM = 0.1;
-
 /** mm. Over rounding noise; the search itself decides what is as near as this. */
 const NOISE_MM = 1e-3;
 
-/** The sets of `count` kinds that may be better than what is kept; null when told to stop. */
-export function kindSets(question: BedQuestion, count: number): readonly KindSet[] | null {
-  const { situation, keeper, least, budget } = question;
-  const { machine, pairs } = situation;
-  const longest = longestNeeded(question);
+/** All beds of `count` stations, one set for each shut height. */
+export function kindSets(question: BedQuestion, count: number): readonly KindSet[] {
+  const { situation } = question;
   const lines = [...new Set(situation.moves.map(({ halfLength }) => 2 * halfLength))];
-  const families = [...kindFamilies(kindsFor(situation, count, question.favoured), lines, machine.settings.maxUncoveredEnd)].sort((a, b) => a.best.pieces - b.best.pieces);
-  const fewest = families[0]?.best.pieces ?? 0;
-  const heightOf = ({ pair }: StationKind) => (pairs[pair]?.punch.height ?? 0) + (pairs[pair]?.die.height ?? 0);
-  const worst = keeper.worst() - SAME_WEIGHT;
-  const found: KindSet[] = [];
-  const add = (chosen: readonly KindFamily[], pieces: number, from: number): boolean => {
-    if (budget.shouldStop()) return false;
-    for (let next = from; next < families.length; next += 1) {
-      const family = families[next];
-      if (family === undefined) continue;
-      const one = family.best;
-      const left = count - chosen.length - 1;
-      const setup = setupSeconds(machine, count, pieces + one.pieces + left * Math.max(fewest, one.pieces));
-      if (setup + least * budget.batch >= worst) break;
-      if (chosen[0] && Math.abs(heightOf(chosen[0].best) - heightOf(one)) > SAME_SHUT_HEIGHT_MM) continue;
-      const longer = [...chosen, family];
-      if (left === 0 && !longer.some(({ best: kind }) => Math.min(kind.punchLength, kind.dieLength) >= longest)) continue;
-      if (left > 0) {
-        if (!add(longer, pieces + one.pieces, next + 1)) return false;
-        continue;
-      }
-      const set = setOf(question, longer.map(({ best }) => best), longer.map(({ spares }) => spares));
-      if (set.floor < worst) found.push(set);
-    }
-    return true;
-  };
-  return add([], 0, 0) ? found : null;
+  const families = kindFamilies(kindsFor(situation, count, question.favoured), lines, situation.machine.settings.maxUncoveredEnd);
+  const heightOf = ({ best: { pair } }: KindFamily) => (situation.pairs[pair]?.punch.height ?? 0) + (situation.pairs[pair]?.die.height ?? 0);
+  const byHeight: KindFamily[][] = [];
+  for (const family of families) {
+    const same = byHeight.find(([first]) => first && Math.abs(heightOf(first) - heightOf(family)) <= SAME_SHUT_HEIGHT_MM);
+    if (same) same.push(family);
+    else byHeight.push([family]);
+  }
+  return byHeight.flatMap((group) => setOf(question, [{ families: group, times: count }]) ?? []);
 }
 
-function setOf({ situation: { machine }, least, budget }: BedQuestion, kinds: readonly StationKind[], spares: KindSet["spares"]): KindSet {
-  const pieces = kinds.reduce((sum, kind) => sum + kind.pieces, 0);
-  const setup = setupSeconds(machine, kinds.length, pieces);
-  return { kinds, spares, pieces, setup, floor: setup + (least + walkAtLeast(kinds, machine.times.walkPerMetre)) * budget.batch };
+/** The same beds in smaller sets: the largest group in two halves, its stations shared out between them in every way. */
+export function splitSet(question: BedQuestion, { groups }: KindSet): readonly KindSet[] {
+  const largest = groups.reduce((a, b) => (b.families.length > a.families.length ? b : a));
+  const half = Math.ceil(largest.families.length / 2);
+  const [left, right] = [largest.families.slice(0, half), largest.families.slice(half)];
+  const rest = groups.filter((group) => group !== largest);
+  return Array.from({ length: largest.times + 1 }, (_, times) => times).flatMap((times) =>
+    setOf(question, [...rest, { families: left, times }, { families: right, times: largest.times - times }].filter((group) => group.times > 0)) ?? []);
 }
 
 /** The sets with one kind changed for a spare of its own; none of those `seen`, which grows. */
-export function spareSets(question: BedQuestion, set: KindSet, seen: Set<string>): readonly KindSet[] {
-  return set.kinds.flatMap((_, place) => (set.spares[place] ?? []).flatMap((spare) => {
-    const kinds = set.kinds.map((kind, index) => (index === place ? spare : kind));
-    const key = kinds.map(({ pair, punchLength, dieLength }) => [pair, punchLength, dieLength].join()).sort().join("/");
-    const other = setOf(question, kinds, set.spares);
-    if (seen.has(key) || other.floor >= question.keeper.worst()) return [];
+export function spareSets(question: BedQuestion, { groups }: KindSet, seen: Set<string>): readonly KindSet[] {
+  return groups.flatMap(({ families: [family] }, place) => (family?.spares ?? []).flatMap((best) => {
+    const changed = groups.map((group, index) => (index === place ? { times: 1, families: [{ best, spares: family?.spares ?? [] }] } : group));
+    const key = changed.map(({ families: [one] }) => [one?.best.pair, one?.best.punchLength, one?.best.dieLength].join()).sort().join("/");
+    if (seen.has(key)) return [];
     seen.add(key);
-    return [other];
+    return setOf(question, changed) ?? [];
   }));
+}
+
+/** Null when no bed of the set is worth looking for. */
+function setOf(question: BedQuestion, groups: readonly KindGroup[]): KindSet | null {
+  const { situation: { machine }, least, budget, keeper } = question;
+  if (groups.some(({ families, times }) => times > families.length)) return null;
+  const longest = longestNeeded(question);
+  if (!groups.some(({ families }) => families.some(({ best }) => Math.min(best.punchLength, best.dieLength) >= longest))) return null;
+  const leastOf = (families: readonly KindFamily[], of: (kind: StationKind) => number) => Math.min(...families.map(({ best }) => of(best)));
+  const count = groups.reduce((sum, { times }) => sum + times, 0);
+  const pieces = groups.reduce((sum, { families, times }) => sum + times * leastOf(families, (kind) => kind.pieces), 0);
+  const setup = setupSeconds(machine, count, pieces);
+  const lengths = groups.flatMap(({ families, times }) => Array.from({ length: times }, () => leastOf(families, ({ length }) => length)));
+  const floor = setup + (least + walkAtLeast(lengths, machine.times.walkPerMetre)) * budget.batch;
+  return floor < keeper.worst() ? { groups, pieces, setup, floor } : null;
 }
 
 /** mm. Some station holds the bend with the longest line, however it is made; what may stay uncovered taken off. */
@@ -82,8 +83,7 @@ function longestNeeded({ situation: { moves, part, machine } }: BedQuestion): nu
 }
 
 /** Every station is walked to at least once, the nearest two standing near each other. */
-function walkAtLeast(kinds: readonly StationKind[], walkPerMetre: number): number {
-  const lengths = kinds.map(({ length }) => length).sort((a, b) => a - b);
-  const nearest = ((lengths[0] ?? 0) + (lengths[1] ?? 0)) / 2 + NEAR_GAP_MM;
-  return (kinds.length - 1) * (nearest / 1000) * walkPerMetre;
+function walkAtLeast(lengths: readonly number[], walkPerMetre: number): number {
+  const [a = 0, b = 0] = [...lengths].sort((x, y) => x - y);
+  return (lengths.length - 1) * (((a + b) / 2 + NEAR_GAP_MM) / 1000) * walkPerMetre;
 }

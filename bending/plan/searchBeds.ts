@@ -7,9 +7,8 @@ import { createStationMaker } from "../setup/createStationMaker";
 import { aloneProblem } from "./aloneProblem";
 import type { BedQuestion } from "./bedQuestion";
 import { bedsOf } from "./bedsOf";
-import { kindSets, spareSets, type KindSet } from "./kindSets";
+import { kindSets, spareSets, splitSet, type KindSet } from "./kindSets";
 import { layoutProblem } from "./layoutProblem";
-import { setupSeconds } from "./setupSeconds";
 
 export interface BedsAnswer {
   readonly layouts: number;
@@ -18,7 +17,7 @@ export interface BedsAnswer {
   readonly open: number;
 }
 
-/** A set of kinds, with the best order that it has when no station is in another's way once that is known. */
+/** A set of beds, with the best order that it has when no station is in another's way once that is known. */
 interface Promising extends KindSet {
   /** No bed of the set weighs less. */
   readonly bound: number;
@@ -29,18 +28,14 @@ interface Promising extends KindSet {
 const STEP = 0.01;
 
 /**
- * Every bed of so many stations that may be better than what is kept, those that promise most first: a set of kinds is
+ * Every bed of so many stations that may be better than what is kept, those that promise most first. A set of beds is
  * queued at its floor, searched on while no other promises more, queued at the weight of its best order with each station
- * alone, and only then set on the bed.
+ * alone, then split; what is one bed only is set up.
  */
 export function searchBeds(question: BedQuestion, count: number): BedsAnswer {
-  const { situation, keeper, least, budget, limits } = question;
-  const least1 = setupSeconds(situation.machine, count) + least * budget.batch;
+  const { situation, keeper, budget, limits } = question;
   const tally = { layouts: 0, expanded: 0 };
-  if (least1 >= keeper.worst()) return { ...tally, open: Infinity };
-  const sets = kindSets(question, count);
-  if (sets === null) return { ...tally, open: least1 };
-  const queue = new TinyQueue<Promising>(sets.map((set) => ({ ...set, bound: set.floor, best: null })), (a, b) => a.bound - b.bound);
+  const queue = new TinyQueue<Promising>(kindSets(question, count).map(unsearched(0)), (a, b) => a.bound - b.bound);
   const seen = new Set<string>();
   const make = createStationMaker((pair) => must(situation.pairs[pair]), situation.machine.settings);
   for (let one = queue.pop(); one !== undefined && one.bound < keeper.worst(); one = queue.pop()) {
@@ -48,21 +43,27 @@ export function searchBeds(question: BedQuestion, count: number): BedsAnswer {
       budget.doing("Looking which stations go together", tally.expanded);
       const wanted = Math.max(queue.peek()?.bound ?? Infinity, one.bound + STEP * (one.bound - one.setup));
       const most = Math.min(wanted, keeper.worst());
-      const { outcome } = searchLearning(aloneProblem(question, one.kinds), { ...limits, under: (most - one.setup) / budget.batch });
+      const { outcome } = searchLearning(aloneProblem(question, one.groups), { ...limits, under: (most - one.setup) / budget.batch });
       tally.expanded += outcome.expanded;
       if (outcome.kind === "stopped") return { ...tally, open: one.bound };
       if (outcome.kind === "found") queue.push({ ...one, bound: Math.max(one.bound, one.setup + outcome.weight * budget.batch), best: { perPart: outcome.weight, steps: outcome.steps } });
-      else if (outcome.kind === "none" && outcome.over < Infinity) queue.push({ ...one, bound: Math.max(one.bound, one.setup + outcome.over * budget.batch) });
+      else if (outcome.over < Infinity) queue.push({ ...one, bound: Math.max(one.bound, one.setup + outcome.over * budget.batch) });
       continue;
     }
-    const stations = make(one.kinds);
-    if (stations === null || piecesOf(stations) > one.pieces) for (const spare of spareSets(question, one, seen)) queue.push({ ...spare, bound: spare.floor, best: null });
+    if (one.groups.some(({ families }) => families.length > 1)) {
+      splitSet(question, one).map(unsearched(one.bound)).forEach((set) => queue.push(set));
+      continue;
+    }
+    const stations = make(one.groups.map(({ families: [family] }) => must(family).best));
+    if (stations === null || piecesOf(stations) > one.pieces) spareSets(question, one, seen).map(unsearched(0)).forEach((set) => queue.push(set));
     for (const layout of stations === null ? [] : bedsOf(question, stations, one.best.steps)) {
       if (!searchBed(question, layout, one.best.perPart, tally)) return { ...tally, open: one.bound };
     }
   }
   return { ...tally, open: Infinity };
 }
+
+const unsearched = (bound: number) => (set: KindSet): Promising => ({ ...set, bound: Math.max(bound, set.floor), best: null });
 
 /** The best order on a bed, kept when it is worth it; false when told to stop. */
 function searchBed({ situation, checks, numbers, keeper, budget, limits, relaxed }: BedQuestion, layout: Layout, perPart: number, tally: { layouts: number; expanded: number }): boolean {
@@ -79,6 +80,6 @@ function searchBed({ situation, checks, numbers, keeper, budget, limits, relaxed
 const piecesOf = (stations: readonly Station[]) => stations.reduce((sum, { punch, die }) => sum + punch.pieces.length + die.pieces.length, 0);
 
 function must<T>(value: T | undefined): T {
-  if (value === undefined) throw new Error("invariant: a pair of the situation");
+  if (value === undefined) throw new Error("invariant: a pair of the situation, a family of a group");
   return value;
 }

@@ -55,7 +55,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
 
   const first = bedQuestionOf(asked, relaxed, budget, keeper, { steps: best.steps, least: best.weight, soFar });
-  const least = Math.min(...(kindSets(first, 1) ?? []).map((set) => set.floor), setupSeconds(situation.machine, 2) + best.weight * budget.batch);
+  const least = Math.min(...kindSets(first, 1).map((set) => set.floor), setupSeconds(situation.machine, 2) + best.weight * budget.batch);
   const done = () => keeper.worst() <= least || enough();
   constructBeds(first, best.steps, done);
   if (enough()) return answer(least, { stopped: true });
