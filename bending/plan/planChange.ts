@@ -26,10 +26,10 @@ export interface PlanChange {
 export type ChangeGroup = "order" | "stock" | "tool" | "machine" | "part" | "setting";
 
 export type ChangeKind =
-  | "move-bends" | "one-by-one"
+  | "free-choice" | "move-bends" | "one-by-one"
   | "section"
   | "punch-relief" | "punch-height" | "punch-width" | "die-opening" | "die-height" | "die-width" | "tool-angle" | "tool-rating" | "hem-die"
-  | "daylight" | "stroke" | "force" | "section-gap"
+  | "daylight" | "stroke" | "bed-length" | "between-frames" | "throat" | "force" | "section-gap"
   | "shorter-flange" | "longer-flange" | "leave-out"
   | "clearance";
 

@@ -33,8 +33,8 @@ const failure = z.strictObject({
 
 const amount = z.strictObject({ name: text, value: number, unit: z.enum(["mm", "in", "deg", "kN", "kN/m", "bends", "pieces"]), from: number.optional() });
 const change = z.strictObject({
-  kind: z.enum(["move-bends", "one-by-one", "section", "punch-relief", "punch-height", "punch-width", "die-opening", "die-height", "die-width", "tool-angle", "tool-rating", "hem-die",
-    "daylight", "stroke", "force", "section-gap", "shorter-flange", "longer-flange", "leave-out", "clearance"]),
+  kind: z.enum(["free-choice", "move-bends", "one-by-one", "section", "punch-relief", "punch-height", "punch-width", "die-opening", "die-height", "die-width", "tool-angle", "tool-rating", "hem-die",
+    "daylight", "stroke", "bed-length", "between-frames", "throat", "force", "section-gap", "shorter-flange", "longer-flange", "leave-out", "clearance"]),
   group: z.enum(["order", "stock", "tool", "machine", "part", "setting"]),
   what: z.strictObject({ bends: texts.optional(), faces: texts.optional(), tools: texts.optional(), path: text.optional() }),
   amount: amount.nullable(),

@@ -5,7 +5,7 @@ import type { CheckRequest, PlanRequest } from "../plan/planRequest";
 import type { WhyLimits } from "./whyLimits";
 
 /** What is changed of the request; a change of order for a person's own. */
-export type Change = Partial<Pick<CheckRequest, "document" | "tools" | "machine" | "order">>;
+export type Change = Partial<Pick<CheckRequest, "document" | "tools" | "machine" | "order" | "wishes">>;
 
 /** Whether there is a plan with a change: `fails` is proven, `unknown` ended too early or found no bed. */
 export type Attempt = { readonly kind: "works"; readonly plan: PlanDocument } | { readonly kind: "fails" | "unknown" };

@@ -4,6 +4,7 @@ import type { PlanFailure } from "../plan/planFailure";
 import type { PlanDocument } from "../plan/planDocument";
 import type { CheckRequest, PlanRequest } from "../plan/planRequest";
 import { angleChanges } from "./changes/angleChanges";
+import { choiceChanges } from "./changes/choiceChanges";
 import { flangeChanges } from "./changes/flangeChanges";
 import { heightChanges } from "./changes/heightChanges";
 import { hemDieChanges } from "./changes/hemDieChanges";
@@ -35,7 +36,7 @@ const GROUPS: readonly ChangeGroup[] = ["order", "stock", "tool", "machine", "pa
 
 /** In the order in which they are worth knowing, as time may end. */
 const CHANGES = [
-  orderChanges, sectionChanges, reliefChanges, openingChanges, angleChanges, ratingChanges, hemDieChanges, heightChanges, flangeChanges, widthChanges, machineChanges, leaveOutChanges, settingChanges,
+  choiceChanges, orderChanges, sectionChanges, reliefChanges, openingChanges, angleChanges, ratingChanges, hemDieChanges, heightChanges, flangeChanges, widthChanges, machineChanges, leaveOutChanges, settingChanges,
 ];
 
 /** Changes that a person's own order is no reason for. */

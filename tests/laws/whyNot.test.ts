@@ -130,6 +130,16 @@ describe("the least changes", () => {
     expect(ofKind(weakTool, "tool-rating")[0]).toMatchObject({ amount: { value: Math.ceil(over(16)), from: 150, unit: "kN/m" }, found: { notEnough: Math.ceil(over(16)) - 1 } });
   });
 
+  it("a choice of a person's that stands in the way is left free, and neither part nor brake is blamed for it", () => {
+    const found = asked({ ...u, wishes: [{ bend: "b1", punch: "P88" }, { bend: "b2", punch: "gone" }] }, 20);
+    expect(found.changes.map(({ kind, what }) => [kind, what.bends])).toEqual([["free-choice", ["b2"]]]);
+  });
+
+  it("a longer bed: the line less its uncovered ends", () => {
+    const [bed] = asked({ ...u, machine: { ...u.machine, bedLength: mm(200) } }).changes;
+    expect(bed).toMatchObject({ kind: "bed-length", group: "machine", amount: { value: 300 - 2 * 5, from: 200 }, found: { notEnough: 285 } });
+  });
+
   it("are in the document's unit", () => {
     const request = planCorpus("no-radius");
     const short = { ...request, tools: request.tools.map((tool) => (tool.kind === "punch" ? withLengths(tool, [50, 40, 30, 20, 15, 10, 10]) : tool)) };
