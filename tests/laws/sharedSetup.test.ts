@@ -138,6 +138,13 @@ describe("sharedSetup", () => {
     expect(sharedSetup([tight("aaaaa"), tight("bbbbbbbbbb")], [p, v], machine(1000, 0, 0))).toMatchObject({ status: "infeasible", reasons: [expect.stringContaining("needs 2")] });
   });
 
+  it("gives up where pieces of many odd lengths make more sums than can be looked at", () => {
+    const odd = Array.from({ length: 24 }, (_, index) => 50 + ((index ** 3 * 7919) % 9973) / 1000);
+    const wish: SharedWish = { id: "b", lineLength: 40, sheet: [-20, 20], forceKN: 1, ways: [{ punch: "p", die: "v", punchWindow: [-500, 500], dieWindow: [-500, 500] }] };
+    const answer = sharedSetup([wish], [tool("punch", "p", odd), tool("die", "v", [50])], machine(3000, 0, 0));
+    expect([answer.status, answer.reasons]).toEqual(["unknown", [expect.stringContaining("in the effort given")]]);
+  });
+
   it("gives up with what it has", () => {
     const way: SharedWay = { punch: "p", die: "v", punchWindow: [-500, 500], dieWindow: [-500, 500] };
     const wishes = [20, 40].map((lineLength): SharedWish => ({ id: `b${lineLength}`, lineLength, sheet: [-20, 20], forceKN: 1, ways: [way] }));

@@ -77,7 +77,7 @@ function fewestKinds(question: FewestQuestion, classes: readonly ShutHeight[], c
   for (let kinds = 2; kinds <= start.kinds && !effort.spent(); kinds += 1) {
     let best = kinds === start.kinds ? start : null;
     for (const one of classes) {
-      for (const pairs of toolSubsets(one, kinds)) best = solve(question, one, pairs, count, best?.cost ?? Infinity, false, tally) ?? best;
+      for (const pairs of toolSubsets(one, kinds, effort)) best = solve(question, one, pairs, count, best?.cost ?? Infinity, false, tally) ?? best;
     }
     if (best !== null) return { ...best, proven: !effort.spent() && !tally.lost };
   }

@@ -2,6 +2,8 @@
 export interface SearchEffort {
   readonly step: () => void;
   readonly steps: () => number;
+  /** Ends the search: there is more to look at than can be. */
+  readonly giveUp: () => void;
   /** True once the search must end; it stays true. */
   readonly spent: () => boolean;
 }
@@ -17,6 +19,7 @@ export function createSearchEffort(most: number, shouldStop: () => boolean): Sea
       if (steps > most || (steps % LOOK_EVERY === 0 && shouldStop())) stopped = true;
     },
     steps: () => steps,
+    giveUp: () => { stopped = true; },
     spent: () => stopped,
   };
 }

@@ -57,7 +57,7 @@ const STEPS = 200_000;
 export function sharedSetup(wishes: readonly SharedWish[], stock: readonly Tool[], machine: Machine, limits: SharedLimits = {}): SharedSetup {
   const effort = createSearchEffort(limits.steps ?? STEPS, limits.shouldStop ?? (() => false));
   const named = new Set(wishes.flatMap(({ ways }) => ways.flatMap(({ punch, die }) => [`punch ${punch}`, `die ${die}`])));
-  const stocks = stock.filter(({ kind, id }) => named.has(`${kind} ${id}`)).map((tool) => createPieceStock(tool, machine.bedLength, machine.settings.maxSectionGap));
+  const stocks = stock.filter(({ kind, id }) => named.has(`${kind} ${id}`)).map((tool) => createPieceStock(tool, machine.bedLength, machine.settings.maxSectionGap, effort));
   const fewest = createFewestPieces(stocks);
   const classes = shutHeights(wishes, stocks, fewest, machine.settings);
   const whole = classes.filter(({ missing }) => missing.length === 0);
