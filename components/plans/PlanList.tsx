@@ -1,5 +1,6 @@
 "use client";
 import Link from "next/link";
+import { JobsUnderWay } from "@/components/planJobs/JobsUnderWay";
 import { DataTable, type Column } from "@/components/ui/DataTable";
 import { EmptyState } from "@/components/ui/EmptyState";
 import { FilterBox } from "@/components/ui/FilterBox";
@@ -33,12 +34,13 @@ function PlanMark({ status }: Pick<PlanListItem, "status">) {
   return <StateMark tone={tone}>{status === "feasible" ? "works" : word}</StateMark>;
 }
 
-export function PlanList() {
+export function PlanList({ mayWrite }: { readonly mayWrite: boolean }) {
   const { state, change } = useListState({ sort: "createdAt", dir: "desc" });
   const { data, error, isFetching } = usePlanList({ ...state, sort: planSorts.find((sort) => sort === state.sort) ?? "createdAt" });
   return (
     <>
       <PageHeader kicker="Plans" title="Bend orders and setups" summary="Every plan as it was computed: the part's revision, the brake, the tools then in service." />
+      <JobsUnderWay of={{}} mayWrite={mayWrite} />
       <div className="mb-3"><FilterBox label="Search part or brake" value={state.q} onChange={(q) => change({ q, page: 1 })} /></div>
       {error ? <Notice tone="wrong" title="The plans cannot be shown">{error.message}</Notice> : (
         <DataTable caption="Plans" columns={columns} rows={data?.items ?? []} rowKey={(row) => row.id} loading={isFetching && data === undefined}

@@ -1,12 +1,13 @@
 import { BedMapDrawing } from "@/components/preview/BedMapDrawing";
 import { allowanceLine } from "@/lib/sheet/allowanceLine";
-import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
+import { measurementTable } from "@/lib/sheet/measurementTable";
 import type { SheetView } from "@/lib/sheet/sheetView";
 import { PaperSteps } from "./PaperSteps";
 import { PaperTable } from "./PaperTable";
 
 /** The setup sheet as it is read and printed. Every number is the view's own text. */
 export function SheetPaper({ view, code }: { readonly view: SheetView; readonly code?: React.ReactNode }) {
+  const measured = measurementTable(view.measurements);
   return (
     <article className="sheet-paper space-y-4 text-ink" aria-label={`Setup sheet ${view.header.number}`}>
       <PaperHead view={view} code={code} />
@@ -19,8 +20,8 @@ export function SheetPaper({ view, code }: { readonly view: SheetView; readonly 
         </section>
         <section>
           <h2 className="caption mb-1">Measure on the first part</h2>
-          <PaperTable heads={["What", "Nominal", "Tolerance"]} rows={groupMeasurements(view.measurements).map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
-          <p className="mt-1 text-xs text-ink-soft">Tolerances: {[...new Set(view.measurements.map((entry) => entry.source))].join(", ")}.</p>
+          <PaperTable heads={measured.heads} rows={measured.rows} />
+          <p className="mt-1 text-xs text-ink-soft">{measured.note}</p>
         </section>
       </div>
       <section className="break-inside-avoid">

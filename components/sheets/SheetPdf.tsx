@@ -1,7 +1,7 @@
 import { Document, Page, Path, Svg, Text, View } from "@react-pdf/renderer";
 import type { SheetState } from "@/lib/schemas/views";
 import { allowanceLine } from "@/lib/sheet/allowanceLine";
-import { groupMeasurements } from "@/lib/sheet/groupMeasurements";
+import { measurementTable } from "@/lib/sheet/measurementTable";
 import { qrPath } from "@/lib/sheet/qrPath";
 import { paperColours } from "@/lib/sheet/shapeLook";
 import type { SheetView } from "@/lib/sheet/sheetView";
@@ -21,6 +21,7 @@ interface SheetPdfProps {
 
 /** The setup sheet on A4. Every number is the view's own text. */
 export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
+  const measured = measurementTable(view.measurements);
   return (
     <Document title={`Setup sheet ${view.header.number}`} subject={`${view.header.partNumber} ${view.header.partName}`} creator="Foldwright" producer="Foldwright">
       <Page size="A4" style={styles.page}>
@@ -45,8 +46,8 @@ export function SheetPdf({ view, state, released, address }: SheetPdfProps) {
           </View>
           <View style={{ flexGrow: 2, flexShrink: 1, flexBasis: 0 }}>
             <Text style={styles.heading}>Measure on the first part</Text>
-            <PdfTable heads={["What", "Nominal", "Tolerance"]} shares={[4, 2, 2.2]} rows={groupMeasurements(view.measurements).map((entry) => [entry.what, entry.nominal, entry.tolerance])} />
-            <Text style={{ fontSize: 6.5, marginTop: 2 }}>Tolerances: {[...new Set(view.measurements.map((entry) => entry.source))].join(", ")}</Text>
+            <PdfTable heads={measured.heads} shares={[4, 2, 2.2, 2.2].slice(0, measured.heads.length)} rows={measured.rows} />
+            <Text style={{ fontSize: 6.5, marginTop: 2 }}>{measured.note}</Text>
           </View>
         </View>
         <View style={{ marginTop: 8 }} wrap={false}>

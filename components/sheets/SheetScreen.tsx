@@ -1,6 +1,8 @@
 "use client";
 import { FileDown, Printer } from "lucide-react";
 import Link from "next/link";
+import { CheckAgain } from "@/components/planJobs/CheckAgain";
+import { PlanOfSheet } from "@/components/planJobs/PlanOfSheet";
 import { FlatChangeNotice } from "@/components/ui/FlatChangeNotice";
 import { Notice } from "@/components/ui/Notice";
 import { PageHeader } from "@/components/ui/PageHeader";
@@ -33,6 +35,7 @@ export function SheetScreen({ id, ...may }: SheetScreenProps) {
       {data.flatChange === null ? null : (
         <div className="mb-6"><FlatChangeNotice change={data.flatChange} of="this sheet">The sheet stays as it was released. <Link href={`/parts/${data.partId}`} className="text-accent-ink underline underline-offset-2">Plan {data.partNumber} again</Link> and release the new sheet; it takes the place of this one.</FlatChangeNotice></div>
       )}
+      {may.maySeePlans ? <PlanOfSheet planId={data.planId} /> : null}
       <div className="border border-rule-strong bg-white p-6 shadow-[0_2px_0_var(--rule)]"><SheetPaper view={data.view} /></div>
     </>
   );
@@ -43,6 +46,7 @@ function SheetHead({ sheet, mayRelease, maySeePlans, maySeeFloor }: Omit<SheetSc
     <PageHeader kicker="Setup sheet" title={<><span className="num">{sheet.number}</span> {sheet.partName}</>} summary={sheetState[sheet.state].sentence}
       actions={<>
         {maySeePlans ? <Link href={`/plans/${sheet.planId}`} className={buttonClasses("quiet")}>Plan</Link> : null}
+        {maySeePlans && mayRelease ? <CheckAgain planId={sheet.planId} /> : null}
         {sheet.state === "released" && maySeeFloor ? <Link href={`/floor/${sheet.id}`} className={buttonClasses("quiet")}>At the brake</Link> : null}
         <Link href={`/print/${sheet.id}`} className={buttonClasses("plain")}><Printer aria-hidden />Print</Link>
         <a href={`/api/sheets/${sheet.id}/pdf`} className={buttonClasses("plain")}><FileDown aria-hidden />PDF</a>

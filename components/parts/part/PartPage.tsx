@@ -1,6 +1,7 @@
 "use client";
 import { useRouter, useSearchParams } from "next/navigation";
 import { unitName } from "@/lib/format/unitName";
+import { JobsUnderWay } from "@/components/planJobs/JobsUnderWay";
 import { FlatChangeNotice } from "@/components/ui/FlatChangeNotice";
 import { Loading } from "@/components/ui/Loading";
 import { LoadProblem } from "@/components/ui/LoadProblem";
@@ -40,6 +41,7 @@ export function PartPage({ id, mayWrite, mayPlan, maySeePlans }: PartPageProps) 
   return (
     <>
       <PartHead part={data} newest={newest} mayWrite={mayWrite} mayPlan={mayPlan} />
+      {maySeePlans ? <JobsUnderWay of={{ partId: id }} mayWrite={mayPlan} /> : null}
       {data.revision.revision === newest ? null : (
         <div className="mb-6"><Notice tone="caution" title={`This is revision ${data.revision.revision}; the newest is ${newest}`}>
           <button type="button" className="text-accent-ink underline underline-offset-2" onClick={() => router.replace(`/parts/${id}`)}>Show the newest</button>
