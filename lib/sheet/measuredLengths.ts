@@ -5,6 +5,8 @@ export interface MeasuredLength {
   /** In the document's units. */
   readonly length: number;
   readonly tolerance: number | null;
+  /** The face whose length it is; null for the width, which bending does not change. */
+  readonly face: string | null;
 }
 
 /** The lengths that a document states and a caliper can take: legs of a profile, lengths of flanges. A flat as drawn states none. */
@@ -13,14 +15,14 @@ export function measuredLengths(document: PartDocument): readonly MeasuredLength
   if (document.profile) {
     const { legs, width } = document.profile;
     return [
-      ...legs.map((length, i) => ({ what: `Leg ${i === 0 ? "base" : `b${i}`}, ${legKind(kind, i, legs.length)}`, length, tolerance: null })),
-      { what: "Width along the bends", length: width, tolerance: null },
+      ...legs.map((length, i) => ({ what: `Leg ${i === 0 ? "base" : `b${i}`}, ${legKind(kind, i, legs.length)}`, length, tolerance: null, face: i === 0 ? "base" : `b${i}` })),
+      { what: "Width along the bends", length: width, tolerance: null, face: null },
     ];
   }
   return (document.flanges ?? []).flatMap((flange) =>
     flange.length === undefined
       ? []
-      : [{ what: `Flange ${flange.id}, ${flange.dimension ?? kind}`, length: flange.length, tolerance: flange.toleranceLength ?? null }],
+      : [{ what: `Flange ${flange.id}, ${flange.dimension ?? kind}`, length: flange.length, tolerance: flange.toleranceLength ?? null, face: flange.id }],
   );
 }
 

@@ -1,6 +1,7 @@
 import { mmPer } from "@/bending/core/units";
 import type { PartDocument } from "@/bending/part/partDocument";
-import { createSheetFormat } from "./createSheetFormat";
+import type { PlanDocument } from "@/bending/plan/planDocument";
+import { createSheetFormat, type SheetFormat } from "./createSheetFormat";
 import { GENERAL_TOLERANCE, generalTolerance } from "./generalTolerance";
 import { measuredLengths } from "./measuredLengths";
 import type { PlanModel } from "./planModel";
@@ -8,8 +9,8 @@ import type { PlanSource, SheetMeasurement } from "./sheetView";
 import { shorterSide } from "./shorterSide";
 
 /** What to measure on the first part: every angle after its step, then the lengths that the document states. */
-export function sheetMeasurements({ document }: PlanSource, model: PlanModel): readonly SheetMeasurement[] {
-  return [...angles(document, model), ...lengths(document, model)];
+export function sheetMeasurements({ document, plan }: PlanSource, model: PlanModel): readonly SheetMeasurement[] {
+  return [...angles(document, model), ...lengths(document, plan, model)];
 }
 
 function angles(document: PartDocument, model: PlanModel): readonly SheetMeasurement[] {
@@ -39,10 +40,10 @@ function angles(document: PartDocument, model: PlanModel): readonly SheetMeasure
   );
 }
 
-function lengths(document: PartDocument, model: PlanModel): readonly SheetMeasurement[] {
+function lengths(document: PartDocument, plan: PlanDocument, model: PlanModel): readonly SheetMeasurement[] {
   const format = createSheetFormat(model.units);
   const per = mmPer(document.units);
-  return measuredLengths(document).flatMap(({ what, length, tolerance: stated }): SheetMeasurement[] => {
+  return measuredLengths(document).flatMap(({ what, length, tolerance: stated, face }): SheetMeasurement[] => {
     const size = length * per;
     const own = stated ?? document.toleranceLength ?? null;
     const tolerance = own === null ? generalTolerance("length", size) : own * per;
@@ -56,6 +57,13 @@ function lengths(document: PartDocument, model: PlanModel): readonly SheetMeasur
       high: format.fine(size + tolerance),
       source: own === null ? GENERAL_TOLERANCE : "part document",
       afterStep: null,
+      ...expectedOf(plan, face, per, format),
     }];
   });
+}
+
+/** What the steps of the plan let a face's own length miss. */
+function expectedOf(plan: PlanDocument, face: string | null, per: number, format: SheetFormat): Pick<SheetMeasurement, "expected"> {
+  const found = plan.tolerances?.find((one) => one.kind === "leg" && one.face === face && (one.from === face || face === "base"));
+  return typeof found?.worstCase === "number" ? { expected: `±${format.fine(found.worstCase * per)}` } : {};
 }

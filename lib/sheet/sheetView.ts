@@ -104,6 +104,8 @@ export interface SheetMeasurement {
   readonly high: string;
   /** Where the tolerance comes from. */
   readonly source: string;
+  /** What the order and the brake let it miss at worst; absent for angles, and on sheets of before it was kept. */
+  readonly expected?: string;
   readonly afterStep: number | null;
 }
 

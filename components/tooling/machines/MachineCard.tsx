@@ -1,4 +1,5 @@
 "use client";
+import { toDeg } from "@/bending/core/units";
 import { readMachineDocument } from "@/bending/tooling/readMachineDocument";
 import { Facts } from "@/components/ui/Facts";
 import { Notice } from "@/components/ui/Notice";
@@ -48,6 +49,7 @@ export function MachineCard({ machine: view }: { readonly machine: MachineView }
             <h3 className="caption mb-1">Settings and times</h3>
             <Facts rows={[
               { label: "Clearance kept", value: mmOf(settings.clearance) }, { label: "Largest gap between pieces", value: mmOf(settings.maxSectionGap) }, { label: "Largest uncovered end", value: mmOf(settings.maxUncoveredEnd) },
+              { label: "Gauge stop repeats within", value: <>±{mmOf(settings.gaugeRepeat)}</> }, { label: "Angle repeats within", value: num(`±${formatNumber(toDeg(settings.angleRepeat), 2)}°`) },
               { label: "Flip, turn", value: <>{seconds(times.flip)}, {seconds(times.turn)}</> }, { label: "Stroke, gauge move", value: <>{seconds(times.stroke)}, {seconds(times.gaugeMove)}</> },
               { label: "Walk", value: seconds(times.walkPerMetre, "s/m") }, { label: "Set up a station, place a piece", value: <>{seconds(times.stationSetup)}, {seconds(times.sectionPlace)}</> },
             ]} />
