@@ -4,6 +4,7 @@ import type { Change } from "../createAttempts";
 import { leastAmount } from "../leastAmount";
 import { newId } from "../newTool/asNew";
 import { bodyWidth } from "../newTool/bodyWidth";
+import { isStraight } from "../newTool/isStraight";
 import { otherDie } from "../newTool/otherDie";
 import { straightPunch } from "../newTool/straightPunch";
 import { offeredChange } from "../offeredChange";
@@ -16,7 +17,8 @@ const ANGLE_DEG = 1;
 
 /** Sharper tools: the bluntest punch and die that do, then whether one of the two alone is enough. */
 export function angleChanges(facts: WhyFacts): readonly PlanChange[] {
-  const { attempts, kinds, punches: [punch], dies: [die] } = facts;
+  const { attempts, kinds, punches, dies: [die] } = facts;
+  const punch = punches.find(isStraight);
   if (!kinds.has("angle") || punch === undefined || die === undefined) return [];
   attempts.doing("Looking for sharper tools that would do");
   const { request } = attempts;

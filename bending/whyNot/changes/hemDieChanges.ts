@@ -7,6 +7,7 @@ import { leastAmount } from "../leastAmount";
 import { newId } from "../newTool/asNew";
 import { bodyWidth } from "../newTool/bodyWidth";
 import { HEM_ANGLE_DEG, hemDie } from "../newTool/hemDie";
+import { isStraight } from "../newTool/isStraight";
 import { straightPunch } from "../newTool/straightPunch";
 import { offeredChange } from "../offeredChange";
 import type { WhyFacts } from "../whyFacts";
@@ -22,7 +23,8 @@ const SLOT_DEPTH = 31;
 const ANY_RATING = 20_000;
 
 /** Where hems cannot be closed for want of a die: a two-stage hem die with the least slot that does, and a sharp punch where there is none. */
-export function hemDieChanges({ attempts, kinds, punches: [punch], dies: [die], situations: { part } }: WhyFacts): readonly PlanChange[] {
+export function hemDieChanges({ attempts, kinds, punches, dies: [die], situations: { part } }: WhyFacts): readonly PlanChange[] {
+  const punch = punches.find(isStraight);
   if (!kinds.has("hem") || punch === undefined || die === undefined || part === null) return [];
   attempts.doing("Looking for a hem die that would do");
   const { request } = attempts;

@@ -46,7 +46,7 @@ function pieces(facts: WhyFacts, tools: readonly (Punch | Die)[]): PlanChange | 
   const names = tools.map(({ id }) => id).join(" and ");
   return offeredChange(attempts, before, inUnits({ change: change(least), plan: attempt.plan, ...(fails && less[0] !== undefined ? { notEnough: less[0] } : {}) }, LESS_MM, units), {
     kind: "section", group: "stock", what: { tools: tools.map(({ id }) => id) },
-    amount: lengthAmount("length", least[0] ?? 0, units), with: least.slice(1).map((length) => lengthAmount("length", length, units)),
+    amount: lengthAmount("length", least[0] ?? 0, units), with: least.slice(1).map((length, k) => lengthAmount(`length of piece ${k + 2}`, length, units)),
     message: `${least.length > 1 ? "Further pieces" : "A further piece"} of ${names}, ${said} long at least${tools.length > 1 ? ", of each" : ""}, would do.`,
   });
 }

@@ -4,6 +4,7 @@ import type { Die, Punch } from "../../tooling/tool";
 import { leastAmount } from "../leastAmount";
 import { newId } from "../newTool/asNew";
 import { bodyWidth } from "../newTool/bodyWidth";
+import { isStraight } from "../newTool/isStraight";
 import { otherDie } from "../newTool/otherDie";
 import { straightPunch } from "../newTool/straightPunch";
 import { offeredChange } from "../offeredChange";
@@ -25,7 +26,7 @@ export function widthChanges(facts: WhyFacts): readonly PlanChange[] {
   const { kinds, punches, dies, attempts } = facts;
   if (!kinds.has("clearance")) return [];
   attempts.doing("Looking for a narrower punch or die that would do");
-  return [...punches.slice(0, 1), ...dies.slice(0, 1)].flatMap((like) => narrower(facts, like) ?? []);
+  return [...punches.filter(isStraight).slice(0, 1), ...dies.slice(0, 1)].flatMap((like) => narrower(facts, like) ?? []);
 }
 
 function narrower(facts: WhyFacts, like: Punch | Die): PlanChange | null {
@@ -37,7 +38,7 @@ function narrower(facts: WhyFacts, like: Punch | Die): PlanChange | null {
   const least = like.kind === "punch" ? THINNEST_PUNCH : like.vOpening + 2 * BESIDE_V;
   const grid = (value: number) => Math.floor(value / WIDTH_MM) * WIDTH_MM;
   const found = leastAmount({
-    attempts, from, asItIs: like.kind === "die" || isStraight(like), resolution: WIDTH_MM,
+    attempts, from, asItIs: true, resolution: WIDTH_MM,
     ladder: PARTS.map((part) => grid(from * part)).filter((width) => width >= least),
     change: (width) => ({ tools: [...request.tools, like.kind === "punch" ? straightPunch(like, width) : otherDie(like, { width })] }),
   });
@@ -49,5 +50,3 @@ function narrower(facts: WhyFacts, like: Punch | Die): PlanChange | null {
     message: `A ${like.kind === "punch" ? "straight punch" : "die"} like ${like.id} with a body at most ${formatLength(found.value, units)} wide (it has ${formatLength(from, units)}), rated for at least ${rating.value} kN/m, would do.`,
   });
 }
-
-const isStraight = ({ profile }: Punch) => Math.abs(Math.max(...profile.map(([x]) => x)) + Math.min(...profile.map(([x]) => x))) < 1e-6;
