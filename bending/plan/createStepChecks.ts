@@ -71,8 +71,7 @@ export function createStepChecks(situation: Situation): StepChecks {
   /** For each list of ways to gauge, those that clear one pair's tools. */
   const clearing = new Map<readonly GaugeOption[], (readonly GaugeOption[] | undefined)[]>();
   const gauges = (move: number, formed: number, pair: number): readonly GaugeOption[] => {
-    const { back } = placeOf(must(moves[move]));
-    const all = gaugeOptions(back, back.at(formed));
+    const all = gaugeOptions(placeOf(must(moves[move])), formed);
     const known = clearing.get(all) ?? [];
     clearing.set(all, known);
     return (known[pair] ??= preferred(move, formed, all.filter((option) => !meets(option, pairOf(pair)))));

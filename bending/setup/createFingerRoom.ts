@@ -11,15 +11,15 @@ import type { PartModel } from "../part/partModel";
 import type { BackGauge } from "../tooling/machine";
 import type { JoinedContact } from "./joinContacts";
 
-/** Where the middle of a finger may stand on a contact; `half`: the one behind the die. */
-export type FingerRoom = (half: Half, back: HalfState, contact: JoinedContact) => readonly Interval[];
+/** Where the middle of a finger may stand on a contact; `half`: the one behind the die; `over`: faces of the half in front that reach over the bend line. */
+export type FingerRoom = (half: Half, back: HalfState, contact: JoinedContact, over: readonly FaceState[]) => readonly Interval[];
 
 /** A plate of the part in the machine's frame before the stroke: `count` corners on one side, then on the other. */
 interface Plate { readonly count: number; readonly points: Float64Array; readonly round: boolean }
 
 /**
- * On the contact by its whole width where that leaves room for two, by half its width at the least; and nothing of the part
- * within the finger of what is behind the die. A plane face or the fold of a hem may touch the
+ * On the contact by its whole width where that leaves room for two, by half its width at the least; and nothing within the
+ * finger of what is behind the die, be it of the half in front. A plane face or the fold of a hem may touch the
  * finger's outside; another bend's round, a little large in plates, may not.
  */
 export function createFingerRoom(part: PartModel, gauge: BackGauge): FingerRoom {
@@ -28,6 +28,7 @@ export function createFingerRoom(part: PartModel, gauge: BackGauge): FingerRoom 
   const [xs, ys] = [gauge.fingerProfile.map((p) => p[0]), gauge.fingerProfile.map((p) => p[1])];
   const box: Box = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)];
   const plates = new Map<FaceState, readonly Plate[]>();
+  const turned = new Map<FaceState, readonly Plate[]>();
 
   const platesOf = (face: FaceState, allowance: number): readonly Plate[] => {
     const known = plates.get(face);
@@ -40,11 +41,17 @@ export function createFingerRoom(part: PartModel, gauge: BackGauge): FingerRoom 
     plates.set(face, made);
     return made;
   };
+  /** The same of a half in front, which stands turned by half a turn about the vertical. */
+  const turnedOf = (face: FaceState, allowance: number): readonly Plate[] => {
+    const made = turned.get(face) ?? platesOf(face, allowance).map((plate): Plate => ({ ...plate, points: plate.points.map((value, i) => (i % 3 === 1 ? value : -value)) }));
+    turned.set(face, made);
+    return made;
+  };
   /**
    * z-extents of what is in a finger at (x, r). Along a slanted edge x grows by `slope` a millimetre of z: then everything is sheared until the edge runs
    * along the bed, and the finger, which reaches half its width to either side, is longer by what that shears it. So nothing is missed.
    */
-  const meets = ({ bend, thickness, lines }: Half, back: HalfState, x: number, r: number, slope: number): readonly Interval[] => {
+  const meets = ({ bend, thickness, lines }: Half, back: HalfState, over: readonly FaceState[], x: number, r: number, slope: number): readonly Interval[] => {
     const grow = Math.abs(slope) * half;
     const met: Interval[] = [];
     let placed: readonly (readonly [Float64Array, Float64Array])[] | null = null;
@@ -59,12 +66,13 @@ export function createFingerRoom(part: PartModel, gauge: BackGauge): FingerRoom 
       const { a, b } = face.bounds();
       if (slope !== 0 || !apart([a[0] + bend.allowance / 2, a[1] + bend.allowance / 2, b[0], b[1]], box, x, r)) platesOf(face, bend.allowance).forEach(look);
     }
+    for (const face of over) turnedOf(face, bend.allowance).forEach(look);
     const zone: Box = [-bend.allowance / 2, bend.allowance / 2, 0, thickness];
     if (slope !== 0 || !apart(zone, box, x, r)) for (const line of lines) look(bar(zone, line));
     return met;
   };
-  return (behind, back, contact) => {
-    const met = meets(behind, back, contact.x, contact.r, contact.slope);
+  return (behind, back, contact, over) => {
+    const met = meets(behind, back, over, contact.x, contact.r, contact.slope);
     const taken = mergeIntervals(met.map(([from, to]): Interval => [from - half, to + half]));
     return mergeIntervals(contact.spans.map(([from, to]): Interval => {
       const inset = Math.max(0, Math.min(half, (to - from - gauge.minSpread) / 2));

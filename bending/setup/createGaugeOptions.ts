@@ -1,4 +1,5 @@
 import { facesOf } from "../clearance/facesOf";
+import type { Halves } from "../clearance/createAsks";
 import type { FaceState, Half, HalfState } from "../clearance/half";
 import { MEANT_CONTACT_MM } from "../core/tolerance";
 import type { Frame } from "../geometry/frame";
@@ -12,14 +13,14 @@ import type { GaugeOption } from "./gaugeOption";
 import { joinContacts } from "./joinContacts";
 import { uprightContact } from "./uprightContact";
 
-/** Every way to locate the sheet before a stroke: `half` is the one behind the die, as it stands. */
-export type GaugeOptions = (half: Half, back: HalfState) => readonly GaugeOption[];
+/** Every way to locate the sheet before a stroke, the two halves of it as they stand. */
+export type GaugeOptions = (halves: Halves, formed: number) => readonly GaugeOption[];
 
 /**
  * Every way to locate the sheet before a stroke, best first: two fingers before one, a straight edge or an
  * upright flange before a slanted edge, the nearest to the bend line first (least error adds up).
  * Before the stroke the sheet lies level on the die. What a face offers is worked out once for each of its states, and
- * everything once for each state of the half behind the die.
+ * everything once for each state of the half behind the die, and of the faces in front that reach over it.
  */
 export function createGaugeOptions(part: PartModel, gauge: BackGauge): GaugeOptions {
   const known = new Map<FaceState, readonly Contact[]>();
@@ -44,18 +45,32 @@ export function createGaugeOptions(part: PartModel, gauge: BackGauge): GaugeOpti
     if (index === undefined || !hem?.hem || !((face.state >> index) & 1)) return null;
     return foldContact(part, index, hem.child === face.path.face && face.before ? face.before.frame() : face.frame());
   };
-  const find = (half: Half, back: HalfState): readonly GaugeOption[] => {
+  const find = (half: Half, back: HalfState, over: readonly FaceState[]): readonly GaugeOption[] => {
     const contacts = facesOf(back).flatMap((face) => contactsOf(half, face)).sort((p, q) => p.face - q.face);
     if (contacts.length === 0) return [];
     return joinContacts(contacts)
-      .map((contact): GaugeOption => ({ ...settingOf(contact), free: room(half, back, contact) }))
+      .map((contact): GaugeOption => ({ ...settingOf(contact), free: room(half, back, contact, over) }))
       .filter((option) => option.free.length > 0)
       .sort((a, b) => rank(a, gauge) - rank(b, gauge) || nearest(a) - nearest(b) || a.face - b.face || a.edge - b.edge);
   };
-  const answers = new Map<HalfState, readonly GaugeOption[]>();
-  return (half, back) => {
-    const answer = answers.get(back) ?? find(half, back);
-    answers.set(back, answer);
+  const overOf = new Map<HalfState, { readonly faces: readonly FaceState[]; readonly key: string }>();
+  /** Faces of the half in front that reach over the bend line. */
+  const reachingOver = ({ bend }: Half, front: HalfState) => {
+    const known = overOf.get(front);
+    if (known) return known;
+    const faces = facesOf(front).filter((face) => face.bounds().a[0] + bend.allowance / 2 < 0);
+    const made = { faces, key: faces.map(({ index }) => index).join() };
+    overOf.set(front, made);
+    return made;
+  };
+  const answers = new Map<HalfState, Map<string, readonly GaugeOption[]>>();
+  return ({ front, back }, formed) => {
+    const behind = back.at(formed);
+    const { faces, key } = reachingOver(front, front.at(formed));
+    const known = answers.get(behind) ?? new Map<string, readonly GaugeOption[]>();
+    answers.set(behind, known);
+    const answer = known.get(key) ?? find(back, behind, faces);
+    known.set(key, answer);
     return answer;
   };
 }

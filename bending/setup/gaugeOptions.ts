@@ -7,6 +7,6 @@ import type { GaugeOption } from "./gaugeOption";
 
 /** Every way to locate the sheet before one stroke, best first: see `createGaugeOptions`. */
 export function gaugeOptions(part: PartModel, hit: Hit, machine: Machine): readonly GaugeOption[] {
-  const { back } = createHitPlaces(part, machine.settings.clearance, { clips: 0, entries: 0 })(hit);
-  return createGaugeOptions(part, machine.gauge)(back, back.at(hit.formed));
+  const halves = createHitPlaces(part, machine.settings.clearance, { clips: 0, entries: 0 })(hit);
+  return createGaugeOptions(part, machine.gauge)(halves, hit.formed);
 }

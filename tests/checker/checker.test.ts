@@ -1,15 +1,17 @@
 import { readdirSync, readFileSync } from "node:fs";
 import path from "node:path";
 import { beforeAll, describe, expect, it } from "vitest";
-import { machineFrames } from "@/bending";
+import { machineFrames, type Clearance } from "@/bending";
 import type { FixedCase } from "./caseOf";
 import { bodyDistance, convexDistance } from "./convexDistance";
 import { judgeCase } from "./judgeCase";
+import { createJudge } from "./judgeSeed";
 import { createModeller, type Modeller } from "./modeller";
 import { move, type Point } from "./placing";
 import { placePart } from "./placePart";
 import { createRandom, type Random } from "./random";
 import { scenesOf } from "./scene";
+import { countOf, emptyTally } from "./tally";
 
 let modeller: Modeller;
 beforeAll(async () => {
@@ -67,6 +69,21 @@ describe("the checker itself", () => {
       for (const solid of [solidA, solidB, bar]) solid.delete();
     }
     expect(Math.min(apart, together)).toBeGreaterThan(100);
+  });
+
+  it("notices answers that are wrong: nothing forbidden, nothing blocked, intervals too short, everything forbidden", { timeout: 600_000 }, () => {
+    const wrong = (told: (clearance: Clearance) => Clearance) => {
+      const [judge, tally] = [createJudge(modeller, told), emptyTally()];
+      for (let seed = 1; seed <= 5; seed++) judge(seed, tally);
+      return tally;
+    };
+    const careless = wrong((clearance) => ({ ...clearance, forbidden: () => [], blocked: () => [] }));
+    for (const question of ["punch", "die", "other", "ram", "bed", "self", "way"] as const) expect(careless[question].falseFeasible, question).toBeGreaterThan(0);
+    const short = wrong((clearance) => ({ ...clearance, forbidden: (...asked) => clearance.forbidden(...asked).map(([from, to]) => [from + 3, to - 3] as const) }));
+    expect(short.punch.falseFeasible + short.die.falseFeasible + short.other.falseFeasible).toBeGreaterThan(0);
+    const anxious = wrong((clearance) => ({ ...clearance, forbidden: () => [[-1e6, 1e6]] }));
+    for (const question of ["punch", "other"] as const) expect(anxious[question].falseInfeasible + anxious[question].choice, question).toBeGreaterThan(0);
+    expect(countOf(wrong((clearance) => clearance), "falseFeasible")).toBe(0);
   });
 
   const cases = path.join(__dirname, "cases");

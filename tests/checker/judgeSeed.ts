@@ -1,3 +1,4 @@
+import type { Clearance } from "@/bending";
 import { judgeScene } from "./judgeScene";
 import type { Modeller } from "./modeller";
 import { createRandom } from "./random";
@@ -25,15 +26,16 @@ export interface SeedResult {
   readonly found: readonly Found[];
 }
 
-/** Judges all strokes of the part that a seed stands for, and counts. */
-export function createJudge(modeller: Modeller): (seed: number, tally: Tally) => SeedResult {
+/** Judges all strokes of the part that a seed stands for, and counts. `told`: what takes the place of the product's answers, to see that the checker notices. */
+export function createJudge(modeller: Modeller, told: (clearance: Clearance) => Clearance = (clearance) => clearance): (seed: number, tally: Tally) => SeedResult {
   const stages = createStages(modeller);
   const shapes = createToolShapes(modeller);
   return (seed, tally) => {
     const random = createRandom(seed);
     const found: Found[] = [];
     let [samples, blocked, near, modelled] = [0, 0, 0, 0];
-    scenesOf(random).forEach((scene, index) => {
+    scenesOf(random).forEach((drawn, index) => {
+      const scene = { ...drawn, clearance: told(drawn.clearance) };
       const stage = stages(scene);
       if (!stage) return;
       samples++;
