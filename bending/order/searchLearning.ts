@@ -13,6 +13,8 @@ export interface LearnedOutcome {
   readonly outcome: OrderOutcome;
   /** The last bound that was worked out. */
   readonly soFar: CostSoFar | null;
+  /** Something was learned since: another bound would be better. */
+  readonly stale: boolean;
 }
 
 /** A bound is worked out again after so much was learned, and the more the larger its table is: it takes as long as asking that much. */
@@ -38,9 +40,9 @@ export function searchLearning(problem: LearningProblem, limits: SearchLimits): 
     const worthIt = () => soFar !== null && (problem.learned() > known + patience || (problem.learned() > known && states > LEARNED_AT_LEAST + entries / ENTRIES_A_STATE));
     const outcome = searchOrder(problem, { ...limits, soFar, onExpand: (count) => { states = count; limits.onExpand?.(expanded + count); }, shouldStop: () => worthIt() || stop() });
     expanded += outcome.expanded;
-    if (outcome.kind !== "stopped") return { outcome: { ...outcome, expanded }, soFar };
+    if (outcome.kind !== "stopped") return { outcome: { ...outcome, expanded }, soFar, stale: problem.learned() > known };
     bound = Math.max(bound, outcome.bound);
-    if (stop()) return { outcome: { ...outcome, bound, expanded }, soFar };
+    if (stop()) return { outcome: { ...outcome, bound, expanded }, soFar, stale: problem.learned() > known };
     soFar = createCostSoFar(problem, stop);
   }
 }

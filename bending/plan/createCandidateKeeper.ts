@@ -10,7 +10,7 @@ export interface Candidate {
   readonly weight: number;
 }
 
-/** The best plans so far. */
+/** The best plans so far, each really different from the others. */
 export interface CandidateKeeper {
   readonly keep: (candidate: Candidate) => void;
   /** Best first. */
@@ -22,29 +22,27 @@ export interface CandidateKeeper {
 /** Two weights nearer than this are equal. */
 export const SAME_WEIGHT = 1e-7;
 
-export function createCandidateKeeper(most: number): CandidateKeeper {
-  const candidates: Candidate[] = [];
+/** Keeps the best plan of each class; two plans of one class differ in nothing that a person would choose by. */
+export function createCandidateKeeper(most: number, classOf: (candidate: Candidate) => string): CandidateKeeper {
+  const candidates: { readonly plan: Candidate; readonly of: string }[] = [];
   return {
-    keep: (candidate) => {
-      if (candidates.some((one) => sameCandidate(one, candidate))) return;
-      candidates.push(candidate);
-      candidates.sort((a, b) => (Math.abs(a.weight - b.weight) < SAME_WEIGHT ? carried(a) - carried(b) : a.weight - b.weight));
+    keep: (plan) => {
+      const of = classOf(plan);
+      const alike = candidates.findIndex((one) => one.of === of);
+      if (alike >= 0) {
+        if (inOrder(candidates[alike]?.plan ?? plan, plan) <= 0) return;
+        candidates.splice(alike, 1);
+      }
+      candidates.push({ plan, of });
+      candidates.sort((a, b) => inOrder(a.plan, b.plan));
       candidates.length = Math.min(candidates.length, most);
     },
-    kept: () => [...candidates],
-    worst: () => (candidates.length < most ? Infinity : (candidates[most - 1]?.weight ?? Infinity) - SAME_WEIGHT),
+    kept: () => candidates.map(({ plan }) => plan),
+    worst: () => (candidates.length < most ? Infinity : (candidates[most - 1]?.plan.weight ?? Infinity) - SAME_WEIGHT),
   };
 }
 
+const inOrder = (a: Candidate, b: Candidate): number => (Math.abs(a.weight - b.weight) < SAME_WEIGHT ? carried(a) - carried(b) : a.weight - b.weight);
+
 /** Length of all tools on the bed: of plans that take the same time, the one with less to carry. */
 const carried = ({ layout }: Candidate) => layout.stations.reduce((sum, { punch, die }) => sum + punch.length + die.length, 0);
-
-/** Plans found twice: the same steps on stations of the same pairs and lengths. */
-function sameCandidate(a: Candidate, b: Candidate): boolean {
-  return Math.abs(a.weight - b.weight) < SAME_WEIGHT && print(a) === print(b);
-}
-
-const print = ({ steps, layout }: Candidate) => JSON.stringify([
-  steps.map(({ move, station }) => [move, station]),
-  layout.stations.map(({ pair, punch, die, z }) => [pair, punch.length, die.length, Math.round(z)]),
-]);

@@ -10,8 +10,9 @@ import type { GaugeNumbers } from "./gaugeNumbers";
 import { gaugePatterns, type GaugePattern } from "./gaugePatterns";
 import type { Situation } from "./situation";
 
-/** Bends that are told apart for one move: the nearest to it. */
-const BENDS_TOLD_APART = 16;
+/** Bends that are told apart for one move, the nearest to it: all of them, or few where all would make the tables larger than they are worth. */
+const ALL_UP_TO = 16;
+const FEW = 12;
 
 /** What is known of steps without asking, and grows with every answer. */
 export interface Least {
@@ -29,7 +30,8 @@ export interface Least {
  */
 export function createLeast(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): Least {
   const { moves, pairs, fits } = situation;
-  const patternsOf = gaugePatterns(situation, BENDS_TOLD_APART);
+  const toldApart = situation.part.bends.length - 1 <= ALL_UP_TO ? ALL_UP_TO : FEW;
+  const patternsOf = gaugePatterns(situation, toldApart);
   const settings = createSettings(situation, numbers);
   const tables = moves.map((): ((formed: number) => LeastOption | null) | null => null);
   /** Wishes that the best of the pairs that fit leaves unmet; Infinity when none fits. */
@@ -41,7 +43,7 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
     const wishes = leastWishes(move);
     if (wishes === Infinity) return () => null;
     const patterns = patternsOf(move);
-    const window = windowOf(patterns);
+    const window = windowOf(patterns, toldApart);
     const pick = pickBits(window);
     const sets = settings.sets(patterns, window, pick);
     const options = new Map<number, LeastOption>();
@@ -80,11 +82,11 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
 }
 
 /** The bends that patterns speak of, as many of the nearest as are told apart: patterns of few bends are near. */
-function windowOf(patterns: readonly GaugePattern[]): number {
+function windowOf(patterns: readonly GaugePattern[], most: number): number {
   let window = 0;
   let count = 0;
   for (const { mask } of [...patterns].sort((a, b) => bitCount(a.mask) - bitCount(b.mask))) {
-    for (let rest = mask & ~window; rest !== 0 && count < BENDS_TOLD_APART; rest &= rest - 1) {
+    for (let rest = mask & ~window; rest !== 0 && count < most; rest &= rest - 1) {
       window |= rest & -rest;
       count += 1;
     }

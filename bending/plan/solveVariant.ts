@@ -6,10 +6,12 @@ import type { SearchBudget } from "./createBudget";
 import { createCandidateKeeper, type Candidate } from "./createCandidateKeeper";
 import { createGaugeNumbers } from "./gaugeNumbers";
 import type { StepChecks } from "./createStepChecks";
+import { planClass } from "./planClass";
 import { relaxedProblem } from "./relaxedProblem";
 import { kindSets } from "./kindSets";
 import { remainingBound } from "../order/remainingBound";
 import { searchLearning } from "../order/searchLearning";
+import { searchOrder } from "../order/searchOrder";
 import { searchBeds } from "./searchBeds";
 import { setupSeconds } from "./setupSeconds";
 import type { Situation } from "./situation";
@@ -32,13 +34,18 @@ export interface VariantAnswer {
 
 /** Beds of up to so many stations are searched; more are only built for an order that works. */
 export const MOST_STATIONS = 3;
+/** With more bends than this some order is looked for first, so that a search that is stopped has a plan to show. */
+const SOME_ORDER_FROM = 12;
+/** How much more the rest of an order weighs meanwhile, and how many states are looked at. */
+const HASTE = 3;
+const HASTY_STATES = 2000;
 /** Sets of formed bends looked at for one where every way ends. */
 const DEAD_END_SETS = 300;
 
 /** Best order, fronts, tools and stations for one flat pattern. */
 export function solveVariant(situation: Situation, checks: StepChecks, budget: SearchBudget): VariantAnswer {
   const numbers = createGaugeNumbers();
-  const keeper = createCandidateKeeper(budget.keep);
+  const keeper = createCandidateKeeper(budget.keep, (candidate) => planClass(situation, candidate));
   const limits = { shouldStop: budget.shouldStop, onExpand: budget.onExpand };
   const asked = { situation, checks, numbers };
   const relaxed = relaxedProblem(situation, checks, numbers);
@@ -48,8 +55,16 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
     ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
 
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
-  budget.doing("Looking for the best order with the bed left out", 0);
-  const { outcome: best, soFar } = searchLearning(relaxed, limits);
+  const known = createCostSoFar(relaxed, budget.shouldStop);
+  if (situation.part.bends.length > SOME_ORDER_FROM) {
+    budget.doing("Looking for a first order", 0);
+    const some = searchOrder(relaxed, { ...limits, soFar: known, haste: HASTE, most: HASTY_STATES });
+    tally.expanded += some.expanded;
+    if (some.kind === "found") constructBeds(bedQuestionOf(asked, relaxed, budget, keeper, { steps: some.steps, least: 0, soFar: known }), some.steps, () => keeper.kept().length > 0);
+    if (enough()) return answer(floor, { stopped: true });
+  }
+  budget.doing("Looking for the best order with the bed left out", tally.expanded);
+  const { outcome: best, soFar, stale } = searchLearning(relaxed, { ...limits, soFar: known });
   tally.expanded += best.expanded;
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
   if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
@@ -59,7 +74,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   const done = () => keeper.worst() <= least || enough();
   constructBeds(first, best.steps, done);
   if (enough()) return answer(least, { stopped: true });
-  const question = keeper.worst() <= least ? first : { ...first, limits: { ...first.limits, soFar: createCostSoFar(relaxed, budget.shouldStop) } };
+  const question = keeper.worst() <= least || !stale ? first : { ...first, limits: { ...first.limits, soFar: createCostSoFar(relaxed, budget.shouldStop) } };
   let open = Infinity;
   for (let count = 1; count <= Math.min(MOST_STATIONS, situation.part.bends.length) && open === Infinity; count += 1) {
     const searched = searchBeds(question, count);
