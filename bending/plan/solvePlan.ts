@@ -7,6 +7,7 @@ import { emptyPlan } from "./emptyPlan";
 import { flatLength } from "./flatLength";
 import { hemReason } from "./hemReason";
 import { explain } from "./explain";
+import { pairsOfFewerWishes } from "./pairsOfFewerWishes";
 import { partVariants, type PartVariant } from "./partVariants";
 import { planFlat } from "./planFlat";
 import { createPlanMemory } from "./planMemory";
@@ -43,7 +44,10 @@ export function solvePlan(request: PlanRequest, order?: readonly number[]): Plan
   return withFlat(joined(request, solved, toolReasons, variants.value.length, order !== undefined), first, request);
 }
 
-/** Flat by flat the shortlist of pairs; only when none of them gives a plan, flat by flat all pairs. */
+/**
+ * Flat by flat the shortlist of pairs, and where it leaves wishes unmet that others would not, these with it; only when none of them gives a plan, flat by
+ * flat all pairs.
+ */
 function solveVariants(request: PlanRequest, variants: readonly PartVariant[], budget: SearchBudget, order: readonly number[] | undefined): { readonly solved: readonly Solved[]; readonly toolReasons: readonly PlanReason[] } {
   const solved: Solved[] = [];
   const toolReasons: PlanReason[] = [];
@@ -69,8 +73,20 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
       toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));
       continue;
     }
-    const short = withPairs(situation, shortlist(situation));
-    if (solve(variant, short, situation.pairs.length)) return { solved, toolReasons };
+    const listed = shortlist(situation);
+    const short = withPairs(situation, listed);
+    if (solve(variant, short, situation.pairs.length)) {
+      const first = solved[solved.length - 1];
+      const unmet = first?.answer.candidates[0]?.demerits ?? 0;
+      const others = unmet > 0 && listed.length < situation.pairs.length ? pairsOfFewerWishes(situation, unmet, budget) : [];
+      const more = situation.pairs.filter((pair) => listed.includes(pair) || others.includes(pair));
+      if (more.length > listed.length) {
+        solved.pop();
+        solve(variant, withPairs(situation, more), situation.pairs.length);
+        if (first && solved[solved.length - 1]?.answer.stopped) solved.push(first);
+      }
+      return { solved, toolReasons };
+    }
     if (short.pairs.length < situation.pairs.length) left.push({ variant, situation });
   }
   for (const { variant, situation } of left) {
