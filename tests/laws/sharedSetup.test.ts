@@ -98,6 +98,16 @@ describe("sharedSetup", () => {
     }), { numRuns: 100 });
   });
 
+  it("says no more than it knows when it is cut short", () => {
+    fc.assert(fc.property(cases, fc.integer({ min: 1, max: 60 }), ({ wishes, stock, brake }, steps) => {
+      const [whole, cut] = [sharedSetup(wishes, stock, brake), sharedSetup(wishes, stock, brake, { steps })];
+      if (cut.status === "optimal" || cut.status === "infeasible") expect([cut.status, rank(cut)]).toEqual([whole.status, rank(whole)]);
+      if (cut.status === "feasible") expect(rank(cut)).toBeGreaterThanOrEqual(rank(whole));
+      if (whole.status === "optimal") expect(cut.proof.leastStations).toBeLessThanOrEqual(whole.stations.length);
+      if (cut.status === "feasible") expect(wrongWith(cut, wishes, brake)).toEqual([]);
+    }), { numRuns: 200 });
+  });
+
   it("keeps a part that sticks out clear of the next station", () => {
     const wide = (id: string, lineLength: number, sticksOut: number): SharedWish => ({
       id, lineLength, sheet: [-lineLength / 2 - sticksOut, lineLength / 2 + sticksOut], forceKN: 1, ways: [{ punch: "p", die: "v", punchWindow: [-lineLength / 2, lineLength / 2], dieWindow: [-1000, 1000] }],

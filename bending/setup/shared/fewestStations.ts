@@ -45,23 +45,59 @@ export interface FewestAnswer {
   readonly lost: boolean;
 }
 
+/** Steps for each count of stations at the first going over: enough where pieces are not scarce. */
+const FIRST_STEPS = 20_000;
+
 /**
  * The least count of stations for which there is a bed at all, counting up; then the least count of tools with which so many
- * stations do, counting up over sets of tools; then the cheapest of those beds.
+ * stations do, counting up over sets of tools; then the cheapest of those beds. A count that takes long is passed over at first, so that there is
+ * some bed to show, and gone into with all the effort that is left afterwards.
  */
 export function fewestStations(question: FewestQuestion): FewestAnswer {
-  const { classes, wishes, machine, effort } = question;
+  const { classes, effort } = question;
+  if (classes.length === 0) return { best: null, leastStations: 0, lost: false };
+  const apart = Math.max(1, Math.min(...classes.map((one) => leastApart(question, one))));
+  const first = countUp(question, apart, () => effort.portion(FIRST_STEPS));
+  const found = first.least === first.count || effort.spent() ? first : countUp(question, first.least, () => effort);
+  const at = found.beds.length > 0 ? found : { ...first, least: found.least, lost: found.lost, sure: false };
+  if (at.beds.length === 0) return { best: null, leastStations: effort.spent() ? found.least : apart, lost: found.lost };
+  const best = fewestKinds(question, at.count, at.beds);
+  return { best: { ...best, proven: best.proven && at.sure && at.least === at.count }, leastStations: at.least, lost: found.lost };
+}
+
+interface Counted {
+  /** The first count with a bed, or one over the last. */
+  readonly count: number;
+  readonly beds: readonly (Omit<FoundBed, "proven"> & { readonly of: ShutHeight })[];
+  /** No bed has fewer stations than this. */
+  readonly least: number;
+  /** Every shut height was settled at the last count. */
+  readonly sure: boolean;
+  readonly lost: boolean;
+}
+
+function countUp(question: FewestQuestion, from: number, effortOf: () => SearchEffort): Counted {
+  const { classes, wishes, machine } = question;
   const most = Math.min(wishes.length, Math.floor((machine.bedLength + NEAR_GAP_MM) / (SHORTEST_RUN_MM + NEAR_GAP_MM)));
   const tally = { lost: false };
-  const apart = classes.length === 0 ? 0 : Math.min(...classes.map((one) => leastApart(question, one)));
-  let least = apart;
-  for (let count = Math.max(1, apart); count <= most && classes.length > 0; count += 1) {
-    const first = classes.map((one) => solve(question, one, one.pairs, count, Infinity, true, tally));
-    if (first.some((bed) => bed !== null)) return { best: fewestKinds(question, classes.filter((_, index) => first[index] !== null), count, first.flatMap((bed) => bed ?? [])), leastStations: least, lost: tally.lost };
-    if (effort.spent()) break;
-    if (!tally.lost) least = count + 1;
+  let [least, open] = [from, false];
+  for (let count = from; count <= most; count += 1) {
+    const beds: Counted["beds"][number][] = [];
+    let sure = true;
+    for (const of of classes) {
+      const effort = effortOf();
+      const before = { lost: false };
+      const bed = solve({ ...question, effort }, of, of.pairs, count, Infinity, true, before);
+      if (bed !== null) beds.push({ ...bed, of });
+      else if (effort.spent() || before.lost) sure = false;
+      tally.lost ||= before.lost && bed === null;
+    }
+    if (beds.length > 0) return { count, beds, least, sure, lost: tally.lost };
+    open ||= !sure;
+    if (!open) least = count + 1;
+    if (question.effort.spent()) break;
   }
-  return { best: null, leastStations: effort.spent() ? least : apart, lost: tally.lost };
+  return { count: most + 1, beds: [], least, sure: !open, lost: tally.lost };
 }
 
 function leastApart({ fewest }: FewestQuestion, { pairs, wishes }: ShutHeight): number {
@@ -70,14 +106,14 @@ function leastApart({ fewest }: FewestQuestion, { pairs, wishes }: ShutHeight): 
 }
 
 /** Of the beds with so many stations the one with the fewest tools, then the cheapest; the first found when the search is cut short. */
-function fewestKinds(question: FewestQuestion, classes: readonly ShutHeight[], count: number, known: readonly Omit<FoundBed, "proven">[]): FoundBed {
+function fewestKinds(question: FewestQuestion, count: number, known: Counted["beds"]): FoundBed {
   const { effort } = question;
   const start = known.reduce((a, b) => (b.kinds < a.kinds || (b.kinds === a.kinds && b.cost < a.cost) ? b : a));
   const tally = { lost: false };
   for (let kinds = 2; kinds <= start.kinds && !effort.spent(); kinds += 1) {
-    let best = kinds === start.kinds ? start : null;
-    for (const one of classes) {
-      for (const pairs of toolSubsets(one, kinds, effort)) best = solve(question, one, pairs, count, best?.cost ?? Infinity, false, tally) ?? best;
+    let best: Omit<FoundBed, "proven"> | null = kinds === start.kinds ? start : null;
+    for (const { of } of known) {
+      for (const pairs of toolSubsets(of, kinds, effort)) best = solve(question, of, pairs, count, best?.cost ?? Infinity, false, tally) ?? best;
     }
     if (best !== null) return { ...best, proven: !effort.spent() && !tally.lost };
   }

@@ -6,6 +6,8 @@ export interface SearchEffort {
   readonly giveUp: () => void;
   /** True once the search must end; it stays true. */
   readonly spent: () => boolean;
+  /** An effort for a part of the search: so many steps at the most, all of them counted in the whole as well. */
+  readonly portion: (most: number) => SearchEffort;
 }
 
 /** How many steps pass between two looks at the clock of the caller. */
@@ -13,7 +15,7 @@ const LOOK_EVERY = 256;
 
 export function createSearchEffort(most: number, shouldStop: () => boolean): SearchEffort {
   let [steps, stopped] = [0, false];
-  return {
+  const effort: SearchEffort = {
     step: () => {
       steps += 1;
       if (steps > most || (steps % LOOK_EVERY === 0 && shouldStop())) stopped = true;
@@ -21,5 +23,23 @@ export function createSearchEffort(most: number, shouldStop: () => boolean): Sea
     steps: () => steps,
     giveUp: () => { stopped = true; },
     spent: () => stopped,
+    portion: (part) => portionOf(effort, part),
   };
+  return effort;
+}
+
+function portionOf(whole: SearchEffort, most: number): SearchEffort {
+  const from = whole.steps();
+  let stopped = false;
+  const part: SearchEffort = {
+    step: () => {
+      whole.step();
+      if (whole.steps() - from > most) stopped = true;
+    },
+    steps: () => whole.steps() - from,
+    giveUp: () => { stopped = true; },
+    spent: () => stopped || whole.spent(),
+    portion: (less) => portionOf(part, less),
+  };
+  return part;
 }
