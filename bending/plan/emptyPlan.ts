@@ -2,7 +2,7 @@ import type { LengthUnit } from "../core/units";
 import type { PlanDocument, PlanReason } from "./planDocument";
 
 /** Names the planner's version; it is stored with each plan. */
-export const PLAN_ENGINE = "foldwright-planner/1";
+export const PLAN_ENGINE = "foldwright-planner/2";
 
 /** A plan without steps: the ground that answers are written on, and the answer when there is none. */
 export function emptyPlan(of: {
