@@ -2,7 +2,9 @@ import { SAME_COST } from "./carryCost";
 import type { ApartBound } from "./createApartBound";
 import type { FewestPieces } from "./createFewestPieces";
 import type { PairPlace, PreparedWish } from "./preparedWish";
-import { bothRooms, isWithinRoom, type Room } from "./room";
+import { bothRooms } from "./bothRooms";
+import { isWithinRoom } from "./isWithinRoom";
+import type { Room } from "./room";
 import type { SearchEffort } from "./searchEffort";
 
 /** A station of the search: its pair, and the lengths that are left to it by what it holds. */

@@ -1,6 +1,6 @@
 import type { FewestPieces } from "./createFewestPieces";
 import type { PairPlace, PreparedWish } from "./preparedWish";
-import { bothRooms } from "./room";
+import { bothRooms } from "./bothRooms";
 
 export interface ApartBound {
   /** Stations that these wishes need at the least. */

@@ -1,6 +1,7 @@
 import { carryCost } from "./carryCost";
 import type { PieceStock } from "./createPieceStock";
-import { leastLengths, type Room } from "./room";
+import { leastLengths } from "./leastLengths";
+import type { Room } from "./room";
 
 /** What a station within a room costs at the least out of the whole stock; null when no pieces make one. */
 export type FewestPieces = (punch: number, die: number, room: Room) => number | null;

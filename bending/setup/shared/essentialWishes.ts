@@ -1,5 +1,5 @@
 import type { PreparedWish } from "./preparedWish";
-import { isWithinRoom } from "./room";
+import { isWithinRoom } from "./isWithinRoom";
 
 /** The wishes that ask for something: without those that every station which holds some other wish holds as well. */
 export function essentialWishes(wishes: readonly PreparedWish[]): readonly PreparedWish[] {

@@ -2,7 +2,8 @@ import { SAME_COST } from "./carryCost";
 import type { PieceStock } from "./createPieceStock";
 import type { ToolShares } from "./createToolShares";
 import type { PieceChoice } from "./pieceChoices";
-import { leastLengths, type Room } from "./room";
+import { leastLengths } from "./leastLengths";
+import type { Room } from "./room";
 import type { SearchEffort } from "./searchEffort";
 import { splitRoom } from "./splitRoom";
 

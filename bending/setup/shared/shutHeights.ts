@@ -2,7 +2,7 @@ import type { MachineSettings } from "../../tooling/machine";
 import type { FewestPieces } from "./createFewestPieces";
 import type { PieceStock } from "./createPieceStock";
 import type { PairPlace, PreparedWish } from "./preparedWish";
-import { roomOf } from "./room";
+import { roomOf } from "./roomOf";
 import type { SharedWish } from "./sharedWish";
 
 /** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */

@@ -1,5 +1,6 @@
 import type { Interval } from "../../geometry/interval";
-import { bothRooms, type Room } from "./room";
+import { bothRooms } from "./bothRooms";
+import type { Room } from "./room";
 
 /** mm. Lengths are in thousandths, and what touches within a millionth is one. */
 const NEXT_MM = 1e-4;
