@@ -38,13 +38,18 @@ const belongs = ({ part }: Scene, body: Body, face: number | null): boolean => {
   return face !== null && (body.face === face || bend?.parent === face || bend?.child === face);
 };
 
-/** A shaved body that the zone in the making runs into; the wings that hang on it and what is level with them are left out. */
+/**
+ * A shaved body that the zone in the making runs into; the wings that hang on it and what is level with them are left out, and what
+ * stands in the zone before the stroke: an earlier stroke brought it there and was judged.
+ */
 function zoneMet({ part, hit }: Scene, { halves, motion, restAt, zoneAt }: Stage): { readonly body: Body; readonly angle: number } | null {
   const wings = hit.bends.flatMap((i) => [part.bends[i]?.parent, part.bends[i]?.child]);
-  const others = [...halves.front, ...halves.back].map((body) => !body.level && !wings.includes(body.face ?? -1));
+  const meetsAt = (moment: number, body: Body) => zoneMeets(zoneAt(moment), [body.hull]) && zoneMeets(zoneAt(moment), body.core());
+  const before = restAt(0).bodies;
+  const others = [...halves.front, ...halves.back].map((body, i) => !body.level && !wings.includes(body.face ?? -1) && !(before[i] && meetsAt(0, before[i])));
   for (let k = 1; k <= ZONE_MOMENTS; k++) {
     const moment = Math.round((motion.own * k) / ZONE_MOMENTS);
-    const met = restAt(moment).bodies.find((body, i) => others[i] && zoneMeets(zoneAt(moment), [body.hull]) && zoneMeets(zoneAt(moment), body.core()));
+    const met = restAt(moment).bodies.find((body, i) => others[i] && meetsAt(moment, body));
     if (met) return { body: met, angle: motion.angles[moment] ?? 0 };
   }
   return null;
