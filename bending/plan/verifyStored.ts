@@ -1,4 +1,4 @@
-import { createClearance } from "../clearance/createClearance";
+import { withHems } from "../clearance/withHems";
 import { deg, mmPer, rad, toRad } from "../core/units";
 import { hitId } from "../strokes/hitId";
 import type { PlanDocument } from "./planDocument";
@@ -46,7 +46,7 @@ function contextOf({ plan, tools }: StoredPlan, now: ShopNow, { part }: PlannedP
   const demanded = demandedOf(plan);
   return {
     plan, part, machine: now.machine, units: plan.units, per: mmPer(plan.units), airForceFactor: now.airForceFactor ?? 1,
-    clearance: createClearance(part, now.machine, { demandedAngle: (bend) => demanded.get(part.bends[bend]?.id ?? "") ?? rad(0) }),
+    clearance: withHems(part, now.machine, { demandedAngle: (bend) => demanded.get(part.bends[bend]?.id ?? "") ?? rad(0) }),
     toolOf: (id) => now.tools.find((tool) => tool.id === id) ?? tools.find((tool) => tool.id === id),
   };
 }
