@@ -11,6 +11,7 @@ import { planTolerances } from "./planTolerances";
 import { rounded } from "./rounded";
 import type { Situation } from "./situation";
 import type { Candidate } from "./createCandidateKeeper";
+import { slantedEdgeCautions } from "./slantedEdgeCautions";
 import { toleranceCautions } from "./toleranceCautions";
 import { writeStation } from "./writeStation";
 import { writeStep } from "./writeStep";
@@ -55,7 +56,7 @@ export function writePlan(situation: Situation, checks: StepChecks, candidate: C
     cost: seconds.total,
     proof: { method: frame.method, expanded: frame.expanded, bound },
     reasons: [],
-    cautions: [...cautionsOf(situation, layout, steps, struck).map(drawnReason), ...toleranceCautions(tolerances, written.map(({ bends }) => bends), machine.settings.gaugeRepeat / mmPer(units), units)],
+    cautions: [...cautionsOf(situation, layout, steps, struck).map(drawnReason), ...slantedEdgeCautions(written), ...toleranceCautions(tolerances, written.map(({ bends }) => bends), machine.settings.gaugeRepeat / mmPer(units), units)],
     tolerances,
     elapsedMs: 0,
   };

@@ -50,3 +50,17 @@ test("is told in the document's units and reads back as it was written", () => {
     expect((one.worstCase ?? NaN) * mmPer("in")).toBeCloseTo(mm[i]?.worstCase ?? NaN, 3);
   });
 });
+
+test("fingers at two depths on a slanted edge are a finding: the sheet can slide along it", () => {
+  const plan = planPart({
+    ...planCorpus("u"),
+    document: {
+      format: "part/1", name: "Slanted", units: "mm", material: "S235", thickness: 2, insideRadius: 2.6,
+      base: { outline: [[0, 0], [200, 0], [200, 100], [0, 60]] }, flanges: [{ id: "front", on: "base", edge: 0, length: 150, startAngle: 70, endAngle: 88, angle: 90, direction: "up" }],
+    },
+  });
+  const depths = plan.steps[0]?.gauge.fingers.map(({ x }) => x) ?? [];
+  const slid = plan.cautions.filter(({ kind, message }) => kind === "gauge" && message.includes("slanted edge"));
+  expect(depths).toHaveLength(2);
+  expect(slid).toHaveLength(depths[0] === depths[1] ? 0 : 1);
+});
