@@ -1,8 +1,11 @@
 import fc from "fast-check";
 import { describe, expect, it, vi } from "vitest";
+import { createCostSoFar } from "./createCostSoFar";
+import { createFacts } from "./createFacts";
 import { everyOrder } from "./everyOrder";
 import type { OrderProblem } from "./orderProblem";
 import { poseOf } from "./pose";
+import { searchLearning } from "./searchLearning";
 import { searchOrder } from "./searchOrder";
 
 vi.setConfig({ testTimeout: 60_000 });
@@ -81,5 +84,80 @@ describe("searchOrder", () => {
     const whole = searchOrder(free);
     expect(stopped.kind).toBe("stopped");
     if (stopped.kind === "stopped" && whole.kind === "found") expect(stopped.bound).toBeLessThanOrEqual(whole.weight);
+  });
+});
+
+/** A problem that tells some of its answers (to one station at least) without being asked: those of which the number is not 0. */
+function telling(problem: OrderProblem, one: (move: number, formed: number) => number): OrderProblem {
+  return {
+    ...problem,
+    least: (move, formed) => {
+      if (one(move, formed) === 0) return { demerit: 0, gauges: null };
+      const options = Array.from({ length: problem.stations }, (_, station) => problem.option(move, formed, station)).filter((option) => option !== null);
+      if (options.length === 0) return null;
+      return { demerit: Math.min(...options.map(({ demerit }) => demerit)), gauges: options.map(({ gauge }) => gauge) };
+    },
+  };
+}
+
+/** The least weight that the facts leave, over the last moves that there can be. */
+const bounded = (problem: OrderProblem): number => {
+  const soFar = createCostSoFar(problem, () => false);
+  const all = 2 ** problem.bends - 1;
+  return Math.min(...problem.moves.map(({ mask }, move) => soFar?.with(all & ~mask, move) ?? 0));
+};
+
+describe("what is known without asking", () => {
+  it("changes no answer, however much it is, and saves questions", () => {
+    fc.assert(fc.property(problems, fc.nat(4), (problem, seed) => {
+      const slow = everyOrder(problem);
+      for (const known of [telling(problem, (move, formed) => (move * 3 + formed + seed) % 3), telling(problem, () => 1)]) {
+        const fast = searchOrder(known, { soFar: createCostSoFar(known, () => false) });
+        expect(fast.kind).toBe(slow === null ? "none" : "found");
+        if (slow && fast.kind === "found") expect(fast.weight).toBeCloseTo(slow.weight, 6);
+      }
+    }), { numRuns: 150 });
+  });
+
+  it("never bounds an order above its weight, and of one station comes to it when everything is known", () => {
+    fc.assert(fc.property(problems, fc.nat(4), (problem, seed) => {
+      const weight = everyOrder(problem)?.weight ?? Infinity;
+      const some = bounded(telling(problem, (move, formed) => (move * 3 + formed + seed) % 3));
+      expect(some).toBeLessThanOrEqual(weight + 1e-6);
+      const all = bounded(telling(problem, () => 1));
+      expect(all).toBeLessThanOrEqual(weight + 1e-6);
+      expect(all).toBeGreaterThanOrEqual(some - 1e-6);
+      if (problem.stations === 1) { if (weight < Infinity) expect(all).toBeCloseTo(weight, 6); else expect(all).toBe(Infinity); }
+    }), { numRuns: 150 });
+  });
+
+  it("may be learned on the way: the same answer", () => {
+    fc.assert(fc.property(problems, (problem) => {
+      const facts = createFacts(problem.moves.length);
+      const all = 2 ** problem.bends - 1;
+      const learning = {
+        ...problem, stations: 1,
+        least: (move: number, formed: number) => (facts.blocked(move, formed) ? null : { demerit: 0, gauges: null }),
+        learned: facts.count,
+        option: (move: number, formed: number) => {
+          const answer = problem.option(move, formed, 0);
+          if (answer === null) facts.block(move, { mask: all, value: formed });
+          return answer;
+        },
+      };
+      const slow = everyOrder({ ...problem, stations: 1 });
+      const { outcome } = searchLearning(learning, {});
+      expect(outcome.kind).toBe(slow === null ? "none" : "found");
+      if (slow && outcome.kind === "found") expect(outcome.weight).toBeCloseTo(slow.weight, 6);
+    }), { numRuns: 150 });
+  });
+
+  it("in haste finds some order where there is one, never a better one than there is", () => {
+    fc.assert(fc.property(problems, (problem) => {
+      const slow = everyOrder(problem);
+      const hasty = searchOrder(problem, { haste: 3 });
+      expect(hasty.kind).toBe(slow === null ? "none" : "found");
+      if (slow && hasty.kind === "found") expect(hasty.weight).toBeGreaterThanOrEqual(slow.weight - 1e-6);
+    }), { numRuns: 100 });
   });
 });
