@@ -24,7 +24,7 @@ import type { WhyLimits } from "./whyLimits";
 
 export interface WhyNot {
   readonly firstFailure: PlanFailure | null;
-  /** Those of order first, then pieces, tools, a machine, the part, settings; within a group the cheapest plan first. */
+  /** Those of order first, then pieces, tools, a machine, the part, settings; within a group the cheapest plan first, a flange left out last. */
   readonly changes: readonly PlanChange[];
   /** Plans made for it. */
   readonly plans: number;
@@ -57,6 +57,9 @@ export function whyNot(request: PlanRequest | CheckRequest, plan: PlanDocument, 
     const atFault = !changes.some(({ group }) => group === "order") || !NOT_OF_ORDER.includes(find);
     if (atFault && !attempts.ended()) changes.push(...find(facts));
   }
-  const sorted = changes.sort((a, b) => GROUPS.indexOf(a.group) - GROUPS.indexOf(b.group) || a.plan.cost - b.plan.cost);
+  const sorted = changes.sort((a, b) => GROUPS.indexOf(a.group) - GROUPS.indexOf(b.group) || lessMade(a) - lessMade(b) || a.plan.cost - b.plan.cost);
   return { firstFailure: failure, changes: sorted, plans: attempts.plans(), complete: !attempts.ended() };
 }
+
+/** A part with something left out takes less time, which says nothing. */
+const lessMade = ({ kind }: PlanChange): number => (kind === "leave-out" ? 1 : 0);
