@@ -122,7 +122,7 @@ describe("the clip against a solid modeller", () => {
       const solid = solids.hull(Array.from({ length: prism.count * 2 }, (_, i): Vec3 => [placed[3 * i] ?? 0, placed[3 * i + 1] ?? 0, placed[3 * i + 2] ?? 0]));
       const lift = liftOf(c, (2 * h) as Rad) - strokePlacement(bend, c.part.thickness, c.die, (2 * h) as Rad).tipHeight;
       for (const piece of c.obstacle.kind === "punch" ? punchShape(c.obstacle, mm(1)) : dieShape(c.obstacle, mm(1))) {
-        clipPrism(placed, prism.count, piece.withMargin, lift, clipped);
+        clipPrism(placed, prism.count, piece.withMargin.planes, lift, clipped);
         const [least, most] = [0.9995, 1.083].map((grow) => {
           const bar = solids.bar(piece.corners, grow, lift);
           const both = solids.shared(solid, bar);

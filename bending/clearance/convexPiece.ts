@@ -6,12 +6,18 @@ import type { Vec2 } from "../geometry/vec2";
  */
 export type PieceRole = "tip" | "body" | "left" | "right";
 
-/** A convex piece of a profile as half-planes (nx x + ny y <= c; three numbers each), twice: kept off by the margin, and without its skin. */
+/** A convex polygon as half-planes (nx x + ny y <= c; three numbers each) and as corners (two numbers each; none when nothing is left). */
+export interface Outline {
+  readonly planes: Float64Array;
+  readonly corners: Float64Array;
+}
+
+/** A convex piece of a profile, twice: kept off by the margin, and without its skin. */
 export interface ConvexPiece {
   readonly role: PieceRole;
   readonly corners: readonly Vec2[];
-  readonly withMargin: Float64Array;
-  readonly withoutSkin: Float64Array;
+  readonly withMargin: Outline;
+  readonly withoutSkin: Outline;
   /** Left, right, bottom and top of the piece with its margin. */
   readonly box: readonly [number, number, number, number];
 }

@@ -22,7 +22,7 @@ export interface FaceState {
   readonly before: FaceState | null;
   /** Numbered within its half from 0. */
   readonly index: number;
-  /** From the unfolded sheet to the wing's coordinates (turns the hand over when the wing's b points against the sheet's z). */
+  /** From the unfolded sheet to the wing's coordinates, which are the machine's before the stroke but for where x is counted from. */
   readonly frame: () => Frame;
   readonly bounds: () => Bounds;
   readonly plates: () => Plates;

@@ -24,7 +24,7 @@ export function meetOwnZone({ bend, thickness, lines }: Half, die: Die, obstacle
     const lift = obstacle.on === "ram" ? obstacle.lift : obstacle.lift - strokePlacement(bend, thickness, die, angle).tipHeight;
     for (const points of lines.flatMap((line) => zonePrisms(bend, thickness, angle / 2, line))) {
       for (const piece of obstacle.shape.pieces) {
-        clipPrism(points, 4, piece.withoutSkin, lift, clipped);
+        clipPrism(points, 4, piece.withoutSkin.planes, lift, clipped);
         if (clipped.separation > 0 || clipped.from > clipped.to) continue;
         found.push([clipped.from - margin, clipped.to + margin]);
         first = Math.min(first, angle);

@@ -4,11 +4,12 @@ import { gapOfBoxes, poseBox } from "./boxGap";
 import { clipPrism, type Clipped } from "./clipPrism";
 import type { ConvexPiece, Shape } from "./convexPiece";
 import { planeGap } from "./planeGap";
-import { planesFor } from "./planesFor";
+import { outlineFor } from "./outlineFor";
 import type { Plates } from "./plates";
 import { posePrism } from "./posePrism";
 import type { Prism } from "./prism";
 import type { Question } from "./question";
+import { sectionGap } from "./sectionGap";
 import { POSE_NUMBERS } from "./strokeMotion";
 
 /** What plates met: z-extents, the first sample, how deep at the deepest sample looked at. */
@@ -36,7 +37,7 @@ export function meetPlates(question: Question, { prisms, bounds }: Plates["group
     poseBox(poses, at, bounds, posed);
     for (const one of open) {
       if (one.next <= sample) {
-        const gap = Math.max(gapOfBoxes(posed, one.piece.box, raised), planeGap(poses, at, bounds, one.piece.withMargin, raised));
+        const gap = Math.max(gapOfBoxes(posed, one.piece.box, raised), planeGap(poses, at, bounds, one.piece.withMargin.planes, raised));
         if (gap <= 0) near = true;
         else one.next = sample + Math.max(1, Math.floor(gap / margin));
       }
@@ -83,13 +84,20 @@ function meetPlate(question: Question, plate: Plate, open: readonly Open[], pose
     if (!one) continue;
     one.next = Math.max(one.next, next);
     if (one.next <= sample) {
-      if (!posed) {
-        if (placed.length < prism.points.length) placed = new Float64Array(prism.points.length);
-        posePrism(prism.points, poses, POSE_NUMBERS * sample, false, placed);
-        posed = true;
-      }
       question.counts.clips++;
-      clipPrism(placed, prism.count, planesFor(piece, prism.lies), lift, clipped);
+      const outline = outlineFor(piece, prism.lies);
+      if (prism.section) {
+        clipped.separation = sectionGap(prism.section, poses, POSE_NUMBERS * sample, outline, lift);
+        clipped.from = low;
+        clipped.to = high;
+      } else {
+        if (!posed) {
+          if (placed.length < prism.points.length) placed = new Float64Array(prism.points.length);
+          posePrism(prism.points, poses, POSE_NUMBERS * sample, false, placed);
+          posed = true;
+        }
+        clipPrism(placed, prism.count, outline.planes, lift, clipped);
+      }
       one.next = sample + 1;
       if (clipped.separation > -SAME_POINT_MM) one.next = sample + Math.max(1, Math.floor(clipped.separation / question.margin));
       else if (clipped.from <= clipped.to) {

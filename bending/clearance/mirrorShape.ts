@@ -1,5 +1,5 @@
 import type { Vec2 } from "../geometry/vec2";
-import type { ConvexPiece, PieceRole, Shape } from "./convexPiece";
+import type { ConvexPiece, Outline, PieceRole, Shape } from "./convexPiece";
 
 const OTHER: Record<PieceRole, PieceRole> = { tip: "tip", body: "body", left: "right", right: "left" };
 
@@ -8,12 +8,12 @@ export function mirrorShape(shape: Shape): Shape {
   return shape.map((piece): ConvexPiece => ({
     role: OTHER[piece.role],
     corners: piece.corners.map(([x, y]): Vec2 => [-x, y]).reverse(),
-    withMargin: mirrorPlanes(piece.withMargin),
-    withoutSkin: mirrorPlanes(piece.withoutSkin),
+    withMargin: mirrorOutline(piece.withMargin),
+    withoutSkin: mirrorOutline(piece.withoutSkin),
     box: [-piece.box[1], -piece.box[0], piece.box[2], piece.box[3]],
   }));
 }
 
-function mirrorPlanes(planes: Float64Array): Float64Array {
-  return planes.map((value, i) => (i % 3 === 0 ? -value : value));
+function mirrorOutline({ planes, corners }: Outline): Outline {
+  return { planes: planes.map((value, i) => (i % 3 === 0 ? -value : value)), corners: corners.map((value, i) => (i % 2 === 0 ? -value : value)) };
 }

@@ -7,6 +7,8 @@ export interface Prism {
   readonly of: "face" | "zone";
   readonly count: number;
   readonly points: Float64Array;
+  /** Where it is the same at every z that it reaches: its cross-section, counter-clockwise, a and b each; else null. */
+  readonly section: Float64Array | null;
   /** How the prism lies to its wing: `plane` in the wing's plane, `inside` on or over its outside surface, `outside` else. */
   readonly lies: "plane" | "inside" | "outside";
   readonly a: readonly [number, number];

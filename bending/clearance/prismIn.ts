@@ -1,6 +1,7 @@
 import { MEANT_CONTACT_MM } from "../core/tolerance";
 import type { Frame } from "../geometry/frame";
 import type { Vec3 } from "../geometry/vec3";
+import { sectionOf } from "./sectionOf";
 import { boundsOf } from "./boundsOf";
 import type { Prism } from "./prism";
 
@@ -16,5 +17,5 @@ export function prismIn(of: Prism["of"], thickness: number, frame: Frame, one: r
   }
   const bounds = boundsOf([{ frame, points: [...one, ...other] }]);
   const lies = bounds.b[0] < -MEANT_CONTACT_MM ? "outside" : bounds.b[1] > thickness + MEANT_CONTACT_MM ? "inside" : "plane";
-  return { of, count: one.length, points, lies, ...bounds };
+  return { of, count: one.length, points, section: sectionOf(points, bounds.z), lies, ...bounds };
 }
