@@ -22,19 +22,20 @@ export function ToleranceTable({ detail: { plan, machineModel } }: { readonly de
   const [list, setList] = useState<ListState>({ q: "", sort: "", dir: "desc", page: 1, pageSize: 20 });
   if (all.length === 0) return <EmptyState title="This plan does not say what its dimensions may miss">It was made before plans kept that. Plan the part again to see it.</EmptyState>;
   const format = createSheetFormat(plan.units);
+  const anyAsked = count("asked") > 0;
   const rows = sorted(all.filter((row) => isShown(row, chosen)), list);
   const { gaugeRepeat, angleRepeat } = machineModel.settings;
   return (
     <div className="space-y-3">
       <p className="max-w-prose text-sm text-ink-soft">
         How far one part may differ from the next when every stop of the gauge repeats within <span className="num">±{format.fine(gaugeRepeat)}</span> and every angle
-        within <span className="num">±{toDeg(angleRepeat).toFixed(2)}°</span>, the brake’s settings. Blank and sheet count as true. A bend gauged from a flange that is bent already takes over that flange’s errors.
+        within <span className="num">±{toDeg(angleRepeat).toFixed(2)}°</span>, the brake’s settings. Blank and sheet count as true. A bend gauged from a flange that is bent already takes over that flange’s errors.{anyAsked ? "" : " Give the part or a flange a length tolerance, and the next plan gauges so that it is kept where it can be."}
       </p>
       {choices.length > 1 ? (
         <Choice label="Dimensions" labelHidden small value={chosen} onChange={(next) => { setChosen(next); setList({ ...list, page: 1 }); }}
           options={choices.map((value) => ({ value, label: `${names[value]} (${count(value)})` }))} />
       ) : null}
-      <DataTable caption="What the dimensions may miss" dense columns={columns(plan.units)} rows={rows.slice((list.page - 1) * list.pageSize, list.page * list.pageSize)}
+      <DataTable caption="What the dimensions may miss" dense columns={columns(plan.units).filter(({ key }) => anyAsked || (key !== "asked" && key !== "state"))} rows={rows.slice((list.page - 1) * list.pageSize, list.page * list.pageSize)}
         rowKey={(row) => `${toleranceName(row)}/${row.nominal}`} list={{ ...list, total: rows.length, onChange: (change) => setList({ ...list, ...change }) }} empty={null} />
     </div>
   );
