@@ -46,3 +46,6 @@ export const SAME_SIZE_MM = 0.01;
 
 /** Radians. Bend lines and edges this near to parallel are: a tenth of a degree, as at the back gauge. */
 export const PARALLEL_RAD = 1.75e-3;
+
+/** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */
+export const SAME_SHUT_HEIGHT_MM = 0.1;

@@ -1,3 +1,4 @@
+import { SAME_SHUT_HEIGHT_MM } from "../core/tolerance";
 import type { StationKind } from "../setup/stationKinds";
 import { NEAR_GAP_MM } from "../setup/placeStations";
 import type { BedQuestion } from "./bedQuestion";
@@ -19,9 +20,6 @@ export interface KindSet {
   readonly setup: number;
   readonly floor: number;
 }
-
-/** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */
-const SAME_SHUT_HEIGHT_MM = 0.1;
 /** mm. Over rounding noise; the search itself decides what is as near as this. */
 const NOISE_MM = 1e-3;
 

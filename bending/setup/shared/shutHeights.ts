@@ -1,12 +1,10 @@
+import { SAME_SHUT_HEIGHT_MM } from "../../core/tolerance";
 import type { MachineSettings } from "../../tooling/machine";
 import type { FewestPieces } from "./createFewestPieces";
 import type { PieceStock } from "./createPieceStock";
 import type { PairPlace, PreparedWish } from "./preparedWish";
 import { roomOf } from "./roomOf";
 import type { SharedWish } from "./sharedWish";
-
-/** mm. Shut heights of stations on one bed must agree this well, as one ram closes them all. Common practice, no source. */
-export const SAME_SHUT_HEIGHT_MM = 0.1;
 
 /** The pairs of one shut height and what they leave each wish. */
 export interface ShutHeight {
