@@ -9,6 +9,7 @@ import { asSentence } from "@/lib/format/asSentence";
 import { bedMap } from "@/lib/sheet/bedMap";
 import { planModel } from "@/lib/sheet/planModel";
 import type { PlanDetail } from "@/lib/schemas/views";
+import { OffCentre } from "./OffCentre";
 import { OrderTable } from "./OrderTable";
 
 /** A plan that works: the order beside the machine, the bed, the flat, what to mind. */
@@ -36,6 +37,7 @@ export function PlanWork({ detail }: { readonly detail: PlanDetail }) {
           <summary className="text-sm text-accent-ink">Closer: only the run of the bed that carries tools</summary>
           <BedMapDrawing map={map} close className="mt-2 w-full border border-rule bg-sheet" />
         </details>
+        <OffCentre plan={plan} />
       </Panel>
     </div>
   );
