@@ -20,7 +20,9 @@ export function proofMethod(over: readonly ProvenOver[], flats: number, ordered:
     return `${orders}${flatsText(over.length)} with ${all ? `all ${Math.max(...over.map(({ allPairs }) => allPairs))} tool pairs that fit a bend` : pairs}, each bend with the shortest solid runs that the pieces make: none clears`;
   }
   const flat = last?.vOpening === null || last === undefined ? "" : `, the flat for a V of ${last.vOpening} mm${flats > 1 ? ` (${flats} flats are possible; the nearest to the usual V that gives a plan is taken)` : ""}`;
-  return `least total time over ${orders} with ${pairs}${flat}, on beds of up to ${MOST_STATIONS} stations of solid runs: ` +
+  const beds = over.every(({ answer }) => answer.deadEnds !== null || answer.anyStations)
+    ? `up to ${MOST_STATIONS} stations (more take longer to set than the plan can save)` : `up to ${MOST_STATIONS} stations`;
+  return `least total time over ${orders} with ${pairs}${flat}, on beds of ${beds} of solid runs: ` +
     `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given allowed" : ""}`;
 }
 

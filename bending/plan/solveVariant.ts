@@ -30,6 +30,8 @@ export interface VariantAnswer {
   readonly deadEnds: readonly number[] | null;
   /** True when the budget ended the search. */
   readonly stopped: boolean;
+  /** Beds of more stations than were searched cost more than the best plan. */
+  readonly anyStations: boolean;
 }
 
 /** Beds of up to so many stations are searched; more are only built for an order that works. */
@@ -52,7 +54,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   const tally = { layouts: 0, expanded: 0 };
   const floor = floorOf(situation, budget.batch);
   const answer = (bound: number, ends: Partial<VariantAnswer>): VariantAnswer =>
-    ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, ...ends });
+    ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, anyStations: false, ...ends });
 
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
   const known = createCostSoFar(relaxed, budget.shouldStop);
@@ -75,16 +77,21 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   constructBeds(first, best.steps, done);
   if (enough()) return answer(least, { stopped: true });
   const question = keeper.worst() <= least || !stale ? first : { ...first, limits: { ...first.limits, soFar: createCostSoFar(relaxed, budget.shouldStop) } };
+  /** With so many stations, and with more, no plan weighs less. */
+  const from = (count: number) => setupSeconds(situation.machine, count) + question.least * budget.batch;
+  const most = Math.min(MOST_STATIONS, situation.part.bends.length);
   let open = Infinity;
-  for (let count = 1; count <= Math.min(MOST_STATIONS, situation.part.bends.length) && open === Infinity; count += 1) {
+  for (let count = 1; count <= most && open === Infinity; count += 1) {
     const searched = searchBeds(question, count);
     tally.layouts += searched.layouts;
     tally.expanded += searched.expanded;
-    open = searched.open;
+    open = count < most && searched.open < Infinity ? Math.min(searched.open, from(count + 1)) : searched.open;
   }
-  const weight = keeper.kept()[0]?.weight ?? Infinity;
-  const more = (keeper.kept()[0]?.layout.stations.length ?? 0) > MOST_STATIONS ? setupSeconds(situation.machine, MOST_STATIONS + 1) + question.least * budget.batch : Infinity;
-  return answer(Math.min(open, more, weight), { stopped: open < Infinity });
+  const cheapest = keeper.kept()[0];
+  const weight = cheapest?.weight ?? Infinity;
+  const anyStations = from(MOST_STATIONS + 1) >= weight;
+  const beyond = (cheapest?.layout.stations.length ?? 0) > MOST_STATIONS ? from(MOST_STATIONS + 1) : Infinity;
+  return answer(Math.min(open, beyond, weight), { stopped: open < Infinity, anyStations });
 }
 
 /** What the cheapest bed and the fewest strokes, flips and turns cost: no plan is under it. */
