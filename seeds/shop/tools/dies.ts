@@ -54,7 +54,7 @@ const hemDie: DieEntry = {
   tang: "60 mm",
   profile: roundedProfile(hemDieProfile({ vOpening: mm(8), vAngle: toRad(deg(26)), shoulderRadius: mm(0.8), height: mm(90), bodyWidth: mm(50) },
     { floor: mm(slot.floor), back: mm(slot.back), opening: mm(slot.opening) })),
-  sections: sectionsOf("H8-26-H90", "split", drawer("F", rows.length)),
+  sections: sectionsOf("H8-26-H90", "short", drawer("F", rows.length)),
   flattening: slot,
 };
 

@@ -40,7 +40,7 @@ const rows: readonly (readonly [Build, number, number, number, number, SectionSe
   ["deep relieved", 85, 0.8, 200, 300, "short"],
   ["sash", 88, 0.8, 150, 350, "short"],
   ["sash", 85, 0.6, 150, 300, "short"],
-  ["straight", 26, 0.6, 120, 600, "split"],
+  ["straight", 26, 0.6, 120, 600, "short"],
 ];
 
 const letters: Readonly<Record<Build, string>> = { straight: "P", relieved: "PR", "deep relieved": "PD", sash: "PS" };
