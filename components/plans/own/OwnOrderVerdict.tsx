@@ -1,7 +1,6 @@
 "use client";
 import { useRouter } from "next/navigation";
-import { useState } from "react";
-import { JobLine } from "@/components/planJobs/JobLine";
+import { useEffect, useState } from "react";
 import { Button } from "@/components/ui/Button";
 import { Notice } from "@/components/ui/Notice";
 import { asSentence } from "@/lib/format/asSentence";
@@ -26,16 +25,17 @@ export function OwnOrderVerdict({ detail, tried, check, mayWrite }: OwnOrderVerd
   const [asked, setAsked] = useState<TriedOrder | null>(null);
   const job = usePlanJob(start.data?.id ?? null);
   const planId = job.data?.state === "done" ? job.data.planId : null;
+  useEffect(() => { if (planId !== null && planId !== detail.id) router.push(`/plans/${planId}`); }, [planId, detail.id, router]);
   const ofThis = asked === tried;
   const plan = (): void => {
     setAsked(tried);
-    start.mutate({ order: [...tried.order], wishes: [...tried.wishes] }, { onSuccess: (started) => { if (started.state === "done" && started.planId !== null) router.push(`/plans/${started.planId}`); } });
+    start.mutate({ order: [...tried.order], wishes: [...tried.wishes] });
   };
   return (
     <div className="space-y-3" aria-live="polite">
       <Verdict detail={detail} check={check} />
       {start.error === null || !ofThis ? null : <Notice tone="wrong" title="The order was not planned" live>{start.error.message}</Notice>}
-      {job.data !== undefined && ofThis && planId !== detail.id ? <JobLine job={job.data} mayWrite={mayWrite} here={detail.id} /> : null}
+      {job.data?.state === "failed" && ofThis ? <Notice tone="wrong" title="The order was not planned" live>{job.data.message}</Notice> : null}
       {mayWrite ? <Button busy={start.isPending || (ofThis && job.data?.state === "running")} disabled={check.failure !== null && check.whole} onClick={plan}>Plan this order</Button> : null}
     </div>
   );
