@@ -31,32 +31,45 @@ export function bedsOf(question: BedQuestion, stations: readonly Station[], want
   const between: Layout[] = [];
   near.forEach((layout, order) => {
     if (clears(layout)) return;
+    // A gap that is too small for the wanted steps may do for the same strokes in another order.
     for (const gap of gaps) {
       const wider = placeStations(stations, [gap], machine, strokes)[order];
-      if (wider && clears(wider)) { between.push(wider); return; }
+      if (wider) between.push(wider);
+      if (wider && clears(wider)) return;
     }
   });
   return borne([...near, ...between, ...placeStations(stations, [overhang], machine, strokes)]);
 }
 
-/** Gaps at which a neighbour's run just ends where a wanted step's forbidden room begins. */
-function gapsBeside({ situation: { pairs, moves }, checks }: BedQuestion, stations: readonly Station[], wanted: readonly OrderStep[]): readonly number[] {
+/**
+ * Gaps at which a neighbour's run just ends where the room begins that a wanted stroke forbids, when it is made, and were it made first or last, with its line in the
+ * middle of its station and as far off as the station holds it; up to the next whole millimetre.
+ */
+function gapsBeside({ situation: { pairs, moves, part, machine }, checks }: BedQuestion, stations: readonly Station[], wanted: readonly OrderStep[]): readonly number[] {
   const gaps = new Set<number>();
+  const all = 2 ** part.bends.length - 1;
   for (const { move, formed, station } of wanted) {
-    const own = stations[station];
-    if (own === undefined || moves[move] === undefined) continue;
+    const [own, stroke] = [stations[station], moves[move]];
+    if (own === undefined || stroke === undefined) continue;
+    const off = Math.max(0, Math.min(own.punch.length, own.die.length) / 2 - stroke.halfLength + machine.settings.maxUncoveredEnd);
     for (const other of stations) {
       const tools = pairs[other.pair];
       if (other === own || tools === undefined) continue;
-      for (const tool of [tools.punch, tools.die]) {
-        for (const [from, to] of checks.forbidden(move, formed, own.pair, tool)) {
-          for (const edge of [Math.abs(from), Math.abs(to)]) gaps.add(Math.ceil(edge - stationLength(own) / 2) + 1);
+      for (const [tool, run] of [[tools.punch, other.punch], [tools.die, other.die]] as const) {
+        const beside = stationLength(own) / 2 + (stationLength(other) - run.length) / 2;
+        for (const state of new Set([formed, 0, all & ~stroke.mask])) {
+          for (const edge of checks.forbidden(move, state, own.pair, tool).flat()) {
+            for (const aside of [0, off]) gaps.add(Math.ceil(Math.abs(edge) - aside - beside - NOISE_MM));
+          }
         }
       }
     }
   }
   return [...gaps].sort((a, b) => a - b);
 }
+
+/** mm. Over rounding noise, within what counts as touching. */
+const NOISE_MM = 1e-6;
 
 /** How far the sheet sticks out beyond a bend line at the most: a station this far off is never in the way. */
 function partOverhang({ situation: { part, moves, machine } }: BedQuestion): number {

@@ -13,7 +13,7 @@ vi.setConfig({ testTimeout: 180_000 });
 const GAPS = [100, 110, 120, 140, 160, 180, 200, 240, 280, 320, 360];
 
 /** Parts, the lengths of the pieces in service (alike for every tool unless said), and what is ruled out to keep the trying short. */
-const SMALL: readonly { readonly name: string; readonly pieces: readonly number[] | Readonly<Record<string, readonly number[]>>; readonly tools?: readonly string[]; readonly batch?: number; readonly stations?: number }[] = [
+const SMALL: readonly { readonly name: string; readonly pieces: readonly number[] | Readonly<Record<string, readonly number[]>>; readonly tools?: readonly string[]; readonly batch?: number; readonly gaps?: readonly number[]; /** Seconds that a plan may be above, for stations a millimetre or so off their nearest place. */ readonly slack?: number }[] = [
   { name: "u", pieces: [415, 200, 100] },
   { name: "z", pieces: [415, 200, 100] },
   { name: "deep-u", pieces: [415, 200] },
@@ -33,6 +33,8 @@ const SMALL: readonly { readonly name: string; readonly pieces: readonly number[
   { name: "small/z-tabs", pieces: [150, 60], tools: ["P88", "V12"] },
   { name: "small/bracket", pieces: [110, 75, 20], tools: ["P88", "V12", "V16"], batch: 1 },
   { name: "small/up-down", pieces: [120, 70], tools: ["P88", "V12"] },
+  // The sheet hangs over the next station: how near it may stand decides.
+  { name: "small/wide-tab", pieces: [70, 55], tools: ["P88", "V12"], gaps: [100, 150, ...Array.from({ length: 16 }, (_, i) => 168 + i), 200, 250, 300], slack: 0.05 },
   { name: "small/batch", pieces: [120, 60], tools: ["P88", "V12"], batch: 1 },
   { name: "small/batch", pieces: [120, 60], tools: ["P88", "V12"], batch: 1000 },
 ];
@@ -52,10 +54,12 @@ describe("the plan is as good as the best of everything tried", () => {
   it.each(SMALL)("$name with $pieces, $batch", (one) => {
     const request = asked(one);
     const plan = planPart(request);
-    const best = exhaustivePlan(request, one.stations ?? 2, GAPS);
+    const best = exhaustivePlan(request, 2, one.gaps ?? GAPS);
     expect(plan.status).toBe(best === null ? "infeasible" : "optimal");
     if (best === null) return;
-    expect({ demerits: planDemerits(plan), seconds: plan.cost }).toEqual({ demerits: best.demerits, seconds: expect.closeTo(best.seconds, 5) });
+    expect(planDemerits(plan)).toBe(best.demerits);
+    expect(plan.cost).toBeGreaterThanOrEqual(best.seconds - 1e-5);
+    expect(plan.cost).toBeLessThanOrEqual(best.seconds + (one.slack ?? 1e-5));
     expect(verifyPlan(plan, request)).toEqual([]);
   });
 
