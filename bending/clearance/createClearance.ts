@@ -117,16 +117,14 @@ export function createClearance(part: PartModel, machine: Machine, options: Clea
     },
     firstBlock: (hit, punch, die) => {
       const { place, state, stroke } = setUp(hit, punch, die);
-      const clear = clearStroke(stroke, state);
-      const asks = [
-        ...(clear ? [] : [() => fixedHit(stroke.ram, state), () => fixedHit(stroke.bed, state)]),
-        () => firstSelf(place, state), () => trapped(stroke.moments, state),
-      ];
-      for (const ask of asks) {
-        const hits = ask();
-        if (hits.length > 0) return hits;
+      if (!clearStroke(stroke, state)) {
+        const fixed = fixedHit(stroke.ram, state);
+        if (fixed.length > 0) return fixed;
+        const below = fixedHit(stroke.bed, state);
+        if (below.length > 0) return below;
       }
-      return NO_HITS;
+      const own = firstSelf(place, state);
+      return own.length > 0 ? own : trapped(stroke.moments, state);
     },
     counts: () => ({ ...counts }),
   };
