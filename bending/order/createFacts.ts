@@ -8,7 +8,6 @@ export interface BlockedPattern {
 export interface Facts {
   readonly block: (move: number, pattern: BlockedPattern) => void;
   readonly blocked: (move: number, formed: number) => boolean;
-  readonly of: (move: number) => readonly BlockedPattern[];
   /** How many patterns there are. */
   readonly count: () => number;
 }
@@ -32,7 +31,6 @@ export function createFacts(moves: number): Facts {
       for (let i = 0; i < known.length; i += 2) if ((formed & (known[i] as number)) === known[i + 1]) return true;
       return false;
     },
-    of: (move) => patterns[move] ?? [],
     count: () => count,
   };
 }

@@ -8,7 +8,6 @@ export interface Nodes {
   readonly set: (node: number, weight: number, gauge: number, demerits: number) => void;
   readonly total: (node: number) => number;
   readonly get: (node: number) => SearchNode;
-  readonly size: () => number;
 }
 
 export interface SearchNode {
@@ -113,6 +112,5 @@ export function createNodes(): Nodes {
       formed: formed[node] as number, move: moves[node] as number, station: stations[node] as number, gauge: gauges[node] as number,
       weight: weights[node] as number, demerits: demerits[node] as number, depth: depths[node] as number, after: afters[node] as number,
     }),
-    size: () => count,
   };
 }
