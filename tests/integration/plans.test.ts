@@ -88,12 +88,12 @@ describe("a stored plan", () => {
 
   it("gives its other plans, and one of them can be made the plan, once", async () => {
     const detail = await planned({ alternatives: 2 });
-    const others = detail.plan.alternatives ?? [];
-    if (others.length > 0) {
-      const chosen = (await on(chooseAlternative, detail.id, "alternatives", { index: 0 })).body as unknown as PlanDetail;
-      expect(chosen).toMatchObject({ origin: "chosen", fromPlanId: detail.id, plan: { order: others[0]!.order, flat: detail.plan.flat } });
-      expect((await on(chooseAlternative, detail.id, "alternatives", { index: 0 })).body["id"]).toBe(chosen.id);
-    }
+    const { flat, order, steps } = detail.plan;
+    const others = [{ ...detail.plan, alternatives: undefined, flat: undefined, elapsedMs: undefined, status: "feasible", order: [...order].reverse(), steps: [...steps].reverse() }];
+    await database()("plans").where({ id: detail.id }).update({ document: JSON.stringify({ ...detail.plan, alternatives: others }) });
+    const chosen = (await on(chooseAlternative, detail.id, "alternatives", { index: 0 })).body as unknown as PlanDetail;
+    expect(chosen).toMatchObject({ origin: "chosen", status: "feasible", fromPlanId: detail.id, plan: { order: others[0]!.order, flat } });
+    expect((await on(chooseAlternative, detail.id, "alternatives", { index: 0 })).body["id"]).toBe(chosen.id);
     const refused = await on(chooseAlternative, detail.id, "alternatives", { index: others.length });
     expect([refused.status, refused.body.errors?.[0]?.path]).toEqual([422, "index"]);
   });
