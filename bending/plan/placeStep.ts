@@ -3,10 +3,13 @@ import type { GaugeOption } from "../setup/gaugeOption";
 import type { Layout } from "../setup/layout";
 import { placeFingers } from "../setup/placeFingers";
 import { placeOnStation } from "../setup/placeOnStation";
+import { freeIntervals } from "../geometry/freeIntervals";
 import type { Interval } from "../geometry/interval";
+import { mergeIntervals } from "../geometry/mergeIntervals";
 import type { PlacedStation } from "../setup/layout";
 import { offCentreReach } from "../tooling/offCentre";
 import type { StepChecks } from "./createStepChecks";
+import { neighboursBesideFingers } from "./neighboursBesideFingers";
 import type { Situation } from "./situation";
 import { stepLoad } from "./stepLoad";
 
@@ -33,7 +36,14 @@ export function placeStep(situation: Situation, checks: StepChecks, layout: Layo
   if (shift === null) return null;
   const hitZ = own.z + shift;
   const option = checks.gauges(move, formed, own.pair)[0];
-  return { hitZ, gauge: option === undefined ? null : { option, fingers: placeFingers(option, machine.gauge, hitZ) } };
+  return { hitZ, gauge: option === undefined ? null : { option, fingers: fingersOf(situation, layout, own, option, hitZ) } };
+}
+
+/** The fingers keep off the tools of the other stations. */
+function fingersOf(situation: Situation, layout: Layout, own: PlacedStation, option: GaugeOption, hitZ: number): readonly number[] {
+  const taken = neighboursBesideFingers(situation, layout, own, option, hitZ);
+  const free = taken.length === 0 ? option.free : option.free.flatMap((span) => freeIntervals(span, mergeIntervals(taken)));
+  return placeFingers({ ...option, free }, situation.machine.gauge, hitZ);
 }
 
 /** Where on a station the line's middle may lie, from the station's, so that the machine bears the load as far from the middle of its bed. */

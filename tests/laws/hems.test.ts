@@ -1,6 +1,10 @@
 import { describe, expect, it } from "vitest";
 import { deg, mm, toRad } from "@/bending/core/units";
+import { candidatePairs } from "@/bending/plan/candidatePairs";
 import { checkOrder } from "@/bending/plan/checkOrder";
+import { createSituation } from "@/bending/plan/createSituation";
+import { neighboursBesideFingers } from "@/bending/plan/neighboursBesideFingers";
+import { partVariants } from "@/bending/plan/partVariants";
 import { planPart } from "@/bending/plan/planPart";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import { readPlanDocument } from "@/bending/plan/readPlanDocument";
@@ -81,6 +85,35 @@ describe("a hem on a two-stage die", () => {
     const late = checkOrder({ ...down(28), order: ["wall", "hem"] });
     expect(late.status).toBe("infeasible");
     expect(late.reasons.flatMap(({ bends }) => bends)).toContain("hem");
+  });
+});
+
+describe("a finger beside another station", () => {
+  const request = hemmed(14, 20);
+  const variants = partVariants(request);
+  const variant = variants.ok ? variants.value[0] : undefined;
+  if (!variant) throw new Error("the part builds");
+  const { pairs } = candidatePairs(request.tools, request.machine, variant.part.thickness, variant.wantedV, "mm");
+  const situation = createSituation({ variant, machine: request.machine, units: "mm", pairs });
+  const place = (punch: string, die: string, z: number) => {
+    const pair = situation.pairs.find((one) => one.punch.id === punch && one.die.id === die);
+    if (!pair) throw new Error(`no ${punch} with ${die}`);
+    return { pair: pair.index, z, punch: { pieces: [], gap: 0, length: 100 }, die: { pieces: [], gap: 0, length: 100 } };
+  };
+  const at = (x: number, other: readonly [string, string]) => {
+    const own = place("P88", "V12", 0);
+    const option = { x, slope: 0, r: 0, on: "edge" as const, face: 0, edge: 0, free: [[-200, 200]] as const };
+    return neighboursBesideFingers(situation, { stations: [own, place(...other, 150)], setupSeconds: 0 }, own, option, 10);
+  };
+  const half = request.machine.gauge.fingerWidth / 2;
+
+  it("keeps off a die that stands higher, 25 mm to the back, where it would stand over it", () => {
+    expect(at(15, ["P26", "H8"])).toContainEqual([100 - half - 10, 200 + half - 10]);
+    expect(at(26, ["P26", "H8"])).toEqual([]);
+  });
+
+  it("passes over a die of its own height", () => {
+    expect(at(15, ["P88", "V16"])).toEqual([]);
   });
 });
 
