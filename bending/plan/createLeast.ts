@@ -5,6 +5,7 @@ import { pickBits } from "../order/pickBits";
 import { bendsBehind } from "./bendsBehind";
 import type { StepChecks } from "./createStepChecks";
 import { createNearTools } from "./createNearTools";
+import { createOverhang } from "./createOverhang";
 import { gaugeDemerits } from "./gaugeDemerits";
 import type { GaugeNumbers } from "./gaugeNumbers";
 import { gaugePatterns, type GaugePattern } from "./gaugePatterns";
@@ -19,7 +20,10 @@ export interface Least {
   readonly of: (move: number, formed: number) => LeastOption | null;
   /** The move cannot be made in any state of the pattern. */
   readonly block: (move: number, pattern: BlockedPattern) => void;
-  /** All pairs gauge the move at this setting with so many fingers, also in every state that is the same behind the die. */
+  /**
+   * All pairs gauge the move at this setting with so many fingers, also in every state that is the same behind the die; where the half in
+   * front may reach over the line, in this state alone, and elsewhere no more fingers than that.
+   */
   readonly settle: (move: number, formed: number, gauge: number, fingers: number) => void;
   readonly learned: () => number;
 }
@@ -53,8 +57,10 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
   };
   const facts = createFacts(moves.length);
   const behind = moves.map(({ bends, front }) => bendsBehind(situation, { bends, front, formed: 0 }));
-  /** Settled answers of moves that all pairs gauge alike, by what is formed behind the die. */
+  const overhangs = createOverhang(situation);
+  /** Settled answers of moves that all pairs gauge alike, by what is formed behind the die; of states with an overhang each by itself. */
   const gauged = moves.map(() => new Map<number, LeastOption>());
+  const overhung = moves.map(() => new Map<number, LeastOption>());
   let settled = 0;
   const table = (move: number, formed: number): LeastOption | null => {
     const known = tables[move] ?? tableFor(move);
@@ -65,16 +71,25 @@ export function createLeast(situation: Situation, checks: StepChecks, numbers: G
     of: (move, formed) => {
       if (facts.blocked(move, formed)) return null;
       const own = gauged[move];
-      return (own && own.size > 0 ? own.get(formed & (behind[move] as number)) : undefined) ?? table(move, formed);
+      const alone = overhung[move];
+      const here = alone && alone.size > 0 ? alone.get(formed) : undefined;
+      if (here !== undefined) return here;
+      const found = own && own.size > 0 ? own.get(formed & (behind[move] as number)) : undefined;
+      if (found === undefined) return table(move, formed);
+      // What reaches over can only take room from the fingers; which setting is the best then is not known.
+      return overhangs(move, formed) ? { demerit: found.demerit, gauges: null } : found;
     },
     block: facts.block,
     settle: (move, formed, gauge, fingers) => {
       const hidden = formed & (behind[move] ?? 0);
       const guess = table(move, formed);
-      if (guess === null || gauged[move]?.has(hidden)) return;
+      const over = overhangs(move, formed);
+      const answers = over ? overhung[move] : gauged[move];
+      const key = over ? formed : hidden;
+      if (guess === null || answers === undefined || answers.has(key)) return;
       const demerit = leastWishes(move) + gaugeDemerits(fingers);
       if (guess.demerit === demerit && guess.gauges?.length === 1) return;
-      gauged[move]?.set(hidden, { demerit, gauges: [gauge] });
+      answers.set(key, { demerit, gauges: [gauge] });
       settled += 1;
     },
     learned: () => facts.count() + settled,
