@@ -28,9 +28,9 @@ const countOf = async (table: string) => Number((await knex(table).count<{ count
 it("holds the whole shop", async () => {
   expect(await countOf("users")).toBe(people.length);
   expect(await countOf("machines")).toBe(2);
-  expect(await countOf("tools")).toBe(60);
+  expect(await countOf("tools")).toBe(62);
   expect(await countOf("tool_pieces")).toBe(tooling.tools.flatMap((tool) => tool.sections).length);
-  expect(await countOf("parts")).toBe(7);
+  expect(await countOf("parts")).toBe(8);
   expect(await countOf("bend_trials")).toBe(bendTrials.length);
   expect(await knex("bend_trials").whereNotNull("excluded_at").pluck("number")).toEqual([`T-${1001 + excludedTrial.index}`]);
   expect(await knex("part_revisions").whereNull("created_by")).toEqual([]);
