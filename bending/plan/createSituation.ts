@@ -1,7 +1,6 @@
 import { withHems } from "../clearance/withHems";
 import { rad, type LengthUnit, type Rad } from "../core/units";
-import { springback } from "../handbook/springback";
-import type { Bend, PartModel } from "../part/partModel";
+import type { PartModel } from "../part/partModel";
 import { collectMoves, type Move } from "../order/collectMoves";
 import { createRuns } from "../setup/createRuns";
 import { acuteHem } from "../strokes/acuteHem";
@@ -11,6 +10,7 @@ import type { Die } from "../tooling/tool";
 import type { BendWish } from "./bendWish";
 import { followsOrder } from "./followsOrder";
 import { heedWishes } from "./heedWishes";
+import { overbent } from "./overbent";
 import type { PartVariant } from "./partVariants";
 import type { Situation, ToolFit } from "./situation";
 import { toolFit } from "./toolFit";
@@ -33,11 +33,10 @@ export interface SituationFacts {
 export function createSituation({ variant: { part, drawn, splits, rows, bitsOf, vOpening, everyBend }, machine, units, pairs, airForceFactor = 1, order, wishes = [] }: SituationFacts): Situation {
   const moves = collectMoves(part);
   const runs = createRuns(machine.settings);
-  const overbent = (bend: Bend) => springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
-  const demanded = part.bends.map(overbent);
+  const demanded = part.bends.map((bend) => overbent(part, bend));
   const demandedAngle = (index: number, die: Die): Rad => {
     const acute = part.bends[index]?.hem ? acuteHem(part, index, die.vOpening).bends[index] : undefined;
-    return acute ? overbent(acute) : demanded[index] ?? rad(0);
+    return acute ? overbent(part, acute) : demanded[index] ?? rad(0);
   };
   const heeded = heedWishes(part, drawn, wishes);
   const fits = part.bends.map((bend, index) => pairs.map((pair): ToolFit => {

@@ -11,10 +11,9 @@ export const PAIRS_EXPLAINED = 12;
  * Why no order works: bends that no tool fits, whatever the order; else, for the fullest set of formed bends
  * that can be reached, what stops each of the others, said of the tool that comes nearest.
  */
-export function explain(situation: Situation, checks: StepChecks, deadEnds: readonly number[]): readonly PlanReason[] {
+export function explain(situation: Situation, checks: StepChecks, formed: number): readonly PlanReason[] {
   const always = situation.part.bends.flatMap((_, bend) => neverFits(situation, bend));
   if (always.length > 0) return always;
-  const formed = deadEnds[0] ?? 0;
   const seen = new Set<string>();
   const reasons: PlanReason[] = [];
   situation.part.bends.forEach((_, bend) => {

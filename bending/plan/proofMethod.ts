@@ -15,14 +15,14 @@ export function proofMethod(over: readonly ProvenOver[], flats: number, ordered:
   const layouts = over.reduce((sum, { answer }) => sum + answer.layouts, 0);
   const last = over[over.length - 1];
   const pairs = last === undefined ? "" : pairsText(last);
-  if (over.every(({ answer }) => answer.deadEnds !== null)) {
+  if (over.every(({ answer }) => answer.deadEnd !== null)) {
     const all = over.every(({ answer, allPairs }) => answer.pairs === allPairs);
     return `${orders}${flatsText(over.length)} with ${all ? `all ${Math.max(...over.map(({ allPairs }) => allPairs))} tool pairs that fit a bend` : pairs}, each bend with the shortest solid runs that the pieces make: none clears`;
   }
   const flat = last?.vOpening === null || last === undefined ? "" : `, the flat for a V of ${last.vOpening} mm${flats > 1 ? ` (${flats} flats are possible; the nearest to the usual V that gives a plan is taken)` : ""}`;
-  const beds = over.every(({ answer }) => answer.deadEnds !== null || answer.anyStations)
+  const beds = over.every(({ answer }) => answer.deadEnd !== null || answer.anyStations)
     ? `up to ${MOST_STATIONS} stations (more take longer to set than the plan can save)` : `up to ${MOST_STATIONS} stations`;
-  return `least total time over ${orders} with ${pairs}${flat}, on beds of ${beds} of solid runs: ` +
+  return `least total time over ${orders} with ${pairs}${flat}, on beds of ${beds} of solid runs, set apart as the orders tried ask for: ` +
     `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given allowed" : ""}`;
 }
 

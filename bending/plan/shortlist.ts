@@ -1,8 +1,8 @@
 import type { Situation } from "./situation";
 import type { ToolPair } from "./toolPair";
 
-/** Pairs kept for each set of bends that they fit. */
-const KEPT = 6;
+/** Pairs kept for each set of bends that they fit: few at first, more when those give no plan. */
+export const SHORTLISTS = [6, 24] as const;
 /** mm. Punches whose bodies agree this well leave the part the same room. */
 const SAME_BODY_MM = 8;
 
@@ -10,7 +10,7 @@ const SAME_BODY_MM = 8;
  * The pairs to look at first: for every set of bends that pairs fit, those of the nearest V, taken in turn from
  * punches of different shape (straight ones, relieved ones) and dies of different width.
  */
-export function shortlist({ pairs, fits, part }: Situation): readonly ToolPair[] {
+export function shortlist({ pairs, fits, part }: Situation, most: (typeof SHORTLISTS)[number]): readonly ToolPair[] {
   const groups = new Map<string, ToolPair[]>();
   for (const pair of pairs) {
     const fitting = part.bends.map((_, bend) => (fits[bend]?.[pair.index]?.ok ? 1 : 0)).join("");
@@ -21,7 +21,7 @@ export function shortlist({ pairs, fits, part }: Situation): readonly ToolPair[]
     const key = `${fitting}/${wishes > 0 ? 1 : 0}`;
     groups.set(key, [...(groups.get(key) ?? []), pair]);
   }
-  const kept = [...groups.values()].flatMap((group) => inTurn(group).slice(0, KEPT));
+  const kept = [...groups.values()].flatMap((group) => inTurn(group).slice(0, most));
   return kept.sort((a, b) => a.index - b.index);
 }
 

@@ -14,7 +14,7 @@ import { createPlanMemory } from "./planMemory";
 import type { PlanDocument, PlanReason } from "./planDocument";
 import type { PlanRequest } from "./planRequest";
 import { proofMethod } from "./proofMethod";
-import { shortlist } from "./shortlist";
+import { shortlist, SHORTLISTS } from "./shortlist";
 import { createBudget, type SearchBudget } from "./createBudget";
 import type { Situation } from "./situation";
 import type { Candidate } from "./createCandidateKeeper";
@@ -69,11 +69,11 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
     const situation = { ...memory.situations.get(place) ?? createSituation(facts), machine: request.machine };
     memory.situations.set(place, situation);
     if (situation.pairs.length === 0) {
-      const reasons = explain(situation, createStepChecks(situation), []);
+      const reasons = explain(situation, createStepChecks(situation), 0);
       toolReasons.push(...(reasons.length > 0 ? reasons : found.reasons));
       continue;
     }
-    const listed = shortlist(situation);
+    const listed = shortlist(situation, SHORTLISTS[0]);
     const short = withPairs(situation, listed);
     if (solve(variant, short, situation.pairs.length)) {
       const first = solved[solved.length - 1];
@@ -89,9 +89,14 @@ function solveVariants(request: PlanRequest, variants: readonly PartVariant[], b
     }
     if (short.pairs.length < situation.pairs.length) left.push({ variant, situation });
   }
-  for (const { variant, situation } of left) {
-    solved.splice(solved.findIndex((one) => one.variant === variant), 1);
-    if (solve(variant, situation, situation.pairs.length)) break;
+  for (const longer of [(situation: Situation) => withPairs(situation, shortlist(situation, SHORTLISTS[1])), (situation: Situation) => situation]) {
+    for (const { variant, situation } of left) {
+      const before = solved.findIndex((one) => one.variant === variant);
+      const wider = longer(situation);
+      if (wider.pairs.length <= (solved[before]?.situation.pairs.length ?? 0)) continue;
+      solved.splice(before, 1);
+      if (solve(variant, wider, situation.pairs.length)) return { solved, toolReasons };
+    }
   }
   return { solved, toolReasons };
 }
@@ -103,8 +108,8 @@ function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: re
   const best = all[0];
   if (best === undefined) {
     const stopped = solved.some(({ answer }) => answer.stopped);
-    const possible = solved.some(({ answer }) => answer.deadEnds === null);
-    const reasons = [...toolReasons, ...solved.flatMap(({ situation, checks, answer }) => (answer.deadEnds ? explain(situation, checks, answer.deadEnds) : []))];
+    const possible = solved.some(({ answer }) => answer.deadEnd === null);
+    const reasons = [...toolReasons, ...solved.flatMap(({ situation, checks, answer }) => (answer.deadEnd ? explain(situation, checks, answer.deadEnd()) : []))];
     if (stopped) return unknown(request, method, expanded, reasonOf("budget", `no order was found in the time given, after ${expanded} states; more time may find one`));
     if (possible) return unknown(request, method, expanded, reasonOf("sections", "every bend can be made, but no bed that was tried holds them all; more pieces or another pair may"));
     return { ...refused(request, onceEach(reasons).map(drawnReason)), proof: { method, expanded, bound: 0 } };

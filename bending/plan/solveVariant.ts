@@ -26,8 +26,8 @@ export interface VariantAnswer {
   readonly floor: number;
   readonly layouts: number;
   readonly pairs: number;
-  /** The sets of formed bends where every way ends, when no order can work whatever the bed. */
-  readonly deadEnds: readonly number[] | null;
+  /** The fullest set of formed bends where every way ends, looked for when it is asked; null when some order works without a bed. */
+  readonly deadEnd: (() => number) | null;
   /** True when the budget ended the search. */
   readonly stopped: boolean;
   /** Beds of more stations than were searched cost more than the best plan. */
@@ -54,7 +54,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   const tally = { layouts: 0, expanded: 0 };
   const floor = floorOf(situation, budget.batch);
   const answer = (bound: number, ends: Partial<VariantAnswer>): VariantAnswer =>
-    ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnds: null, stopped: false, anyStations: false, ...ends });
+    ({ candidates: keeper.kept(), ...tally, bound, floor, pairs: situation.pairs.length, deadEnd: null, stopped: false, anyStations: false, ...ends });
 
   const enough = () => budget.firstPlan && keeper.kept().length > 0;
   const known = createCostSoFar(relaxed, budget.shouldStop);
@@ -69,7 +69,7 @@ export function solveVariant(situation: Situation, checks: StepChecks, budget: S
   const { outcome: best, soFar, stale } = searchLearning(relaxed, { ...limits, soFar: known });
   tally.expanded += best.expanded;
   if (best.kind === "stopped") return answer(Math.max(floor, setupSeconds(situation.machine, 1) + best.bound * budget.batch), { stopped: true });
-  if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnds: [fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop)] });
+  if (best.kind === "none") return answer(Infinity, { candidates: [], deadEnd: () => fullestDeadEnd(relaxed, DEAD_END_SETS, budget.shouldStop) });
 
   const first = bedQuestionOf(asked, relaxed, budget, keeper, { steps: best.steps, least: best.weight, soFar });
   const least = Math.min(...kindSets(first, 1).map((set) => set.floor), setupSeconds(situation.machine, 2) + best.weight * budget.batch);

@@ -2,7 +2,6 @@ import { MEANT_CONTACT_MM } from "../core/tolerance";
 import { kiloNewtonPerMetre, toDeg, type LengthUnit } from "../core/units";
 import { airBendForce } from "../handbook/airBendForce";
 import { naturalRadius } from "../handbook/naturalRadius";
-import { springback } from "../handbook/springback";
 import { vOpeningRule } from "../handbook/vOpeningRule";
 import { formatLength } from "../core/formatLength";
 import type { Bend, PartModel } from "../part/partModel";
@@ -10,6 +9,7 @@ import type { RunsOf } from "../setup/createRuns";
 import { levelNeeded } from "../strokes/levelNeeded";
 import type { Machine } from "../tooling/machine";
 import { hemFit } from "./hemFit";
+import { overbent } from "./overbent";
 import type { FitProblem, ToolFit } from "./situation";
 import type { ToolPair } from "./toolPair";
 
@@ -35,13 +35,15 @@ export interface FitQuestion {
 export function toolFit(question: FitQuestion, bend: Bend, pair: ToolPair): ToolFit {
   if (bend.hem !== null) return hemFit(question, bend, pair, toolFit);
   const { part } = question;
-  const demanded = springback(bend.angle, bend.insideRadius, part.thickness, part.material).angle;
+  const demanded = overbent(part, bend);
   const force = kiloNewtonPerMetre(airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening) * question.airForceFactor);
   const problem = bedProblem(question, bend) ?? radiusProblem(question, bend, pair) ?? tipProblem(question, bend, pair) ?? angleProblem(bend, toDeg(demanded), pair)
     ?? forceProblem(force, pair) ?? piecesProblem(question, bend, pair);
   if (problem) return { ok: false, problem };
   return { ok: true, wishes: wishes(question, bend, pair), demanded, force, reach: levelNeeded(bend, part.thickness, pair.die) };
 }
+
+// Messages are put into words when they are read: most are about pairs that nobody asks for.
 
 /** The die is for another flat, which is asked about by itself: last of all to be told. */
 const OTHER_FLAT = 1e6;
@@ -52,18 +54,18 @@ const NO_TOOL_HELPS = -1;
 function bedProblem({ machine, units }: FitQuestion, bend: Bend): FitProblem | null {
   const length = lineLength(bend);
   if (length - 2 * machine.settings.maxUncoveredEnd <= machine.bedLength) return null;
-  return { kind: "bed", tools: [], off: NO_TOOL_HELPS, message: `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}` };
+  return { kind: "bed", tools: [], off: NO_TOOL_HELPS, get message() { return `bend ${bend.id} is ${formatLength(length, units)} long; the bed of ${machine.name} is ${formatLength(machine.bedLength, units)}`; } };
 }
 
 function radiusProblem({ part, units, vOpening, everyBend }: FitQuestion, bend: Bend, { die }: ToolPair): FitProblem | null {
   if (vOpening === null || (bend.radiusSource === "document" && !everyBend) || Math.abs(die.vOpening - vOpening) < 1e-6) return null;
   if (bend.radiusSource === "document") {
-    return { kind: "no-die", tools: [die.id], off: OTHER_FLAT, message: `the flat of bend ${bend.id} is for a V ${formatLength(vOpening, units)}, as the shop measured; ${die.id} has ${formatLength(die.vOpening, units)}` };
+    return { kind: "no-die", tools: [die.id], off: OTHER_FLAT, get message() { return `the flat of bend ${bend.id} is for a V ${formatLength(vOpening, units)}, as the shop measured; ${die.id} has ${formatLength(die.vOpening, units)}`; } };
   }
   const gives = naturalRadius(part.material, die.vOpening);
   return {
     kind: "no-die", tools: [die.id], off: OTHER_FLAT,
-    message: `the flat of bend ${bend.id} is for the inside radius ${formatLength(bend.insideRadius, units)} of a V ${formatLength(vOpening, units)}; ${die.id} gives ${formatLength(gives, units)}`,
+    get message() { return `the flat of bend ${bend.id} is for the inside radius ${formatLength(bend.insideRadius, units)} of a V ${formatLength(vOpening, units)}; ${die.id} gives ${formatLength(gives, units)}`; },
   };
 }
 
@@ -71,7 +73,7 @@ function tipProblem({ units }: FitQuestion, bend: Bend, { punch }: ToolPair): Fi
   if (punch.tipRadius <= bend.insideRadius + MEANT_CONTACT_MM) return null;
   return {
     kind: "radius", tools: [punch.id], off: punch.tipRadius / Math.max(bend.insideRadius, 0.01),
-    message: `the tip of ${punch.id} has a radius of ${formatLength(punch.tipRadius, units)}, larger than the ${formatLength(bend.insideRadius, units)} inside bend ${bend.id}; ${formatLength(bend.insideRadius, units)} or less is needed`,
+    get message() { return `the tip of ${punch.id} has a radius of ${formatLength(punch.tipRadius, units)}, larger than the ${formatLength(bend.insideRadius, units)} inside bend ${bend.id}; ${formatLength(bend.insideRadius, units)} or less is needed`; },
   };
 }
 
@@ -82,15 +84,15 @@ function angleProblem(bend: Bend, demanded: number, { punch, die }: ToolPair): F
   const tool = toDeg(punch.tipAngle) > toDeg(die.vAngle) ? punch : die;
   return {
     kind: "angle", tools: [tool.id], off: (sharp - included) / 180,
-    message: `bend ${bend.id} is taken to ${(180 - demanded).toFixed(1)}° included (${toDeg(bend.angle).toFixed(1)}° turned and its springback); ` +
-      `${tool.id} has ${sharp.toFixed(1)}°, ${Math.max(0, included).toFixed(1)}° or less is needed`,
+    get message() { return `bend ${bend.id} is taken to ${(180 - demanded).toFixed(1)}° included (${toDeg(bend.angle).toFixed(1)}° turned and its springback); ` +
+      `${tool.id} has ${sharp.toFixed(1)}°, ${Math.max(0, included).toFixed(1)}° or less is needed`; },
   };
 }
 
 function forceProblem(force: number, { punch, die }: ToolPair): FitProblem | null {
   const weak = punch.maxForcePerMetre < die.maxForcePerMetre ? punch : die;
   if (force <= weak.maxForcePerMetre) return null;
-  return { kind: "tool-force", tools: [weak.id], off: force / weak.maxForcePerMetre - 1, message: `${weak.id} is rated ${weak.maxForcePerMetre.toFixed(0)} kN/m; this V needs ${force.toFixed(0)} kN/m` };
+  return { kind: "tool-force", tools: [weak.id], off: force / weak.maxForcePerMetre - 1, get message() { return `${weak.id} is rated ${weak.maxForcePerMetre.toFixed(0)} kN/m; this V needs ${force.toFixed(0)} kN/m`; } };
 }
 
 const lineLength = ({ line: [[ax, ay], [bx, by]] }: Bend) => Math.hypot(bx - ax, by - ay);
@@ -102,7 +104,7 @@ function piecesProblem({ runs, units }: FitQuestion, bend: Bend, { punch, die }:
   const have = short.pieces.reduce((sum, piece) => sum + piece.length, 0);
   return {
     kind: "sections", tools: [short.id], off: length / Math.max(1, have),
-    message: `bend ${bend.id} is ${formatLength(length, units)} long; the pieces of ${short.id} in service make ${formatLength(have, units)} together`,
+    get message() { return `bend ${bend.id} is ${formatLength(length, units)} long; the pieces of ${short.id} in service make ${formatLength(have, units)} together`; },
   };
 }
 
@@ -113,10 +115,10 @@ function wishes({ part, units, vOpening }: FitQuestion, bend: Bend, { die }: Too
   const ratio = asked ? gives / Math.max(bend.insideRadius, 1e-6) : die.vOpening / vOpeningRule(part.thickness);
   const off = Math.abs(Math.log(ratio));
   if (off > Math.log(WISHED_RATIO) && asked) {
-    found.push({ kind: "radius", tools: [die.id], off, message: `${die.id} gives bend ${bend.id} an inside radius of about ${formatLength(gives, units)}; ${formatLength(bend.insideRadius, units)} is asked for, the natural radius of a V ${formatLength(bend.insideRadius / part.material.naturalRadiusRatio, units)}` });
+    found.push({ kind: "radius", tools: [die.id], off, get message() { return `${die.id} gives bend ${bend.id} an inside radius of about ${formatLength(gives, units)}; ${formatLength(bend.insideRadius, units)} is asked for, the natural radius of a V ${formatLength(bend.insideRadius / part.material.naturalRadiusRatio, units)}`; } });
   }
   if (off > Math.log(WISHED_RATIO) && !asked && vOpening !== null) {
-    found.push({ kind: "tool-choice", tools: [die.id], off, message: `${die.id} has a V of ${formatLength(die.vOpening, units)}; the usual one for ${formatLength(part.thickness, units)} is ${formatLength(vOpeningRule(part.thickness), units)}` });
+    found.push({ kind: "tool-choice", tools: [die.id], off, get message() { return `${die.id} has a V of ${formatLength(die.vOpening, units)}; the usual one for ${formatLength(part.thickness, units)} is ${formatLength(vOpeningRule(part.thickness), units)}`; } });
   }
   return found;
 }
