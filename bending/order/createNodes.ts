@@ -8,6 +8,8 @@ export interface Nodes {
   readonly set: (node: number, weight: number, gauge: number, demerits: number) => void;
   readonly total: (node: number) => number;
   readonly get: (node: number) => SearchNode;
+  /** Nodes made so far. */
+  readonly count: () => number;
 }
 
 export interface SearchNode {
@@ -65,6 +67,7 @@ export function createNodes(): Nodes {
     heap[at] = node;
   };
   return {
+    count: () => count,
     add: (node, total) => {
       if (count === room) grow();
       const at = count;

@@ -42,7 +42,7 @@ export function searchLearning(problem: LearningProblem, limits: SearchLimits): 
     expanded += outcome.expanded;
     if (outcome.kind !== "stopped") return { outcome: { ...outcome, expanded }, soFar, stale: problem.learned() > known };
     bound = Math.max(bound, outcome.bound);
-    if (stop()) return { outcome: { ...outcome, bound, expanded }, soFar, stale: problem.learned() > known };
+    if (stop() || outcome.full) return { outcome: { ...outcome, bound, expanded }, soFar, stale: problem.learned() > known };
     soFar = createCostSoFar(problem, stop);
   }
 }

@@ -21,7 +21,10 @@ export interface SearchLimits {
 export type OrderOutcome =
   | { readonly kind: "found"; readonly steps: readonly OrderStep[]; readonly seconds: number; readonly demerits: number; readonly weight: number; readonly expanded: number }
   | { readonly kind: "none"; readonly expanded: number; /** What was left aside for being over the limit weighs so much at the least; Infinity when nothing was. */ readonly over: number }
-  | { readonly kind: "stopped"; /** No plan weighs less. */ readonly bound: number; readonly expanded: number };
+  | { readonly kind: "stopped"; /** No plan weighs less. */ readonly bound: number; readonly expanded: number; /** It stopped because it would take too much memory. */ readonly full?: true };
+
+/** Steps that are kept at once: about 200 MB. */
+const MOST_NODES = 2 ** 22;
 
 /**
  * The best order, looked for from the finished part back to the flat one, as the last bends are the hardest to make.
@@ -84,6 +87,7 @@ export function searchOrder(problem: OrderProblem, limits: SearchLimits = {}): O
   for (let at = nodes.take(); at >= 0; at = nodes.take()) {
     const total = nodes.total(at);
     let node = nodes.get(at);
+    if (nodes.count() > MOST_NODES) return { kind: "stopped", bound: total, expanded, full: true };
     if (limits.shouldStop?.() || expanded >= most) return { kind: "stopped", bound: total, expanded };
     if (node.gauge === UNASKED) {
       const asked = ask(at, node);

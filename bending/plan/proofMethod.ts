@@ -23,7 +23,7 @@ export function proofMethod(over: readonly ProvenOver[], flats: number, ordered:
   const beds = over.every(({ answer }) => answer.deadEnd !== null || answer.anyStations)
     ? `up to ${MOST_STATIONS} stations (more take longer to set than the plan can save)` : `up to ${MOST_STATIONS} stations`;
   return `least total time over ${orders} with ${pairs}${flat}, on beds of ${beds} of solid runs, set apart as the orders tried ask for: ` +
-    `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given allowed" : ""}`;
+    `${layouts} beds searched, the rest excluded by bounds${over.some(({ answer }) => answer.stopped) ? " as far as the time given and the memory allowed" : ""}`;
 }
 
 const pairsText = ({ answer: { pairs }, allPairs }: ProvenOver): string =>

@@ -110,7 +110,7 @@ function joined(request: PlanRequest, solved: readonly Solved[], toolReasons: re
     const stopped = solved.some(({ answer }) => answer.stopped);
     const possible = solved.some(({ answer }) => answer.deadEnd === null);
     const reasons = [...toolReasons, ...solved.flatMap(({ situation, checks, answer }) => (answer.deadEnd ? explain(situation, checks, answer.deadEnd()) : []))];
-    if (stopped) return unknown(request, method, expanded, reasonOf("budget", `no order was found in the time given, after ${expanded} states; more time may find one`));
+    if (stopped) return unknown(request, method, expanded, reasonOf("budget", `no order was found in the time and memory that a plan is given, after ${expanded} states; more time may find one`));
     if (possible) return unknown(request, method, expanded, reasonOf("sections", "every bend can be made, but no bed that was tried holds them all; more pieces or another pair may"));
     return { ...refused(request, onceEach(reasons).map(drawnReason)), proof: { method, expanded, bound: 0 } };
   }

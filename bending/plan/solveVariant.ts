@@ -44,11 +44,16 @@ const HASTY_STATES = 2000;
 /** Sets of formed bends looked at for one where every way ends. */
 const DEAD_END_SETS = 300;
 
+/** Faces in states of their own that are remembered: about 400 MB. */
+const MOST_ANSWERS = 500_000;
+
 /** Best order, fronts, tools and stations for one flat pattern. */
 export function solveVariant(situation: Situation, checks: StepChecks, budget: SearchBudget): VariantAnswer {
   const numbers = createGaugeNumbers();
   const keeper = createCandidateKeeper(budget.keep, (candidate) => planClass(situation, candidate));
-  const limits = { shouldStop: budget.shouldStop, onExpand: budget.onExpand };
+  /** Every answer of clearance is kept: with too many of them the search ends as if its time were over. */
+  const full = () => situation.clearance.counts().entries > MOST_ANSWERS;
+  const limits = { shouldStop: () => budget.shouldStop() || full(), onExpand: budget.onExpand };
   const asked = { situation, checks, numbers };
   const relaxed = relaxedProblem(situation, checks, numbers);
   const tally = { layouts: 0, expanded: 0 };
