@@ -46,6 +46,8 @@ describe("a sheet let down on a die of points", () => {
     const sizes = fc.record({ opening: between(4, 200), times: between(5, 16), radiusPart: between(0.02, 0.2), shoulderPart: between(0.02, 0.12), turned: between(5, 150), spare: between(1, 20), named: fc.constantFrom("tops", "corners") });
     fc.assert(fc.property(sizes, ({ opening, times, radiusPart, shoulderPart, turned, spare, named }) => {
       const die: DrawnDie = { named, opening, shoulderRadius: shoulderPart * opening, dieAngle: (Math.max(5, 180 - turned - spare) * Math.PI) / 180 };
+      // The formulas hold while the plane wing touches the shoulder, not the round of the bend.
+      fc.pre(flangeAtContact(toRad(deg(turned)), openingOf(die)) > apexSetback(toRad(deg(turned)), mm(radiusPart * opening), mm(opening / times)));
       const [depth, flange] = compare({ angle: (turned * Math.PI) / 180, insideRadius: radiusPart * opening, thickness: opening / times }, die);
       expect(depth).toBeLessThan(1e-5);
       expect(flange).toBeLessThan(2e-3);
