@@ -10,6 +10,8 @@ test("an order of one's own is tried while it is dragged, says where it fails, b
   const steps = page.getByRole("list", { name: "Your order" }).locator(":scope > li");
   await expect(steps).toHaveCount(4);
   await expect(steps.nth(3)).toContainText("can be made", { timeout: 60_000 });
+  // Rows grow when the best plan of the order is known: they are measured after that.
+  await expect(page.getByText("This order works")).toBeVisible({ timeout: 60_000 });
 
   // The order is b1 b2 and the other side: the return inside first would shut the punch in.
   const from = await page.getByRole("button", { name: "Move step 1, b1" }).boundingBox();
