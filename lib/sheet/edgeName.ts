@@ -9,6 +9,8 @@ export function edgeName(model: PlanModel, step: StepModel): string {
   if (!face) return "";
   const frame = stepFrames(model, step, 0).frames[step.gaugeFace];
   if (frame && standsUpright(frame)) return `${face.id}, outside of the flange`;
+  const carrier = face.bend === null ? undefined : model.part.bends[face.bend];
+  if (step.step.gauge.on === "face" && carrier?.hem && (step.formed[face.bend ?? 0] ?? 0) > 0) return `${face.id}, fold`;
   const from = face.outline[step.gaugeEdge];
   const to = face.outline[(step.gaugeEdge + 1) % face.outline.length];
   const bend = model.part.bends[face.bend ?? step.hit.bends[0] ?? 0];
