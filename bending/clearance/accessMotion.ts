@@ -18,7 +18,7 @@ export interface AccessMotion {
 }
 
 /** mm. Farther than any part reaches. */
-const AWAY = 1e4;
+export const AWAY_MM = 1e4;
 
 /** What an obstacle goes through, seen from a half at the back: where it may not stand beside the part, and where it may not stand at all. */
 export interface AccessShapes {
@@ -47,6 +47,6 @@ function shapes(motion: AccessMotion, { on, shape: { pieces } }: Obstacle, base:
   const apart = base + (on === "ram" ? opening : 0) - motion.lift;
   const parting = sweepShape(pieces, [0, base], on === "ram" ? [0, opening] : [0, -motion.lift], margin);
   return motion.kind === "pull"
-    ? { passed: [...parting, ...sweepShape(pieces, [0, apart], [AWAY, 0], margin)], everywhere: [] }
+    ? { passed: [...parting, ...sweepShape(pieces, [0, apart], [AWAY_MM, 0], margin)], everywhere: [] }
     : { passed: parting, everywhere: sweepShape(pieces, [0, apart], still, margin) };
 }

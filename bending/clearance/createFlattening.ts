@@ -3,6 +3,7 @@ import type { Vec2 } from "../geometry/vec2";
 import type { Bend, PartModel } from "../part/partModel";
 import type { Machine } from "../tooling/machine";
 import type { Die, Punch, Tool } from "../tooling/tool";
+import { AWAY_MM } from "./accessMotion";
 import { askFace } from "./askHalf";
 import { atRest } from "./atRest";
 import type { ClearanceHit } from "./clearance";
@@ -27,9 +28,6 @@ export interface Flattening {
   /** The same for ram and bed, and for a fold that does not go into the open slot. */
   blocked(hit: Hit, punch: Punch, die: Die): readonly ClearanceHit[];
 }
-
-/** mm. Farther than any part reaches. */
-const AWAY = 1e4;
 
 /**
  * The part in the slot of a two-stage hem die. Only what is in front of the fold can be in the way: the leg behind it is what the slot is
@@ -76,7 +74,6 @@ function passed(part: PartModel, bend: Bend, die: Die, obstacle: Obstacle, openi
   const die0 = -part.thickness + slot.floor;
   const onBed = (up: number): Vec2 => [x, die0 + obstacle.lift + up];
   return obstacle.on === "bed"
-    ? sweepShape(obstacle.tool === die.id ? obstacle.shape.pieces.map((piece) => ({ ...piece, role: "left" as const })) : obstacle.shape.pieces, onBed(0), [AWAY, 0], margin)
-    : [...sweepShape(obstacle.shape.pieces, onBed(-depth), [0, depth + opening], margin), ...sweepShape(obstacle.shape.pieces, onBed(opening), [AWAY, 0], margin)];
+    ? sweepShape(obstacle.tool === die.id ? obstacle.shape.pieces.map((piece) => ({ ...piece, role: "left" as const })) : obstacle.shape.pieces, onBed(0), [AWAY_MM, 0], margin)
+    : [...sweepShape(obstacle.shape.pieces, onBed(-depth), [0, depth + opening], margin), ...sweepShape(obstacle.shape.pieces, onBed(opening), [AWAY_MM, 0], margin)];
 }
-

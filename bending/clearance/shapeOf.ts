@@ -2,6 +2,7 @@ import { EMPTY_AREA_MM2, MEANT_CONTACT_MM, SAME_POINT_MM } from "../core/toleran
 import type { Mm } from "../core/units";
 import { clipByHalfPlane } from "../geometry/clipByHalfPlane";
 import { convexPieces } from "../geometry/convexPieces";
+import { onStretch } from "../geometry/onStretch";
 import { signedArea } from "../geometry/signedArea";
 import type { ProfilePoint, Vec2 } from "../geometry/vec2";
 import type { ConvexPiece, PieceRole, Shape } from "./convexPiece";
@@ -37,12 +38,6 @@ function piece(corners: readonly Vec2[], role: PieceRole, profile: readonly Prof
 function onOutline(p: Vec2, q: Vec2, profile: readonly ProfilePoint[]): boolean {
   return profile.some((a, i) => {
     const b = profile[(i + 1) % profile.length] ?? a;
-    const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
-    if (length < SAME_POINT_MM) return false;
-    return [p, q].every((r) => {
-      const along = ((r[0] - a[0]) * (b[0] - a[0]) + (r[1] - a[1]) * (b[1] - a[1])) / length;
-      const off = ((b[0] - a[0]) * (r[1] - a[1]) - (b[1] - a[1]) * (r[0] - a[0])) / length;
-      return Math.abs(off) < SAME_POINT_MM && along > -SAME_POINT_MM && along < length + SAME_POINT_MM;
-    });
+    return [p, q].every((r) => onStretch(a, b, r, SAME_POINT_MM));
   });
 }

@@ -1,7 +1,7 @@
 import { hemSteps } from "../handbook/hemSteps";
 import { bendLines } from "./bendLines";
 import type { FindingsContext } from "./context";
-import { faceReach } from "./faceReach";
+import { faceReach } from "../part/faceReach";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import { named } from "./named";

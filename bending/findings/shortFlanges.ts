@@ -2,7 +2,7 @@ import { flangeWithMargin } from "../handbook/flangeWithMargin";
 import type { Bend, Face } from "../part/partModel";
 import type { BendingV } from "./bendTools";
 import type { FindingsContext } from "./context";
-import { faceReach } from "./faceReach";
+import { faceReach } from "../part/faceReach";
 import type { Finding } from "./finding";
 import { lengthCure } from "./lengthCure";
 import { shownLength } from "./shownLength";

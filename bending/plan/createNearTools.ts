@@ -1,7 +1,6 @@
 import { convexPieces } from "../geometry/convexPieces";
 import type { Vec2 } from "../geometry/vec2";
 import type { Contact } from "../setup/edgeContacts";
-import { fingerMeetsTools } from "../setup/fingerMeetsTools";
 import type { Situation } from "./situation";
 
 /** A rectangle round something: x from and to, y from and to. */
@@ -11,7 +10,7 @@ type Box = readonly [number, number, number, number];
 const PAIRS_ASKED = 16;
 
 /** Answers whether a finger at a contact may meet the tools of some pairs and not those of others: then they do not gauge alike. */
-export function createNearTools({ pairs, machine, part }: Situation): (contact: Contact) => boolean {
+export function createNearTools({ pairs, machine, part, fingers: against }: Situation): (contact: Contact) => boolean {
   const { gauge } = machine;
   const punches = new Map(pairs.map(({ punch }) => [punch.id, punch]));
   const dies = new Map(pairs.map(({ die }) => [die.id, die]));
@@ -26,7 +25,7 @@ export function createNearTools({ pairs, machine, part }: Situation): (contact: 
     const near = fingers.some(([x0, , y0, y1]) => bodies.some((body) => nearest + x0 < body[1] && r + y0 < body[3] && r + y1 > body[2]));
     if (!near || slope !== 0 || pairs.length > PAIRS_ASKED) return near;
     const key = `${x.toFixed(3)}/${r.toFixed(3)}`;
-    const answer = known.get(key) ?? pairs.some(({ punch, die }) => fingerMeetsTools(x, r, part.thickness, punch, die, machine));
+    const answer = known.get(key) ?? pairs.some(({ punch, die }) => against.pair(x, r, part.thickness, punch, die));
     known.set(key, answer);
     return answer;
   };

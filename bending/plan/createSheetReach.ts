@@ -1,5 +1,6 @@
 import { hitSides } from "../clearance/hitSides";
-import type { PartModel } from "../part/partModel";
+import { faceReach } from "../part/faceReach";
+import type { Bend, PartModel } from "../part/partModel";
 
 /** How far the sheet lies level on either side of a bend line, mm from the line. */
 export interface SheetReach {
@@ -18,10 +19,7 @@ interface LevelFace { readonly mask: number; readonly far: number }
 export function createSheetReach(part: PartModel, bends: readonly number[], front: number): (formed: number) => SheetReach {
   const bend = part.bends[bends[0] ?? -1];
   if (bend === undefined) return () => ({ front: 0, back: 0 });
-  const [[ax, ay], [bx, by]] = bend.line;
-  const length = Math.hypot(bx - ax, by - ay);
-  const across = (p: readonly [number, number]) => Math.abs(((p[0] - ax) * (by - ay) - (p[1] - ay) * (bx - ax)) / length);
-  const levels = (start: number) => levelFaces(part, bends, start, across);
+  const levels = (start: number) => levelFaces(part, bends, start, bend);
   const parent = levels(bend.parent);
   const children = bends.map((index) => levels(part.bends[index]?.child ?? 0));
   const parentInFront = hitSides(part, { bends, front, formed: 0 })[bend.parent] === true;
@@ -40,13 +38,13 @@ function farthest(faces: readonly LevelFace[], formed: number): number {
 }
 
 /** The faces that hang together with one, without crossing a bend of the stroke. */
-function levelFaces(part: PartModel, bends: readonly number[], start: number, across: (p: readonly [number, number]) => number): readonly LevelFace[] {
+function levelFaces(part: PartModel, bends: readonly number[], start: number, bend: Bend): readonly LevelFace[] {
   const found: LevelFace[] = [];
   const seen = new Set([start]);
   const waiting = [{ face: start, mask: 0 }];
   for (let at = waiting.pop(); at !== undefined; at = waiting.pop()) {
     const { face, mask } = at;
-    found.push({ mask, far: Math.max(0, ...(part.faces[face]?.outline ?? []).map(across)) });
+    found.push({ mask, far: faceReach(part.faces[face]?.outline ?? [], bend) });
     part.bends.forEach(({ parent, child }, index) => {
       const next = bends.includes(index) ? null : parent === face ? child : child === face ? parent : null;
       if (next === null || seen.has(next)) return;

@@ -2,8 +2,9 @@ import { withHems } from "../clearance/withHems";
 import { rad, type LengthUnit, type Rad } from "../core/units";
 import type { PartModel } from "../part/partModel";
 import { collectMoves, type Move } from "../order/collectMoves";
+import { createFingerAgainstTools } from "../setup/createFingerAgainstTools";
 import { createRuns } from "../setup/createRuns";
-import { acuteHem } from "../strokes/acuteHem";
+import { acuteStage } from "../strokes/acuteHem";
 import { inRow } from "../strokes/inRow";
 import type { Machine } from "../tooling/machine";
 import type { Die } from "../tooling/tool";
@@ -35,8 +36,8 @@ export function createSituation({ variant: { part, drawn, splits, rows, bitsOf, 
   const runs = createRuns(machine.settings);
   const demanded = part.bends.map((bend) => overbent(part, bend));
   const demandedAngle = (index: number, die: Die): Rad => {
-    const acute = part.bends[index]?.hem ? acuteHem(part, index, die.vOpening).bends[index] : undefined;
-    return acute ? overbent(part, acute) : demanded[index] ?? rad(0);
+    const bend = part.bends[index];
+    return bend?.hem ? overbent(part, acuteStage(part, bend, die.vOpening)) : demanded[index] ?? rad(0);
   };
   const heeded = heedWishes(part, drawn, wishes);
   const fits = part.bends.map((bend, index) => pairs.map((pair): ToolFit => {
@@ -51,6 +52,7 @@ export function createSituation({ variant: { part, drawn, splits, rows, bitsOf, 
     pairs: useful.map((pair, index) => ({ ...pair, index })),
     fits: useful.length === 0 ? fits : fits.map((ofBend) => ofBend.filter((_, index) => kept.has(index))),
     clearance: withHems(part, machine, { demandedAngle }),
+    fingers: createFingerAgainstTools(machine),
     allowed: (move, formed) => {
       const found = moves[move];
       return found !== undefined && hemsHeldInFront(part, found) && inRow(rows, found.bends, formed) && (asked === null || asked(found, formed)) && heeded.frontAllowed(found);

@@ -1,7 +1,6 @@
 import { createHitPlaces } from "../clearance/createHitPlaces";
 import type { Hit } from "../clearance/hit";
 import type { Interval } from "../geometry/interval";
-import { createFingerAgainstTools } from "../setup/createFingerAgainstTools";
 import { createGaugeOptions } from "../setup/createGaugeOptions";
 import type { GaugeOption } from "../setup/gaugeOption";
 import type { Tool } from "../tooling/tool";
@@ -32,7 +31,7 @@ export interface StepChecks {
 }
 
 export function createStepChecks(situation: Situation): StepChecks {
-  const { part, machine, moves, pairs, clearance } = situation;
+  const { part, machine, moves, pairs, clearance, fingers } = situation;
   const facts = moves.map((_, move) => createMoveFacts(situation, move));
   const factsOf = (move: number): MoveFacts => must(facts[move]);
   const pairOf = (pair: number): ToolPair => must(pairs[pair]);
@@ -57,14 +56,8 @@ export function createStepChecks(situation: Situation): StepChecks {
   const intervals = pairs.map(() => new Map<Tool, StateTable<readonly Interval[]>>());
   const placeOf = createHitPlaces(part, machine.settings.clearance, { clips: 0, entries: 0 });
   const gaugeOptions = createGaugeOptions(part, machine.gauge);
-  const inTheWay = createFingerAgainstTools(machine);
-  const meets = (option: GaugeOption, { punch, die }: ToolPair): boolean => {
-    const heights = { punchSeat: part.thickness + punch.height, dieSeat: -die.height };
-    return [option.free[0]?.[0] ?? 0, option.free[option.free.length - 1]?.[1] ?? 0].some((z) => {
-      const x = option.x + option.slope * z;
-      return inTheWay.tool(x, option.r, die, heights) || inTheWay.tool(x, option.r, punch, heights) || inTheWay.machine(x, option.r, heights);
-    });
-  };
+  const meets = (option: GaugeOption, { punch, die }: ToolPair): boolean => [option.free[0]?.[0] ?? 0, option.free[option.free.length - 1]?.[1] ?? 0]
+    .some((z) => fingers.pair(option.x + option.slope * z, option.r, part.thickness, punch, die));
   const { gaugeRepeat, angleRepeat } = machine.settings;
   const keeping = createKeeping(part, { gauge: gaugeRepeat, angle: angleRepeat }, fingerHeight(machine.gauge), (option) => fingerCount(option, machine.gauge));
   const behind = moves.map((move) => bendsBehind(situation, { bends: move.bends, front: move.front, formed: 0 }));

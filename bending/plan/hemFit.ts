@@ -1,8 +1,9 @@
 import { formatLength } from "../core/formatLength";
 import { kiloNewtonPerMetre } from "../core/units";
 import { airBendForce } from "../handbook/airBendForce";
+import { faceReach } from "../part/faceReach";
 import type { Bend } from "../part/partModel";
-import { acuteHem } from "../strokes/acuteHem";
+import { acuteStage } from "../strokes/acuteHem";
 import type { FitProblem, ToolFit } from "./situation";
 import type { FitQuestion } from "./toolFit";
 import type { ToolPair } from "./toolPair";
@@ -16,26 +17,17 @@ export function hemFit(question: FitQuestion, bend: Bend, pair: ToolPair, acute:
   const slot = pair.die.flattening;
   const no = (off: number, message: string): ToolFit => ({ ok: false, problem: { kind: "hem", tools: [pair.die.id], off, message } satisfies FitProblem });
   if (slot === undefined) return no(100, `the hem ${bend.id} is flattened after its acute stroke; ${pair.die.id} has no slot that flattens: a two-stage hem die has`);
-  const index = part.bends.indexOf(bend);
-  const bent = acuteHem(part, index, pair.die.vOpening);
-  const stage = bent.bends[index];
-  if (stage === undefined) throw new Error("invariant: a hem is a bend of the part");
+  const stage = acuteStage(part, bend, pair.die.vOpening);
   if (part.bends.some(({ parent }) => parent === bend.child)) return no(90, `the leg of hem ${bend.id} carries another flange, which the slot of ${pair.die.id} has no room for`);
   const text = (value: number) => formatLength(value, units);
-  const leg = legOf(part.faces[bend.child]?.outline ?? [], bend);
+  const leg = faceReach(part.faces[bend.child]?.outline ?? [], bend);
   const stands = leg * Math.sin(stage.angle) + part.thickness + 2 * stage.insideRadius;
   if (stands > slot.opening) return no(stands / slot.opening, `the leg of hem ${bend.id} stands ${text(stands)} high after the acute stroke; the slot of ${pair.die.id} opens ${text(slot.opening)}`);
   const deep = slot.back - Math.min(...pair.die.profile.map(([x]) => x));
   if (leg > deep) return no(leg / deep, `the leg of hem ${bend.id} is ${text(leg)} wide; the slot of ${pair.die.id} is ${text(deep)} deep`);
-  const fit = acute({ ...question, part: bent, vOpening: null, everyBend: false }, stage, pair);
+  const fit = acute({ ...question, vOpening: null, everyBend: false }, stage, pair);
   if (!fit.ok) return fit;
   const force = kiloNewtonPerMetre(FLATTENING_FACTOR * airBendForce(part.material.tensile[1], part.thickness, pair.die.vOpening) * question.airForceFactor);
   if (force > pair.die.maxForcePerMetre) return no(force / pair.die.maxForcePerMetre, `closing the hem ${bend.id} takes about ${force.toFixed(0)} kN/m; ${pair.die.id} is rated ${pair.die.maxForcePerMetre.toFixed(0)} kN/m`);
   return { ...fit, force: kiloNewtonPerMetre(Math.max(fit.force, force)) };
-}
-
-/** How far the leg reaches from the middle of the bend zone, mm. */
-function legOf(outline: readonly (readonly [number, number])[], { line: [[ax, ay], [bx, by]] }: Bend): number {
-  const length = Math.hypot(bx - ax, by - ay);
-  return Math.max(0, ...outline.map(([x, y]) => Math.abs(((x - ax) * (by - ay) - (y - ay) * (bx - ax)) / length)));
 }

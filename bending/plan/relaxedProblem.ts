@@ -1,7 +1,8 @@
 import { ANY_GAUGE, type StepOption } from "../order/orderProblem";
 import type { LearningProblem } from "../order/searchLearning";
-import { freeShifts } from "../setup/freeShifts";
+import type { GaugeOption } from "../setup/gaugeOption";
 import { blockedPattern } from "./blockedPattern";
+import { createAloneRoom } from "./createAloneRoom";
 import { createLeast } from "./createLeast";
 import type { StepChecks } from "./createStepChecks";
 import { fingerCount } from "./fingerCount";
@@ -15,38 +16,25 @@ import type { Situation } from "./situation";
  * stand a shorter one within it may, so no plan costs less a part; if it has no order, none has.
  */
 export function relaxedProblem(situation: Situation, checks: StepChecks, numbers: GaugeNumbers): LearningProblem {
-  const { moves, pairs, machine, part, allowed, runs } = situation;
-  const shortest = moves.map(({ halfLength }) => pairs.map(({ punch, die }) => {
-    const least = (tool: typeof punch | typeof die) => Math.min(...runs(tool, halfLength * 2).map(({ length }) => length));
-    return { punch: least(punch), die: least(die) };
-  }));
-  const fingersWith = (move: number, formed: number, pair: number): number => {
-    const gauge = checks.gauges(move, formed, pair)[0];
-    return gauge === undefined ? 0 : fingerCount(gauge, machine.gauge);
-  };
+  const { moves, pairs, machine, part, allowed } = situation;
+  const room = createAloneRoom(situation, checks);
+  const fingersOf = (gauge: GaugeOption | undefined): number => (gauge === undefined ? 0 : fingerCount(gauge, machine.gauge));
   const withPair = (move: number, formed: number, pair: number): StepOption | null => {
-    const length = shortest[move]?.[pair];
-    const tools = pairs[pair];
-    if (!length || !tools || !Number.isFinite(length.punch) || !Number.isFinite(length.die) || !checks.possible(move, formed, pair)) return null;
-    const fits = (tool: typeof tools.punch | typeof tools.die, run: number) => freeShifts(
-      run / 2 - (moves[move]?.halfLength ?? 0) + machine.settings.maxUncoveredEnd,
-      [{ offset: 0, length: run, forbidden: checks.forbidden(move, formed, pair, tool) }],
-    ).length > 0;
-    if (!fits(tools.punch, length.punch) || !fits(tools.die, length.die)) return null;
+    if (!room.fits(move, formed, pair)) return null;
     const gauge = checks.gauges(move, formed, pair)[0];
-    return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingersWith(move, formed, pair)) + checks.unkept(move, formed, gauge) };
+    return { gauge: numbers(gauge), demerit: checks.wishes(move, pair) + gaugeDemerits(fingersOf(gauge)) + checks.unkept(move, formed, gauge) };
   };
   const least = createLeast(situation, checks, numbers);
   const known = new Map<number, StepOption | null>();
   const find = (move: number, formed: number): StepOption | null => {
     const best = bestOf(pairs.length, (pair) => withPair(move, formed, pair), least.of(move, formed)?.demerit ?? 0);
     if (best === null) {
-      const pattern = blockedPattern(situation, checks, move, formed, pairs, (pair) => shortest[move]?.[pair]);
+      const pattern = blockedPattern(situation, checks, move, formed, pairs, (pair) => room.shortest(move, pair));
       if (pattern) least.block(move, pattern);
       return null;
     }
     if (!checks.gaugesAgree(move, formed)) return { ...best.option, gauge: ANY_GAUGE };
-    least.settle(move, formed, best.option.gauge, fingersWith(move, formed, best.pair));
+    least.settle(move, formed, best.option.gauge, fingersOf(checks.gauges(move, formed, best.pair)[0]));
     return best.option;
   };
   return {

@@ -2,6 +2,7 @@ import type { Clearance } from "../clearance/clearance";
 import type { LengthUnit, KiloNewtonPerMetre, Mm, Rad } from "../core/units";
 import type { Move } from "../order/collectMoves";
 import type { PartModel } from "../part/partModel";
+import type { FingerAgainstTools } from "../setup/createFingerAgainstTools";
 import type { RunsOf } from "../setup/createRuns";
 import type { BendSplit } from "../strokes/bendSplit";
 import type { Machine } from "../tooling/machine";
@@ -41,6 +42,7 @@ export interface Situation {
   readonly moves: readonly Move[];
   readonly pairs: readonly ToolPair[];
   readonly clearance: Clearance;
+  readonly fingers: FingerAgainstTools;
   readonly runs: RunsOf;
   /** By bend, then by pair. */
   readonly fits: readonly (readonly ToolFit[])[];

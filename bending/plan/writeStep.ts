@@ -6,7 +6,7 @@ import type { Interval } from "../geometry/interval";
 import { handlingBetween } from "../order/handlingBetween";
 import type { OrderStep } from "../order/orderProblem";
 import type { Layout, PlacedStation } from "../setup/layout";
-import { acuteHem } from "../strokes/acuteHem";
+import { acuteStage } from "../strokes/acuteHem";
 import type { StepChecks } from "./createStepChecks";
 import { placeStep, type StepPlace } from "./placeStep";
 import type { PlanGauge, PlanStep } from "./planDocument";
@@ -27,7 +27,7 @@ export function writeStep(situation: Situation, checks: StepChecks, layout: Layo
   const bend = part.bends[move?.bends[0] ?? -1];
   const fit = fits[move?.bends[0] ?? -1]?.[station?.pair ?? -1];
   if (!place || !move || !station || !pair || !bend || !fit?.ok) throw new Error("invariant: a step that was found can be made");
-  const acute = bend.hem === null ? null : acuteHem(part, move.bends[0] ?? 0, pair.die.vOpening).bends[move.bends[0] ?? 0] ?? null;
+  const acute = bend.hem === null ? null : acuteStage(part, bend, pair.die.vOpening);
   const inUnits = (value: number) => rounded(value / mmPer(units));
   const { hitZ } = place;
   return {

@@ -4,7 +4,7 @@ import { convexPieces } from "../geometry/convexPieces";
 import { polygonBounds, type Bounds2 } from "../geometry/polygonBounds";
 import type { Vec2 } from "../geometry/vec2";
 import type { Machine } from "../tooling/machine";
-import type { Tool } from "../tooling/tool";
+import type { Die, Punch, Tool } from "../tooling/tool";
 
 /** A cross-section in convex pieces, and the box round it. */
 interface Body { readonly pieces: readonly (readonly Vec2[])[]; readonly bounds: Bounds2 }
@@ -16,11 +16,14 @@ export interface ToolHeights {
   readonly dieSeat: number;
 }
 
+/** The seats when this pair is in use. */
+export const toolHeights = (thickness: number, punch: Punch, die: Die): ToolHeights => ({ punchSeat: thickness + punch.height, dieSeat: -die.height });
+
 export interface FingerAgainstTools {
   /** Does a finger with its stop at (x, r) stand in the tool? */
   readonly tool: (x: number, r: number, tool: Tool, heights: ToolHeights) => boolean;
-  /** In the ram or in the bed? */
-  readonly machine: (x: number, r: number, heights: ToolHeights) => boolean;
+  /** In the punch, the die, the ram or the bed, when these two are in use? */
+  readonly pair: (x: number, r: number, thickness: number, punch: Punch, die: Die) => boolean;
 }
 
 export function createFingerAgainstTools(machine: Machine): FingerAgainstTools {
@@ -38,9 +41,14 @@ export function createFingerAgainstTools(machine: Machine): FingerAgainstTools {
     const parts = finger.pieces.map((piece) => piece.map((p): Vec2 => [p[0] + x, p[1] + r - lift]));
     return body.pieces.some((piece) => parts.some((part) => convexOverlap(part, piece) > MEANT_CONTACT_MM));
   };
+  const inTool = (x: number, r: number, tool: Tool, { punchSeat, dieSeat }: ToolHeights) =>
+    meets(x, r, ofTool(tool), tool.kind === "punch" ? punchSeat - tool.height : dieSeat + tool.height);
   return {
-    tool: (x, r, tool, { punchSeat, dieSeat }) => meets(x, r, ofTool(tool), tool.kind === "punch" ? punchSeat - tool.height : dieSeat + tool.height),
-    machine: (x, r, { punchSeat, dieSeat }) => meets(x, r, ram, punchSeat) || meets(x, r, bed, dieSeat),
+    tool: inTool,
+    pair: (x, r, thickness, punch, die) => {
+      const heights = toolHeights(thickness, punch, die);
+      return inTool(x, r, die, heights) || inTool(x, r, punch, heights) || meets(x, r, ram, heights.punchSeat) || meets(x, r, bed, heights.dieSeat);
+    },
   };
 }
 

@@ -1,6 +1,7 @@
 import type { Frame } from "../geometry/frame";
 import { applyFrame } from "../geometry/applyFrame";
 import type { Interval } from "../geometry/interval";
+import { onStretch } from "../geometry/onStretch";
 import type { Vec2 } from "../geometry/vec2";
 import type { PartModel } from "../part/partModel";
 import type { GaugeOption } from "./gaugeOption";
@@ -41,10 +42,6 @@ function onBend(part: PartModel, face: number, p: Vec2, q: Vec2): boolean {
   return part.bends.some((bend) => {
     if (bend.parent !== face && bend.child !== face) return false;
     const [a, b] = bend.parent === face ? [bend.zone[0], bend.zone[3]] : [bend.zone[1], bend.zone[2]];
-    const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
-    const [ux, uy] = [(b[0] - a[0]) / length, (b[1] - a[1]) / length];
-    const along = (middle[0] - a[0]) * ux + (middle[1] - a[1]) * uy;
-    const off = Math.abs((middle[0] - a[0]) * uy - (middle[1] - a[1]) * ux);
-    return off < ON_BEND_MM && along > -ON_BEND_MM && along < length + ON_BEND_MM;
+    return onStretch(a, b, middle, ON_BEND_MM);
   });
 }

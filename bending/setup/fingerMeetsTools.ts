@@ -4,7 +4,5 @@ import { createFingerAgainstTools } from "./createFingerAgainstTools";
 
 /** Does a gauge finger with its stop at (x, r) stand in the tools, the ram or the bed when the punch touches the flat sheet? */
 export function fingerMeetsTools(x: number, r: number, thickness: number, punch: Punch, die: Die, machine: Machine): boolean {
-  const heights = { punchSeat: thickness + punch.height, dieSeat: -die.height };
-  const { tool, machine: inMachine } = createFingerAgainstTools(machine);
-  return tool(x, r, die, heights) || tool(x, r, punch, heights) || inMachine(x, r, heights);
+  return createFingerAgainstTools(machine).pair(x, r, thickness, punch, die);
 }

@@ -12,20 +12,27 @@ import { narrowed } from "./narrowed";
 const ACUTE = toRad(deg(180 - hemSteps(mm(1)).preBendOpening[1]));
 
 /**
- * The part with one hem in its first stage: bent acutely over a V, with the radius that this V gives, about the same middle line. An acute bend takes
- * up more sheet than the finished hem, so the plane parts beside it are shorter by as much; the blank is the same.
+ * A hem in its first stage: bent acutely over a V, with the radius that this V gives, about the same middle line. An acute bend takes up more sheet
+ * than the finished hem.
  */
-export function acuteHem(part: PartModel, hem: number, vOpening: Mm): PartModel {
-  const bend = part.bends[hem];
-  invariant(bend, "a hem is a bend of the part");
-  const insideRadius = naturalRadius(part.material, vOpening);
-  const allowance = bendAllowance(ACUTE, insideRadius, bend.k, part.thickness);
+export function acuteStage({ material, thickness }: PartModel, bend: Bend, vOpening: Mm): Bend {
+  const insideRadius = naturalRadius(material, vOpening);
+  const allowance = bendAllowance(ACUTE, insideRadius, bend.k, thickness);
   const { outward } = bendDirections(bend);
   const by = (allowance - bend.allowance) / 2;
   const moved = (p: FlatPoint, off: number): FlatPoint => [p[0] + outward[0] * off, p[1] + outward[1] * off];
   const [parentStart, childStart, childEnd, parentEnd] = bend.zone;
   const zone = [moved(parentStart, -by), moved(childStart, by), moved(childEnd, by), moved(parentEnd, -by)] as const;
-  const acute: Bend = { ...bend, angle: ACUTE, hem: null, insideRadius, allowance, zone, region: null, radiusSource: "acute stage of a hem" };
+  return { ...bend, angle: ACUTE, hem: null, insideRadius, allowance, zone, region: null, radiusSource: "acute stage of a hem" };
+}
+
+/** The part with one hem in its first stage; the plane parts beside it are shorter by what that takes, the blank is the same. */
+export function acuteHem(part: PartModel, hem: number, vOpening: Mm): PartModel {
+  const bend = part.bends[hem];
+  invariant(bend, "a hem is a bend of the part");
+  const acute = acuteStage(part, bend, vOpening);
+  const [parentStart, childStart, childEnd, parentEnd] = bend.zone;
+  const { zone } = acute;
   const shorter = (face: Face, from: FlatPoint, to: FlatPoint, from2: FlatPoint, to2: FlatPoint): Face =>
     ({ ...face, outline: narrowed(face.outline, from, to, from2, to2) ?? face.outline });
   return {

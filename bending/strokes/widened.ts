@@ -1,4 +1,5 @@
 import { SAME_POINT_MM } from "../core/tolerance";
+import { onStretch } from "../geometry/onStretch";
 import type { FlatPoint } from "../geometry/vec2";
 
 /** mm. How far the ends of a bend zone may lie off the edge of the face that they belong to. */
@@ -11,7 +12,7 @@ const ON_EDGE_MM = 1000 * SAME_POINT_MM;
 export function widened(outline: readonly FlatPoint[], a: FlatPoint, b: FlatPoint, a2: FlatPoint, b2: FlatPoint): readonly FlatPoint[] | null {
   const edge = outline.findIndex((p, i) => {
     const q = outline[(i + 1) % outline.length] ?? p;
-    return onEdge(p, q, a) && onEdge(p, q, b) && (b[0] - a[0]) * (q[0] - p[0]) + (b[1] - a[1]) * (q[1] - p[1]) > 0;
+    return onStretch(p, q, a, ON_EDGE_MM) && onStretch(p, q, b, ON_EDGE_MM) && (b[0] - a[0]) * (q[0] - p[0]) + (b[1] - a[1]) * (q[1] - p[1]) > 0;
   });
   if (edge < 0) return null;
   const added = [a, a2, b2, b];
@@ -20,11 +21,3 @@ export function widened(outline: readonly FlatPoint[], a: FlatPoint, b: FlatPoin
 }
 
 const apart = (p: FlatPoint, q: FlatPoint): boolean => Math.hypot(p[0] - q[0], p[1] - q[1]) > SAME_POINT_MM;
-
-function onEdge(p: FlatPoint, q: FlatPoint, point: FlatPoint): boolean {
-  const length = Math.hypot(q[0] - p[0], q[1] - p[1]);
-  if (length < SAME_POINT_MM) return false;
-  const along = ((point[0] - p[0]) * (q[0] - p[0]) + (point[1] - p[1]) * (q[1] - p[1])) / length;
-  const off = ((q[0] - p[0]) * (point[1] - p[1]) - (q[1] - p[1]) * (point[0] - p[0])) / length;
-  return Math.abs(off) < ON_EDGE_MM && along > -ON_EDGE_MM && along < length + ON_EDGE_MM;
-}

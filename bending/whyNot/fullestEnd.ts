@@ -1,3 +1,4 @@
+import { bitCount } from "../order/bitCount";
 import type { WhySituation } from "./situationsOf";
 
 /** The state with most bends formed from which no stroke goes on, each stroke asked with the bed left out. */
@@ -29,14 +30,8 @@ export function fullestEnd({ situation, works, follows }: WhySituation, shouldSt
     }
     if (!any) ends.push(formed);
   }
-  const fullest = ends.sort((a, b) => bits(b) - bits(a) || a - b)[0] ?? 0;
+  const fullest = ends.sort((a, b) => bitCount(b) - bitCount(a) || a - b)[0] ?? 0;
   const way: number[] = [];
   for (let step = before.get(fullest) ?? null; step !== null; step = before.get(step.from) ?? null) way.unshift(step.move);
   return { formed: fullest, way };
-}
-
-function bits(set: number): number {
-  let count = 0;
-  for (let rest = set; rest !== 0; rest &= rest - 1) count += 1;
-  return count;
 }

@@ -55,10 +55,8 @@ export const findChangesSchema = ownOrderSchema.omit({ limitSeconds: true }).par
 export type FindChangesInput = z.input<typeof findChangesSchema>;
 
 export const chooseAlternativeSchema = z.strictObject({ index: z.number().int("must be a whole number").min(0, "must be 0 or more").max(100) });
-export type ChooseAlternativeInput = z.input<typeof chooseAlternativeSchema>;
 
 export const searchOnSchema = z.strictObject({ moreSeconds: limitSeconds });
-export type SearchOnInput = z.input<typeof searchOnSchema>;
 
 export const planJobListQuerySchema = z.strictObject({
   partId: z.uuid("must be the id of a part").optional(),

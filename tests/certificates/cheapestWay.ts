@@ -1,4 +1,4 @@
-import type { FlatCertificate, PlanCertificate } from "@/bending/plan/certificate";
+import type { FlatCertificate, PlanCertificate } from "./certificate";
 import { handlingByHand, handlingTime } from "../corpus/handlingByHand";
 
 type Made = Extract<FlatCertificate["facts"][number], { kind: "made" }>;

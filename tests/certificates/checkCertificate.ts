@@ -1,4 +1,4 @@
-import type { CertificateFact, FlatCertificate, PlanCertificate } from "@/bending/plan/certificate";
+import type { CertificateFact, FlatCertificate, PlanCertificate } from "./certificate";
 import type { SituationFacts } from "@/bending/plan/createSituation";
 import { partVariants } from "@/bending/plan/partVariants";
 import type { PlanRequest } from "@/bending/plan/planRequest";

@@ -1,6 +1,6 @@
 import { bendsBehind } from "@/bending/plan/bendsBehind";
 import { blockedPattern } from "@/bending/plan/blockedPattern";
-import type { CertificateFact, FlatCertificate, PlanCertificate } from "@/bending/plan/certificate";
+import type { CertificateFact, FlatCertificate, PlanCertificate } from "./certificate";
 import { createSituation, type SituationFacts } from "@/bending/plan/createSituation";
 import { createStepChecks } from "@/bending/plan/createStepChecks";
 import { partVariants, type PartVariant } from "@/bending/plan/partVariants";

@@ -1,4 +1,4 @@
-import type { CertificateFact, PlanCertificate } from "@/bending/plan/certificate";
+import type { CertificateFact, PlanCertificate } from "./certificate";
 import { partVariants } from "@/bending/plan/partVariants";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import type { SituationFacts } from "@/bending/plan/createSituation";

@@ -1,4 +1,4 @@
-import type { CertificateMove } from "@/bending/plan/certificate";
+import type { CertificateMove } from "./certificate";
 import type { Bend, PartModel } from "@/bending/part/partModel";
 
 /** mm, and radians: bends this near to each other on one line, of one angle and one radius, can be one stroke. */

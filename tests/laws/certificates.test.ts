@@ -1,5 +1,5 @@
 import { describe, expect, it, vi } from "vitest";
-import type { CertificateFact, FlatCertificate, PlanCertificate } from "@/bending/plan/certificate";
+import type { CertificateFact, FlatCertificate, PlanCertificate } from "../certificates/certificate";
 import { planPart } from "@/bending/plan/planPart";
 import type { PlanRequest } from "@/bending/plan/planRequest";
 import { checkCertificate } from "../certificates/checkCertificate";

@@ -1,5 +1,5 @@
 import type { Vec2 } from "../geometry/vec2";
-import type { Bend } from "../part/partModel";
+import type { Bend } from "./partModel";
 
 /** How far an outline reaches from the line of a bend, mm in the sheet. */
 export function faceReach(outline: readonly Vec2[], { line: [[ax, ay], [bx, by]] }: Bend): number {
