@@ -4,8 +4,9 @@ import { recordEvent } from "../recordEvent";
 import { lastCheck } from "./lastCheck";
 import { machineOf } from "./machineOf";
 import { noSuchPlan } from "./noSuchPlan";
+import { startJob } from "./startJob";
 import { invariant } from "@/bending/core/invariant";
-import { fail, ok, type Result } from "@/bending/core/result";
+import { fail, type Result } from "@/bending/core/result";
 import { PLAN_ENGINE } from "@/bending/plan/emptyPlan";
 import type { StoredCheck } from "@/bending/plan/storedPlan";
 import { database } from "@/db/client";
@@ -15,7 +16,6 @@ import { insertPlanCheck } from "@/db/plans/insertPlanCheck";
 import { findToolsInService } from "@/db/tools/findToolsInService";
 import type { Failure } from "@/lib/api/failure";
 import type { SignedInPerson } from "@/lib/auth/signedInPerson";
-import { planJobs } from "@/lib/jobs/planJobs";
 import type { PlanJobView } from "@/lib/schemas/views";
 
 const CHECK_LIMIT_MS = 60_000;
@@ -30,7 +30,7 @@ export async function checkPlan(person: SignedInPerson, planId: string): Promise
   if (!machine) return fail({ kind: "conflict", message: `The brake ${row.machine_name} is not in the list any more.` });
   const [{ forceFactors }, tools, { missing }] = await Promise.all([getShopSettings(), findToolsInService(db), currentPieces(db, row.plan, row.tools)]);
   const subject = `${row.part_number} rev ${row.revision} on ${row.machine_name}`;
-  const job = planJobs().start({
+  return startJob({
     key: `check ${planId}`,
     place: { partId: row.part_id, fromPlanId: planId, subject, by: person.name },
     task: {
@@ -45,7 +45,6 @@ export async function checkPlan(person: SignedInPerson, planId: string): Promise
       return { planId, message: answer.check.holds ? "Done: the plan holds" : "Done: the plan does not hold any more", result: check ? { kind: "check", check } : null };
     },
   });
-  return job ? ok(job) : fail({ kind: "busy", message: "Too many plans are waiting already. Try again in a minute.", retryAfterSeconds: 60 });
 }
 
 async function keep(person: SignedInPerson, row: PlanRow, subject: string, check: StoredCheck): Promise<void> {

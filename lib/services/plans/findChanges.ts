@@ -3,15 +3,15 @@ import { inputsDigest } from "./inputsDigest";
 import { noSuchPlan } from "./noSuchPlan";
 import { planInputs } from "./planInputs";
 import { questionOf } from "./questionOf";
+import { startJob } from "./startJob";
 import { invariant } from "@/bending/core/invariant";
-import { fail, ok, type Result } from "@/bending/core/result";
+import { fail, type Result } from "@/bending/core/result";
 import { PLAN_ENGINE } from "@/bending/plan/emptyPlan";
 import { database } from "@/db/client";
 import { addToPlan } from "@/db/plans/addToPlan";
 import { findPlan } from "@/db/plans/findPlan";
 import type { Failure } from "@/lib/api/failure";
 import type { SignedInPerson } from "@/lib/auth/signedInPerson";
-import { planJobs } from "@/lib/jobs/planJobs";
 import type { findChangesSchema } from "@/lib/schemas/planInputs";
 import type { PlanJobView } from "@/lib/schemas/views";
 
@@ -31,7 +31,7 @@ export async function findChanges(person: SignedInPerson, planId: string, { orde
   const { task, partId, subject } = inputs.value;
   const digest = inputsDigest(PLAN_ENGINE, task);
   const same = order === undefined && digest === row.inputs_digest;
-  const job = planJobs().start({
+  return startJob({
     key: `why ${planId} ${digest}`,
     place: { partId, fromPlanId: planId, subject, by: person.name },
     task: { kind: "why", limitMs: LIMIT_MS, task: { ...task, alternatives: 0 }, plan: same ? row.plan : null },
@@ -42,5 +42,4 @@ export async function findChanges(person: SignedInPerson, planId: string, { orde
       return { planId: null, message: changes.length === 0 ? "Done: no single change that was tried would do" : `Done: ${changes.length} ${changes.length === 1 ? "change" : "changes"} would make it work`, result: { kind: "why", ...answer.why, order: order ?? null } };
     },
   });
-  return job ? ok(job) : fail({ kind: "busy", message: "Too many plans are waiting already. Try again in a minute.", retryAfterSeconds: 60 });
 }

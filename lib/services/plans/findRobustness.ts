@@ -2,15 +2,15 @@ import { inputsDigest } from "./inputsDigest";
 import { noSuchPlan } from "./noSuchPlan";
 import { planInputs } from "./planInputs";
 import { questionOf } from "./questionOf";
+import { startJob } from "./startJob";
 import { invariant } from "@/bending/core/invariant";
-import { fail, ok, type Result } from "@/bending/core/result";
+import { fail, type Result } from "@/bending/core/result";
 import { PLAN_ENGINE } from "@/bending/plan/emptyPlan";
 import { database } from "@/db/client";
 import { addToPlan } from "@/db/plans/addToPlan";
 import { findPlan } from "@/db/plans/findPlan";
 import type { Failure } from "@/lib/api/failure";
 import type { SignedInPerson } from "@/lib/auth/signedInPerson";
-import { planJobs } from "@/lib/jobs/planJobs";
 import type { PlanJobView } from "@/lib/schemas/views";
 
 const LIMIT_MS = 180_000;
@@ -25,7 +25,7 @@ export async function findRobustness(person: SignedInPerson, planId: string): Pr
   if (!inputs.ok) return inputs;
   const { task, partId, subject } = inputs.value;
   if (inputsDigest(PLAN_ENGINE, task) !== row.inputs_digest) return fail({ kind: "conflict", message: "The shop or the planner has changed since this plan was made: another plan may be the best by now. Plan the part again first." });
-  const job = planJobs().start({
+  return startJob({
     key: `firm ${planId}`,
     place: { partId, fromPlanId: planId, subject, by: person.name },
     task: { kind: "firm", limitMs: LIMIT_MS, task, plan: row.plan },
@@ -35,5 +35,4 @@ export async function findRobustness(person: SignedInPerson, planId: string): Pr
       return { planId: null, message: "Done: see how far the times may be off", result: { kind: "firm", robustness: answer.robustness } };
     },
   });
-  return job ? ok(job) : fail({ kind: "busy", message: "Too many plans are waiting already. Try again in a minute.", retryAfterSeconds: 60 });
 }

@@ -2,7 +2,8 @@ import type { PlanQuestion } from "./planInputs";
 import { planInputs } from "./planInputs";
 import { inputsDigest } from "./inputsDigest";
 import { storePlan } from "./storePlan";
-import { fail, ok, type Result } from "@/bending/core/result";
+import { startJob } from "./startJob";
+import { ok, type Result } from "@/bending/core/result";
 import { PLAN_ENGINE } from "@/bending/plan/emptyPlan";
 import { invariant } from "@/bending/core/invariant";
 import type { PlanDocument } from "@/bending/plan/planDocument";
@@ -23,7 +24,7 @@ export async function planOf(person: SignedInPerson, question: PlanQuestion, fro
   const place = { partId, fromPlanId, subject, by: person.name };
   const same = await findSamePlan(db, revisionId, digest, task.limitMs);
   if (same !== undefined) return ok(planJobs().finished(same, place));
-  const job = planJobs().start({
+  return startJob({
     key: `plan ${revisionId} ${digest} ${task.limitMs}`,
     place,
     task: { kind: "plan", limitMs: task.limitMs, task },
@@ -33,7 +34,6 @@ export async function planOf(person: SignedInPerson, question: PlanQuestion, fro
       return { planId: await storePlan(person, inputs.value, { plan, ended, digest, fromPlanId }), message: endMessage(plan), result: null };
     },
   });
-  return job ? ok(job) : fail({ kind: "busy", message: "Too many plans are waiting already. Try again in a minute.", retryAfterSeconds: 60 });
 }
 
 function endMessage(plan: PlanDocument): string {
